@@ -1,0 +1,5 @@
+/** The command line and the launcher. */
+@NullMarked
+package earward.command;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** The desktop program. */
+@NullMarked
+package earward.desktop;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** The build sheet as a PDF. */
+@NullMarked
+package earward.sheet;
+
+import org.jspecify.annotations.NullMarked;

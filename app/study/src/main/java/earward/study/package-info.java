@@ -1,0 +1,5 @@
+/** Many solves of one design: batch, limits, fault guide. */
+@NullMarked
+package earward.study;
+
+import org.jspecify.annotations.NullMarked;

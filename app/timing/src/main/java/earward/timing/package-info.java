@@ -1,0 +1,5 @@
+/** Benchmarks; never shipped. */
+@NullMarked
+package earward.timing;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** Audio filters. */
+@NullMarked
+package earward.filters;
+
+import org.jspecify.annotations.NullMarked;

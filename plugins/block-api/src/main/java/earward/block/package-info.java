@@ -1,0 +1,5 @@
+/** All that a block author sees. */
+@NullMarked
+package earward.block;
+
+import org.jspecify.annotations.NullMarked;

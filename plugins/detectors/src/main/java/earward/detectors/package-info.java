@@ -1,0 +1,5 @@
+/** Detectors. */
+@NullMarked
+package earward.detectors;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** Loads. */
+@NullMarked
+package earward.loads;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** Power stages. */
+@NullMarked
+package earward.power;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** Supplies. */
+@NullMarked
+package earward.supplies;
+
+import org.jspecify.annotations.NullMarked;

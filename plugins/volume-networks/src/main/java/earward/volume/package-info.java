@@ -1,0 +1,5 @@
+/** Volume networks. */
+@NullMarked
+package earward.volume;
+
+import org.jspecify.annotations.NullMarked;
