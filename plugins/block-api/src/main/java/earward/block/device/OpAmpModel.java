@@ -1,0 +1,52 @@
+package earward.block.device;
+
+/**
+ * An operational amplifier: one pole and limits.
+ *
+ * @param name part type
+ * @param openLoopGain at DC, plain number, above 1
+ * @param unityGainHertz gain-bandwidth product, above 0
+ * @param inputOhms differential input resistance, above 0
+ * @param outputOhms open-loop output resistance, above 0
+ * @param lostVoltsUp how near the output comes to the supply, at least 0
+ * @param lostVoltsDown how near it comes to ground, at least 0
+ * @param quiescentAmperes supply current at rest, at least 0
+ * @param biasAmperes input bias current, at least 0
+ * @param noiseVoltsPerRootHertz input noise density, at least 0
+ * @param leastVolts lowest supply
+ * @param mostVolts absolute maximum supply
+ */
+public record OpAmpModel(
+    String name,
+    double openLoopGain,
+    double unityGainHertz,
+    double inputOhms,
+    double outputOhms,
+    double lostVoltsUp,
+    double lostVoltsDown,
+    double quiescentAmperes,
+    double biasAmperes,
+    double noiseVoltsPerRootHertz,
+    double leastVolts,
+    double mostVolts)
+    implements PartModel {
+  public OpAmpModel {
+    Require.named(name, "op-amp");
+    Require.above(1, openLoopGain, name + ": open-loop gain");
+    Require.above(0, unityGainHertz, name + ": gain-bandwidth product (Hz)");
+    Require.above(0, inputOhms, name + ": input resistance (Ω)");
+    Require.above(0, outputOhms, name + ": output resistance (Ω)");
+    Require.atLeast(0, lostVoltsUp, name + ": lost voltage up (V)");
+    Require.atLeast(0, lostVoltsDown, name + ": lost voltage down (V)");
+    Require.atLeast(0, quiescentAmperes, name + ": quiescent current (A)");
+    Require.atLeast(0, biasAmperes, name + ": bias current (A)");
+    Require.atLeast(0, noiseVoltsPerRootHertz, name + ": input noise");
+    Require.above(0, leastVolts, name + ": lowest supply (V)");
+    Require.above(leastVolts, mostVolts, name + ": absolute maximum supply (V)");
+  }
+
+  @Override
+  public PartKind kind() {
+    return PartKind.OP_AMP;
+  }
+}

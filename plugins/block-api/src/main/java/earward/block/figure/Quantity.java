@@ -1,0 +1,88 @@
+package earward.block.figure;
+
+import earward.block.quantity.Unit;
+import java.util.Optional;
+
+/** What a figure measures. The key is its one name in Java, files, JSON and CSV. */
+public enum Quantity {
+  // at a node or a test point
+  DC_VOLTS("dc-volts", Unit.VOLT),
+  /** Fundamental of the test tone. */
+  AUDIO_RMS_VOLTS("audio-rms-volts", Unit.VOLT),
+  /** Harmonics 2 to 10 over the fundamental. */
+  DISTORTION("distortion", Unit.FRACTION),
+  CARRIER_RMS_VOLTS("carrier-rms-volts", Unit.VOLT),
+  SECOND_CARRIER_RMS_VOLTS("second-carrier-rms-volts", Unit.VOLT),
+  THIRD_CARRIER_RMS_VOLTS("third-carrier-rms-volts", Unit.VOLT),
+  // of a part
+  DC_AMPERES("dc-amperes", Unit.AMPERE),
+  DISSIPATION_WATTS("dissipation-watts", Unit.WATT),
+  JUNCTION_CELSIUS("junction-celsius", Unit.CELSIUS),
+  /** Touchable surface: case or heat sink. */
+  SURFACE_CELSIUS("surface-celsius", Unit.CELSIUS),
+  /** Highest reverse voltage across a diode. */
+  REVERSE_PEAK_VOLTS("reverse-peak-volts", Unit.VOLT),
+  /** Unmodulated carrier peak at a diode's drive, with all loads in place. */
+  CARRIER_PEAK_VOLTS("carrier-peak-volts", Unit.VOLT),
+  /** DC out of a detector over the carrier peak that drives it. */
+  DETECTION_EFFICIENCY("detection-efficiency", Unit.FRACTION),
+  /** What a carrier-driven device presents to the carrier. */
+  CARRIER_INPUT_OHMS("carrier-input-ohms", Unit.OHM),
+  /** Depth at which the clipping rule says that the detector lets go. */
+  CLIPPING_DEPTH("clipping-depth", Unit.FRACTION),
+  /** Depth at which a diode's mean current first reverses, solved. */
+  REVERSAL_DEPTH("reversal-depth", Unit.FRACTION),
+  /** Depth of 3 % distortion, solved. */
+  CLEAN_DEPTH("clean-depth", Unit.FRACTION),
+  /** Supply voltage across a part, rails at the case's state. */
+  SUPPLY_VOLTS("supply-volts", Unit.VOLT),
+  PEAK_AMPERES("peak-amperes", Unit.AMPERE),
+  CLIP_WATTS("clip-watts", Unit.WATT),
+  TEN_PERCENT_WATTS("ten-percent-watts", Unit.WATT),
+  // of a seam
+  ONWARD_OHMS("onward-ohms", Unit.OHM),
+  BACKWARD_OHMS("backward-ohms", Unit.OHM),
+  LOADING_LOSS_DECIBELS("loading-loss-decibels", Unit.DECIBEL),
+  HEADROOM_DECIBELS("headroom-decibels", Unit.DECIBEL),
+  // of the path
+  LOW_EDGE_HERTZ("low-edge-hertz", Unit.HERTZ),
+  HIGH_EDGE_HERTZ("high-edge-hertz", Unit.HERTZ),
+  OUTPUT_RMS_VOLTS("output-rms-volts", Unit.VOLT),
+  OUTPUT_WATTS("output-watts", Unit.WATT),
+  SIGNAL_TO_NOISE_DECIBELS("signal-to-noise-decibels", Unit.DECIBEL),
+  SUPPLY_AMPERES("supply-amperes", Unit.AMPERE),
+  BATTERY_HOURS("battery-hours", Unit.HOUR),
+  SOUND_DECIBELS("sound-decibels", Unit.DECIBEL),
+  /** How much more the strongest signal drives an amplifier than its input bears; below 0 is well. */
+  OVERLOAD_DECIBELS("overload-decibels", Unit.DECIBEL),
+  /** Margin of the loop through the supply rail against motor-boating. */
+  RAIL_LOOP_MARGIN_DECIBELS("rail-loop-margin-decibels", Unit.DECIBEL);
+
+  private final String key;
+  private final Unit unit;
+
+  Quantity(String key, Unit unit) {
+    this.key = key;
+    this.unit = unit;
+  }
+
+  /** The name as written. */
+  public String key() {
+    return key;
+  }
+
+  /** The unit in which its figures are held. */
+  public Unit unit() {
+    return unit;
+  }
+
+  /** The quantity of this written name. */
+  public static Optional<Quantity> ofKey(String key) {
+    for (Quantity quantity : values()) {
+      if (quantity.key.equals(key)) {
+        return Optional.of(quantity);
+      }
+    }
+    return Optional.empty();
+  }
+}
