@@ -6,8 +6,8 @@ import java.util.List;
 import java.util.Objects;
 
 /**
- * All that a block says of itself for given settings: its parts in their places, what must hold, and
- * what is worth plotting. Data only; nothing of the plug-in runs when it is used.
+ * All that a block says of itself for given settings: its parts in their places, what must hold,
+ * and what is worth plotting. Data only; nothing of the plug-in runs when it is used.
  *
  * @param wiring the parts
  * @param checks what must hold

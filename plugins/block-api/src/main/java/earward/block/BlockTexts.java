@@ -11,10 +11,11 @@ import java.util.Optional;
 import java.util.Properties;
 
 /**
- * The words of a block type: {@code texts.properties} (English) and {@code texts_LANGUAGE.properties}
- * in UTF-8 beside its class. Keys are {@code BLOCK-TYPE-ID.KEY} where KEY is {@code name}, {@code
- * help}, {@code setting.ID}, {@code setting.ID.help}, {@code setting.ID.OPTION}, {@code part.ID},
- * {@code test-point.ID}, {@code check.CODE} or {@code curve.ID}.
+ * The words of a block type: {@code texts.properties} (English) and {@code
+ * texts_LANGUAGE.properties} in UTF-8 beside its class. Keys are {@code BLOCK-TYPE-ID.KEY} where
+ * KEY is {@code name}, {@code help}, {@code setting.ID}, {@code setting.ID.help}, {@code
+ * setting.ID.OPTION}, {@code part.ID}, {@code test-point.ID}, {@code check.CODE} or {@code
+ * curve.ID}.
  *
  * <p>Immutable.
  */

@@ -1,6 +1,4 @@
-/**
- * All that a block author sees: {@link earward.block.BlockType} is the place to start.
- */
+/** All that a block author sees: {@link earward.block.BlockType} is the place to start. */
 @NullMarked
 @Offered(since = 1)
 package earward.block;

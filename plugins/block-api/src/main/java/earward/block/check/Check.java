@@ -49,8 +49,7 @@ public record Check(
       double limit,
       String source,
       RemedyHint... remedies) {
-    return new Check(
-        code, severity, figure, Relation.AT_MOST, limit, source, List.of(remedies));
+    return new Check(code, severity, figure, Relation.AT_MOST, limit, source, List.of(remedies));
   }
 
   /** The figure must be at least the limit. */
@@ -61,7 +60,6 @@ public record Check(
       double limit,
       String source,
       RemedyHint... remedies) {
-    return new Check(
-        code, severity, figure, Relation.AT_LEAST, limit, source, List.of(remedies));
+    return new Check(code, severity, figure, Relation.AT_LEAST, limit, source, List.of(remedies));
   }
 }

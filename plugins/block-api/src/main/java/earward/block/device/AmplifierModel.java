@@ -18,8 +18,8 @@ import java.util.List;
  * @param restVolts what is added to that share
  * @param inputOhms input resistance, above 0
  * @param biasAmperes current out of the input pin, at least 0
- * @param rippleRejectionDecibels supply ripple over what of it appears at the output, with the
- *     data sheet's capacitor at RIPPLE
+ * @param rippleRejectionDecibels supply ripple over what of it appears at the output, with the data
+ *     sheet's capacitor at RIPPLE
  * @param rippleRejectionBareDecibels the same with nothing at RIPPLE
  * @param noiseVolts rms noise at the input over 22 Hz to 22 kHz, at least 0
  * @param packageName for instance DIP-8

@@ -10,8 +10,7 @@ import java.util.List;
  * @param heatSinkKelvinPerWatt thermal resistance of the heat sink with its interface, above 0,
  *     infinite for none
  */
-public record AudioAmplifier(AmplifierModel model, double heatSinkKelvinPerWatt)
-    implements Device {
+public record AudioAmplifier(AmplifierModel model, double heatSinkKelvinPerWatt) implements Device {
   public AudioAmplifier {
     Require.above(0, heatSinkKelvinPerWatt, "heat sink (K/W)");
   }
@@ -34,13 +33,9 @@ public record AudioAmplifier(AmplifierModel model, double heatSinkKelvinPerWatt)
   @Override
   public List<Parameter> parameters() {
     return List.of(
+        new Parameter("gain", Unit.NUMBER, model.gain().fixedGain(), ToleranceClass.AMPLIFIER_GAIN),
         new Parameter(
-            "gain", Unit.NUMBER, model.gain().fixedGain(), ToleranceClass.AMPLIFIER_GAIN),
-        new Parameter(
-            "feedback-ohms",
-            Unit.OHM,
-            model.gain().feedbackOhms(),
-            ToleranceClass.AMPLIFIER_GAIN),
+            "feedback-ohms", Unit.OHM, model.gain().feedbackOhms(), ToleranceClass.AMPLIFIER_GAIN),
         new Parameter(
             "quiescent-amperes",
             Unit.AMPERE,

@@ -3,8 +3,8 @@ package earward.block.device;
 import java.util.List;
 
 /**
- * What a part is, with the figures of its law. The kinds are sealed: each has exactly one law, which
- * the engine knows. A block is free in how it joins them.
+ * What a part is, with the figures of its law. The kinds are sealed: each has exactly one law,
+ * which the engine knows. A block is free in how it joins them.
  *
  * <p>Immutable. All numbers are in the SI unit that the component's name says.
  */

@@ -1,8 +1,8 @@
 package earward.block.device;
 
 /**
- * A diode by its model figures: i = Is·(exp((v − i·Rs)/(n·Vt)) − 1) + v/leakage, a junction charge of
- * Cj0/(1 − v/Vj)^M, and breakdown.
+ * A diode by its model figures: i = Is·(exp((v − i·Rs)/(n·Vt)) − 1) + v/leakage, a junction charge
+ * of Cj0/(1 − v/Vj)^M, and breakdown.
  *
  * <p>Source: Shockley 1949; junction capacitance of the abrupt and graded junction as in any device
  * text.
@@ -54,7 +54,9 @@ public record DiodeModel(
     Require.atLeast(0, recoverySeconds, name + ": recovery time (s)");
   }
 
-  /** A diode of exponential law and series resistance alone: no band, charge, leakage, breakdown. */
+  /**
+   * A diode of exponential law and series resistance alone: no band, charge, leakage, breakdown.
+   */
   public static DiodeModel plain(
       String name, DiodeMaterial material, double saturationAmperes, double n, double seriesOhms) {
     return new DiodeModel(

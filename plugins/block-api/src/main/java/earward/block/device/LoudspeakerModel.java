@@ -1,8 +1,8 @@
 package earward.block.device;
 
 /**
- * A loudspeaker by the figures of Thiele and Small: Z = Re + jωLe + Rm/(1 + jQms(f/fs − fs/f)),
- * Rm = Re·Qms/Qes.
+ * A loudspeaker by the figures of Thiele and Small: Z = Re + jωLe + Rm/(1 + jQms(f/fs − fs/f)), Rm
+ * = Re·Qms/Qes.
  *
  * @param name part type
  * @param ratedOhms nominal impedance, above 0

@@ -1,8 +1,6 @@
 package earward.block.device;
 
-/**
- * The figures of one part type from the parts library, or given inline in a design. Immutable.
- */
+/** The figures of one part type from the parts library, or given inline in a design. Immutable. */
 public sealed interface PartModel
     permits DiodeModel,
         AmplifierModel,

@@ -1,6 +1,8 @@
 package earward.block.device;
 
-/** The argument checks of the device records; each message names the thing, the found, the wanted. */
+/**
+ * The argument checks of the device records; each message names the thing, the found, the wanted.
+ */
 final class Require {
   private Require() {}
 

@@ -25,11 +25,7 @@ public record Transformer(
   @Override
   public List<Terminal> terminals() {
     return List.of(
-        Terminal.PRIMARY_START,
-        Terminal.PRIMARY_END,
-        Terminal.TOP,
-        Terminal.TAP,
-        Terminal.BOTTOM);
+        Terminal.PRIMARY_START, Terminal.PRIMARY_END, Terminal.TOP, Terminal.TAP, Terminal.BOTTOM);
   }
 
   @Override

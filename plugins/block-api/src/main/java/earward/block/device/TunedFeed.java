@@ -33,11 +33,7 @@ public record TunedFeed(
   @Override
   public List<Terminal> terminals() {
     return List.of(
-        Terminal.PRIMARY_START,
-        Terminal.PRIMARY_END,
-        Terminal.TOP,
-        Terminal.TAP,
-        Terminal.BOTTOM);
+        Terminal.PRIMARY_START, Terminal.PRIMARY_END, Terminal.TOP, Terminal.TAP, Terminal.BOTTOM);
   }
 
   @Override

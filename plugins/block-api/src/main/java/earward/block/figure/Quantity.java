@@ -53,7 +53,9 @@ public enum Quantity {
   SUPPLY_AMPERES("supply-amperes", Unit.AMPERE),
   BATTERY_HOURS("battery-hours", Unit.HOUR),
   SOUND_DECIBELS("sound-decibels", Unit.DECIBEL),
-  /** How much more the strongest signal drives an amplifier than its input bears; below 0 is well. */
+  /**
+   * How much more the strongest signal drives an amplifier than its input bears; below 0 is well.
+   */
   OVERLOAD_DECIBELS("overload-decibels", Unit.DECIBEL),
   /** Margin of the loop through the supply rail against motor-boating. */
   RAIL_LOOP_MARGIN_DECIBELS("rail-loop-margin-decibels", Unit.DECIBEL);

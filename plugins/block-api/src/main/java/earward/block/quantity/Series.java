@@ -61,9 +61,7 @@ public enum Series {
     double low = atOrBelow(value);
     int exponent = exponentOf(low);
     int index = indexOf(low, exponent);
-    return index + 1 < members.size()
-        ? member(index + 1, exponent)
-        : member(0, exponent + 1);
+    return index + 1 < members.size() ? member(index + 1, exponent) : member(0, exponent + 1);
   }
 
   /** The next member below the value; for ANY the value less a tenth. */

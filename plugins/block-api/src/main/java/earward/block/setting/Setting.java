@@ -91,8 +91,7 @@ public sealed interface Setting {
    * @param reading local figure that is watched
    * @param usualTarget what it is to read
    */
-  record Trim(String id, String partId, FigureName reading, double usualTarget)
-      implements Setting {
+  record Trim(String id, String partId, FigureName reading, double usualTarget) implements Setting {
     public Trim {
       requireId(id);
     }

@@ -73,13 +73,15 @@ public final class Values {
         .orElseThrow(
             () ->
                 new IllegalArgumentException(
-                    "there is no setting '" + settingId + "' of that kind; there are "
+                    "there is no setting '"
+                        + settingId
+                        + "' of that kind; there are "
                         + byId.keySet()));
   }
 
   @Override
   public boolean equals(Object other) {
-    return other instanceof Values && ((Values) other).byId.equals(byId);
+    return other instanceof Values values && values.byId.equals(byId);
   }
 
   @Override

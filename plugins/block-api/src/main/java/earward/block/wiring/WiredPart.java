@@ -19,11 +19,7 @@ import java.util.Objects;
  * @param nodes the node at each terminal that is connected, in the order of the device's terminals
  */
 public record WiredPart(
-    String id,
-    Device device,
-    Placement placement,
-    Terminal entering,
-    Map<Terminal, String> nodes) {
+    String id, Device device, Placement placement, Terminal entering, Map<Terminal, String> nodes) {
   public WiredPart {
     Objects.requireNonNull(device);
     Objects.requireNonNull(placement);

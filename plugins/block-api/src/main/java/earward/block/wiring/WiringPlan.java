@@ -55,7 +55,9 @@ public final class WiringPlan {
     return at(toNode);
   }
 
-  /** A two-ended part from the cursor down, its first terminal up. For a chain: {@code at(toNode)}. */
+  /**
+   * A two-ended part from the cursor down, its first terminal up. For a chain: {@code at(toNode)}.
+   */
   public WiringPlan down(String id, Device device, String toNode) {
     return down(id, device, device.terminals().get(0), toNode);
   }
@@ -81,8 +83,7 @@ public final class WiringPlan {
    * @param upper the terminal at its upper end
    * @param nodes the node at each connected terminal
    */
-  public WiringPlan column(
-      String id, Device device, Terminal upper, Map<Terminal, String> nodes) {
+  public WiringPlan column(String id, Device device, Terminal upper, Map<Terminal, String> nodes) {
     return add(new WiredPart(id, device, Placement.COLUMN, upper, nodes));
   }
 
@@ -100,8 +101,7 @@ public final class WiringPlan {
 
   /** A two-ended part over or under what stands between two nodes, first terminal at the first. */
   public WiringPlan bridge(String id, Device device, String fromNode, String toNode) {
-    return twoEnded(
-        id, device, Placement.BRIDGE, device.terminals().get(0), fromNode, toNode);
+    return twoEnded(id, device, Placement.BRIDGE, device.terminals().get(0), fromNode, toNode);
   }
 
   /** A node where the builder measures. */
