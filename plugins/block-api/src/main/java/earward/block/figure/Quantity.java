@@ -30,6 +30,10 @@ public enum Quantity {
   CARRIER_INPUT_OHMS("carrier-input-ohms", Unit.OHM),
   /** Depth at which the clipping rule says that the detector lets go. */
   CLIPPING_DEPTH("clipping-depth", Unit.FRACTION),
+  /** The same with the detector's reservoir capacitor taken away: names the cause. */
+  CLIPPING_DEPTH_WITHOUT_CAPACITOR("clipping-depth-without-capacitor", Unit.FRACTION),
+  /** The same with all coupling capacitors opened: names the cause. */
+  CLIPPING_DEPTH_WITHOUT_COUPLING("clipping-depth-without-coupling", Unit.FRACTION),
   /** Depth at which a diode's mean current first reverses, solved. */
   REVERSAL_DEPTH("reversal-depth", Unit.FRACTION),
   /** Depth of 3 % distortion, solved. */
