@@ -18,6 +18,7 @@ public enum Series {
   /** No series: any value may be had. */
   ANY();
 
+  @SuppressWarnings("ImmutableEnumChecker") // List.of cannot be changed
   private final List<Integer> members;
 
   Series(Integer... members) {

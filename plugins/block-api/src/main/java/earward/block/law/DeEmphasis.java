@@ -1,0 +1,29 @@
+package earward.block.law;
+
+/**
+ * Pre-emphasis curves, in decibels over the gain at DC; a receiver's de-emphasis is the negative.
+ *
+ * <p>Source: ITU-R BS.450 for the single time constant; NRSC-1 for the AM curve with its second
+ * corner at 8.7 kHz.
+ */
+public final class DeEmphasis {
+  /** Second corner of the North American AM curve, Hz. Source: NRSC-1. */
+  public static final double SECOND_CORNER_HERTZ = 8700;
+
+  /** Time constant of the North American AM curve, s. Source: NRSC-1. */
+  public static final double NRSC_SECONDS = 75e-6;
+
+  private DeEmphasis() {}
+
+  /** Boost of a single time constant: 10·log10(1 + (2π·f·τ)²), in dB. */
+  public static double boostDecibels(double hertz, double seconds) {
+    double ratio = 2 * Math.PI * hertz * seconds;
+    return 10 * Math.log10(1 + ratio * ratio);
+  }
+
+  /** Boost of the North American AM curve, in dB. */
+  public static double nrscBoostDecibels(double hertz) {
+    double second = hertz / SECOND_CORNER_HERTZ;
+    return boostDecibels(hertz, NRSC_SECONDS) - 10 * Math.log10(1 + second * second);
+  }
+}
