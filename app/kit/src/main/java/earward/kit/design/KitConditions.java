@@ -1,0 +1,59 @@
+package earward.kit.design;
+
+import earward.block.Conditions;
+import java.util.List;
+import java.util.Objects;
+
+/**
+ * What the kit must work under and what is wanted of it.
+ *
+ * @param core what blocks may know of it
+ * @param frontEndSupply what powers the front end
+ * @param sidebands the front end's response, by rising distance from the carrier; empty: flat
+ * @param wanted what is wanted beyond safety
+ * @param written how the file had it
+ */
+public record KitConditions(
+    Conditions core,
+    FrontEndSupply frontEndSupply,
+    List<SidebandPoint> sidebands,
+    WantedLimits wanted,
+    AsWritten written) {
+  public KitConditions {
+    Objects.requireNonNull(core);
+    Objects.requireNonNull(frontEndSupply);
+    Objects.requireNonNull(wanted);
+    Objects.requireNonNull(written);
+    sidebands = List.copyOf(sidebands);
+    for (int i = 1; i < sidebands.size(); i++) {
+      if (!(sidebands.get(i).offsetHertz() > sidebands.get(i - 1).offsetHertz())) {
+        throw new IllegalArgumentException(
+            "the sideband points do not rise: "
+                + sidebands.get(i).offsetHertz()
+                + " Hz after "
+                + sidebands.get(i - 1).offsetHertz()
+                + " Hz");
+      }
+    }
+  }
+
+  /** Conditions with a flat front end and usual wishes. */
+  public static KitConditions of(Conditions core, FrontEndSupply frontEndSupply) {
+    return new KitConditions(core, frontEndSupply, List.of(), WantedLimits.USUAL, AsWritten.NEW);
+  }
+
+  /** These conditions with others for the blocks. */
+  public KitConditions withCore(Conditions changed) {
+    return new KitConditions(changed, frontEndSupply, sidebands, wanted, written);
+  }
+
+  /** These conditions with another answer. */
+  public KitConditions withFrontEndSupply(FrontEndSupply changed) {
+    return new KitConditions(core, changed, sidebands, wanted, written);
+  }
+
+  /** These conditions with other wishes. */
+  public KitConditions withWanted(WantedLimits changed) {
+    return new KitConditions(core, frontEndSupply, sidebands, changed, written);
+  }
+}
