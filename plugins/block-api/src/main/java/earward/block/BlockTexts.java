@@ -34,9 +34,9 @@ public final class BlockTexts {
    * @throws UncheckedIOException when the jar cannot be read
    */
   public static BlockTexts of(BlockType type, Locale locale) {
-    Properties english = read(type.getClass(), "texts.properties", new Properties());
+    Properties english = read(type.besideTexts(), "texts.properties", new Properties());
     Properties words =
-        read(type.getClass(), "texts_" + locale.getLanguage() + ".properties", english);
+        read(type.besideTexts(), "texts_" + locale.getLanguage() + ".properties", english);
     return new BlockTexts(type.id(), words);
   }
 

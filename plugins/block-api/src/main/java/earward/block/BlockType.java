@@ -49,4 +49,12 @@ public interface BlockType {
       Values values, Conditions conditions, ToDoubleFunction<String> figure) {
     return List.of();
   }
+
+  /**
+   * The class beside which {@link BlockTexts} finds the words: this type's own. A type that wraps
+   * another names the class of the one within.
+   */
+  default Class<?> besideTexts() {
+    return getClass();
+  }
 }
