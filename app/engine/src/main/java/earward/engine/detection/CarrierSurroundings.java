@@ -1,0 +1,101 @@
+package earward.engine.detection;
+
+/**
+ * What surrounds N carrier-driven devices: a linear network, seen from their ports at the carrier's
+ * harmonics and at those of the tone. Ports run from anode to cathode.
+ *
+ * <p>Mutable: its owner, one solver, fills the rows in place before each solve. Index of a matrix
+ * entry: {@code (harmonic * devices + row) * devices + column}; row 0 of the carrier matrices is
+ * not used, since the mean belongs to the audio rate.
+ */
+public final class CarrierSurroundings {
+  private final int devices;
+  private final int carrierHarmonics;
+  private final int audioHarmonics;
+
+  /**
+   * Impedances at k·fc in ohms. At k = 1 the e.m.f. of an untuned feed, or the node of a tuned one,
+   * is held; from k = 2 a tuned feed's own impedance is inside.
+   */
+  public final double[] carrierRealOhms;
+
+  public final double[] carrierImaginaryOhms;
+
+  /** Open-circuit voltage at each port over the e.m.f. (or over the tuned node's voltage) at fc. */
+  public final double[] transferReal;
+
+  public final double[] transferImaginary;
+
+  /** Impedances at h·fm in ohms, h from 0. */
+  public final double[] audioRealOhms;
+
+  public final double[] audioImaginaryOhms;
+
+  /** Voltage at each port when no device conducts, from supplies and bias. */
+  public final double[] openVolts;
+
+  /** Series resistance of each device, in ohms. */
+  public final double[] seriesOhms;
+
+  /** Whether the feed is tuned. */
+  public boolean tuned;
+
+  /** Tuned feed: Rp of the winding, without anything that hangs on it. */
+  public double tankOhms;
+
+  /** Tuned feed: C of the winding. */
+  public double tankFarads;
+
+  /** Tuned feed: ωc − ω0, in radians a second. */
+  public double detuningRadians;
+
+  /** Admittance at fc that the linear network presents to the held node, in siemens. */
+  public double loadRealSiemens;
+
+  public double loadImaginarySiemens;
+
+  /** ωc, in radians a second. */
+  public double carrierRadians;
+
+  /**
+   * Surroundings filled with zeros.
+   *
+   * @param devices N, at least 1
+   * @param carrierHarmonics K, at least 1
+   * @param audioHarmonics H, at least 1
+   */
+  public CarrierSurroundings(int devices, int carrierHarmonics, int audioHarmonics) {
+    this.devices = devices;
+    this.carrierHarmonics = carrierHarmonics;
+    this.audioHarmonics = audioHarmonics;
+    int entries = devices * devices;
+    carrierRealOhms = new double[(carrierHarmonics + 1) * entries];
+    carrierImaginaryOhms = new double[(carrierHarmonics + 1) * entries];
+    audioRealOhms = new double[(audioHarmonics + 1) * entries];
+    audioImaginaryOhms = new double[(audioHarmonics + 1) * entries];
+    transferReal = new double[devices];
+    transferImaginary = new double[devices];
+    openVolts = new double[devices];
+    seriesOhms = new double[devices];
+  }
+
+  /** N. */
+  public int devices() {
+    return devices;
+  }
+
+  /** K. */
+  public int carrierHarmonics() {
+    return carrierHarmonics;
+  }
+
+  /** H. */
+  public int audioHarmonics() {
+    return audioHarmonics;
+  }
+
+  /** Where the entry of a harmonic, row and column stands. */
+  public int index(int harmonic, int row, int column) {
+    return (harmonic * devices + row) * devices + column;
+  }
+}

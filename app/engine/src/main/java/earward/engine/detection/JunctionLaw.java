@@ -1,0 +1,132 @@
+package earward.engine.detection;
+
+/**
+ * The law of one junction at one temperature: i = Is·(exp(u/nVt) − 1) + g·u, breakdown, and a
+ * charge of Cj0/(1 − u/Vj)^M. Series resistance is not part of it; it belongs to the surroundings.
+ *
+ * <p>Source: Shockley 1949; depletion charge as in any device text, its capacitance continued
+ * linearly above Vj/2. One instance a device and solver; {@link #set} changes its figures.
+ */
+public final class JunctionLaw {
+  /** Beyond this exponent the law goes on along its tangent, so that nothing overflows. */
+  private static final double MOST_EXPONENT = 80;
+
+  private double saturationAmperes;
+  private double scaledThermalVolts;
+  private double leakageSiemens;
+  private double junctionFarads;
+  private double builtInVolts;
+  private double gradingExponent;
+  private double breakdownVolts;
+
+  /** A law without figures yet. */
+  public JunctionLaw() {
+    set(1e-9, 25.7e-3, 0, 0, 0.5, 0.5, 1e3);
+  }
+
+  /**
+   * Sets the figures.
+   *
+   * @param saturationAmperes Is at this temperature, above 0
+   * @param scaledThermalVolts n·Vt, above 0
+   * @param leakageSiemens conductance in parallel, at least 0
+   * @param junctionFarads Cj0, at least 0
+   * @param builtInVolts Vj, above 0
+   * @param gradingExponent M, from 0 to 0.9
+   * @param breakdownVolts above 0
+   */
+  public void set(
+      double saturationAmperes,
+      double scaledThermalVolts,
+      double leakageSiemens,
+      double junctionFarads,
+      double builtInVolts,
+      double gradingExponent,
+      double breakdownVolts) {
+    this.saturationAmperes = saturationAmperes;
+    this.scaledThermalVolts = scaledThermalVolts;
+    this.leakageSiemens = leakageSiemens;
+    this.junctionFarads = junctionFarads;
+    this.builtInVolts = builtInVolts;
+    this.gradingExponent = gradingExponent;
+    this.breakdownVolts = breakdownVolts;
+  }
+
+  /** Current in amperes at a junction voltage. */
+  public double current(double volts) {
+    return saturationAmperes * (exponential(volts / scaledThermalVolts) - 1)
+        + leakageSiemens * volts
+        - saturationAmperes * exponential(-(volts + breakdownVolts) / scaledThermalVolts);
+  }
+
+  /** Slope of the current, in siemens. */
+  public double conductance(double volts) {
+    return saturationAmperes
+            / scaledThermalVolts
+            * (slope(volts / scaledThermalVolts)
+                + slope(-(volts + breakdownVolts) / scaledThermalVolts))
+        + leakageSiemens;
+  }
+
+  /** Whether there is a junction charge at all. */
+  public boolean charged() {
+    return junctionFarads > 0;
+  }
+
+  /** Charge in coulombs. */
+  public double charge(double volts) {
+    double knee = builtInVolts / 2;
+    if (volts <= knee) {
+      return depletionCharge(volts);
+    }
+    double over = volts - knee;
+    return depletionCharge(knee)
+        + capacitance(knee) * over
+        + capacitanceSlopeAtKnee() * over * over / 2;
+  }
+
+  /** Capacitance in farads. */
+  public double capacitance(double volts) {
+    double knee = builtInVolts / 2;
+    double here = Math.min(volts, knee);
+    double farads = junctionFarads * Math.pow(1 - here / builtInVolts, -gradingExponent);
+    return volts <= knee ? farads : farads + capacitanceSlopeAtKnee() * (volts - knee);
+  }
+
+  /**
+   * A voltage towards which a Newton step may go: large steps up the exponential are shortened to
+   * the logarithm of what they ask, so that the current does not explode.
+   */
+  double limited(double from, double to) {
+    double knee = scaledThermalVolts * Math.log(scaledThermalVolts / saturationAmperes);
+    double rise = to - from;
+    if (to <= knee || rise <= 2 * scaledThermalVolts) {
+      return to;
+    }
+    double base = Math.max(from, knee);
+    return base + scaledThermalVolts * Math.log1p((to - base) / scaledThermalVolts);
+  }
+
+  double scaledThermalVolts() {
+    return scaledThermalVolts;
+  }
+
+  private double depletionCharge(double volts) {
+    double power = 1 - gradingExponent;
+    return junctionFarads * builtInVolts / power * (1 - Math.pow(1 - volts / builtInVolts, power));
+  }
+
+  private double capacitanceSlopeAtKnee() {
+    return junctionFarads * gradingExponent / builtInVolts * Math.pow(0.5, -gradingExponent - 1);
+  }
+
+  private static double exponential(double exponent) {
+    return exponent <= MOST_EXPONENT
+        ? Math.exp(exponent)
+        : Math.exp(MOST_EXPONENT) * (1 + exponent - MOST_EXPONENT);
+  }
+
+  private static double slope(double exponent) {
+    return Math.exp(Math.min(exponent, MOST_EXPONENT));
+  }
+}
