@@ -1,0 +1,8 @@
+/**
+ * From a design to solved figures: {@code Assembler} joins the blocks to one circuit, {@code
+ * KitSolver} solves it in all its cases.
+ */
+@NullMarked
+package earward.kit.path;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** What is found when the solved figures are held against the checks: {@code Reviewer}. */
+@NullMarked
+package earward.kit.review;
+
+import org.jspecify.annotations.NullMarked;
