@@ -26,6 +26,12 @@ public record CaseName(String text) {
   /** Full output from a battery at its end. */
   public static final CaseName BATTERY_LOW = new CaseName("battery-low");
 
+  /**
+   * No signal, at the highest voltage that the supply may bring unloaded: the wrong cells in the
+   * holder, an adaptor at mains +10 %. For absolute maxima.
+   */
+  public static final CaseName HIGHEST_SUPPLY = new CaseName("highest-supply");
+
   /** Highest ambient and supply, any drive, the least load. */
   public static final CaseName HOTTEST = new CaseName("hottest");
 
@@ -41,6 +47,7 @@ public record CaseName(String text) {
           FULL_VOLUME,
           FULL_OUTPUT,
           BATTERY_LOW,
+          HIGHEST_SUPPLY,
           HOTTEST);
 
   public CaseName {

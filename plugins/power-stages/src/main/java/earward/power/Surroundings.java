@@ -1,0 +1,206 @@
+package earward.power;
+
+import static earward.block.device.Terminal.A;
+import static earward.block.device.Terminal.B;
+import static earward.block.wiring.Nodes.GROUND;
+import static earward.block.wiring.Nodes.MAIN_RAIL;
+
+import earward.block.device.AmplifierModel;
+import earward.block.device.AudioAmplifier;
+import earward.block.device.Capacitor;
+import earward.block.device.Loudspeaker;
+import earward.block.device.LoudspeakerModel;
+import earward.block.device.Potentiometer;
+import earward.block.device.Resistor;
+import earward.block.device.Taper;
+import earward.block.device.Terminal;
+import earward.block.setting.Values;
+import earward.block.wiring.Caution;
+import earward.block.wiring.Port;
+import earward.block.wiring.Port.Pair;
+import earward.block.wiring.Port.Single;
+import earward.block.wiring.Wiring;
+import earward.block.wiring.WiringPlan;
+import java.util.EnumMap;
+import java.util.Map;
+
+/** An amplifier IC amid the parts that its pins need, for one set of settings; used once. */
+final class Surroundings {
+  private static final double FILM_RATED_VOLTS = 63;
+  private static final double LOW_RATED_VOLTS = 25;
+  private static final double HIGH_RATED_VOLTS = 35;
+
+  /** Highest supply for which an electrolytic of the lower rating is fitted (common practice). */
+  private static final double MOST_VOLTS_AT_LOW_RATING = 20;
+
+  private final Values values;
+  private final AmplifierModel model;
+  private final WiringPlan plan = Wiring.from(new Single("in"));
+  private final String output;
+
+  Surroundings(Values values, AmplifierModel model) {
+    this.values = values;
+    this.model = model;
+    this.output = model.bridge() ? "plus" : "amp-out";
+  }
+
+  /** The node at which the signal leaves; the plus one of a bridge. */
+  String exitNode() {
+    return model.bridge() ? "plus" : "out";
+  }
+
+  Wiring wiring() {
+    plan.testPoint("in", "in");
+    control();
+    amplifier();
+    aroundThePins();
+    outputNetwork("", output);
+    if (model.bridge()) {
+      outputNetwork("-two", "minus");
+    } else {
+      plan.at(output).run("output-capacitor", electrolytic("output-capacitor"), "out");
+      polarised("output-capacitor");
+    }
+    plan.testPoint(model.bridge() ? "plus" : "output", output);
+    if (model.bridge()) {
+      plan.testPoint("minus", "minus");
+    }
+    loudspeaker();
+    fittingOrder();
+    Port exit = model.bridge() ? new Pair("plus", "minus") : new Single("out");
+    return plan.to(exit);
+  }
+
+  /** A DC volume control: a potentiometer from a dropped rail, its wiper at the control pin. */
+  private void control() {
+    if (!model.has(Terminal.CONTROL)) {
+      return;
+    }
+    Potentiometer track =
+        new Potentiometer(
+            values.amount("control-track"), Taper.LINEAR, values.position("control-knob"));
+    plan.column(
+            "control-series",
+            new Resistor(values.amount("control-series")),
+            A,
+            Map.of(A, MAIN_RAIL, B, "control-top"))
+        .column(
+            "control-track",
+            track,
+            Terminal.TOP,
+            Map.of(Terminal.TOP, "control-top", Terminal.WIPER, "control", Terminal.BOTTOM, GROUND))
+        .at("control")
+        .down("control-capacitor", electrolytic("control-capacitor"), GROUND)
+        .testPoint("control", "control");
+    polarised("control-capacitor");
+  }
+
+  private void amplifier() {
+    Map<Terminal, String> nodes = new EnumMap<>(Terminal.class);
+    for (Terminal terminal : new AudioAmplifier(model).terminals()) {
+      nodes.put(terminal, nodeAt(terminal));
+    }
+    boolean cooled = values.chosen("cooling", "heat-sink");
+    AudioAmplifier amplifier =
+        cooled ? new AudioAmplifier(model, values.amount("heat-sink")) : new AudioAmplifier(model);
+    plan.at("in").body("amplifier", amplifier, nodes).caution("amplifier", Caution.HOT_PART);
+    if (model.bridge()) {
+      plan.caution("amplifier", Caution.BRIDGE_NEVER_TO_GROUND);
+    }
+  }
+
+  private String nodeAt(Terminal terminal) {
+    if (terminal == Terminal.INPUT) {
+      return "in";
+    } else if (terminal == Terminal.OUTPUT) {
+      return output;
+    } else if (terminal == Terminal.OUTPUT_TWO) {
+      return "minus";
+    } else if (terminal == Terminal.SUPPLY) {
+      return MAIN_RAIL;
+    } else if (terminal == Terminal.GROUND) {
+      return GROUND;
+    }
+    return terminal.name().toLowerCase(java.util.Locale.ROOT);
+  }
+
+  private void aroundThePins() {
+    if (model.has(Terminal.GAIN)) {
+      plan.at("gain")
+          .down("gain-resistor", new Resistor(values.amount("gain-resistor")), "gain-foot")
+          .at("gain-foot")
+          .down("gain-capacitor", electrolytic("gain-capacitor"), GROUND);
+      polarised("gain-capacitor");
+    }
+    downFrom(Terminal.INVERTING, "inverting-capacitor", true);
+    downFrom(Terminal.RIPPLE, "ripple-capacitor", values.chosen("ripple", "capacitor"));
+    if (model.has(Terminal.BOOTSTRAP) && values.chosen("bootstrap", "capacitor")) {
+      plan.bridge("bootstrap-capacitor", electrolytic("bootstrap-capacitor"), "bootstrap", output);
+      polarised("bootstrap-capacitor");
+    }
+    if (model.has(Terminal.COMPENSATION)) {
+      plan.bridge("compensation-capacitor", film("compensation-capacitor"), "compensation", output);
+    }
+    plan.at(MAIN_RAIL).down("bypass-capacitor", electrolytic("bypass-capacitor"), GROUND);
+    polarised("bypass-capacitor");
+  }
+
+  private void downFrom(Terminal pin, String capacitorId, boolean fitted) {
+    if (model.has(pin) && fitted) {
+      plan.at(nodeAt(pin)).down(capacitorId, electrolytic(capacitorId), GROUND);
+      polarised(capacitorId);
+    }
+  }
+
+  private void outputNetwork(String suffix, String node) {
+    if (values.chosen("network", "fitted")) {
+      plan.at(node)
+          .down(
+              "network-resistor" + suffix,
+              new Resistor(values.amount("network-resistor")),
+              "network" + suffix)
+          .at("network" + suffix)
+          .down("network-capacitor" + suffix, film("network-capacitor"), GROUND);
+    }
+  }
+
+  private void loudspeaker() {
+    if (!values.chosen("output", "loudspeaker")) {
+      return;
+    }
+    Loudspeaker loudspeaker = new Loudspeaker(values.part("loudspeaker", LoudspeakerModel.class));
+    plan.at(exitNode()).down("loudspeaker", loudspeaker, model.bridge() ? "minus" : GROUND);
+    if (model.bridge()) {
+      plan.caution("loudspeaker", Caution.BRIDGE_NEVER_TO_GROUND);
+    }
+  }
+
+  /** Low parts first: resistors, then small capacitors, the IC, electrolytics, off-board parts. */
+  private void fittingOrder() {
+    Wiring all = plan.to(model.bridge() ? new Pair("plus", "minus") : new Single("out"));
+    all.partsOf(Resistor.class).forEach(part -> plan.fit(part.id()));
+    all.partsOf(Capacitor.class).stream()
+        .filter(part -> !((Capacitor) part.device()).dielectric().polarised())
+        .forEach(part -> plan.fit(part.id()));
+    plan.fit("amplifier");
+    all.partsOf(Capacitor.class).stream()
+        .filter(part -> ((Capacitor) part.device()).dielectric().polarised())
+        .forEach(part -> plan.fit(part.id()));
+  }
+
+  private void polarised(String capacitorId) {
+    plan.caution(capacitorId, Caution.POLARITY);
+  }
+
+  private Capacitor film(String settingId) {
+    return Capacitor.of(values.amount(settingId), FILM_RATED_VOLTS);
+  }
+
+  private Capacitor electrolytic(String settingId) {
+    double rated =
+        model.ratings().mostVolts() <= MOST_VOLTS_AT_LOW_RATING
+            ? LOW_RATED_VOLTS
+            : HIGH_RATED_VOLTS;
+    return Capacitor.electrolytic(values.amount(settingId), rated);
+  }
+}
