@@ -1,0 +1,69 @@
+package earward.kit.path;
+
+import earward.block.figure.CaseName;
+import earward.block.figure.FigureName;
+import earward.engine.CircuitException;
+import earward.engine.CompiledCircuit;
+import earward.engine.Engine;
+import earward.engine.SolveCase;
+import earward.engine.SolveOutcome;
+import java.util.List;
+import java.util.Map;
+
+/** Solves an assembled kit in all its cases. */
+public final class KitSolver {
+  private KitSolver() {}
+
+  /**
+   * The kit with its figures. An assembly that is not complete has none; its findings say why.
+   *
+   * @param assembly of the nominal kit
+   */
+  public static SolvedKit solve(Assembly assembly) {
+    if (!assembly.complete()) {
+      return new SolvedKit(assembly, Figures.NONE, List.of(), false);
+    }
+    try {
+      CompiledKit compiled = compile(assembly);
+      double[] row = new double[compiled.circuit().figures().size()];
+      SolveOutcome outcome =
+          compiled.circuit().newSolver().solve(compiled.circuit().nominalValues(), row);
+      return new SolvedKit(assembly, compiled.figures(row), outcome.findings(), outcome.solved());
+    } catch (CircuitException e) {
+      return new SolvedKit(assembly, Figures.NONE, List.of(e.finding()), false);
+    }
+  }
+
+  /**
+   * The kit compiled once for many solves. The deepest modulation is solved where the knobs are at
+   * their worst: the turn of each is scanned and the least clipping depth kept.
+   *
+   * @param assembly a complete one
+   * @throws CircuitException with a finding when the circuit makes no sense to the engine
+   */
+  public static CompiledKit compile(Assembly assembly) {
+    KitCases cases = new KitCases(assembly);
+    List<FigureName> wanted = WantedFigures.of(assembly, new Places(assembly.circuit()));
+    List<SolveCase> all = cases.all(worstPosition(assembly, cases));
+    return new CompiledKit(assembly, Engine.compile(assembly.circuit(), all, wanted));
+  }
+
+  private static Map<String, Double> worstPosition(Assembly assembly, KitCases cases) {
+    List<SolveCase> turn = cases.deepestOverTheTurn();
+    List<CaseName> names = turn.stream().map(SolveCase::name).toList();
+    List<FigureName> depths = WantedFigures.ofScan(assembly, names);
+    if (turn.isEmpty() || depths.isEmpty()) {
+      return Map.of();
+    }
+    CompiledCircuit compiled = Engine.compile(assembly.circuit(), turn, depths);
+    double[] row = new double[depths.size()];
+    var unused = compiled.newSolver().solve(compiled.nominalValues(), row);
+    int worst = -1;
+    for (int i = 0; i < row.length; i++) {
+      if (!Double.isNaN(row[i]) && (worst < 0 || row[i] < row[worst])) {
+        worst = i;
+      }
+    }
+    return worst < 0 ? Map.of() : cases.scan().get(names.indexOf(depths.get(worst).caseName()));
+  }
+}

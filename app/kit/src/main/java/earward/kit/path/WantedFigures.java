@@ -1,0 +1,132 @@
+package earward.kit.path;
+
+import static earward.block.figure.CaseName.BATTERY_LOW;
+import static earward.block.figure.CaseName.DEEPEST;
+import static earward.block.figure.CaseName.FULL_OUTPUT;
+import static earward.block.figure.CaseName.FULL_VOLUME;
+import static earward.block.figure.CaseName.HIGHEST_SUPPLY;
+import static earward.block.figure.CaseName.HOTTEST;
+import static earward.block.figure.CaseName.NO_SIGNAL;
+import static earward.block.figure.CaseName.STRONG;
+import static earward.block.figure.CaseName.TEST;
+import static earward.block.figure.CaseName.WEAK;
+
+import earward.block.check.Check;
+import earward.block.device.Adaptor;
+import earward.block.device.AudioAmplifier;
+import earward.block.device.Battery;
+import earward.block.device.Diode;
+import earward.block.device.Regulator;
+import earward.block.figure.CaseName;
+import earward.block.figure.FigureName;
+import earward.block.figure.Quantity;
+import earward.engine.CircuitPart;
+import earward.engine.Probe;
+import earward.engine.Seam;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+
+/** All figures that are asked of the engine for a kit: the standing list, and what checks name. */
+final class WantedFigures {
+  private static final List<CaseName> POWERED = List.of(NO_SIGNAL, WEAK, TEST, STRONG);
+  private static final List<CaseName> SIGNALS = List.of(WEAK, TEST, STRONG, FULL_VOLUME);
+  private static final List<CaseName> OUTPUTS = List.of(FULL_OUTPUT, BATTERY_LOW);
+
+  private final Set<FigureName> wanted = new LinkedHashSet<>();
+
+  private WantedFigures() {}
+
+  static List<FigureName> of(Assembly assembly, Places places) {
+    WantedFigures figures = new WantedFigures();
+    assembly.circuit().probes().forEach(figures::atProbe);
+    assembly.circuit().seams().forEach(figures::atSeam);
+    assembly.circuit().parts().forEach(figures::ofPart);
+    for (PlacedBlock block : assembly.blocks()) {
+      for (Check check : block.description().checks()) {
+        places.inEngine(block.global(check).figure()).ifPresent(figures.wanted::add);
+      }
+    }
+    return List.copyOf(figures.wanted);
+  }
+
+  /** What the clipping rule says, for each diode in each case of a scan. */
+  static List<FigureName> ofScan(Assembly assembly, List<CaseName> cases) {
+    List<FigureName> names = new ArrayList<>();
+    for (CircuitPart part : assembly.circuit().parts()) {
+      if (part.device() instanceof Diode) {
+        cases.forEach(c -> names.add(new FigureName(part.name(), Quantity.CLIPPING_DEPTH, c)));
+      }
+    }
+    return names;
+  }
+
+  private void add(String place, Quantity quantity, List<CaseName> cases) {
+    cases.forEach(caseName -> wanted.add(new FigureName(place, quantity, caseName)));
+  }
+
+  private void atProbe(Probe probe) {
+    add(probe.name(), Quantity.DC_VOLTS, POWERED);
+    add(probe.name(), Quantity.AUDIO_RMS_VOLTS, SIGNALS);
+    add(probe.name(), Quantity.DISTORTION, SIGNALS);
+    add(probe.name(), Quantity.CARRIER_RMS_VOLTS, List.of(TEST, STRONG));
+    add(probe.name(), Quantity.SECOND_CARRIER_RMS_VOLTS, List.of(TEST));
+    add(probe.name(), Quantity.THIRD_CARRIER_RMS_VOLTS, List.of(TEST));
+    if (probe.name().equals(CircuitBuilder.PATH)) {
+      add(probe.name(), Quantity.LOW_EDGE_HERTZ, List.of(TEST));
+      add(probe.name(), Quantity.HIGH_EDGE_HERTZ, List.of(TEST));
+    }
+  }
+
+  private void atSeam(Seam seam) {
+    String place = "seam." + seam.name();
+    add(place, Quantity.ONWARD_OHMS, List.of(TEST));
+    add(place, Quantity.BACKWARD_OHMS, List.of(TEST));
+    add(place, Quantity.LOADING_LOSS_DECIBELS, List.of(TEST));
+  }
+
+  private void ofPart(CircuitPart part) {
+    if (part.device() instanceof Diode) {
+      ofDiode(part.name());
+    } else if (part.device() instanceof AudioAmplifier) {
+      ofAmplifier(part.name());
+    } else if (part.device() instanceof Regulator) {
+      ofHeated(part.name());
+    } else if (part.device() instanceof Battery || part.device() instanceof Adaptor) {
+      add(
+          part.name(),
+          Quantity.SUPPLY_AMPERES,
+          List.of(NO_SIGNAL, TEST, STRONG, FULL_OUTPUT, BATTERY_LOW, HOTTEST));
+    }
+  }
+
+  private void ofDiode(String name) {
+    add(name, Quantity.CLIPPING_DEPTH, List.of(DEEPEST));
+    add(name, Quantity.CLIPPING_DEPTH_WITHOUT_CAPACITOR, List.of(DEEPEST));
+    add(name, Quantity.CLIPPING_DEPTH_WITHOUT_COUPLING, List.of(DEEPEST));
+    add(name, Quantity.CLEAN_DEPTH, List.of(TEST));
+    add(name, Quantity.REVERSE_PEAK_VOLTS, List.of(DEEPEST));
+    add(name, Quantity.CARRIER_PEAK_VOLTS, List.of(WEAK, TEST, STRONG));
+    add(name, Quantity.DETECTION_EFFICIENCY, List.of(TEST));
+    add(name, Quantity.CARRIER_INPUT_OHMS, List.of(TEST));
+  }
+
+  private void ofAmplifier(String name) {
+    add(name, Quantity.CLIP_WATTS, OUTPUTS);
+    add(name, Quantity.TEN_PERCENT_WATTS, OUTPUTS);
+    add(
+        name,
+        Quantity.SUPPLY_VOLTS,
+        List.of(NO_SIGNAL, TEST, FULL_OUTPUT, BATTERY_LOW, HIGHEST_SUPPLY));
+    add(name, Quantity.PEAK_AMPERES, List.of(FULL_OUTPUT));
+    add(name, Quantity.OVERLOAD_DECIBELS, List.of(STRONG));
+    ofHeated(name);
+  }
+
+  private void ofHeated(String name) {
+    add(name, Quantity.DISSIPATION_WATTS, List.of(NO_SIGNAL, TEST, FULL_OUTPUT, HOTTEST));
+    add(name, Quantity.JUNCTION_CELSIUS, List.of(HOTTEST));
+    add(name, Quantity.SURFACE_CELSIUS, List.of(HOTTEST));
+  }
+}
