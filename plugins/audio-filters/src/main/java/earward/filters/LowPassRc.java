@@ -21,6 +21,9 @@ import java.util.List;
  * the solved figures show.
  */
 public final class LowPassRc implements BlockType {
+  private static final double LEAST_OHMS = 470;
+  private static final double MOST_OHMS = 1e6;
+
   @Override
   public String id() {
     return "filter.low-pass-rc";
@@ -37,7 +40,7 @@ public final class LowPassRc implements BlockType {
         new Setting.Choice("given-by", List.of("corner", "time-constant", "parts")),
         new Setting.Value("corner-hertz", Unit.HERTZ, 4.5e3, 100, 50e3, Series.ANY),
         new Setting.Value("time-constant", Unit.SECOND, 75e-6, 3e-6, 2e-3, Series.ANY),
-        new Setting.Value("r2", Unit.OHM, 4.7e3, 470, 1e6, Series.E12),
+        new Setting.Value("r2", Unit.OHM, 4.7e3, LEAST_OHMS, MOST_OHMS, Series.E12),
         new Setting.Value("c2", Unit.FARAD, 6.8e-9, 10e-12, 4.7e-6, Series.E12));
   }
 
@@ -63,8 +66,8 @@ public final class LowPassRc implements BlockType {
     return new Curve(
         "edge-over-r2",
         "r2",
-        ohms / 3,
-        ohms * 3,
+        Math.max(LEAST_OHMS, ohms / 3),
+        Math.min(MOST_OHMS, ohms * 3),
         21,
         List.of(new FigureName("out", Quantity.HIGH_EDGE_HERTZ, CaseName.TEST)));
   }

@@ -91,8 +91,8 @@ public final class EnvelopeDiode implements BlockType {
     return new Curve(
         "clipping-over-c1",
         "c1",
-        c1 / 5,
-        c1 * 5,
+        Math.max(LEAST_FARADS, c1 / 5),
+        Math.min(MOST_FARADS, c1 * 5),
         21,
         List.of(
             new FigureName("d1", Quantity.CLIPPING_DEPTH, CaseName.DEEPEST),

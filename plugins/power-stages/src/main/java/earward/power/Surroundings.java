@@ -98,7 +98,9 @@ final class Surroundings {
   private void amplifier() {
     Map<Terminal, String> nodes = new EnumMap<>(Terminal.class);
     for (Terminal terminal : new AudioAmplifier(model).terminals()) {
-      nodes.put(terminal, nodeAt(terminal));
+      if (inUse(terminal)) {
+        nodes.put(terminal, nodeAt(terminal));
+      }
     }
     boolean cooled = values.chosen("cooling", "heat-sink");
     AudioAmplifier amplifier =
@@ -107,6 +109,13 @@ final class Surroundings {
     if (model.bridge()) {
       plan.caution("amplifier", Caution.BRIDGE_NEVER_TO_GROUND);
     }
+  }
+
+  private boolean inUse(Terminal terminal) {
+    if (terminal == Terminal.RIPPLE) {
+      return values.chosen("ripple", "capacitor");
+    }
+    return terminal != Terminal.BOOTSTRAP || values.chosen("bootstrap", "capacitor");
   }
 
   private String nodeAt(Terminal terminal) {

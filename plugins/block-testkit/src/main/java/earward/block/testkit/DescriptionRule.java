@@ -1,0 +1,83 @@
+package earward.block.testkit;
+
+import earward.block.BlockDescription;
+import earward.block.BlockType;
+import earward.block.setting.Setting;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Locale;
+import java.util.Set;
+
+/**
+ * The block has a sound id and settings, and describes itself for all of them, the same each time.
+ */
+public final class DescriptionRule implements BlockRule {
+  @Override
+  public List<String> faults(BlockType type, List<Variation> variations) {
+    Faults faults = new Faults();
+    faults.addIf(
+        !type.id().matches("[a-z]+(-[a-z]+)*\\.[a-z0-9]+(-[a-z0-9]+)*"),
+        "'" + type.id() + "' is no block type id; wanted role.name in lower case with hyphens");
+    hasPlainConstructor(type, faults);
+    settings(type, faults);
+    Set<String> turned = new HashSet<>();
+    for (Variation variation : variations) {
+      describe(type, variation, faults).ifPresent(description -> parts(description, turned));
+    }
+    for (Setting setting : type.settings()) {
+      String partId = turnedBy(setting);
+      faults.addIf(
+          !partId.isEmpty() && !turned.contains(partId),
+          "setting '" + setting.id() + "' turns '" + partId + "', which is never a part");
+    }
+    return faults.all();
+  }
+
+  private static String turnedBy(Setting setting) {
+    if (setting instanceof Setting.Position position) {
+      return position.partId();
+    }
+    return setting instanceof Setting.Trim trim ? trim.partId() : "";
+  }
+
+  private static void parts(BlockDescription description, Set<String> ids) {
+    description.wiring().parts().forEach(part -> ids.add(part.id()));
+  }
+
+  private static void hasPlainConstructor(BlockType type, Faults faults) {
+    boolean plain =
+        List.of(type.getClass().getConstructors()).stream()
+            .anyMatch(constructor -> constructor.getParameterCount() == 0);
+    faults.addIf(
+        !plain, type.getClass().getName() + " has no public constructor without arguments");
+  }
+
+  private static void settings(BlockType type, Faults faults) {
+    Set<String> ids = new HashSet<>();
+    for (Setting setting : type.settings()) {
+      faults.addIf(!ids.add(setting.id()), "two settings are named '" + setting.id() + "'");
+      faults.addIf(
+          !setting.id().equals(setting.id().toLowerCase(Locale.ROOT)),
+          "setting '" + setting.id() + "' is not in lower case");
+      if (setting instanceof Setting.Choice choice) {
+        faults.addIf(
+            new HashSet<>(choice.options()).size() != choice.options().size(),
+            "setting '" + choice.id() + "' has an option twice");
+      }
+    }
+  }
+
+  private static java.util.Optional<BlockDescription> describe(
+      BlockType type, Variation variation, Faults faults) {
+    try {
+      BlockDescription first = variation.describe(type);
+      faults.addIf(
+          !first.equals(variation.describe(type)),
+          "two descriptions of the same settings differ: " + variation.name());
+      return java.util.Optional.of(first);
+    } catch (RuntimeException e) {
+      faults.add("it cannot be described with " + variation.name() + ": " + e);
+      return java.util.Optional.empty();
+    }
+  }
+}

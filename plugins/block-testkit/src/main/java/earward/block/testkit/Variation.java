@@ -1,0 +1,32 @@
+package earward.block.testkit;
+
+import earward.block.BlockDescription;
+import earward.block.BlockType;
+import earward.block.Conditions;
+import earward.block.setting.Values;
+import java.util.Objects;
+
+/**
+ * One set of settings in which a block is tried.
+ *
+ * @param name what is particular about it, for messages
+ * @param values all settings
+ * @param conditions what the kit must work under
+ */
+public record Variation(String name, Values values, Conditions conditions) {
+
+  /** Conditions of a plain medium-wave receiver, for tries. */
+  public static final Conditions PLAIN_CONDITIONS =
+      new Conditions(455e3, 400, 4.5e3, 150, 0.3, 0.8, 0.15, 1.2, 3, 25, 40, 0.1);
+
+  public Variation {
+    Objects.requireNonNull(name);
+    Objects.requireNonNull(values);
+    Objects.requireNonNull(conditions);
+  }
+
+  /** The block in this variation. */
+  public BlockDescription describe(BlockType type) {
+    return type.describe(values, conditions);
+  }
+}

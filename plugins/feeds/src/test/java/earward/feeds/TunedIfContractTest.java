@@ -1,0 +1,11 @@
+package earward.feeds;
+
+import earward.block.BlockType;
+import earward.block.testkit.BlockContract;
+
+class TunedIfContractTest extends BlockContract {
+  @Override
+  protected BlockType type() {
+    return new TunedIf();
+  }
+}
