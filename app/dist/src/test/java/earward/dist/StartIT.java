@@ -1,0 +1,161 @@
+package earward.dist;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.concurrent.TimeUnit;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.condition.DisabledOnOs;
+import org.junit.jupiter.api.condition.OS;
+import org.junit.jupiter.api.io.TempDir;
+
+/** The shipped folder, started as a process from a place of which the build knows nothing. */
+@DisabledOnOs(value = OS.WINDOWS, disabledReason = "bin/earward is the start script for the others")
+class StartIT {
+  private static final Path BUILT = Path.of(Objects.requireNonNull(property("earward.folder")));
+  private static final List<String> ROLES =
+      List.of("feed.", "detector.", "filter.", "volume.", "power.", "supply.", "load.");
+
+  @TempDir Path elsewhere;
+  private Path program;
+
+  /** What a process left behind. */
+  private record Ended(int code, String out, String err) {}
+
+  @BeforeEach
+  void copyToAPathWithSpaces() throws IOException {
+    program = elsewhere.resolve("Radio Club: kits, 50% $HOME").resolve("ear ward");
+    try (Stream<Path> files = Files.walk(BUILT)) {
+      for (Path file : files.toList()) {
+        Path to = program.resolve(BUILT.relativize(file).toString());
+        Files.createDirectories(Objects.requireNonNull(to.getParent()));
+        Files.copy(
+            file, to, StandardCopyOption.COPY_ATTRIBUTES, StandardCopyOption.REPLACE_EXISTING);
+      }
+    }
+  }
+
+  @Test
+  void theVersionIsTheBuildsOwn() throws Exception {
+    Ended ended = start(program.resolve("bin/earward"), elsewhere, Map.of(), "--version");
+    assertThat(ended).isEqualTo(new Ended(0, "earward " + property("earward.version") + "\n", ""));
+  }
+
+  @Test
+  void everyPluginOfOursLoadsAndEveryRoleIsServed() throws Exception {
+    Ended ended = start(program.resolve("bin/earward"), elsewhere, Map.of(), "blocks");
+    assertThat(ended.code()).isZero();
+    assertThat(ended.err()).isEmpty();
+    assertThat(ended.out()).doesNotContain("WEIGH", "STOP").contains(ROLES);
+    for (Path jar : jars(program.resolve("plugins"))) {
+      String id = String.valueOf(jar.getFileName()).replaceFirst("earward-(.*)-[0-9].*", "$1");
+      assertThat(ended.out()).contains("earward." + id);
+    }
+  }
+
+  @Test
+  void aCorruptPluginIsNamedAndItsNeighboursStillWork() throws Exception {
+    Files.writeString(program.resolve("plugins/broken.jar"), "no jar");
+    Ended ended = start(program.resolve("bin/earward"), elsewhere, Map.of(), "blocks");
+    assertThat(ended.code()).isZero();
+    assertThat(ended.out()).contains("broken.jar").contains(ROLES);
+  }
+
+  @Test
+  void itStartsThroughAChainOfLinks() throws Exception {
+    Path first = elsewhere.resolve("first link");
+    Files.createSymbolicLink(first, program.resolve("bin/earward"));
+    Path second = Files.createDirectory(elsewhere.resolve("bin dir")).resolve("earward");
+    Files.createSymbolicLink(second, Path.of("..", "first link"));
+    assertThat(start(second, Path.of("/"), Map.of(), "--version").out()).startsWith("earward ");
+  }
+
+  @Test
+  void itStartsByARelativePathWithCdpathSet() throws Exception {
+    Path inside = program.resolve("bin");
+    Map<String, String> environment = Map.of("CDPATH", "/tmp:/");
+    assertThat(start(Path.of("./earward"), inside, environment, "--version").out())
+        .startsWith("earward ");
+  }
+
+  @Test
+  void anUnknownCommandIsTheCallsFault() throws Exception {
+    Ended ended = start(program.resolve("bin/earward"), elsewhere, Map.of(), "no-such-command");
+    assertThat(ended.code()).isEqualTo(2);
+    assertThat(ended.out()).isEmpty();
+    assertThat(ended.err()).isNotBlank().doesNotContain("\tat ");
+  }
+
+  @Test
+  void aMissingJavaIsSaidInOneSentence() throws Exception {
+    Map<String, String> environment = Map.of("JAVA_HOME", "/nowhere at all");
+    Ended ended = start(program.resolve("bin/earward"), elsewhere, environment, "--version");
+    assertThat(ended.code()).isEqualTo(2);
+    assertThat(ended.err()).contains("/nowhere at all/bin/java").contains("Java 17");
+  }
+
+  @Test
+  void pluginsComeFromTheirFolderAndNotFromTheClassPath() throws IOException {
+    assertThat(jars(program.resolve("plugins"))).hasSizeGreaterThanOrEqualTo(8);
+    List<String> libraries =
+        jars(program.resolve("lib")).stream().map(jar -> jar.getFileName().toString()).toList();
+    assertThat(libraries).hasSizeGreaterThan(10);
+    for (Path jar : jars(program.resolve("plugins"))) {
+      assertThat(libraries).doesNotContain(jar.getFileName().toString());
+    }
+    assertThat(libraries)
+        .noneMatch(name -> name.matches(".*(junit|assertj|testkit|archunit|jmh|timing).*"));
+  }
+
+  @Test
+  void theFolderHoldsWhatItPromises() {
+    for (String name : List.of("LICENSE", "bin/earward.bat", "lib", "plugins", "templates")) {
+      assertThat(program.resolve(name)).exists();
+    }
+    assertThat(program.resolve("bin/earward")).isExecutable();
+  }
+
+  private static List<Path> jars(Path folder) throws IOException {
+    try (Stream<Path> files = Files.list(folder)) {
+      return files.filter(file -> file.toString().endsWith(".jar")).toList();
+    }
+  }
+
+  private static String property(String name) {
+    return System.getProperty(name);
+  }
+
+  private Ended start(Path script, Path from, Map<String, String> environment, String... arguments)
+      throws IOException, InterruptedException {
+    List<String> call = new ArrayList<>(List.of(script.toString()));
+    call.addAll(List.of(arguments));
+    Path out = elsewhere.resolve("out.txt");
+    Path err = elsewhere.resolve("err.txt");
+    ProcessBuilder builder =
+        new ProcessBuilder(call)
+            .directory(from.toFile())
+            .redirectOutput(out.toFile())
+            .redirectError(err.toFile());
+    builder.environment().remove("JAVA_TOOL_OPTIONS");
+    builder.environment().putAll(environment);
+    Process process = builder.start();
+    if (!process.waitFor(60, TimeUnit.SECONDS)) {
+      process.destroyForcibly();
+      throw new AssertionError("still running after a minute: " + call);
+    }
+    return new Ended(
+        process.exitValue(),
+        Files.readString(out, StandardCharsets.UTF_8),
+        Files.readString(err, StandardCharsets.UTF_8));
+  }
+}
