@@ -34,7 +34,7 @@ class StartIT {
 
   @BeforeEach
   void copyToAPathWithSpaces() throws IOException {
-    program = elsewhere.resolve("Radio Club: kits, 50% $HOME").resolve("ear ward");
+    program = elsewhere.resolve("Radio Club, kits 50% $HOME #1").resolve("ear ward");
     try (Stream<Path> files = Files.walk(BUILT)) {
       for (Path file : files.toList()) {
         Path to = program.resolve(BUILT.relativize(file).toString());
@@ -123,6 +123,15 @@ class StartIT {
       assertThat(program.resolve(name)).exists();
     }
     assertThat(program.resolve("bin/earward")).isExecutable();
+  }
+
+  @Test
+  void aPathThatJavaCannotStartFromIsSaidInOneSentence() throws Exception {
+    Path colon = Files.move(program, elsewhere.resolve("kits:2"));
+    Ended ended = start(colon.resolve("bin/earward"), elsewhere, Map.of(), "--version");
+    assertThat(ended.code()).isEqualTo(2);
+    assertThat(ended.out()).isEmpty();
+    assertThat(ended.err()).contains("':'").contains("kits:2").hasLineCount(1);
   }
 
   private static List<Path> jars(Path folder) throws IOException {
