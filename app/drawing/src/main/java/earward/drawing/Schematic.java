@@ -1,0 +1,109 @@
+package earward.drawing;
+
+import earward.drawing.internal.element.Element;
+import earward.drawing.internal.element.Mark;
+import earward.drawing.internal.element.Symbol;
+import earward.drawing.internal.paint.Painter;
+import earward.drawing.internal.reading.NetReader;
+import earward.drawing.internal.reading.OverlapReader;
+import java.awt.Font;
+import java.awt.Graphics2D;
+import java.awt.geom.Rectangle2D;
+import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
+
+/** A circuit drawing: immutable vector geometry in points (1/72 inch), y growing downwards. */
+public final class Schematic {
+  private final double width;
+  private final double height;
+  private final Font font;
+  private final List<Element> elements;
+  private final List<Rectangle2D.Double> rows;
+
+  Schematic(
+      double width,
+      double height,
+      Font font,
+      List<Element> elements,
+      List<Rectangle2D.Double> rows) {
+    this.width = width;
+    this.height = height;
+    this.font = font;
+    this.elements = List.copyOf(elements);
+    this.rows = List.copyOf(rows);
+  }
+
+  /** Width in points; more than was asked for where one block alone is wider. */
+  public double width() {
+    return width;
+  }
+
+  /** Height in points. */
+  public double height() {
+    return height;
+  }
+
+  /** The box of each row, from the top: where a page may break. */
+  public List<Rectangle2D> rows() {
+    return rows.stream().<Rectangle2D>map(row -> (Rectangle2D) row.clone()).toList();
+  }
+
+  /** Where each part's symbol stands, by {@code block.part}. */
+  public Map<String, Rectangle2D> partBounds() {
+    Map<String, Rectangle2D> found = new TreeMap<>();
+    for (Element element : elements) {
+      if (element instanceof Symbol symbol) {
+        found.put(symbol.part(), rectangle(symbol));
+      }
+    }
+    return found;
+  }
+
+  /** Where each test point's flag stands, by {@code block#test-point}. */
+  public Map<String, Rectangle2D> testPointBounds() {
+    Map<String, Rectangle2D> found = new TreeMap<>();
+    for (Element element : elements) {
+      if (element instanceof Mark mark && mark.kind() == Mark.Kind.TEST_POINT) {
+        found.put(mark.name(), rectangle(mark));
+      }
+    }
+    return found;
+  }
+
+  private static Rectangle2D rectangle(Element element) {
+    var box = element.bounds();
+    return new Rectangle2D.Double(box.left(), box.top(), box.width(), box.height());
+  }
+
+  /** Draws all of it with its upper left corner at the origin; the graphics' state is kept. */
+  public void paint(Graphics2D graphics, Ink ink) {
+    new Painter(graphics, ink, font).paint(elements);
+  }
+
+  /**
+   * The netlist read from the geometry alone: what touches what, and what bears the same name.
+   * Wires that cross without a dot are not connected.
+   */
+  public Netlist readBack() {
+    return NetReader.read(elements);
+  }
+
+  /**
+   * Whatever lies over something else, one sentence each: symbols, wires and text. Wires may cross
+   * at right angles and touch symbols at their ends.
+   */
+  public List<String> overlaps() {
+    return OverlapReader.read(elements);
+  }
+
+  /** The geometry, for tests. */
+  List<Element> elements() {
+    return elements;
+  }
+
+  /** The same drawing with other geometry, for tests. */
+  Schematic withElements(List<Element> changed) {
+    return new Schematic(width, height, font, changed, rows);
+  }
+}
