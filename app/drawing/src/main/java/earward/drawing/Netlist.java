@@ -22,7 +22,8 @@ import java.util.TreeSet;
 public record Netlist(SortedMap<String, SortedSet<String>> nets) {
   public Netlist {
     SortedMap<String, SortedSet<String>> copy = new TreeMap<>();
-    nets.forEach((net, ends) -> copy.put(net, Collections.unmodifiableSortedSet(new TreeSet<>(ends))));
+    nets.forEach(
+        (net, ends) -> copy.put(net, Collections.unmodifiableSortedSet(new TreeSet<>(ends))));
     nets = Collections.unmodifiableSortedMap(copy);
   }
 

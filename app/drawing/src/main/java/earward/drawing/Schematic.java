@@ -3,6 +3,7 @@ package earward.drawing;
 import earward.drawing.internal.element.Element;
 import earward.drawing.internal.element.Mark;
 import earward.drawing.internal.element.Symbol;
+import earward.drawing.internal.element.Text;
 import earward.drawing.internal.paint.Painter;
 import earward.drawing.internal.reading.NetReader;
 import earward.drawing.internal.reading.OverlapReader;
@@ -11,7 +12,9 @@ import java.awt.Graphics2D;
 import java.awt.geom.Rectangle2D;
 import java.util.List;
 import java.util.Map;
+import java.util.SortedSet;
 import java.util.TreeMap;
+import java.util.TreeSet;
 
 /** A circuit drawing: immutable vector geometry in points (1/72 inch), y growing downwards. */
 public final class Schematic {
@@ -95,6 +98,17 @@ public final class Schematic {
    */
   public List<String> overlaps() {
     return OverlapReader.read(elements);
+  }
+
+  /** The sizes of text that occur, in points. */
+  public SortedSet<Double> textSizes() {
+    SortedSet<Double> found = new TreeSet<>();
+    for (Element element : elements) {
+      if (element instanceof Text text) {
+        found.add(text.sizePoints());
+      }
+    }
+    return found;
   }
 
   /** The geometry, for tests. */

@@ -43,8 +43,7 @@ public final class Painter {
     graphics.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
     graphics.setRenderingHint(
         RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
-    graphics.setRenderingHint(
-        RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
+    graphics.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
     graphics.setRenderingHint(
         RenderingHints.KEY_FRACTIONALMETRICS, RenderingHints.VALUE_FRACTIONALMETRICS_ON);
     try {
@@ -70,7 +69,13 @@ public final class Painter {
     } else if (element instanceof Text text) {
       text(text);
     } else if (element instanceof Rule rule) {
-      line(rule.x(), rule.top(), rule.x(), rule.bottom(), ink.quiet(), dashed(SEAM_POINTS, SEAM_DASH));
+      line(
+          rule.x(),
+          rule.top(),
+          rule.x(),
+          rule.bottom(),
+          ink.quiet(),
+          dashed(SEAM_POINTS, SEAM_DASH));
     }
   }
 
@@ -98,8 +103,7 @@ public final class Painter {
 
   private void text(Text text) {
     boolean strong = text.role() == Text.Role.TITLE;
-    graphics.setFont(
-        font.deriveFont(strong ? Font.BOLD : Font.PLAIN, (float) text.sizePoints()));
+    graphics.setFont(font.deriveFont(strong ? Font.BOLD : Font.PLAIN, (float) text.sizePoints()));
     graphics.setColor(
         switch (text.role()) {
           case PIN -> ink.quiet();

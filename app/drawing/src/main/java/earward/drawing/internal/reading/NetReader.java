@@ -81,7 +81,8 @@ public final class NetReader {
           }
         });
     SortedMap<String, SortedSet<String>> nets = new TreeMap<>();
-    ends.forEach((net, set) -> nets.put(sharedNames.getOrDefault(net, "net of " + set.first()), set));
+    ends.forEach(
+        (net, set) -> nets.put(sharedNames.getOrDefault(net, "net of " + set.first()), set));
     return new Netlist(nets);
   }
 

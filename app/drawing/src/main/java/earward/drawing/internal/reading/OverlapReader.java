@@ -84,8 +84,7 @@ public final class OverlapReader {
 
   private boolean dotAt(double x, double y) {
     return elements.stream()
-        .anyMatch(
-            e -> e instanceof Dot dot && Math.hypot(dot.x() - x, dot.y() - y) < HAIR);
+        .anyMatch(e -> e instanceof Dot dot && Math.hypot(dot.x() - x, dot.y() - y) < HAIR);
   }
 
   private void seam(Element a, Element b) {
