@@ -2,7 +2,6 @@ package earward.detectors;
 
 import earward.block.Conditions;
 import earward.block.check.Check;
-import earward.block.check.Finding;
 import earward.block.check.RemedyHint;
 import earward.block.check.Severity;
 import earward.block.device.DiodeModel;
@@ -11,7 +10,6 @@ import earward.block.figure.FigureName;
 import earward.block.figure.Quantity;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.function.ToDoubleFunction;
 
 /** What must hold at a diode that recovers the envelope. */
 final class DetectorChecks {
@@ -24,9 +22,6 @@ final class DetectorChecks {
 
   /** Share of the breakdown voltage that is used (common practice). */
   private static final double REVERSE_MARGIN = 0.8;
-
-  /** Two causes are named together when taking either away helps about as much. */
-  private static final double ALIKE = 0.2;
 
   private DetectorChecks() {}
 
@@ -59,37 +54,5 @@ final class DetectorChecks {
             new FigureName("d1", Quantity.REVERSE_PEAK_VOLTS, CaseName.DEEPEST),
             REVERSE_MARGIN * model.breakdownVolts(),
             "common practice: 80 % of the diode's breakdown voltage"));
-  }
-
-  /**
-   * Names why the detector lets go: its capacitor is taken away, then the AC coupling, and the one
-   * whose removal raises the depth more is the cause.
-   */
-  static List<Finding> cause(Conditions conditions, ToDoubleFunction<String> figure) {
-    double depth = figure.applyAsDouble("d1:clipping-depth@deepest");
-    if (!(depth < conditions.deepestDepth())) {
-      return List.of();
-    }
-    double byCapacitor =
-        figure.applyAsDouble("d1:clipping-depth-without-capacitor@deepest") - depth;
-    double byCoupling = figure.applyAsDouble("d1:clipping-depth-without-coupling@deepest") - depth;
-    if (Double.isNaN(byCapacitor) || Double.isNaN(byCoupling)) {
-      return List.of();
-    }
-    return List.of(
-        Finding.of(Severity.NOTE, "clipping-cause", "", sentence(byCapacitor, byCoupling)));
-  }
-
-  private static String sentence(double byCapacitor, double byCoupling) {
-    double larger = Math.max(byCapacitor, byCoupling);
-    if (Math.abs(byCapacitor - byCoupling) <= ALIKE * larger) {
-      return "The detector lets go for two reasons alike: C1 is too large for its load, and what"
-          + " is coupled through capacitors loads it too heavily.";
-    }
-    return byCapacitor > byCoupling
-        ? "The detector lets go because C1 is too large for its load: the envelope falls faster"
-            + " than C1 can discharge."
-        : "The detector lets go because what is coupled to it through capacitors loads it too"
-            + " heavily: it sees a lower resistance for audio than for DC.";
   }
 }

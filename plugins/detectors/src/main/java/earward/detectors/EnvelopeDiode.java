@@ -10,7 +10,6 @@ import earward.block.Conditions;
 import earward.block.Curve;
 import earward.block.Proposer;
 import earward.block.Role;
-import earward.block.check.Finding;
 import earward.block.device.Capacitor;
 import earward.block.device.Diode;
 import earward.block.device.DiodeMaterial;
@@ -33,7 +32,6 @@ import earward.block.wiring.WiringPlan;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.function.ToDoubleFunction;
 
 /** A diode, its reservoir capacitor and, where nothing else loads it, its load resistor. */
 public final class EnvelopeDiode implements BlockType {
@@ -118,11 +116,5 @@ public final class EnvelopeDiode implements BlockType {
           double fitted = Series.E12.nearest(Math.max(LEAST_FARADS, seconds / ohms));
           return Map.of("c1", new SettingValue.Amount(Math.min(MOST_FARADS, fitted)));
         });
-  }
-
-  @Override
-  public List<Finding> judge(
-      Values values, Conditions conditions, ToDoubleFunction<String> figure) {
-    return DetectorChecks.cause(conditions, figure);
   }
 }

@@ -11,11 +11,14 @@ import java.util.Objects;
  *
  * @param assembly what was compiled
  * @param circuit for the engine
+ * @param deepestKnobs where the deepest modulation is worst, by slot; see {@link SolvedKit}
  */
-public record CompiledKit(Assembly assembly, CompiledCircuit circuit) {
+public record CompiledKit(
+    Assembly assembly, CompiledCircuit circuit, Map<String, Double> deepestKnobs) {
   public CompiledKit {
     Objects.requireNonNull(assembly);
     Objects.requireNonNull(circuit);
+    deepestKnobs = Map.copyOf(deepestKnobs);
   }
 
   /** The figures of a row that the engine gave, with those of the path that follow from them. */

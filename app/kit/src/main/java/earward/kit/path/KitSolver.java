@@ -12,6 +12,9 @@ import java.util.Map;
 
 /** Solves an assembled kit in all its cases. */
 public final class KitSolver {
+  /** Difference in depth over the turn below which no position counts as the worst. */
+  private static final double LEAST_SPREAD = 1e-3;
+
   private KitSolver() {}
 
   /**
@@ -28,7 +31,12 @@ public final class KitSolver {
       double[] row = new double[compiled.circuit().figures().size()];
       SolveOutcome outcome =
           compiled.circuit().newSolver().solve(compiled.circuit().nominalValues(), row);
-      return new SolvedKit(assembly, compiled.figures(row), outcome.findings(), outcome.solved());
+      return new SolvedKit(
+          assembly,
+          compiled.figures(row),
+          outcome.findings(),
+          outcome.solved(),
+          compiled.deepestKnobs());
     } catch (CircuitException e) {
       return new SolvedKit(assembly, Figures.NONE, List.of(e.finding()), false);
     }
@@ -44,8 +52,9 @@ public final class KitSolver {
   public static CompiledKit compile(Assembly assembly) {
     KitCases cases = new KitCases(assembly);
     List<FigureName> wanted = WantedFigures.of(assembly, new Places(assembly.circuit()));
-    List<SolveCase> all = cases.all(worstPosition(assembly, cases));
-    return new CompiledKit(assembly, Engine.compile(assembly.circuit(), all, wanted));
+    Map<String, Double> worst = worstPosition(assembly, cases);
+    CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases.all(worst), wanted);
+    return new CompiledKit(assembly, circuit, worst);
   }
 
   private static Map<String, Double> worstPosition(Assembly assembly, KitCases cases) {
@@ -59,11 +68,16 @@ public final class KitSolver {
     double[] row = new double[depths.size()];
     var unused = compiled.newSolver().solve(compiled.nominalValues(), row);
     int worst = -1;
+    double most = 0;
     for (int i = 0; i < row.length; i++) {
+      most = Math.max(most, Double.isNaN(row[i]) ? 0 : row[i]);
       if (!Double.isNaN(row[i]) && (worst < 0 || row[i] < row[worst])) {
         worst = i;
       }
     }
-    return worst < 0 ? Map.of() : cases.scan().get(names.indexOf(depths.get(worst).caseName()));
+    if (worst < 0 || most - row[worst] < LEAST_SPREAD) {
+      return Map.of();
+    }
+    return cases.scan().get(names.indexOf(depths.get(worst).caseName()));
   }
 }

@@ -102,9 +102,9 @@ final class WantedFigures {
   }
 
   private void ofDiode(String name) {
-    add(name, Quantity.CLIPPING_DEPTH, List.of(DEEPEST));
-    add(name, Quantity.CLIPPING_DEPTH_WITHOUT_CAPACITOR, List.of(DEEPEST));
-    add(name, Quantity.CLIPPING_DEPTH_WITHOUT_COUPLING, List.of(DEEPEST));
+    add(name, Quantity.CLIPPING_DEPTH, List.of(TEST, DEEPEST));
+    add(name, Quantity.CLIPPING_DEPTH_WITHOUT_CAPACITOR, List.of(TEST, DEEPEST));
+    add(name, Quantity.CLIPPING_DEPTH_WITHOUT_COUPLING, List.of(TEST, DEEPEST));
     add(name, Quantity.CLEAN_DEPTH, List.of(TEST));
     add(name, Quantity.REVERSE_PEAK_VOLTS, List.of(DEEPEST));
     add(name, Quantity.CARRIER_PEAK_VOLTS, List.of(WEAK, TEST, STRONG));

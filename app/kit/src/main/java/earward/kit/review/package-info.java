@@ -1,4 +1,7 @@
-/** What is found when the solved figures are held against the checks: {@code Reviewer}. */
+/**
+ * What is found when the solved figures are held against the checks: {@link
+ * earward.kit.review.Reviewer}.
+ */
 @NullMarked
 package earward.kit.review;
 
