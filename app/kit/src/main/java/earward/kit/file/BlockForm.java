@@ -1,0 +1,107 @@
+package earward.kit.file;
+
+import earward.block.device.PartKind;
+import earward.kit.design.AsWritten;
+import earward.kit.design.BlockEntry;
+import earward.kit.design.SettingEntry;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/** One block of a design, as a JSON object. */
+final class BlockForm {
+  private static final String SETTINGS = "settings";
+  private static final String RAILS = "rails";
+  private static final String JOINS_AT = "joins at";
+
+  private BlockForm() {}
+
+  static List<BlockEntry> readAll(MembersReader design, String list) throws DesignFileException {
+    List<BlockEntry> blocks = new ArrayList<>();
+    for (Json item : design.ownItems(list)) {
+      blocks.add(read(MembersReader.of(item, design.fileName(), "a block of '" + list + "'")));
+    }
+    return blocks;
+  }
+
+  private static BlockEntry read(MembersReader unnamed) throws DesignFileException {
+    String id = unnamed.requiredText("id");
+    MembersReader in =
+        new MembersReader(unnamed.object(), unnamed.fileName(), "block '" + id + "'");
+    Map<String, SettingEntry> settings = new LinkedHashMap<>();
+    Optional<MembersReader> inner = in.openOwn(SETTINGS);
+    if (inner.isPresent()) {
+      for (Json.Member member : inner.get().object().members()) {
+        settings.put(member.name(), setting(in, member));
+      }
+    }
+    Map<String, String> rails = new LinkedHashMap<>();
+    Optional<MembersReader> railMembers = in.openOwn(RAILS);
+    if (railMembers.isPresent()) {
+      railMembers.get().allScalars().forEach((own, kit) -> rails.put(own, kit.words()));
+    }
+    in.find("id");
+    try {
+      return new BlockEntry(
+          id, in.requiredText("type"), settings, rails, in.text(JOINS_AT), in.written());
+    } catch (IllegalArgumentException e) {
+      throw in.impossible(e);
+    }
+  }
+
+  private static SettingEntry setting(MembersReader block, Json.Member member)
+      throws DesignFileException {
+    if (member.value() instanceof Json.Scalar scalar && !scalar.isNull()) {
+      return new SettingEntry.Words(scalar.words(), !scalar.quoted());
+    }
+    String json = JsonWriting.line(member.value());
+    if (member.value() instanceof Json.Members object) {
+      String what = "'" + member.name() + "' of " + block.what();
+      MembersReader part = new MembersReader(object, block.fileName(), what);
+      Optional<PartKind> kind = kind(part, member.name());
+      if (kind.isPresent()) {
+        return new SettingEntry.Inline(
+            PartForms.read(kind.get(), part, member.name() + " as given").model(), json);
+      }
+    }
+    return new SettingEntry.Unread(json);
+  }
+
+  private static Optional<PartKind> kind(MembersReader part, String settingId)
+      throws DesignFileException {
+    String key = part.text("kind").orElse(settingId);
+    return Arrays.stream(PartKind.values()).filter(kind -> kind.key().equals(key)).findFirst();
+  }
+
+  static Json.Items writeAll(List<BlockEntry> blocks) {
+    return Json.array(blocks.stream().map(BlockForm::write).toList());
+  }
+
+  private static Json.Members write(BlockEntry block) {
+    MembersWriter out = new MembersWriter(block.written());
+    out.text("id", block.id()).text("type", block.typeId());
+    if (block.joinsAt().isPresent()) {
+      out.text(JOINS_AT, block.joinsAt().get());
+    } else {
+      out.skip(JOINS_AT);
+    }
+    MembersWriter rails = new MembersWriter(AsWritten.NEW);
+    block.rails().forEach(rails::text);
+    List<Json.Member> settings = new ArrayList<>();
+    block.settings().forEach((id, entry) -> settings.add(new Json.Member(id, json(entry))));
+    return out.nested(RAILS, rails.done()).nested(SETTINGS, Json.object(settings)).done();
+  }
+
+  private static Json json(SettingEntry entry) {
+    if (entry instanceof SettingEntry.Words words) {
+      return words.bare() ? Json.Scalar.bare(words.words()) : Json.Scalar.text(words.words());
+    }
+    if (entry instanceof SettingEntry.Inline inline) {
+      return JsonReading.kept(inline.json());
+    }
+    return JsonReading.kept(((SettingEntry.Unread) entry).json());
+  }
+}
