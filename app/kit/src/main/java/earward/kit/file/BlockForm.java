@@ -1,6 +1,7 @@
 package earward.kit.file;
 
 import earward.block.device.PartKind;
+import earward.block.device.PartModel;
 import earward.kit.design.AsWritten;
 import earward.kit.design.BlockEntry;
 import earward.kit.design.SettingEntry;
@@ -22,15 +23,14 @@ final class BlockForm {
   static List<BlockEntry> readAll(MembersReader design, String list) throws DesignFileException {
     List<BlockEntry> blocks = new ArrayList<>();
     for (Json item : design.ownItems(list)) {
-      blocks.add(read(MembersReader.of(item, design.fileName(), "a block of '" + list + "'")));
+      blocks.add(read(MembersReader.of(item, design.source(), "a block of '" + list + "'")));
     }
     return blocks;
   }
 
   private static BlockEntry read(MembersReader unnamed) throws DesignFileException {
     String id = unnamed.requiredText("id");
-    MembersReader in =
-        new MembersReader(unnamed.object(), unnamed.fileName(), "block '" + id + "'");
+    MembersReader in = new MembersReader(unnamed.object(), unnamed.source(), "block '" + id + "'");
     Map<String, SettingEntry> settings = new LinkedHashMap<>();
     Optional<MembersReader> inner = in.openOwn(SETTINGS);
     if (inner.isPresent()) {
@@ -60,11 +60,12 @@ final class BlockForm {
     String json = JsonWriting.line(member.value());
     if (member.value() instanceof Json.Members object) {
       String what = "'" + member.name() + "' of " + block.what();
-      MembersReader part = new MembersReader(object, block.fileName(), what);
+      MembersReader part = new MembersReader(object, block.source(), what);
       Optional<PartKind> kind = kind(part, member.name());
       if (kind.isPresent()) {
-        return new SettingEntry.Inline(
-            PartForms.read(kind.get(), part, member.name() + " as given").model(), json);
+        PartModel model = PartForms.read(kind.get(), part, member.name() + " as given");
+        part.noteUnknown();
+        return new SettingEntry.Inline(model, json);
       }
     }
     return new SettingEntry.Unread(json);

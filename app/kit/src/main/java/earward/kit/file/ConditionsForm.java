@@ -22,10 +22,7 @@ final class ConditionsForm {
   static KitConditions read(MembersReader in) throws DesignFileException {
     FrontEndSupply frontEnd =
         in.choice(
-            FRONT_END,
-            FrontEndSupply.values(),
-            FrontEndSupply::key,
-            FrontEndSupply.NOT_ANSWERED);
+            FRONT_END, FrontEndSupply.values(), FrontEndSupply::key, FrontEndSupply.NOT_ANSWERED);
     Conditions core = core(in);
     List<SidebandPoint> sidebands = sidebands(in);
     Optional<MembersReader> wanted = in.open(WANTED);
@@ -61,7 +58,7 @@ final class ConditionsForm {
   private static List<SidebandPoint> sidebands(MembersReader in) throws DesignFileException {
     List<SidebandPoint> points = new ArrayList<>();
     for (Json item : in.items(SIDEBANDS)) {
-      MembersReader point = MembersReader.of(item, in.fileName(), "a sideband point");
+      MembersReader point = MembersReader.of(item, in.source(), "a sideband point");
       try {
         points.add(
             new SidebandPoint(
@@ -77,11 +74,14 @@ final class ConditionsForm {
   private static WantedLimits wanted(MembersReader in) throws DesignFileException {
     WantedLimits usual = WantedLimits.USUAL;
     try {
-      return new WantedLimits(
-          in.quantity("low edge", Unit.HERTZ, usual.lowEdgeHertz()),
-          in.quantity("listening level", Unit.WATT, usual.listeningWatts()),
-          in.quantity("battery life", Unit.HOUR),
-          in.quantity("distortion", Unit.FRACTION, usual.distortion()));
+      WantedLimits limits =
+          new WantedLimits(
+              in.quantity("low edge", Unit.HERTZ, usual.lowEdgeHertz()),
+              in.quantity("listening level", Unit.WATT, usual.listeningWatts()),
+              in.quantity("battery life", Unit.HOUR),
+              in.quantity("distortion", Unit.FRACTION, usual.distortion()));
+      in.noteUnknown();
+      return limits;
     } catch (IllegalArgumentException e) {
       throw in.impossible(e);
     }
@@ -115,7 +115,8 @@ final class ConditionsForm {
   private static Json sidebands(KitConditions conditions) {
     try {
       MembersReader before =
-          new MembersReader(Kept.object(conditions.written()), "kept", "conditions");
+          new MembersReader(
+              Kept.object(conditions.written()), new FileSource("kept"), "conditions");
       if (sidebands(before).equals(conditions.sidebands())) {
         return before.find(SIDEBANDS).orElse(Json.array(List.of()));
       }
@@ -143,6 +144,7 @@ final class ConditionsForm {
     } else {
       out.skip("battery life");
     }
-    return out.quantity("distortion", limits.distortion(), Unit.FRACTION, usual.distortion()).done();
+    return out.quantity("distortion", limits.distortion(), Unit.FRACTION, usual.distortion())
+        .done();
   }
 }

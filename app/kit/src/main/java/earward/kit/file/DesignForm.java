@@ -61,14 +61,15 @@ final class DesignForm {
     }
   }
 
-  private static void requireVersion(MembersReader in) throws DesignFileException {
+  static void requireVersion(MembersReader in) throws DesignFileException {
     Json.Scalar version = in.scalar(SCHEMA).orElseThrow(() -> in.missing(SCHEMA));
     if (version.quoted() || !version.words().equals(VERSION)) {
       throw DesignFileException.of(
           "schema-version",
           in.fileName(),
           version.at(),
-          "the design is of schema "
+          in.what()
+              + " is of schema "
               + version.words()
               + "; this program reads schema "
               + VERSION
@@ -79,7 +80,7 @@ final class DesignForm {
   private static List<AddedTestPoint> testPoints(MembersReader in) throws DesignFileException {
     List<AddedTestPoint> points = new ArrayList<>();
     for (Json item : in.ownItems(TEST_POINTS)) {
-      MembersReader point = MembersReader.of(item, in.fileName(), "an added test point");
+      MembersReader point = MembersReader.of(item, in.source(), "an added test point");
       try {
         points.add(
             new AddedTestPoint(

@@ -21,7 +21,7 @@ public final class Designs {
    * @throws DesignFileException when it is missing, a folder, empty, broken, nested too deeply, of
    *     another schema, or says something impossible
    */
-  public static KitDesign read(Path file) throws DesignFileException {
+  public static DesignReading read(Path file) throws DesignFileException {
     return read(TextFiles.read(file), file.toString());
   }
 
@@ -31,9 +31,11 @@ public final class Designs {
    * @param fileName for the sentences
    * @throws DesignFileException as above
    */
-  public static KitDesign read(String text, String fileName) throws DesignFileException {
+  public static DesignReading read(String text, String fileName) throws DesignFileException {
     Json tree = JsonReading.read(text, fileName);
-    return DesignForm.read(MembersReader.of(tree, fileName, "the design"));
+    FileSource source = new FileSource(fileName);
+    KitDesign design = DesignForm.read(MembersReader.of(tree, source, "the design"));
+    return new DesignReading(design, source.notes());
   }
 
   /** The design's text, as it stands in a file: the same design gives the same text. */

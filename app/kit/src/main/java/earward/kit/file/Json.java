@@ -22,14 +22,14 @@ sealed interface Json {
 
   /** An object, its members in order. */
   record Members(List<Member> members, Place at) implements Json {
-    Members {
+    public Members {
       members = List.copyOf(members);
     }
   }
 
   /** An array. */
   record Items(List<Json> items, Place at) implements Json {
-    Items {
+    public Items {
       items = List.copyOf(items);
     }
   }

@@ -6,24 +6,21 @@ import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.core.StreamReadConstraints;
-import com.fasterxml.jackson.core.StreamReadFeature;
 import com.fasterxml.jackson.core.exc.StreamConstraintsException;
 import java.io.IOException;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 
-/** Reads JSON into a tree, with limits on depth and length so that no file can overrun the stack. */
+/** Reads JSON into a tree, with a limit on depth so that no file can overrun the stack. */
 final class JsonReading {
   private static final int DEEPEST = 60;
-  private static final int LONGEST_CHARACTERS = 20_000_000;
+  private static final int LONGEST_NUMBER_CHARACTERS = 100;
   private static final JsonFactory FACTORY =
       JsonFactory.builder()
           .streamReadConstraints(
-              StreamReadConstraints.builder()
-                  .maxNestingDepth(DEEPEST)
-                  .maxDocumentLength(LONGEST_CHARACTERS)
-                  .build())
-          .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
+              StreamReadConstraints.builder().maxNumberLength(LONGEST_NUMBER_CHARACTERS).build())
           .build();
 
   private final String fileName;
@@ -47,20 +44,19 @@ final class JsonReading {
     }
     try (JsonParser parser = FACTORY.createParser(body)) {
       JsonReading reading = new JsonReading(fileName, parser);
-      Json tree = reading.value(parser.nextToken());
+      Json tree = reading.value(parser.nextToken(), 1);
       if (parser.nextToken() != null) {
         throw reading.broken("more follows after the end of the JSON object", reading.place());
       }
       return tree;
     } catch (StreamConstraintsException e) {
       throw DesignFileException.of(
-          "nested-too-deep",
+          "too-long",
           fileName,
           place(e.getLocation()),
-          "it is nested deeper than "
-              + DEEPEST
-              + " levels, or has a text or number of unusual length; no design needs that:"
-              + " correct the file");
+          "a text or number here is of unusual length (a number has at most "
+              + LONGEST_NUMBER_CHARACTERS
+              + " digits); shorten it");
     } catch (JsonProcessingException e) {
       throw DesignFileException.of(
           "broken-json", fileName, place(e.getLocation()), said(e.getOriginalMessage()));
@@ -78,11 +74,18 @@ final class JsonReading {
     }
   }
 
-  private Json value(JsonToken token) throws IOException, DesignFileException {
+  private Json value(JsonToken token, int depth) throws IOException, DesignFileException {
     Json.Place place = place();
+    if (depth > DEEPEST) {
+      throw DesignFileException.of(
+          "nested-too-deep",
+          fileName,
+          place,
+          "lists and objects are nested deeper than " + DEEPEST + " levels; wanted fewer");
+    }
     return switch (token) {
-      case START_OBJECT -> members(place);
-      case START_ARRAY -> items(place);
+      case START_OBJECT -> members(place, depth);
+      case START_ARRAY -> items(place, depth);
       case VALUE_STRING -> new Json.Scalar(true, parser.getText(), place);
       case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT, VALUE_TRUE, VALUE_FALSE, VALUE_NULL ->
           new Json.Scalar(false, parser.getText(), place);
@@ -91,21 +94,35 @@ final class JsonReading {
     };
   }
 
-  private Json.Members members(Json.Place place) throws IOException, DesignFileException {
+  private Json.Members members(Json.Place place, int depth)
+      throws IOException, DesignFileException {
+    Map<String, Json.Place> places = new HashMap<>();
     List<Json.Member> members = new ArrayList<>();
     while (parser.nextToken() != JsonToken.END_OBJECT) {
       String name = parser.currentName();
-      members.add(new Json.Member(name, value(parser.nextToken())));
+      requireNew(places, name);
+      members.add(new Json.Member(name, value(parser.nextToken(), depth + 1)));
     }
     return new Json.Members(members, place);
   }
 
-  private Json.Items items(Json.Place place) throws IOException, DesignFileException {
+  private void requireNew(Map<String, Json.Place> places, String name) throws DesignFileException {
+    Json.Place former = places.put(name, place());
+    if (former != null) {
+      throw DesignFileException.of(
+          "duplicate-key",
+          fileName,
+          place(),
+          "'" + name + "' stands here and in line " + former.line() + "; wanted once: remove one");
+    }
+  }
+
+  private Json.Items items(Json.Place place, int depth) throws IOException, DesignFileException {
     List<Json> items = new ArrayList<>();
     for (JsonToken token = parser.nextToken();
         token != JsonToken.END_ARRAY;
         token = parser.nextToken()) {
-      items.add(value(token));
+      items.add(value(token, depth + 1));
     }
     return new Json.Items(items, place);
   }

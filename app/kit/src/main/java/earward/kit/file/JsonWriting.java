@@ -94,7 +94,7 @@ final class JsonWriting {
         case '\r' -> quoted.append("\\r");
         case '\t' -> quoted.append("\\t");
         default -> {
-          if (c < ' ' || Character.isSurrogate(c) && !paired(text, i)) {
+          if (c < ' ' || (Character.isSurrogate(c) && !paired(text, i))) {
             quoted.append("\\u").append(hex(c));
           } else {
             quoted.append(c);

@@ -16,7 +16,7 @@ import java.util.function.Function;
 /** Reads the members of one object; each fault becomes one sentence with its place. */
 final class MembersReader {
   private final Json.Members object;
-  private final String fileName;
+  private final FileSource source;
   private final String what;
   private final Set<String> asked = new HashSet<>();
   private final Set<String> opened = new HashSet<>();
@@ -26,26 +26,30 @@ final class MembersReader {
    *
    * @param what it is, for the sentences: {@code block 'volume'}
    */
-  MembersReader(Json.Members object, String fileName, String what) {
+  MembersReader(Json.Members object, FileSource source, String what) {
     this.object = object;
-    this.fileName = fileName;
+    this.source = source;
     this.what = what;
   }
 
-  static MembersReader of(Json tree, String fileName, String what) throws DesignFileException {
+  static MembersReader of(Json tree, FileSource source, String what) throws DesignFileException {
     if (tree instanceof Json.Members object) {
-      return new MembersReader(object, fileName, what);
+      return new MembersReader(object, source, what);
     }
     throw DesignFileException.of(
-        "wrong-form", fileName, tree.at(), what + " is no JSON object; wanted { ... }");
+        "wrong-form", source.fileName(), tree.at(), what + " is no JSON object; wanted { ... }");
   }
 
   String what() {
     return what;
   }
 
+  FileSource source() {
+    return source;
+  }
+
   String fileName() {
-    return fileName;
+    return source.fileName();
   }
 
   Json.Members object() {
@@ -146,7 +150,7 @@ final class MembersReader {
   Optional<MembersReader> open(String name) throws DesignFileException {
     Optional<Json> value = find(name);
     return value.isPresent()
-        ? Optional.of(of(value.get(), fileName, "'" + name + "'"))
+        ? Optional.of(of(value.get(), source, "'" + name + "'"))
         : Optional.empty();
   }
 
@@ -176,35 +180,40 @@ final class MembersReader {
     return all;
   }
 
-  /** The object as it was written. */
+  /** The object as it was written; what nothing asked for is noted, since it may be misspelt. */
   AsWritten written() {
+    noteUnknown();
     Map<String, String> members = new LinkedHashMap<>();
     for (Json.Member member : object.members()) {
       members.put(
-          member.name(),
-          opened.contains(member.name()) ? "" : JsonWriting.line(member.value()));
+          member.name(), opened.contains(member.name()) ? "" : JsonWriting.line(member.value()));
     }
     return new AsWritten(members);
   }
 
-  /** The first member that nothing asked for. */
-  Optional<Json.Member> unasked() {
-    return object.members().stream().filter(member -> !asked.contains(member.name())).findFirst();
+  /** Notes every member that nothing asked for: it is kept, and has no effect. */
+  void noteUnknown() {
+    unasked().forEach(member -> source.noteUnknown(member, what));
+  }
+
+  /** The members that nothing asked for. */
+  List<Json.Member> unasked() {
+    return object.members().stream().filter(member -> !asked.contains(member.name())).toList();
   }
 
   DesignFileException missing(String name) {
     return DesignFileException.of(
-        "missing-member", fileName, object.at(), what + " has no member '" + name + "'; add it");
+        "missing-member", fileName(), object.at(), what + " has no member '" + name + "'; add it");
   }
 
   DesignFileException fault(String code, Json value, String name, String found) {
     return DesignFileException.of(
-        code, fileName, value.at(), "'" + name + "' of " + what + " " + found);
+        code, fileName(), value.at(), "'" + name + "' of " + what + " " + found);
   }
 
   /** The whole object at fault, by a record's own sentence. */
   DesignFileException impossible(IllegalArgumentException e) {
     return DesignFileException.of(
-        "impossible-value", fileName, object.at(), what + ": " + e.getMessage());
+        "impossible-value", fileName(), object.at(), what + ": " + e.getMessage());
   }
 }

@@ -94,7 +94,9 @@ final class MembersWriter {
   }
 
   private Optional<Json> sameWords(String name, String words) {
-    return scalarAsWritten(name).filter(scalar -> scalar.words().equals(words)).map(Json.class::cast);
+    return scalarAsWritten(name)
+        .filter(scalar -> scalar.words().equals(words))
+        .map(Json.class::cast);
   }
 
   private Optional<Json> quantityAsWritten(String name, double value, Unit unit) {

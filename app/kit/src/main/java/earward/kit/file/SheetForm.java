@@ -17,10 +17,7 @@ final class SheetForm {
     try {
       return new SheetOptions(
           in.choice(
-              "paper",
-              SheetOptions.Paper.values(),
-              SheetOptions.Paper::key,
-              SheetOptions.Paper.A4),
+              "paper", SheetOptions.Paper.values(), SheetOptions.Paper::key, SheetOptions.Paper.A4),
           in.text("language").orElse(usual.language()),
           in.text("club").orElse(usual.clubName()),
           in.text("kit number").orElse(usual.kitNumber()),
@@ -49,7 +46,7 @@ final class SheetForm {
   static Bench readBench(MembersReader in) throws DesignFileException {
     List<Bench.Instrument> instruments = new ArrayList<>();
     for (Json item : in.ownItems(INSTRUMENTS)) {
-      MembersReader one = MembersReader.of(item, in.fileName(), "an instrument");
+      MembersReader one = MembersReader.of(item, in.source(), "an instrument");
       try {
         instruments.add(
             new Bench.Instrument(

@@ -1,0 +1,111 @@
+package earward.kit.file;
+
+import earward.block.device.AmplifierGain;
+import earward.block.device.AmplifierModel;
+import earward.block.device.AmplifierRatings;
+import earward.block.device.ControlPoint;
+import earward.block.device.OutputSwing;
+import earward.block.quantity.Unit;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** An audio amplifier IC's data as a JSON object. Gains are given in dB. */
+final class AmplifierForm {
+  private static final String COMPENSATION = "compensation";
+  private static final String FEEDBACK = "feedback resistor";
+
+  private AmplifierForm() {}
+
+  static AmplifierModel read(MembersReader in, String name) throws DesignFileException {
+    double rejection = in.quantity("ripple rejection", Unit.DECIBEL, 0);
+    return new AmplifierModel(
+        name,
+        in.flag("bridge", false),
+        gain(in),
+        swing(in),
+        ratings(in),
+        in.requiredQuantity("quiescent current", Unit.AMPERE),
+        in.quantity("rest share of the supply", Unit.FRACTION, 0.5),
+        in.quantity("rest offset", Unit.VOLT, 0),
+        in.requiredQuantity("input resistance", Unit.OHM),
+        in.quantity("input bias current", Unit.AMPERE, 0),
+        rejection,
+        in.quantity("ripple rejection without capacitor", Unit.DECIBEL, rejection),
+        in.quantity("input noise", Unit.VOLT, 0),
+        in.text("package").orElse(""),
+        PinsForm.read(in));
+  }
+
+  /** The plain number of a gain in decibels of voltage. */
+  static double ratio(double decibels) {
+    return Math.pow(10, decibels / 20);
+  }
+
+  private static AmplifierGain gain(MembersReader in) throws DesignFileException {
+    OptionalDouble fixed = in.quantity("gain", Unit.DECIBEL);
+    OptionalDouble feedback = in.quantity(FEEDBACK, Unit.OHM);
+    if (fixed.isPresent() == feedback.isPresent()) {
+      throw DesignFileException.of(
+          "missing-member",
+          in.fileName(),
+          in.object().at(),
+          in.what()
+              + (fixed.isPresent() ? " has both 'gain' and '" : " has neither 'gain' nor '")
+              + FEEDBACK
+              + "'; wanted one of them: a fixed gain, or the resistor with which parts outside"
+              + " set it");
+    }
+    return new AmplifierGain(
+        fixed.isPresent() ? ratio(fixed.getAsDouble()) : 1,
+        feedback.orElse(Double.POSITIVE_INFINITY),
+        ratio(in.requiredQuantity("open-loop gain", Unit.DECIBEL)),
+        in.requiredQuantity("bandwidth", Unit.HERTZ),
+        compensation(in),
+        control(in));
+  }
+
+  /** Upper edge times capacitance, from one pair of them. */
+  private static double compensation(MembersReader in) throws DesignFileException {
+    Optional<MembersReader> pair = in.open(COMPENSATION);
+    if (pair.isEmpty()) {
+      return 0;
+    }
+    return pair.get().requiredQuantity("capacitor", Unit.FARAD)
+        * pair.get().requiredQuantity("bandwidth", Unit.HERTZ);
+  }
+
+  private static List<ControlPoint> control(MembersReader in) throws DesignFileException {
+    List<ControlPoint> curve = new ArrayList<>();
+    for (Json item : in.items("control")) {
+      MembersReader point =
+          MembersReader.of(item, in.source(), "a point of 'control' of " + in.what());
+      curve.add(
+          new ControlPoint(
+              point.requiredQuantity("voltage", Unit.VOLT),
+              point.requiredQuantity("gain", Unit.DECIBEL)));
+    }
+    return curve;
+  }
+
+  private static OutputSwing swing(MembersReader in) throws DesignFileException {
+    return new OutputSwing(
+        in.requiredQuantity("lost voltage up", Unit.VOLT),
+        in.quantity("lost voltage up per ampere", Unit.OHM, 0),
+        in.requiredQuantity("lost voltage down", Unit.VOLT),
+        in.quantity("lost voltage down per ampere", Unit.OHM, 0),
+        in.quantity("lost voltage without bootstrap", Unit.VOLT, 0));
+  }
+
+  private static AmplifierRatings ratings(MembersReader in) throws DesignFileException {
+    return new AmplifierRatings(
+        in.requiredQuantity("lowest supply", Unit.VOLT),
+        in.requiredQuantity("highest supply", Unit.VOLT),
+        in.requiredQuantity("least load", Unit.OHM),
+        in.requiredQuantity("highest output current", Unit.AMPERE),
+        in.quantity("highest junction temperature", Unit.CELSIUS, 150),
+        in.requiredQuantity("junction to air", Unit.KELVIN_PER_WATT),
+        in.requiredQuantity("junction to case", Unit.KELVIN_PER_WATT));
+  }
+}
