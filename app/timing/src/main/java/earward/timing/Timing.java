@@ -27,6 +27,7 @@ public final class Timing {
 
   private static List<Bar> bars() {
     return List.of(
-        new Bar("earward blocks from a cold start", 1.0, 10, () -> Program.start("blocks")));
+        new RepeatedBar("earward blocks from a cold start", 1.0, 10, () -> Program.start("blocks")),
+        new WarmBar("all plug-ins loaded", 0.25, "PluginLoading.allPlugins"));
   }
 }

@@ -15,21 +15,21 @@ class BarsTest {
 
   @Test
   void aBarThatIsKeptEndsWithZero() {
-    assertThat(run(false, new Bar("idle", 30, 3, () -> {}))).isZero();
+    assertThat(run(false, new RepeatedBar("idle", 30, 3, () -> {}))).isZero();
     assertThat(out.toString(StandardCharsets.UTF_8)).startsWith("kept").contains("idle");
   }
 
   @Test
   void oneMissedBarAmongKeptOnesEndsWithOne() {
-    Bar missed = new Bar("slow", 1e-9, 1, () -> Thread.sleep(2));
-    assertThat(run(false, missed, new Bar("idle", 30, 1, () -> {}))).isEqualTo(1);
+    RepeatedBar missed = new RepeatedBar("slow", 1e-9, 1, () -> Thread.sleep(2));
+    assertThat(run(false, missed, new RepeatedBar("idle", 30, 1, () -> {}))).isEqualTo(1);
     assertThat(out.toString(StandardCharsets.UTF_8)).startsWith("MISSED slow").contains("kept");
   }
 
   @Test
   void workThatFailsMissesItsBar() {
-    Bar failing =
-        new Bar(
+    RepeatedBar failing =
+        new RepeatedBar(
             "broken",
             30,
             1,
@@ -43,9 +43,27 @@ class BarsTest {
   @Test
   void quickIsAFifthOfTheLengthAgainstTwiceTheTime() throws Exception {
     AtomicInteger runs = new AtomicInteger();
-    Bar bar = new Bar("counted", 30, 10, runs::incrementAndGet);
+    RepeatedBar bar = new RepeatedBar("counted", 30, 10, runs::incrementAndGet);
     assertThat(bar.measure(true).limitSeconds()).isEqualTo(60);
     assertThat(runs.get()).isEqualTo(1 + 10 / 5);
+  }
+
+  @Test
+  void whatIsOnlyToldIsNeverMissed() {
+    Timed told = new Timed("kits", 0.002, Double.POSITIVE_INFINITY);
+    assertThat(told.kept()).isTrue();
+    assertThat(told.line()).startsWith("told").contains("2.000 ms").contains("500.0 a second");
+  }
+
+  @Test
+  void theRatioToTheLimitIsPrinted() {
+    assertThat(new Timed("kits", 0.002, 0.008).line()).contains("0.25 of the limit");
+    assertThat(new Timed("kits", 0.016, 0.008).line()).startsWith("MISSED").contains("2.00");
+  }
+
+  @Test
+  void noBarsAtAllAreNoBarsKept() {
+    assertThat(run(false)).isEqualTo(1);
   }
 
   private int run(boolean quick, Bar... bars) {
