@@ -2,23 +2,29 @@ package earward.engine;
 
 import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
+import earward.engine.internal.Plan;
+import earward.engine.internal.Run;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 
 /** A circuit ready to be solved many times. Immutable; shared by all threads. */
 public final class CompiledCircuit {
-  private final List<Slot> slots = List.of();
+  private final Plan plan;
   private final List<FigureName> figures;
-  private final Map<String, Integer> slotIndex = new HashMap<>();
+  private final Map<FigureName, Integer> figureIndex = new HashMap<>();
 
-  CompiledCircuit(Circuit circuit, List<SolveCase> cases, List<FigureName> wanted) {
-    figures = wanted;
+  CompiledCircuit(Plan plan, List<FigureName> wanted) {
+    this.plan = plan;
+    figures = List.copyOf(wanted);
+    for (int i = 0; i < figures.size(); i++) {
+      figureIndex.put(figures.get(i), i);
+    }
   }
 
   /** The values of a row, in order. */
   public List<Slot> slots() {
-    return slots;
+    return List.copyOf(plan.slots().all());
   }
 
   /**
@@ -27,16 +33,12 @@ public final class CompiledCircuit {
    * @throws IllegalArgumentException when there is none of this name
    */
   public int slot(String name) {
-    Integer index = slotIndex.get(name);
-    if (index == null) {
-      throw new IllegalArgumentException("there is no slot '" + name + "'");
-    }
-    return index;
+    return plan.slots().of(name);
   }
 
   /** A fresh row with the nominal values. */
   public double[] nominalValues() {
-    return slots.stream().mapToDouble(Slot::nominal).toArray();
+    return plan.slots().all().stream().mapToDouble(Slot::nominal).toArray();
   }
 
   /** The figures of a row, in order. */
@@ -50,8 +52,8 @@ public final class CompiledCircuit {
    * @throws IllegalArgumentException when it was not asked for
    */
   public int figure(FigureName name) {
-    int index = figures.indexOf(name);
-    if (index < 0) {
+    Integer index = figureIndex.get(name);
+    if (index == null) {
       throw new IllegalArgumentException("figure " + name + " was not asked for");
     }
     return index;
@@ -59,18 +61,19 @@ public final class CompiledCircuit {
 
   /** A solver for one thread. */
   public Solver newSolver() {
-    return new Solver(this);
+    return new Solver(this, new Run(plan));
   }
 
   /**
-   * The audio response from the recovered envelope to a place.
+   * The small-signal audio response from the envelope of the feed, at no load, to a place.
    *
    * @param values a row of values
    * @param caseName the case whose operating point holds
    * @param place probe or node
-   * @param hertz frequencies
+   * @param hertz frequencies, above 0
+   * @throws IllegalArgumentException when there is no such place
    */
   public Response response(double[] values, CaseName caseName, String place, double[] hertz) {
-    return new Response(List.of());
+    return new Run(plan).response(values, caseName, place, hertz);
   }
 }

@@ -1,6 +1,11 @@
 package earward.engine;
 
+import earward.block.check.Finding;
+import earward.block.check.Severity;
+import earward.block.device.CarrierGenerator;
+import earward.block.device.TunedFeed;
 import earward.block.figure.FigureName;
+import earward.engine.internal.Plan;
 import java.util.List;
 
 /** The door of the engine: a circuit in, something that can be solved out. */
@@ -17,6 +22,28 @@ public final class Engine {
    */
   public static CompiledCircuit compile(
       Circuit circuit, List<SolveCase> cases, List<FigureName> wanted) {
-    return new CompiledCircuit(circuit, List.copyOf(cases), List.copyOf(wanted));
+    long feeds =
+        circuit.parts().stream()
+            .map(CircuitPart::device)
+            .filter(device -> device instanceof CarrierGenerator || device instanceof TunedFeed)
+            .count();
+    if (feeds > 1) {
+      throw refused("the circuit has " + feeds + " feeds; it can have one at most");
+    }
+    try {
+      return new CompiledCircuit(new Plan(circuit, cases, wanted), wanted);
+    } catch (IllegalArgumentException e) {
+      String message = e.getMessage();
+      throw refused(message == null ? "the circuit makes no sense" : message);
+    }
+  }
+
+  private static CircuitException refused(String sentence) {
+    return new CircuitException(
+        Finding.of(
+            Severity.STOP,
+            "circuit-refused",
+            "",
+            Character.toUpperCase(sentence.charAt(0)) + sentence.substring(1) + "."));
   }
 }

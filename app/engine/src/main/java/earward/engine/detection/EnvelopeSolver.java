@@ -34,6 +34,10 @@ public final class EnvelopeSolver {
   private final double[] rateKernel;
   private final double[] envelope;
   private final double[] drawn;
+  private final double[] keptState;
+  private final double[] keptJunctions;
+  private boolean keptWarm;
+  private int keptSamples;
   private boolean warm;
   private int warmSamples;
 
@@ -76,6 +80,8 @@ public final class EnvelopeSolver {
     residual = new double[blocks * audioSamples];
     junctions = new double[audioSamples * devices * carrierSamples];
     savedJunctions = new double[junctions.length];
+    keptState = new double[state.length];
+    keptJunctions = new double[junctions.length];
     slopes = new double[audioSamples * blocks * blocks];
     audioKernel = new double[devices * devices * 2 * audioSamples];
     rateKernel = new double[2 * audioSamples];
@@ -89,6 +95,40 @@ public final class EnvelopeSolver {
     feedReal = new double[audioSamples];
     feedImaginary = new double[audioSamples];
     reversePeakVolts = new double[devices];
+  }
+
+  /**
+   * Slope of a mean current (rows 0..) or of what is drawn from the feed (real, imaginary) to a
+   * port voltage (columns 0..) or to the held quantity (real, imaginary), at one audio sample.
+   */
+  public double slope(int sample, int row, int column) {
+    return slopes[(sample * blocks + row) * blocks + column];
+  }
+
+  /** What the held node gives at one audio sample, in A, real part. */
+  public double drawnReal(int sample) {
+    return drawn[2 * sample];
+  }
+
+  /** What the held node gives at one audio sample, in A, imaginary part. */
+  public double drawnImaginary(int sample) {
+    return drawn[2 * sample + 1];
+  }
+
+  /** Remembers the present solution as the start of later solves. */
+  public void keep() {
+    System.arraycopy(state, 0, keptState, 0, state.length);
+    System.arraycopy(junctions, 0, keptJunctions, 0, junctions.length);
+    keptWarm = warm;
+    keptSamples = warmSamples;
+  }
+
+  /** Goes back to the solution that was kept, so that no former solve leaves a trace. */
+  public void recall() {
+    System.arraycopy(keptState, 0, state, 0, state.length);
+    System.arraycopy(keptJunctions, 0, junctions, 0, junctions.length);
+    warm = keptWarm;
+    warmSamples = keptSamples;
   }
 
   /** Number of carrier harmonics, K: what the surroundings must hold. */

@@ -97,7 +97,7 @@ public final class JunctionLaw {
    * A voltage towards which a Newton step may go: large steps up the exponential are shortened to
    * the logarithm of what they ask, so that the current does not explode.
    */
-  double limited(double from, double to) {
+  public double limited(double from, double to) {
     double knee = scaledThermalVolts * Math.log(scaledThermalVolts / saturationAmperes);
     double rise = to - from;
     if (to <= knee || rise <= 2 * scaledThermalVolts) {

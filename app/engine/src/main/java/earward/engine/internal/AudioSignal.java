@@ -1,0 +1,90 @@
+package earward.engine.internal;
+
+import java.util.Arrays;
+
+/** Harmonics of the tone (peak, complex) in all unknowns. Mutable, for one thread. */
+final class AudioSignal {
+  final int harmonics;
+  private final int size;
+  private final double[] re;
+  private final double[] im;
+
+  AudioSignal(int harmonics, int size) {
+    this.harmonics = harmonics;
+    this.size = size;
+    re = new double[(harmonics + 1) * size];
+    im = new double[re.length];
+  }
+
+  void clear() {
+    Arrays.fill(re, 0);
+    Arrays.fill(im, 0);
+  }
+
+  /** Adds a column of the table times a complex factor, at one harmonic. */
+  void add(AudioTable table, int harmonic, int column, double real, double imaginary) {
+    for (int i = 0; i < size; i++) {
+      double r = table.re(harmonic, column, i);
+      double m = table.im(harmonic, column, i);
+      re[harmonic * size + i] += r * real - m * imaginary;
+      im[harmonic * size + i] += r * imaginary + m * real;
+    }
+  }
+
+  double re(int harmonic, int unknown) {
+    return unknown < 0 ? 0 : re[harmonic * size + unknown];
+  }
+
+  double im(int harmonic, int unknown) {
+    return unknown < 0 ? 0 : im[harmonic * size + unknown];
+  }
+
+  /** Peak of one harmonic between two nodes. */
+  double peak(int harmonic, int plus, int minus) {
+    return Math.hypot(
+        re(harmonic, plus) - re(harmonic, minus), im(harmonic, plus) - im(harmonic, minus));
+  }
+
+  /** Harmonics 2 to 10 over the fundamental; NaN where there is no fundamental. */
+  double distortion(int plus, int minus) {
+    double fundamental = peak(1, plus, minus);
+    double sum = 0;
+    for (int h = 2; h <= Math.min(10, harmonics); h++) {
+      double here = peak(h, plus, minus);
+      sum += here * here;
+    }
+    return fundamental > 1e-15 ? Math.sqrt(sum) / fundamental : Double.NaN;
+  }
+
+  /** Writes the wave of an unknown; returns the largest magnitude. */
+  double wave(int unknown, double[] into, double[] cosine, double[] sine) {
+    int samples = into.length;
+    double largest = 0;
+    for (int s = 0; s < samples; s++) {
+      double sum = 0;
+      for (int h = 1; h <= harmonics; h++) {
+        int turn = (h * s) % samples;
+        sum += re(h, unknown) * cosine[turn] - im(h, unknown) * sine[turn];
+      }
+      into[s] = sum;
+      largest = Math.max(largest, Math.abs(sum));
+    }
+    return largest;
+  }
+
+  /** Makes an output follow a wave: each harmonic's change is added through the output's column. */
+  void replace(
+      AudioTable table, int column, int node, double[] wave, double[] cosine, double[] sine) {
+    int samples = wave.length;
+    for (int h = 1; h <= harmonics; h++) {
+      double real = 0;
+      double imaginary = 0;
+      for (int s = 0; s < samples; s++) {
+        int turn = (h * s) % samples;
+        real += 2.0 / samples * wave[s] * cosine[turn];
+        imaginary -= 2.0 / samples * wave[s] * sine[turn];
+      }
+      add(table, h, column, real - re(h, node), imaginary - im(h, node));
+    }
+  }
+}

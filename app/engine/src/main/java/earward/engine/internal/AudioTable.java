@@ -1,0 +1,82 @@
+package earward.engine.internal;
+
+import earward.engine.law.AmplifierLaw;
+import earward.engine.law.DirectStage;
+
+/**
+ * How all unknowns answer to one ampere through each port, and to one volt at each amplifier
+ * output, at each harmonic of the tone. Column order: ports, then outputs.
+ */
+final class AudioTable {
+  final int harmonics;
+  final int columns;
+  private final Network network;
+  private final int size;
+  private final double[] re;
+  private final double[] im;
+
+  AudioTable(Network network, int harmonics) {
+    this.network = network;
+    this.harmonics = harmonics;
+    size = network.size;
+    columns = network.ports.size() + Outputs.count(network);
+    re = new double[(harmonics + 1) * columns * size];
+    im = new double[re.length];
+  }
+
+  /** Fills harmonics 1 and up about the DC point of the stage. */
+  boolean fill(AlternatingSolver solver, DirectStage point, double toneRadians) {
+    for (int h = 1; h <= harmonics; h++) {
+      if (!solver.audio(h * toneRadians)) {
+        return false;
+      }
+      int column = 0;
+      for (Port port : network.ports) {
+        solver.rest();
+        solver.push(port.law().anode(point), port.law().cathode(point), 1, 0);
+        solver.solve();
+        store(solver, h, column++);
+      }
+      for (AmplifierLaw amplifier : network.amplifiers) {
+        for (int k = 0; k < amplifier.branches(); k++) {
+          solver.rest();
+          solver.re[amplifier.outputBranch(k)] = 1;
+          solver.solve();
+          normalise(solver, amplifier.outputNode(point, k));
+          store(solver, h, column++);
+        }
+      }
+    }
+    return true;
+  }
+
+  /** Scales so that the output itself moves by one volt: then it is a source, whatever drove it. */
+  static void normalise(AlternatingSolver solver, int node) {
+    double real = solver.re(node);
+    double imaginary = solver.im(node);
+    double norm = real * real + imaginary * imaginary;
+    if (norm == 0) {
+      return;
+    }
+    for (int i = 0; i < solver.re.length; i++) {
+      double r = solver.re[i];
+      double m = solver.im[i];
+      solver.re[i] = (r * real + m * imaginary) / norm;
+      solver.im[i] = (m * real - r * imaginary) / norm;
+    }
+  }
+
+  private void store(AlternatingSolver solver, int harmonic, int column) {
+    int at = (harmonic * columns + column) * size;
+    System.arraycopy(solver.re, 0, re, at, size);
+    System.arraycopy(solver.im, 0, im, at, size);
+  }
+
+  double re(int harmonic, int column, int unknown) {
+    return unknown < 0 ? 0 : re[(harmonic * columns + column) * size + unknown];
+  }
+
+  double im(int harmonic, int column, int unknown) {
+    return unknown < 0 ? 0 : im[(harmonic * columns + column) * size + unknown];
+  }
+}

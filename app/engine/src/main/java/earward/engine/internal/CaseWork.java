@@ -1,0 +1,306 @@
+package earward.engine.internal;
+
+import earward.engine.Drive;
+import earward.engine.detection.CarrierSurroundings;
+import earward.engine.law.DirectStage;
+import earward.engine.law.FeedLaw;
+import earward.engine.law.LoadView;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * One case being solved: each part of the solution is worked out when a figure first asks for it.
+ * Holds all that it needs, allocated once; for one thread.
+ */
+final class CaseWork {
+  private static final int MOST_PASSES = 8;
+
+  final Network network;
+  final CasePlan plan;
+  final double[] row;
+  final DirectSolver direct;
+  final AlternatingSolver alternating;
+  final AudioTable audioTable;
+  final CarrierTable carrierTable;
+  final AudioSignal signal;
+  final Outputs outputs;
+  final SmallSignal small;
+  final @Nullable Detection detection;
+  private final double[] scratch;
+  private final double[] former;
+
+  private enum Part {
+    TO_DO,
+    DONE,
+    FAILED
+  }
+
+  private Part point = Part.TO_DO;
+  private Part carrier = Part.TO_DO;
+  private boolean warm;
+  private String trouble = "";
+
+  CaseWork(Network network, CasePlan plan) {
+    this.network = network;
+    this.plan = plan;
+    row = new double[network.slots.all().size()];
+    direct = new DirectSolver(network);
+    alternating = new AlternatingSolver(network, direct.stage());
+    int harmonics = Detection.AUDIO_SAMPLES / 2 - 1;
+    audioTable = new AudioTable(network, harmonics);
+    carrierTable = new CarrierTable(network);
+    signal = new AudioSignal(harmonics, network.size);
+    outputs = new Outputs(network);
+    small = new SmallSignal(network.ports.size());
+    detection =
+        network.ports.isEmpty() || network.feed == null
+            ? null
+            : new Detection(network, direct.stage());
+    scratch = new double[network.size];
+    former = new double[network.size];
+  }
+
+  /** Takes over a row; everything is to be solved anew, from the solution that was kept. */
+  void begin(double[] values) {
+    plan.apply(values, row);
+    point = Part.TO_DO;
+    carrier = Part.TO_DO;
+    trouble = "";
+    signal.clear();
+    if (warm) {
+      direct.recall();
+      if (detection != null) {
+        detection.recall();
+      }
+    }
+  }
+
+  /** Makes the present solution the start of all later ones. */
+  void keep() {
+    direct.keep();
+    if (detection != null) {
+      detection.keep();
+    }
+    warm = true;
+  }
+
+  /** What did not converge, empty where all went well. */
+  String trouble() {
+    return trouble;
+  }
+
+  double peakVolts() {
+    return row[network.carrierPeak];
+  }
+
+  double depth() {
+    return row[network.depth];
+  }
+
+  double toneRadians() {
+    return 2 * Math.PI * row[network.tone];
+  }
+
+  double carrierRadians() {
+    return 2 * Math.PI * row[network.carrierHertz];
+  }
+
+  DirectStage stage() {
+    return direct.stage();
+  }
+
+  private boolean fail(String what) {
+    trouble = what;
+    return false;
+  }
+
+  /** The whole state of the case: DC, and with a drive also what it makes of DC. */
+  boolean solved() {
+    if (point == Part.TO_DO) {
+      stage()
+          .state(
+              row,
+              row[network.ambient],
+              plan.drive != Drive.UNPOWERED,
+              plan.drive == Drive.SIGNAL && detection != null);
+      alternating.stage().carrier(carrierRadians());
+      java.util.Arrays.fill(stage().signalAmperes(), 0);
+      java.util.Arrays.fill(stage().drivenAmperes(), 0);
+      java.util.Arrays.fill(outputs.outWatts, 0);
+      point = solveDrive() ? Part.DONE : Part.FAILED;
+    }
+    return point == Part.DONE;
+  }
+
+  private boolean solveDrive() {
+    if (!direct.solve()) {
+      return fail("no DC solution; it was worst at " + direct.worst());
+    }
+    return switch (plan.drive) {
+      case UNPOWERED, NO_SIGNAL -> {
+        outputs.measureHeat(stage());
+        yield true;
+      }
+      case SIGNAL -> signal();
+      case CLIPPING ->
+          loads(LoadView.RATED)
+              && (outputs.atClipping(direct) || fail("no DC solution at the edge of clipping"));
+      case ANY_DRIVE ->
+          loads(LoadView.LEAST)
+              && (outputs.atWorstHeat(direct) || fail("no DC solution at the worst drive"));
+    };
+  }
+
+  private boolean loads(LoadView view) {
+    alternating.stage().viewLoad(view, 1 - row[network.loadTolerance]);
+    boolean factored = alternating.audio(toneRadians());
+    alternating.stage().viewLoad(LoadView.AS_IT_IS, 1);
+    if (!factored) {
+      return fail("the circuit has no solution at the tone");
+    }
+    outputs.measureLoads(alternating, stage());
+    return true;
+  }
+
+  /** DC, detection and outputs in turn, until none moves the others. */
+  private boolean signal() {
+    for (int pass = 0; pass < MOST_PASSES; pass++) {
+      System.arraycopy(stage().solution(), 0, former, 0, former.length);
+      if (!loads(LoadView.AS_IT_IS)
+          || !audioTable.fill(alternating, stage(), toneRadians())
+          || !detect(pass == 0)) {
+        return trouble.isEmpty() ? fail("the circuit has no solution at the tone") : false;
+      }
+      signal.clear();
+      if (detection != null) {
+        gather(detection);
+      }
+      outputs.clip(audioTable, signal, stage());
+      outputs.measureSignal(signal, stage());
+      if (!direct.solve()) {
+        return fail("no DC solution; it was worst at " + direct.worst());
+      }
+      if (settled()) {
+        break;
+      }
+    }
+    outputs.measureHeat(stage());
+    return true;
+  }
+
+  private boolean settled() {
+    double[] now = stage().solution();
+    for (int i = 0; i < network.nodes; i++) {
+      if (Math.abs(now[i] - former[i]) > 1e-10 + 1e-9 * Math.abs(now[i])) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private boolean detect(boolean first) {
+    FeedLaw feed = network.feed;
+    if (feed == null) {
+      return true;
+    }
+    if (detection == null) {
+      return true;
+    }
+    detection.direct(direct, scratch);
+    detection.audio(audioTable, stage());
+    if (first && !tune(detection, feed)) {
+      return false;
+    }
+    if (!detection.solveModulated(peakVolts(), depth(), toneRadians())) {
+      return fail("the detector's cycle did not settle");
+    }
+    for (int j = 0; j < network.ports.size(); j++) {
+      stage().drivenAmperes()[j] = detection.modulated.audioReal[j];
+    }
+    return true;
+  }
+
+  /** Carrier impedances, and the winding peaked at this case's carrier. */
+  private boolean tune(Detection parts, FeedLaw feed) {
+    if (!carrierTable.fill(alternating, stage(), feed, carrierRadians(), parts.around)) {
+      return fail("the circuit has no solution at the carrier");
+    }
+    parts.around.detuningRadians = 0;
+    if (feed.tuned()) {
+      double shift = parts.peak(peakVolts());
+      if (Double.isNaN(shift)) {
+        return fail("the detector did not settle while its winding was peaked");
+      }
+      parts.around.detuningRadians = shift - feed.detuningRadians(stage());
+    }
+    return true;
+  }
+
+  private void gather(Detection parts) {
+    int ports = network.ports.size();
+    for (int h = 1; h <= signal.harmonics; h++) {
+      for (int j = 0; j < ports; j++) {
+        signal.add(
+            audioTable,
+            h,
+            j,
+            parts.modulated.audioReal[h * ports + j],
+            parts.modulated.audioImaginary[h * ports + j]);
+      }
+    }
+  }
+
+  /** The same case with the carrier unmodulated; surroundings as {@link #solved} left them. */
+  boolean carrierSolved() {
+    if (carrier == Part.TO_DO) {
+      carrier = solveCarrier() ? Part.DONE : Part.FAILED;
+    }
+    return carrier == Part.DONE;
+  }
+
+  private boolean solveCarrier() {
+    if (detection == null || network.feed == null || plan.drive != Drive.SIGNAL || !ready()) {
+      return false;
+    }
+    return detection.solveCarrier(peakVolts())
+        || fail("the detector did not settle on the bare carrier");
+  }
+
+  /**
+   * Enough for the unmodulated carrier: the whole state where a figure has asked for it, else DC
+   * and carrier alone, which is all that a scan for the clipping depth needs.
+   */
+  private boolean ready() {
+    if (point != Part.TO_DO || detection == null || network.feed == null) {
+      return point == Part.DONE;
+    }
+    stage().state(row, row[network.ambient], true, true);
+    alternating.stage().carrier(carrierRadians());
+    java.util.Arrays.fill(stage().signalAmperes(), 0);
+    java.util.Arrays.fill(stage().drivenAmperes(), 0);
+    if (!direct.solve()) {
+      return fail("no DC solution; it was worst at " + direct.worst());
+    }
+    detection.direct(direct, scratch);
+    return tune(detection, network.feed);
+  }
+
+  /** Share of the feed's level across each port when none of the ports conducts. */
+  double[] carrierShares() {
+    FeedLaw feed = network.feed;
+    double[] shares = new double[network.ports.size()];
+    if (feed == null || detection == null) {
+      return shares;
+    }
+    stage().state(row, row[network.ambient], true, true);
+    alternating.stage().carrier(carrierRadians());
+    CarrierSurroundings around = detection.around;
+    if (direct.solve() && carrierTable.fill(alternating, stage(), feed, carrierRadians(), around)) {
+      double held =
+          feed.tuned() ? 1 / (1 + Math.max(0, around.tankOhms * around.loadRealSiemens)) : 1;
+      for (int i = 0; i < shares.length; i++) {
+        shares[i] = held * Math.hypot(around.transferReal[i], around.transferImaginary[i]);
+      }
+    }
+    return shares;
+  }
+}

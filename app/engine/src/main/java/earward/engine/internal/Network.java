@@ -1,0 +1,129 @@
+package earward.engine.internal;
+
+import earward.engine.Circuit;
+import earward.engine.Probe;
+import earward.engine.Seam;
+import earward.engine.Slot;
+import earward.engine.law.AmplifierLaw;
+import earward.engine.law.FeedLaw;
+import earward.engine.law.Law;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+
+/** The structure of a circuit: nodes, laws, ports, slots. Immutable once built; shared. */
+public final class Network {
+  final Circuit circuit;
+  final Slots slots;
+  final int nodes;
+  final int size;
+  final List<Law> laws;
+  final Map<String, Law> lawOf = new HashMap<>();
+  final List<Port> ports;
+  final List<AmplifierLaw> amplifiers = new ArrayList<>();
+  final int diodes;
+  final @Nullable FeedLaw feed;
+  final int[] probePlus;
+  final int[] probeMinus;
+  final int[] probeMeter;
+  final int[] seamBefore;
+  final int[] seamAfter;
+  final int firstSeamBranch;
+  final int carrierHertz;
+  final int carrierPeak;
+  final int depth;
+  final int tone;
+  final int ambient;
+  final int loadTolerance;
+  private final Map<String, Integer> nodeOf;
+  private final String[] names;
+
+  Network(NetworkBuilder from) {
+    circuit = from.circuit();
+    slots = from.slots();
+    nodeOf = Map.copyOf(from.nodeOf());
+    nodes = nodeOf.size();
+    size = from.size();
+    laws = List.copyOf(from.laws());
+    laws.forEach(law -> lawOf.put(law.seat().name(), law));
+    ports = List.copyOf(from.ports());
+    diodes = from.diodes();
+    feed = from.feed();
+    for (Law law : laws) {
+      if (law instanceof AmplifierLaw amplifier) {
+        amplifiers.add(amplifier);
+      }
+    }
+    firstSeamBranch = size - circuit.seams().size();
+    names = new String[size];
+    nodeOf.forEach((name, node) -> names[node] = name);
+    probePlus = new int[circuit.probes().size()];
+    probeMinus = new int[circuit.probes().size()];
+    probeMeter = new int[circuit.probes().size()];
+    for (int i = 0; i < probePlus.length; i++) {
+      Probe probe = circuit.probes().get(i);
+      probePlus[i] = node(probe.plus());
+      probeMinus[i] = node(probe.minus());
+      probeMeter[i] = slots.of(probe.name() + ":meter-siemens");
+    }
+    seamBefore = circuit.seams().stream().map(Seam::before).mapToInt(this::node).toArray();
+    seamAfter = circuit.seams().stream().map(Seam::after).mapToInt(this::node).toArray();
+    carrierHertz = slots.of(Slot.CARRIER_HERTZ);
+    carrierPeak = slots.of(Slot.CARRIER_PEAK_VOLTS);
+    depth = slots.of(Slot.DEPTH);
+    tone = slots.of(Slot.TONE_HERTZ);
+    ambient = slots.of(Slot.AMBIENT_CELSIUS);
+    loadTolerance = slots.of(Slot.LOAD_TOLERANCE);
+  }
+
+  /** Its values. */
+  public Slots slots() {
+    return slots;
+  }
+
+  /** Index of a node, −1 for ground. */
+  int node(String name) {
+    if (name.equals(Circuit.GROUND)) {
+      return -1;
+    }
+    Integer node = nodeOf.get(name);
+    if (node == null) {
+      throw new IllegalArgumentException("there is no node '" + name + "'");
+    }
+    return node;
+  }
+
+  boolean hasNode(String name) {
+    return name.equals(Circuit.GROUND) || nodeOf.containsKey(name);
+  }
+
+  /**
+   * The two nodes of a probe, or a node and ground.
+   *
+   * @throws IllegalArgumentException when there is no such place
+   */
+  int[] place(String place) {
+    for (int i = 0; i < probePlus.length; i++) {
+      if (circuit.probes().get(i).name().equals(place)) {
+        return new int[] {probePlus[i], probeMinus[i]};
+      }
+    }
+    return new int[] {node(place), -1};
+  }
+
+  /** Which part or node an unknown belongs to, for messages. */
+  String nameOf(int unknown) {
+    if (unknown < nodes) {
+      return "node '" + names[unknown] + "'";
+    }
+    for (Law law : laws) {
+      int first = law.seat().firstBranch();
+      if (unknown >= first && unknown < first + law.branches()) {
+        return "part '" + law.seat().name() + "'";
+      }
+    }
+    return "seam '" + circuit.seams().get(unknown - firstSeamBranch).name() + "'";
+  }
+}

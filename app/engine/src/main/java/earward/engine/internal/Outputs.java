@@ -1,0 +1,291 @@
+package earward.engine.internal;
+
+import earward.block.law.ClippedSine;
+import earward.engine.law.AmplifierLaw;
+import earward.engine.law.DirectStage;
+
+/**
+ * What the amplifiers' outputs do in one case: clipping of a given signal, or the edge of clipping
+ * and the worst heat whatever drives them. Mutable, for one thread.
+ */
+final class Outputs {
+  private static final int SAMPLES = 128;
+  private static final double TEN_PERCENT = 0.10;
+
+  /** Shares of the clipped sine's range that are tried for the worst heat, then overdrives. */
+  private static final int SINES = 20;
+
+  private static final double[] OVERDRIVES = {1.15, 1.3, 1.6, 2, 3, 5, 10, 1e3};
+
+  private final Network network;
+  private final double tenPercentOverdrive = ClippedSine.overdriveOf(TEN_PERCENT);
+  private final double[] volts = new double[SAMPLES];
+  private final double[] amperes = new double[SAMPLES];
+  private final double[] cosine = new double[SAMPLES];
+  private final double[] sine = new double[SAMPLES];
+
+  /** Power that leaves each amplifier, in W. */
+  final double[] outWatts;
+
+  final double[] clipWatts;
+  final double[] tenPercentWatts;
+  final double[] peakAmperes;
+  final double[] overloadDecibels;
+
+  /** Impedance that each output (both of a bridge together) works into. */
+  final double[] loadRe;
+
+  final double[] loadIm;
+
+  /** Heat of each amplifier, in W. */
+  final double[] heatWatts;
+
+  Outputs(Network network) {
+    this.network = network;
+    int count = network.amplifiers.size();
+    outWatts = new double[count];
+    clipWatts = new double[count];
+    tenPercentWatts = new double[count];
+    peakAmperes = new double[count];
+    overloadDecibels = new double[count];
+    loadRe = new double[count];
+    loadIm = new double[count];
+    heatWatts = new double[count];
+    for (int s = 0; s < SAMPLES; s++) {
+      cosine[s] = Math.cos(2 * Math.PI * s / SAMPLES);
+      sine[s] = Math.sin(2 * Math.PI * s / SAMPLES);
+    }
+  }
+
+  /** How many outputs all amplifiers have together. */
+  static int count(Network network) {
+    return network.amplifiers.stream().mapToInt(AmplifierLaw::branches).sum();
+  }
+
+  /** Impedances at the outputs, from a solver that is factored at the tone. */
+  void measureLoads(AlternatingSolver solver, DirectStage point) {
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      int a = amplifier.ordinal();
+      solver.rest();
+      solver.re[amplifier.outputBranch(0)] = 1;
+      boolean bridge = amplifier.branches() == 2;
+      if (bridge) {
+        solver.re[amplifier.outputBranch(1)] = -1;
+      }
+      solver.solve();
+      int plus = amplifier.outputNode(point, 0);
+      int minus = bridge ? amplifier.outputNode(point, 1) : -1;
+      double vr = solver.re(plus) - solver.re(minus);
+      double vi = solver.im(plus) - solver.im(minus);
+      double ir = solver.re(amplifier.outputBranch(0));
+      double ii = solver.im(amplifier.outputBranch(0));
+      double norm = ir * ir + ii * ii;
+      loadRe[a] = norm == 0 ? Double.POSITIVE_INFINITY : (vr * ir + vi * ii) / norm;
+      loadIm[a] = norm == 0 ? 0 : (vi * ir - vr * ii) / norm;
+    }
+  }
+
+  /**
+   * Clips a signal at each output and adds what clipping does to the unknowns' harmonics.
+   *
+   * @param signal harmonics of all unknowns, changed in place
+   */
+  void clip(AudioTable table, AudioSignal signal, DirectStage point) {
+    int column = network.ports.size();
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      int a = amplifier.ordinal();
+      double ohms = Math.hypot(loadRe[a], loadIm[a]);
+      double wanted = 0;
+      double limit = Double.POSITIVE_INFINITY;
+      for (int k = 0; k < amplifier.branches(); k++) {
+        int node = amplifier.outputNode(point, k);
+        double up = limited(amplifier, point, k, ohms, true);
+        double down = limited(amplifier, point, k, ohms, false);
+        double peak = signal.wave(node, volts, cosine, sine);
+        wanted = Math.max(wanted, peak);
+        limit = Math.min(limit, Math.min(up, down));
+        if (peak > Math.min(up, down)) {
+          clipWave(up, down);
+          signal.replace(table, column + k, node, volts, cosine, sine);
+        }
+      }
+      overloadDecibels[a] = 20 * Math.log10(wanted / limit);
+      column += amplifier.branches();
+    }
+  }
+
+  private void clipWave(double up, double down) {
+    for (int s = 0; s < SAMPLES; s++) {
+      volts[s] = Math.max(-down, Math.min(up, volts[s]));
+    }
+  }
+
+  /** The limit L of one output that allows for its own current: L = swing(L/|Z|). */
+  private static double limited(
+      AmplifierLaw amplifier, DirectStage point, int k, double ohms, boolean up) {
+    double differential = amplifier.branches();
+    double none = swing(amplifier, point, k, 0, up);
+    double perAmpere = none - swing(amplifier, point, k, 1e-3, up);
+    return none / (1 + perAmpere / 1e-3 * differential / ohms);
+  }
+
+  private static double swing(
+      AmplifierLaw amplifier, DirectStage point, int k, double peakAmperes, boolean up) {
+    return up
+        ? amplifier.swingUpVolts(point, k, peakAmperes)
+        : amplifier.swingDownVolts(point, k, peakAmperes);
+  }
+
+  /** What the signal takes from the supply, and what leaves, from the harmonics of the unknowns. */
+  void measureSignal(AudioSignal signal, DirectStage point) {
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      int a = amplifier.ordinal();
+      double drawn = 0;
+      double leaving = 0;
+      double peak = 0;
+      for (int k = 0; k < amplifier.branches(); k++) {
+        peak = Math.max(peak, signal.wave(amplifier.outputBranch(k), amperes, cosine, sine));
+        double unused = signal.wave(amplifier.outputNode(point, k), volts, cosine, sine);
+        for (int s = 0; s < SAMPLES; s++) {
+          drawn += Math.max(0, amperes[s]) / SAMPLES;
+          leaving += volts[s] * amperes[s] / SAMPLES;
+        }
+        assert unused >= 0;
+      }
+      point.signalAmperes()[a] = drawn;
+      outWatts[a] = leaving;
+      peakAmperes[a] = peak;
+    }
+  }
+
+  /** Heat of all amplifiers at the present point. */
+  void measureHeat(DirectStage point) {
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      heatWatts[amplifier.ordinal()] = amplifier.watts(point) - outWatts[amplifier.ordinal()];
+    }
+  }
+
+  /** A sine at the edge of clipping, with its sag; and the power at 10 % distortion. */
+  boolean atClipping(DirectSolver direct) {
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      int a = amplifier.ordinal();
+      if (Double.isNaN(settle(direct, amplifier, 1, tenPercentOverdrive))) {
+        return false;
+      }
+      tenPercentWatts[a] = outWatts[a];
+      double peak = settle(direct, amplifier, 1, 1);
+      if (Double.isNaN(peak)) {
+        return false;
+      }
+      clipWatts[a] = outWatts[a];
+      peakAmperes[a] = peak;
+    }
+    measureHeat(direct.stage());
+    return true;
+  }
+
+  /** The drive that heats most, from a small sine to a square wave; leaves the point there. */
+  boolean atWorstHeat(DirectSolver direct) {
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      double most = -1;
+      double share = 1;
+      double overdrive = 1;
+      for (int i = 0; i <= SINES + OVERDRIVES.length; i++) {
+        double s = i <= SINES ? i / (double) SINES : 1;
+        double o = i <= SINES ? 1 : OVERDRIVES[i - SINES - 1];
+        if (Double.isNaN(settle(direct, amplifier, s, o))) {
+          return false;
+        }
+        double heat = amplifier.watts(direct.stage()) - outWatts[amplifier.ordinal()];
+        if (heat > most) {
+          most = heat;
+          share = s;
+          overdrive = o;
+        }
+      }
+      double unused = settle(direct, amplifier, share, overdrive);
+      assert !Double.isNaN(unused);
+    }
+    measureHeat(direct.stage());
+    return true;
+  }
+
+  /**
+   * Finds the output current at which swing and sag agree, by false position between nothing and
+   * what a stiff supply would give. The bypass keeps the rail at its mean over a cycle.
+   *
+   * @param share of the range between rest and clipping
+   * @param overdrive drive over clip level; 1 for a sine
+   * @return peak current in A, NaN where DC has no solution
+   */
+  private double settle(
+      DirectSolver direct, AmplifierLaw amplifier, double share, double overdrive) {
+    int a = amplifier.ordinal();
+    double ohms = Math.hypot(loadRe[a], loadIm[a]);
+    double low = 0;
+    double excessLow = excess(direct, amplifier, 0, share, overdrive, ohms);
+    if (Double.isNaN(excessLow) || Double.isInfinite(ohms)) {
+      outWatts[a] = 0;
+      return excessLow;
+    }
+    double high = share * peakVolts(amplifier, direct.stage(), 0) / ohms;
+    double excessHigh = excess(direct, amplifier, high, share, overdrive, ohms);
+    double peak = high;
+    for (int i = 0; i < 40 && high - low > 1e-9 * high; i++) {
+      if (Double.isNaN(excessHigh)) {
+        return Double.NaN;
+      }
+      peak = low + (high - low) * excessLow / (excessLow - excessHigh);
+      double here = excess(direct, amplifier, peak, share, overdrive, ohms);
+      if (Math.abs(here) < 1e-9 * (1 + excessLow)) {
+        break;
+      }
+      if (here > 0) {
+        low = peak;
+        excessLow = here;
+        excessHigh /= 2;
+      } else {
+        high = peak;
+        excessHigh = here;
+        excessLow /= 2;
+      }
+    }
+    double fraction = loadRe[a] / ohms;
+    outWatts[a] =
+        0.5 * peak * peak * ohms * fraction * ClippedSine.powerRatio(Math.max(1, overdrive));
+    return peak;
+  }
+
+  /** Swing that the supply allows at a current, less what the current makes of the load, in V. */
+  private double excess(
+      DirectSolver direct,
+      AmplifierLaw amplifier,
+      double peak,
+      double share,
+      double overdrive,
+      double ohms) {
+    DirectStage stage = direct.stage();
+    stage.signalAmperes()[amplifier.ordinal()] =
+        amplifier.branches() * peak * halfWaveMean(overdrive);
+    if (!direct.solve()) {
+      return Double.NaN;
+    }
+    return share * peakVolts(amplifier, stage, peak) - peak * ohms;
+  }
+
+  /** Mean of one half wave of a clipped sine over the whole cycle, over the clip level. */
+  private static double halfWaveMean(double overdrive) {
+    double angle = Math.asin(1 / overdrive);
+    return (overdrive * (1 - Math.cos(angle)) + Math.PI / 2 - angle) / Math.PI;
+  }
+
+  /** Peak across the load at the edge of clipping, in V. */
+  private static double peakVolts(AmplifierLaw amplifier, DirectStage stage, double peak) {
+    double least = Double.POSITIVE_INFINITY;
+    for (int k = 0; k < amplifier.branches(); k++) {
+      least = Math.min(least, amplifier.swingUpVolts(stage, k, peak));
+      least = Math.min(least, amplifier.swingDownVolts(stage, k, peak));
+    }
+    return least * amplifier.branches();
+  }
+}

@@ -1,0 +1,96 @@
+package earward.engine.internal;
+
+import earward.block.check.Finding;
+import earward.block.check.Severity;
+import earward.block.figure.CaseName;
+import earward.engine.Response;
+import earward.engine.SolveOutcome;
+import java.util.ArrayList;
+import java.util.List;
+
+/** All cases of a plan, ready to be solved again and again by one thread. */
+public final class Run {
+  private static final SolveOutcome WELL = new SolveOutcome(true, List.of());
+
+  private final Plan plan;
+  private final CaseWork[] works;
+  private boolean prepared;
+
+  /** Room for a plan. */
+  public Run(Plan plan) {
+    this.plan = plan;
+    works =
+        plan.cases.stream().map(each -> new CaseWork(plan.network, each)).toArray(CaseWork[]::new);
+  }
+
+  /** Solves a row; every solve starts from the nominal kit's solution. */
+  public SolveOutcome solve(double[] values, double[] figures) {
+    if (!prepared) {
+      prepare(figures);
+    }
+    return read(values, figures);
+  }
+
+  private void prepare(double[] figures) {
+    double[] nominal = plan.slots().all().stream().mapToDouble(s -> s.nominal()).toArray();
+    var unused = read(nominal, figures);
+    for (CaseWork work : works) {
+      if (work.trouble().isEmpty()) {
+        work.keep();
+      }
+    }
+    prepared = true;
+  }
+
+  private SolveOutcome read(double[] values, double[] figures) {
+    for (CaseWork work : works) {
+      work.begin(values);
+    }
+    for (int i = 0; i < figures.length; i++) {
+      figures[i] = plan.readings[i].of(works[plan.caseOf[i]]);
+    }
+    boolean well = true;
+    for (CaseWork work : works) {
+      well &= work.trouble().isEmpty();
+    }
+    return well ? WELL : troubled();
+  }
+
+  private SolveOutcome troubled() {
+    List<Finding> findings = new ArrayList<>();
+    for (CaseWork work : works) {
+      if (!work.trouble().isEmpty()) {
+        String name = work.plan.name.text();
+        findings.add(
+            Finding.of(
+                Severity.STOP,
+                "no-solution",
+                name,
+                "The kit could not be solved in the case '" + name + "': " + work.trouble() + "."));
+      }
+    }
+    return new SolveOutcome(false, findings);
+  }
+
+  /** The small-signal response at a place, per volt of the recovered envelope's drive. */
+  public Response response(double[] values, CaseName caseName, String place, double[] hertz) {
+    List<Response.Point> points = new ArrayList<>();
+    for (CaseWork work : works) {
+      if (work.plan.name.equals(caseName)) {
+        work.begin(values);
+        int[] nodes = plan.network.place(place);
+        for (double each : hertz) {
+          if (work.solved() && SmallResponse.at(work, each)) {
+            double scale = 1 / work.peakVolts();
+            points.add(
+                new Response.Point(
+                    each,
+                    scale * (work.alternating.re(nodes[0]) - work.alternating.re(nodes[1])),
+                    scale * (work.alternating.im(nodes[0]) - work.alternating.im(nodes[1]))));
+          }
+        }
+      }
+    }
+    return new Response(points);
+  }
+}

@@ -1,0 +1,139 @@
+package earward.engine.law;
+
+import earward.block.device.DiodeMaterial;
+import earward.block.device.TransistorModel;
+
+/**
+ * A bipolar transistor by Ebers and Moll (1954), transport form, with Early's factor; terminals
+ * COLLECTOR, BASE, EMITTER. One ohm stands between base lead and inner base, whose voltage is an
+ * unknown of its own.
+ */
+final class BipolarLaw extends Law {
+  private static final double BASE_SIEMENS = 1;
+
+  /** Beyond this exponent the law goes on along its tangent. */
+  private static final double MOST_EXPONENT = 60;
+
+  private final TransistorModel model;
+  private final double sign;
+
+  BipolarLaw(Seat seat, TransistorModel model) {
+    super(seat);
+    this.model = model;
+    this.sign = model.pnp() ? -1 : 1;
+  }
+
+  @Override
+  public int branches() {
+    return 1;
+  }
+
+  private double saturation(DirectStage stage) {
+    return value(stage, 0) * Temperature.saturationRatio(DiodeMaterial.SILICON, 1, stage.celsius());
+  }
+
+  private static double exponential(double exponent) {
+    return exponent <= MOST_EXPONENT
+        ? Math.exp(exponent)
+        : Math.exp(MOST_EXPONENT) * (1 + exponent - MOST_EXPONENT);
+  }
+
+  private double forward(DirectStage stage, int[] nodes) {
+    return sign * (stage.branch(branch(0)) - stage.volts(nodes[2]));
+  }
+
+  private double backward(DirectStage stage, int[] nodes) {
+    return sign * (stage.branch(branch(0)) - stage.volts(nodes[0]));
+  }
+
+  /** Early's factor 1 + vce/Va, not below a tenth. */
+  private double early(DirectStage stage, int[] nodes) {
+    double across = sign * (stage.volts(nodes[0]) - stage.volts(nodes[2]));
+    return Math.max(0.1, 1 + across / model.earlyVolts());
+  }
+
+  @Override
+  void stampDirect(DirectStage stage, int[] nodes) {
+    double thermal = Temperature.thermalVolts(stage.celsius());
+    double saturation = saturation(stage);
+    double gain = value(stage, 1);
+    double early = early(stage, nodes);
+    int base = branch(0);
+    double towards = saturation * (exponential(forward(stage, nodes) / thermal) - 1);
+    double back = saturation * (exponential(backward(stage, nodes) / thermal) - 1);
+    stage.conductance(nodes[1], base, BASE_SIEMENS);
+    stage.current(base, nodes[2], sign * towards / gain);
+    stage.current(base, nodes[0], sign * back / model.reverseGain());
+    stage.current(nodes[0], nodes[2], sign * (towards - back) * early);
+    double byForward = forwardSlope(saturation, stage, nodes, thermal);
+    double byBackward = backwardSlope(saturation, stage, nodes, thermal);
+    slope(stage, base, nodes[2], base, nodes[2], byForward / gain);
+    slope(stage, base, nodes[0], base, nodes[0], byBackward / model.reverseGain());
+    slope(stage, nodes[0], nodes[2], base, nodes[2], byForward * early);
+    slope(stage, nodes[0], nodes[2], base, nodes[0], -byBackward * early);
+    slope(stage, nodes[0], nodes[2], nodes[0], nodes[2], (towards - back) / model.earlyVolts());
+  }
+
+  private double forwardSlope(double saturation, DirectStage stage, int[] nodes, double thermal) {
+    double exponent = Math.min(MOST_EXPONENT, forward(stage, nodes) / thermal);
+    return saturation / thermal * Math.exp(exponent);
+  }
+
+  private double backwardSlope(double saturation, DirectStage stage, int[] nodes, double thermal) {
+    double exponent = Math.min(MOST_EXPONENT, backward(stage, nodes) / thermal);
+    return saturation / thermal * Math.exp(exponent);
+  }
+
+  private static void slope(
+      DirectStage stage, int from, int to, int plus, int minus, double siemens) {
+    stage.currentSlope(from, to, plus, siemens);
+    stage.currentSlope(from, to, minus, -siemens);
+  }
+
+  @Override
+  public void limit(DirectStage stage, double[] proposal) {
+    int[] nodes = nodes(stage);
+    double emitter = nodes[2] < 0 ? 0 : proposal[nodes[2]];
+    double thermal = Temperature.thermalVolts(stage.celsius());
+    double from = forward(stage, nodes);
+    double to = sign * (proposal[branch(0)] - emitter);
+    double knee = thermal * Math.log(thermal / saturation(stage));
+    if (to > knee && to - from > 2 * thermal) {
+      double start = Math.max(from, knee);
+      double limited = start + thermal * Math.log1p((to - start) / thermal);
+      proposal[branch(0)] = emitter + sign * limited;
+    }
+  }
+
+  @Override
+  void stampAlternating(AlternatingStage stage, int[] nodes) {
+    DirectStage point = stage.point();
+    double thermal = Temperature.thermalVolts(point.celsius());
+    double saturation = saturation(point);
+    double early = early(point, nodes);
+    int base = branch(0);
+    double byForward = forwardSlope(saturation, point, nodes, thermal);
+    double byBackward = backwardSlope(saturation, point, nodes, thermal);
+    double output = amperes(point) * sign / early / model.earlyVolts();
+    stage.admittance(nodes[1], base, BASE_SIEMENS, 0);
+    stage.admittance(base, nodes[2], byForward / value(point, 1), 0);
+    stage.admittance(base, nodes[0], byBackward / model.reverseGain(), 0);
+    stage.transconductance(nodes[0], nodes[2], base, (byForward - byBackward) * early, 0);
+    stage.transconductance(nodes[0], nodes[2], nodes[2], -byForward * early - output, 0);
+    stage.transconductance(nodes[0], nodes[2], nodes[0], byBackward * early + output, 0);
+  }
+
+  /** Current from collector to emitter, without the base's. */
+  @Override
+  public double amperes(DirectStage stage) {
+    if (isOpen(stage)) {
+      return 0;
+    }
+    int[] nodes = nodes(stage);
+    double thermal = Temperature.thermalVolts(stage.celsius());
+    double saturation = saturation(stage);
+    double towards = exponential(forward(stage, nodes) / thermal);
+    double back = exponential(backward(stage, nodes) / thermal);
+    return sign * saturation * (towards - back) * early(stage, nodes);
+  }
+}

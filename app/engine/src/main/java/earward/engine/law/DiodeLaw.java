@@ -1,0 +1,130 @@
+package earward.engine.law;
+
+import earward.block.device.DiodeModel;
+import earward.engine.detection.JunctionLaw;
+
+/**
+ * A diode: series resistance, then the junction, with an unknown for the voltage between them. One
+ * that the carrier drives stands as a source of its mean current while the carrier is on, and as
+ * nothing at all to audio and carrier: its cycle is solved apart.
+ */
+public final class DiodeLaw extends Law {
+  /** What stands for no series resistance, in Ω. */
+  private static final double LEAST_OHMS = 1e-3;
+
+  private final DiodeModel model;
+  private final int ordinal;
+  private final int driven;
+
+  DiodeLaw(Seat seat, DiodeModel model, int ordinal, int driven) {
+    super(seat);
+    this.model = model;
+    this.ordinal = ordinal;
+    this.driven = driven;
+  }
+
+  @Override
+  public int branches() {
+    return 1;
+  }
+
+  /** Place among the carrier-driven devices, −1 for one that is not driven. */
+  public int driven() {
+    return driven;
+  }
+
+  /** Place among all diodes. */
+  public int ordinal() {
+    return ordinal;
+  }
+
+  /** Node of the anode as fitted. */
+  public int anode(DirectStage stage) {
+    return nodes(stage)[0];
+  }
+
+  /** Node of the cathode as fitted. */
+  public int cathode(DirectStage stage) {
+    return nodes(stage)[1];
+  }
+
+  /** Series resistance, in Ω. */
+  public double seriesOhms(DirectStage stage) {
+    return Math.max(LEAST_OHMS, value(stage, 2));
+  }
+
+  @Override
+  public void prepare(DirectStage stage) {
+    double emission = value(stage, 1);
+    boolean open = isOpen(stage);
+    double ratio = Temperature.saturationRatio(model.material(), emission, stage.celsius());
+    stage
+        .junction(ordinal)
+        .set(
+            (open ? 1e-18 : value(stage, 0)) * ratio,
+            emission * Temperature.thermalVolts(stage.celsius()),
+            open ? 0 : value(stage, 4),
+            open ? 0 : value(stage, 3),
+            model.builtInVolts(),
+            model.gradingExponent(),
+            model.breakdownVolts());
+  }
+
+  private boolean apart(DirectStage stage) {
+    return driven >= 0 && stage.detecting();
+  }
+
+  @Override
+  void stampDirect(DirectStage stage, int[] nodes) {
+    if (apart(stage)) {
+      stage.current(nodes[0], nodes[1], stage.drivenAmperes()[driven]);
+      stage.term(branch(0), branch(0), 1);
+      return;
+    }
+    JunctionLaw junction = stage.junction(ordinal);
+    double volts = stage.branch(branch(0)) - stage.volts(nodes[1]);
+    stage.conductance(nodes[0], branch(0), 1 / seriesOhms(stage));
+    stage.current(branch(0), nodes[1], junction.current(volts));
+    double slope = junction.conductance(volts);
+    stage.currentSlope(branch(0), nodes[1], branch(0), slope);
+    stage.currentSlope(branch(0), nodes[1], nodes[1], -slope);
+  }
+
+  @Override
+  public void limit(DirectStage stage, double[] proposal) {
+    if (apart(stage) || isOpen(stage)) {
+      return;
+    }
+    int cathode = cathode(stage);
+    double from = stage.branch(branch(0)) - stage.volts(cathode);
+    double base = cathode < 0 ? 0 : proposal[cathode];
+    proposal[branch(0)] = base + stage.junction(ordinal).limited(from, proposal[branch(0)] - base);
+  }
+
+  @Override
+  void stampAlternating(AlternatingStage stage, int[] nodes) {
+    DirectStage point = stage.point();
+    if (apart(point)) {
+      stage.add(branch(0), branch(0), 1, 0);
+      return;
+    }
+    JunctionLaw junction = point.junction(ordinal);
+    double volts = point.branch(branch(0)) - point.volts(nodes[1]);
+    stage.admittance(nodes[0], branch(0), 1 / seriesOhms(point), 0);
+    stage.admittance(
+        branch(0),
+        nodes[1],
+        junction.conductance(volts),
+        stage.omega() * junction.capacitance(volts));
+  }
+
+  @Override
+  public double amperes(DirectStage stage) {
+    if (apart(stage)) {
+      return stage.drivenAmperes()[driven];
+    }
+    return isOpen(stage)
+        ? 0
+        : stage.junction(ordinal).current(stage.branch(branch(0)) - stage.volts(cathode(stage)));
+  }
+}

@@ -1,0 +1,29 @@
+package earward.engine.law;
+
+/**
+ * What brings the carrier. At the carrier itself its held quantity is given as one volt: the e.m.f.
+ * of an untuned feed, the winding's voltage of a tuned one.
+ */
+public abstract class FeedLaw extends Law {
+  FeedLaw(Seat seat) {
+    super(seat);
+  }
+
+  /** Whether the held quantity is the voltage of a resonant winding. */
+  public abstract boolean tuned();
+
+  /** Adds the right-hand side of one held volt. */
+  public abstract void hold(double[] sideRe, DirectStage point);
+
+  /** Branch whose current the held winding gives; −1 for an untuned feed. */
+  public abstract int heldBranch();
+
+  /** Rp of a tuned feed, in Ω; NaN for an untuned one. */
+  public abstract double tankOhms(DirectStage point);
+
+  /** C of a tuned feed, in F, at the carrier in rad/s; NaN for an untuned one. */
+  public abstract double tankFarads(DirectStage point, double carrierRadians);
+
+  /** By how much the peak lies above the carrier as the builder left it, in rad/s. */
+  public abstract double detuningRadians(DirectStage point);
+}

@@ -1,0 +1,57 @@
+package earward.engine.law;
+
+/**
+ * A loudspeaker: Z = Re + jωLe + Rm/(1 + jQms(f/fs − fs/f)), Rm = Re·Qms/Qes.
+ *
+ * <p>Source: Thiele and Small (Small 1972, direct-radiator loudspeaker system analysis).
+ */
+final class LoudspeakerLaw extends Law {
+  private static final int DC_OHMS = 0;
+  private static final int VOICE_COIL_HENRIES = 1;
+  private static final int RESONANCE_HERTZ = 2;
+  private static final int MECHANICAL_Q = 3;
+  private static final int ELECTRICAL_Q = 4;
+
+  private final double ratedOhms;
+
+  LoudspeakerLaw(Seat seat, double ratedOhms) {
+    super(seat);
+    this.ratedOhms = ratedOhms;
+  }
+
+  @Override
+  void stampDirect(DirectStage stage, int[] nodes) {
+    stage.conductance(nodes[0], nodes[1], 1 / value(stage, DC_OHMS));
+  }
+
+  @Override
+  void stampAlternating(AlternatingStage stage, int[] nodes) {
+    double dcOhms = value(stage, DC_OHMS);
+    switch (stage.load()) {
+      case RATED -> stage.admittance(nodes[0], nodes[1], 1 / ratedOhms, 0);
+      case LEAST -> stage.admittance(nodes[0], nodes[1], 1 / (dcOhms * stage.leastLoadShare()), 0);
+      case AS_IT_IS -> asItIs(stage, nodes, dcOhms);
+    }
+  }
+
+  private void asItIs(AlternatingStage stage, int[] nodes, double dcOhms) {
+    double hertz = stage.omega() / (2 * Math.PI);
+    double resonance = value(stage, RESONANCE_HERTZ);
+    double mechanicalQ = value(stage, MECHANICAL_Q);
+    double motional = dcOhms * mechanicalQ / value(stage, ELECTRICAL_Q);
+    double off = mechanicalQ * (hertz / resonance - resonance / hertz);
+    double norm = 1 + off * off;
+    stage.impedance(
+        nodes[0],
+        nodes[1],
+        dcOhms + motional / norm,
+        stage.omega() * value(stage, VOICE_COIL_HENRIES) - motional * off / norm);
+  }
+
+  @Override
+  public double amperes(DirectStage stage) {
+    return isOpen(stage)
+        ? 0
+        : (stage.volts(node(0)) - stage.volts(node(1))) / value(stage, DC_OHMS);
+  }
+}

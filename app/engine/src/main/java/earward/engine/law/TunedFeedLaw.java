@@ -1,0 +1,123 @@
+package earward.engine.law;
+
+/**
+ * Drive current into Rp ∥ L ∥ C across TOP and BOTTOM, with an ideal tap; C = Q/(ωc·Rp), L =
+ * Rp/(ωc·Q). At audio and DC only the winding counts. The primary ends are not joined to anything.
+ *
+ * <p>Branches: current out of the resonant circuit into TOP, and out of the tap.
+ */
+final class TunedFeedLaw extends FeedLaw {
+  private static final int TOP = 2;
+  private static final int TAP = 3;
+  private static final int BOTTOM = 4;
+
+  private static final int PARALLEL_OHMS = 0;
+  private static final int QUALITY = 1;
+  private static final int DETUNING = 2;
+  private static final int TAP_FRACTION = 3;
+  private static final int WINDING_OHMS = 4;
+
+  TunedFeedLaw(Seat seat) {
+    super(seat);
+  }
+
+  @Override
+  public int branches() {
+    return 2;
+  }
+
+  @Override
+  public boolean tuned() {
+    return true;
+  }
+
+  @Override
+  public void hold(double[] sideRe, DirectStage point) {
+    if (!isOpen(point)) {
+      sideRe[branch(0)] += 1;
+    }
+  }
+
+  @Override
+  public int heldBranch() {
+    return branch(0);
+  }
+
+  @Override
+  public double tankOhms(DirectStage point) {
+    return value(point, PARALLEL_OHMS);
+  }
+
+  @Override
+  public double tankFarads(DirectStage point, double carrierRadians) {
+    return value(point, QUALITY) / (carrierRadians * value(point, PARALLEL_OHMS));
+  }
+
+  @Override
+  public double detuningRadians(DirectStage point) {
+    return 2 * Math.PI * value(point, DETUNING);
+  }
+
+  @Override
+  void stampDirect(DirectStage stage, int[] nodes) {
+    double ohms = Math.max(InductorLaw.LEAST_OHMS, value(stage, WINDING_OHMS));
+    double fraction = value(stage, TAP_FRACTION);
+    stage.term(branch(0), branch(0), 1);
+    stage.term(branch(1), branch(1), 1);
+    // the share of the winding below the tap; nothing is left of it where the tap is at an end
+    double below = Math.max(InductorLaw.LEAST_OHMS, ohms * fraction);
+    double above = Math.max(InductorLaw.LEAST_OHMS, ohms * (1 - fraction));
+    stage.conductance(nodes[TOP], nodes[TAP], 1 / above);
+    stage.conductance(nodes[TAP], nodes[BOTTOM], 1 / below);
+  }
+
+  @Override
+  void stampAlternating(AlternatingStage stage, int[] nodes) {
+    if (stage.carrierHarmonic() == 0) {
+      audio(stage, nodes);
+      return;
+    }
+    double fraction = value(stage, TAP_FRACTION);
+    stage.branchCurrent(branch(0), -1, nodes[TOP]);
+    stage.branchCurrent(branch(0), nodes[BOTTOM], -1);
+    stage.branchCurrent(branch(1), -1, nodes[TAP]);
+    stage.add(nodes[TOP], branch(1), fraction, 0);
+    stage.add(nodes[BOTTOM], branch(1), 1 - fraction, 0);
+    stage.add(branch(0), nodes[TOP], 1, 0);
+    stage.add(branch(0), nodes[BOTTOM], -1, 0);
+    stage.add(branch(1), nodes[TAP], 1, 0);
+    stage.add(branch(1), nodes[BOTTOM], fraction - 1, 0);
+    stage.add(branch(1), nodes[TOP], -fraction, 0);
+    if (stage.carrierHarmonic() > 1 || stage.feedFree()) {
+      tank(stage);
+    }
+  }
+
+  /** The voltage that the circuit's own impedance takes from the current that it gives. */
+  private void tank(AlternatingStage stage) {
+    double conductance = 1 / value(stage, PARALLEL_OHMS);
+    double harmonic = stage.carrierHarmonic();
+    double susceptance = conductance * value(stage, QUALITY) * (harmonic - 1 / harmonic);
+    double norm = conductance * conductance + susceptance * susceptance;
+    stage.add(branch(0), branch(0), conductance / norm, -susceptance / norm);
+  }
+
+  private void audio(AlternatingStage stage, int[] nodes) {
+    double henries = value(stage, PARALLEL_OHMS) / (stage.carrierOmega() * value(stage, QUALITY));
+    double ohms = Math.max(InductorLaw.LEAST_OHMS, value(stage, WINDING_OHMS));
+    double reactance = stage.omega() * henries;
+    double fraction = value(stage, TAP_FRACTION);
+    stage.add(branch(0), branch(0), 1, 0);
+    stage.add(branch(1), branch(1), 1, 0);
+    double below = Math.max(InductorLaw.LEAST_OHMS, ohms * fraction);
+    double above = Math.max(InductorLaw.LEAST_OHMS, ohms * (1 - fraction));
+    stage.impedance(nodes[TOP], nodes[TAP], above, reactance * (1 - fraction));
+    stage.impedance(nodes[TAP], nodes[BOTTOM], below, reactance * fraction);
+  }
+
+  @Override
+  public double amperes(DirectStage stage) {
+    double ohms = Math.max(InductorLaw.LEAST_OHMS, value(stage, WINDING_OHMS));
+    return (stage.volts(node(TOP)) - stage.volts(node(BOTTOM))) / ohms;
+  }
+}
