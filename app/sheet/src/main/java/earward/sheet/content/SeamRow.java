@@ -1,0 +1,36 @@
+package earward.sheet.content;
+
+import java.util.Objects;
+
+/**
+ * Where two blocks meet, at the test signal.
+ *
+ * @param from name of the block on the left
+ * @param to name of the block on the right
+ * @param level audio rms there
+ * @param distortion there
+ * @param backward impedance seen towards the feed
+ * @param onward impedance seen towards the load
+ * @param loss by loading
+ * @param headroom until something limits
+ */
+public record SeamRow(
+    String from,
+    String to,
+    Amount level,
+    Amount distortion,
+    Amount backward,
+    Amount onward,
+    Amount loss,
+    Amount headroom) {
+  public SeamRow {
+    Objects.requireNonNull(from);
+    Objects.requireNonNull(to);
+    Objects.requireNonNull(level);
+    Objects.requireNonNull(distortion);
+    Objects.requireNonNull(backward);
+    Objects.requireNonNull(onward);
+    Objects.requireNonNull(loss);
+    Objects.requireNonNull(headroom);
+  }
+}
