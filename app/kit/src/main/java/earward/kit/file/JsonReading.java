@@ -43,25 +43,30 @@ final class JsonReading {
           "empty-file", fileName, Json.Place.NOWHERE, "the file is empty; wanted a JSON object");
     }
     try (JsonParser parser = FACTORY.createParser(body)) {
-      JsonReading reading = new JsonReading(fileName, parser);
-      Json tree = reading.value(parser.nextToken(), 1);
+      return new JsonReading(fileName, parser).whole();
+    } catch (JsonProcessingException e) {
+      throw DesignFileException.of(
+          "broken-json", fileName, place(e.getLocation()), said(e.getOriginalMessage()));
+    } catch (IOException e) {
+      throw new IllegalStateException("a text in memory could not be read", e);
+    }
+  }
+
+  private Json whole() throws IOException, DesignFileException {
+    try {
+      Json tree = value(parser.nextToken(), 1);
       if (parser.nextToken() != null) {
-        throw reading.broken("more follows after the end of the JSON object", reading.place());
+        throw broken("more follows after the end of the JSON object", place());
       }
       return tree;
     } catch (StreamConstraintsException e) {
       throw DesignFileException.of(
           "too-long",
           fileName,
-          place(e.getLocation()),
+          place(parser.currentLocation()),
           "a text or number here is of unusual length (a number has at most "
               + LONGEST_NUMBER_CHARACTERS
               + " digits); shorten it");
-    } catch (JsonProcessingException e) {
-      throw DesignFileException.of(
-          "broken-json", fileName, place(e.getLocation()), said(e.getOriginalMessage()));
-    } catch (IOException e) {
-      throw new IllegalStateException("a text in memory could not be read", e);
     }
   }
 
