@@ -1,18 +1,14 @@
 package earward.engine.law;
 
+import static earward.block.law.ThermalVoltage.BOLTZMANN;
+import static earward.block.law.ThermalVoltage.CHARGE;
+import static earward.block.law.ThermalVoltage.ZERO_CELSIUS;
+
 import earward.block.device.DiodeMaterial;
+import earward.block.law.ThermalVoltage;
 
 /** Thermal voltage and the movement of saturation currents with temperature. */
 public final class Temperature {
-  /** Boltzmann constant, J/K, exact (SI 2019). */
-  private static final double BOLTZMANN = 1.380649e-23;
-
-  /** Elementary charge, C, exact (SI 2019). */
-  private static final double CHARGE = 1.602176634e-19;
-
-  /** 0 °C in K, exact. */
-  private static final double ZERO_CELSIUS = 273.15;
-
   /** Temperature for which saturation currents are given, °C. */
   private static final double GIVEN_AT_CELSIUS = 25;
 
@@ -20,7 +16,7 @@ public final class Temperature {
 
   /** Vt = kT/q, in V: 25.693 mV at 25 °C. */
   public static double thermalVolts(double celsius) {
-    return BOLTZMANN * (celsius + ZERO_CELSIUS) / CHARGE;
+    return ThermalVoltage.volts(celsius);
   }
 
   /**

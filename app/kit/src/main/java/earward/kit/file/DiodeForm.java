@@ -2,32 +2,132 @@ package earward.kit.file;
 
 import earward.block.device.DiodeMaterial;
 import earward.block.device.DiodeModel;
+import earward.block.law.ThermalVoltage;
 import earward.block.quantity.Unit;
+import earward.kit.design.QuantityText;
+import earward.kit.parts.DiodeFit;
+import earward.kit.parts.DiodePoint;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 
-/** A diode's figures as a JSON object. */
+/**
+ * A diode's figures as a JSON object: given, or fitted to the typical ones of its {@code points}
+ * where no saturation current is given. Points that are limits are held against the figures.
+ */
 final class DiodeForm {
+  private static final String SATURATION = "saturation current";
+  private static final String POINTS = "points";
+  private static final double CELSIUS = 25;
+
   private DiodeForm() {}
 
   static DiodeModel read(MembersReader in, String name) throws DesignFileException {
-    double saturation = in.requiredQuantity("saturation current", Unit.AMPERE);
-    return new DiodeModel(
-        name,
-        in.choice("material", DiodeMaterial.values(), DiodeForm::key, DiodeMaterial.SILICON),
-        saturation,
-        in.quantity("least saturation current", Unit.AMPERE, saturation),
-        in.quantity("most saturation current", Unit.AMPERE, saturation),
-        in.requiredQuantity("emission coefficient", Unit.NUMBER),
-        in.quantity("series resistance", Unit.OHM, 0),
-        in.quantity("junction capacitance", Unit.FARAD, 0),
-        in.quantity("built-in voltage", Unit.VOLT, 0.5),
-        in.quantity("grading exponent", Unit.NUMBER, 0.5),
-        in.quantity("leakage resistance", Unit.OHM, Double.POSITIVE_INFINITY),
-        in.quantity("breakdown voltage", Unit.VOLT, 1000),
-        in.quantity("recovery time", Unit.SECOND, 0));
+    Optional<DiodeFit> fit = fit(in);
+    double saturation =
+        fit.isPresent()
+            ? fit.get().saturationAmperes()
+            : in.requiredQuantity(SATURATION, Unit.AMPERE);
+    DiodeModel model =
+        new DiodeModel(
+            name,
+            in.choice("material", DiodeMaterial.values(), DiodeForm::key, DiodeMaterial.SILICON),
+            saturation,
+            in.quantity("least saturation current", Unit.AMPERE, saturation),
+            in.quantity("most saturation current", Unit.AMPERE, saturation),
+            fit.isPresent()
+                ? fit.get().emissionCoefficient()
+                : in.requiredQuantity("emission coefficient", Unit.NUMBER),
+            fit.isPresent()
+                ? fit.get().seriesOhms()
+                : in.quantity("series resistance", Unit.OHM, 0),
+            in.quantity("junction capacitance", Unit.FARAD, 0),
+            in.quantity("built-in voltage", Unit.VOLT, 0.5),
+            in.quantity("grading exponent", Unit.NUMBER, 0.5),
+            in.quantity("leakage resistance", Unit.OHM, Double.POSITIVE_INFINITY),
+            in.quantity("breakdown voltage", Unit.VOLT, 1000),
+            in.quantity("recovery time", Unit.SECOND, 0));
+    requireBelowLimits(model, points(in));
+    return model;
+  }
+
+  /** The fit, where the object has points and no saturation current. */
+  static Optional<DiodeFit> fit(MembersReader in) throws DesignFileException {
+    List<DiodePoint> points = points(in);
+    if (points.isEmpty() || in.find(SATURATION).isPresent()) {
+      return Optional.empty();
+    }
+    for (String fitted : List.of("emission coefficient", "series resistance")) {
+      Optional<Json> given = in.find(fitted);
+      if (given.isPresent()) {
+        throw in.fault(
+            "given-and-fitted",
+            given.get(),
+            fitted,
+            "is given while '" + SATURATION + "' is left to the fit; wanted both or none");
+      }
+    }
+    try {
+      return Optional.of(DiodeFit.of(points));
+    } catch (IllegalArgumentException e) {
+      throw in.impossible(e);
+    }
   }
 
   static String key(DiodeMaterial material) {
     return material.name().toLowerCase(Locale.ROOT);
+  }
+
+  private static List<DiodePoint> points(MembersReader in) throws DesignFileException {
+    List<DiodePoint> points = new ArrayList<>();
+    for (Json item : in.items(POINTS)) {
+      MembersReader point = MembersReader.of(item, in.source(), "a point of " + in.what());
+      try {
+        points.add(
+            new DiodePoint(
+                point.requiredQuantity("voltage", Unit.VOLT),
+                point.requiredQuantity("current", Unit.AMPERE),
+                point.choice("meaning", Meaning.values(), Meaning::key, Meaning.TYPICAL)
+                    == Meaning.TYPICAL));
+      } catch (IllegalArgumentException e) {
+        throw point.impossible(e);
+      }
+    }
+    return points;
+  }
+
+  /** What a data sheet says of a point. */
+  private enum Meaning {
+    TYPICAL,
+    LIMIT;
+
+    String key() {
+      return name().toLowerCase(Locale.ROOT);
+    }
+  }
+
+  /** A model above its own data sheet's limit is a slip in the entry. */
+  private static void requireBelowLimits(DiodeModel model, List<DiodePoint> points) {
+    for (DiodePoint point : points) {
+      double volts =
+          model.emissionCoefficient()
+                  * ThermalVoltage.volts(CELSIUS)
+                  * Math.log1p(point.amperes() / model.saturationAmperes())
+              + point.amperes() * model.seriesOhms();
+      if (!point.typical() && point.amperes() <= DiodeFit.MOST_AMPERES && volts > point.volts()) {
+        throw new IllegalArgumentException(
+            "at "
+                + written(point.amperes(), Unit.AMPERE)
+                + " the figures give "
+                + written(volts, Unit.VOLT)
+                + "; the limit given is "
+                + written(point.volts(), Unit.VOLT));
+      }
+    }
+  }
+
+  private static String written(double number, Unit unit) {
+    return QuantityText.format(number, unit, Locale.ROOT);
   }
 }

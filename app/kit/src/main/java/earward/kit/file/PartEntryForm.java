@@ -4,6 +4,7 @@ import earward.block.device.AmplifierModel;
 import earward.block.device.PartKind;
 import earward.block.device.PartModel;
 import earward.block.device.Pin;
+import earward.kit.parts.DiodeFit;
 import earward.kit.parts.PartEntry;
 import java.util.ArrayList;
 import java.util.List;
@@ -20,15 +21,17 @@ final class PartEntryForm {
     String name = unnamed.requiredText("name");
     MembersReader in = new MembersReader(unnamed.object(), source, kind.key() + " '" + name + "'");
     PartModel model = PartForms.read(kind, in, name);
+    Optional<DiodeFit> fit = kind == PartKind.DIODE ? DiodeForm.fit(in) : Optional.empty();
     String from = in.requiredText("source");
     List<String> notes = notes(in);
+    fit.ifPresent(fitted -> notes.add(fitted.sentence()));
     String packageName = in.text("package").orElse("");
     List<Pin> pins =
         model instanceof AmplifierModel amplifier ? amplifier.pins() : PinsForm.read(in);
     requireAllKnown(in);
     try {
       return new PartEntry(
-          model, from, from.contains(MEMORY), notes, Optional.empty(), packageName, pins);
+          model, from, from.contains(MEMORY), notes, fit.map(DiodeFit::report), packageName, pins);
     } catch (IllegalArgumentException e) {
       throw in.impossible(e);
     }

@@ -184,6 +184,41 @@ class PartsFilesTest {
   }
 
   @Test
+  void aDiodeGivenByPointsIsFitted() throws Exception {
+    Files.writeString(
+        folder.resolve("diodes.json"),
+        DIODES.replace(
+            "\"saturation current\": \"1 nA\", \"emission coefficient\": 1",
+            "\"points\": ["
+                + point("10 µA", "0.163 V", "typical")
+                + ","
+                + point("0.1 mA", "0.230 V", "typical")
+                + ","
+                + point("1 mA", "0.321 V", "typical")
+                + ","
+                + point("10 mA", "0.655 V", "typical")
+                + "]"));
+    PartEntry entry = PartsFiles.read(folder).find(PartKind.DIODE, "D").orElseThrow();
+    assertThat(((DiodeModel) entry.model()).seriesOhms()).isCloseTo(30, within(0.5));
+    assertThat(entry.fit()).isPresent();
+    assertThat(entry.notes()).anyMatch(note -> note.contains("extrapolated"));
+  }
+
+  @Test
+  void aDiodeAboveItsOwnLimitIsRefused() throws Exception {
+    Files.writeString(
+        folder.resolve("diodes.json"),
+        DIODES.replace(
+            "\"source\"", "\"points\": [" + point("1 mA", "0.3 V", "limit") + "], \"source\""));
+    assertThat(fault().sentence()).contains("diode 'D'").contains("the limit given is 300");
+  }
+
+  private static String point(String current, String voltage, String meaning) {
+    return "{ \"current\": \"%s\", \"voltage\": \"%s\", \"meaning\": \"%s\" }"
+        .formatted(current, voltage, meaning);
+  }
+
+  @Test
   void aPartThatStandsInTwoFilesIsNamedWithBoth() throws Exception {
     Files.writeString(folder.resolve("a.json"), DIODES);
     Files.writeString(folder.resolve("b.json"), DIODES);
