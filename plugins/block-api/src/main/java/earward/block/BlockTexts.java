@@ -11,11 +11,21 @@ import java.util.Optional;
 import java.util.Properties;
 
 /**
- * The words of a block type: {@code texts.properties} (English) and {@code
- * texts_LANGUAGE.properties} in UTF-8 beside its class. Keys are {@code BLOCK-TYPE-ID.KEY} where
- * KEY is {@code name}, {@code help}, {@code setting.ID}, {@code setting.ID.help}, {@code
- * setting.ID.OPTION}, {@code part.ID}, {@code test-point.ID}, {@code check.CODE} or {@code
- * curve.ID}.
+ * The words of a block type: {@code texts.properties} (English) and, where there is one, {@code
+ * texts_LANGUAGE.properties}, both in UTF-8 beside its class. A key is the block type's id, a point
+ * and one of
+ *
+ * <ul>
+ *   <li>{@code name}, {@code help}: of the block;
+ *   <li>{@code setting.ID}, {@code setting.ID.help}: of each setting;
+ *   <li>{@code setting.ID.OPTION}: of each option of a choice;
+ *   <li>{@code part.ID}, {@code test-point.ID}, {@code curve.ID}: of each of these;
+ *   <li>{@code check.CODE}: one sentence with {@code {figure}} and {@code {limit}}, into which the
+ *       host puts the numbers with their units, then one that says what to do.
+ * </ul>
+ *
+ * <p>Example: {@code volume.two-resistor-pad.check.coupling-edge = The bass ends at {figure}; the
+ * band wanted goes down to {limit}. Take a larger capacitor.}
  *
  * <p>Immutable.
  */

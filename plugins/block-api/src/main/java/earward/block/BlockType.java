@@ -8,20 +8,31 @@ import java.util.Optional;
 import java.util.function.ToDoubleFunction;
 
 /**
- * One kind of block, offered by a plug-in. The jar names its types in {@code
- * META-INF/services/earward.block.BlockType}, carries {@code Block-Api-Version}, {@code Plugin-Id}
- * and {@code Plugin-Version} in its manifest, and the words in {@code texts.properties} beside the
- * class (see {@link BlockTexts}).
+ * One kind of block, offered by a plug-in: an id, a role, settings, and a description of its parts
+ * for any values of them. No solving: network, drawing, parts list and figures derive from the
+ * description.
  *
- * <p>Implementations have a public constructor without arguments, hold no state and are safe for
- * several threads.
+ * <p>A plug-in is a jar with
+ *
+ * <ul>
+ *   <li>the class, public, with a public constructor without arguments, holding no state, safe for
+ *       several threads, using nothing but the JDK and {@code earward.block};
+ *   <li>its name in {@code META-INF/services/earward.block.BlockType};
+ *   <li>its words in {@code texts.properties} beside the class (see {@link BlockTexts});
+ *   <li>{@code Block-Api-Version: 1}, {@code Plugin-Id} and {@code Plugin-Version} in its manifest.
+ * </ul>
+ *
+ * <p>The contract test of {@code block-testkit} says what is missing, in sentences.
  */
 public interface BlockType {
 
-  /** Stable and unique, role and name, for instance {@code detector.envelope-diode}. */
+  /**
+   * Stable and unique: a word for the role, a point and a name, in lower case with hyphens, for
+   * instance {@code detector.envelope-diode}. Design files and texts refer to it.
+   */
   String id();
 
-  /** What it is for. */
+  /** What it is for, and so where it may stand and which ports it has. */
   Role role();
 
   /** What the designer may set, in the order in which it is shown. */
@@ -30,6 +41,9 @@ public interface BlockType {
   /**
    * The block for these settings. Runs once per edit; must depend on nothing but its arguments.
    *
+   * @param values a value for each of {@link #settings()}, within its limits
+   * @param conditions what the kit must do, for the limits of checks
+   * @return parts, checks and curves; the same for the same arguments
    * @throws IllegalArgumentException with one sentence when the settings do not go together
    */
   BlockDescription describe(Values values, Conditions conditions);
@@ -40,8 +54,12 @@ public interface BlockType {
   }
 
   /**
-   * A judgement that no check can put as data; runs once per edit, on the nominal design.
+   * A judgement that no check can put as data; runs once per edit, on the nominal design. Prefer
+   * {@link earward.block.check.Check}: only checks are held against every kit of a batch, and only
+   * they have remedies.
    *
+   * @param values as in {@link #describe}
+   * @param conditions as in {@link #describe}
    * @param figure gives a solved figure by its local name (see {@code FigureName.parse}), NaN where
    *     there is none
    */

@@ -31,7 +31,8 @@ public record Check(
     Objects.requireNonNull(relation);
     remedies = List.copyOf(remedies);
     if (!code.matches("[a-z0-9]+(-[a-z0-9]+)*")) {
-      throw new IllegalArgumentException("'" + code + "' is no check code");
+      throw new IllegalArgumentException(
+          "'" + code + "' is no check code; wanted lower case words joined by hyphens");
     }
     if (Double.isNaN(limit)) {
       throw new IllegalArgumentException("the limit of check " + code + " is not a number");

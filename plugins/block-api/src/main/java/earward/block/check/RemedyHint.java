@@ -1,5 +1,7 @@
 package earward.block.check;
 
+import java.util.Objects;
+
 /**
  * Where a block's author would turn when a check fails: a setting of the block and a direction. The
  * host walks the preferred series from there, solves, and offers only what it has proven.
@@ -8,6 +10,13 @@ package earward.block.check;
  * @param direction which way to walk
  */
 public record RemedyHint(String settingId, Direction direction) {
+
+  public RemedyHint {
+    Objects.requireNonNull(direction);
+    if (settingId.isBlank()) {
+      throw new IllegalArgumentException("a remedy names no setting; wanted one of the block's");
+    }
+  }
 
   /** Which way the host walks. */
   public enum Direction {

@@ -7,6 +7,8 @@ import java.util.List;
  * A mains adaptor: an e.m.f. behind its internal resistance, such that its rated voltage stands at
  * its rated current.
  *
+ * <p>Terminals: PLUS, MINUS.
+ *
  * @param model its figures
  */
 public record Adaptor(AdaptorModel model) implements Device {

@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * An audio power amplifier IC as fitted.
  *
+ * <p>Terminals: those of its model's pins.
+ *
  * @param model its data
  * @param heatSinkKelvinPerWatt thermal resistance of the heat sink with its interface, above 0,
  *     infinite for none

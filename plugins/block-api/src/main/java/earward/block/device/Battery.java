@@ -7,6 +7,8 @@ import java.util.List;
  * A battery: an e.m.f. behind its internal resistance. Which state of charge holds belongs to the
  * case; the nominal parameters are those of a new one.
  *
+ * <p>Terminals: PLUS, MINUS.
+ *
  * @param model its figures
  */
 public record Battery(BatteryModel model) implements Device {

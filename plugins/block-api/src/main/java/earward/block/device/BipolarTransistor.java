@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A bipolar transistor, npn or pnp.
  *
+ * <p>Terminals: COLLECTOR, BASE, EMITTER.
+ *
  * @param model its figures
  */
 public record BipolarTransistor(TransistorModel model) implements Device {

@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A capacitor. Where the dielectric is polarised, end A is the positive one.
  *
+ * <p>Terminals: A (the positive one of a polarised type), B.
+ *
  * @param farads capacitance, above 0
  * @param dielectric what it is made of
  * @param ratedVolts rated DC voltage, above 0

@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A diode of any material. Whether the carrier drives it is found by the engine from figures.
  *
+ * <p>Terminals: ANODE, CATHODE.
+ *
  * @param model its figures
  */
 public record Diode(DiodeModel model) implements Device {

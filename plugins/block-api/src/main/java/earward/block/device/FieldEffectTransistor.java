@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A junction field-effect transistor.
  *
+ * <p>Terminals: DRAIN, GATE, SOURCE.
+ *
  * @param model its figures
  */
 public record FieldEffectTransistor(FieldEffectModel model) implements Device {

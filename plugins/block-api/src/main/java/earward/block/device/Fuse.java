@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A fuse.
  *
+ * <p>Terminals: A, B.
+ *
  * @param ratedAmperes rated current, above 0
  * @param coldOhms resistance, above 0
  */

@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * An inductor with its winding resistance.
  *
+ * <p>Terminals: A, B.
+ *
  * @param henries inductance, above 0
  * @param seriesOhms winding resistance, at least 0
  */

@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A loudspeaker, earphone or headphone.
  *
+ * <p>Terminals: A, B.
+ *
  * @param model its figures
  */
 public record Loudspeaker(LoudspeakerModel model) implements Device {

@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A moving-coil meter built into the kit, such as a tuning meter.
  *
+ * <p>Terminals: A, B.
+ *
  * @param coilOhms resistance, above 0
  * @param fullScaleAmperes current at full scale, above 0
  */

@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * An operational amplifier with one supply.
  *
+ * <p>Terminals: INPUT, INVERTING, OUTPUT, SUPPLY, GROUND.
+ *
  * @param model its figures
  */
 public record OperationalAmplifier(OpAmpModel model) implements Device {

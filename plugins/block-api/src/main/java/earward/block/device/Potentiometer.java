@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A potentiometer: one part with three ends. A trimmer is one too.
  *
+ * <p>Terminals: TOP, WIPER, BOTTOM.
+ *
  * @param trackOhms resistance from end to end, above 0
  * @param taper its law
  * @param endOhms what is left between wiper and an end at the stop, at least 0

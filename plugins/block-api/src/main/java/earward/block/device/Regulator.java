@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A three-ended series regulator.
  *
+ * <p>Terminals: INPUT, GROUND, OUTPUT.
+ *
  * @param model its figures
  */
 public record Regulator(RegulatorModel model) implements Device {

@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A resistor, by Ohm's law.
  *
+ * <p>Terminals: A, B.
+ *
  * @param ohms resistance, above 0
  * @param ratedWatts dissipation that it bears, above 0
  */

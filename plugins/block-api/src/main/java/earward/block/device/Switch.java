@@ -6,6 +6,8 @@ import java.util.List;
 /**
  * A switch, or the switching contact of a jack.
  *
+ * <p>Terminals: A, B.
+ *
  * @param closed whether it is closed in use
  * @param contactOhms resistance when closed, above 0
  */

@@ -6,7 +6,9 @@ public enum Terminal {
   A,
   /** Second end of a two-ended part. */
   B,
+  /** Of a diode: where current goes in when it conducts. */
   ANODE,
+  /** Of a diode: the end with the ring. */
   CATHODE,
   /** Upper end of a track or a winding. */
   TOP,
@@ -16,28 +18,43 @@ public enum Terminal {
   TAP,
   /** Lower end of a track or a winding. */
   BOTTOM,
+  /** Start of the winding that is not TOP to BOTTOM; in phase with TOP. */
   PRIMARY_START,
+  /** End of the winding that is not TOP to BOTTOM. */
   PRIMARY_END,
+  /** Of a bipolar transistor. */
   BASE,
+  /** Of a bipolar transistor. */
   COLLECTOR,
+  /** Of a bipolar transistor. */
   EMITTER,
+  /** Of a field-effect transistor. */
   GATE,
+  /** Of a field-effect transistor. */
   DRAIN,
+  /** Of a field-effect transistor. */
   SOURCE,
+  /** Of a battery or an adaptor. */
   PLUS,
+  /** Of a battery or an adaptor. */
   MINUS,
   /** Signal input; the non-inverting one where there are two. */
   INPUT,
+  /** The inverting input. */
   INVERTING,
+  /** The output, or the first one of a bridge amplifier. */
   OUTPUT,
   /** The second output of a bridge amplifier. */
   OUTPUT_TWO,
+  /** Supply pin. */
   SUPPLY,
+  /** Ground pin. */
   GROUND,
   /** Where parts from outside set the gain of an amplifier. */
   GAIN,
   /** Where a capacitor holds ripple off the bias of an amplifier. */
   RIPPLE,
+  /** Where a capacitor from the output, fed from the supply, lets an amplifier swing further. */
   BOOTSTRAP,
   /** Where a capacitor sets the upper edge of an amplifier. */
   COMPENSATION,

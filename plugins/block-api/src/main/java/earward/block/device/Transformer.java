@@ -7,6 +7,8 @@ import java.util.List;
  * An audio transformer: an ideal ratio with magnetising inductance and winding resistances. The
  * secondary may have a tap at its middle; TAP may be left unconnected.
  *
+ * <p>Terminals: PRIMARY_START, PRIMARY_END, TOP, TAP, BOTTOM.
+ *
  * @param primaryHenries magnetising inductance seen at the primary, above 0
  * @param ratio turns of the whole secondary over those of the primary, above 0
  * @param primaryOhms DC resistance of the primary, at least 0

@@ -9,6 +9,9 @@ import java.util.List;
  * that winding, its depth and its tone belong to the case. Its detuning counts from the peak as the
  * builder finds it, with diode and capacitances in place.
  *
+ * <p>Terminals: PRIMARY_START, PRIMARY_END, TOP, TAP, BOTTOM; the drive needs no terminal, so a
+ * feed connects TOP and BOTTOM, and TAP where it is used.
+ *
  * @param parallelOhms Rp at the winding, above 0
  * @param quality Q without the diode, at least 1
  * @param detuningHertz how far the peak lies above the carrier (negative: below)

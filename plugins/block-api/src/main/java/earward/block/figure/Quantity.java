@@ -3,7 +3,14 @@ package earward.block.figure;
 import earward.block.quantity.Unit;
 import java.util.Optional;
 
-/** What a figure measures. The key is its one name in Java, files, JSON and CSV. */
+/**
+ * What a figure measures. The key is its one name in Java, files, JSON and CSV.
+ *
+ * <p>Which places have it: voltages, distortion and the two edges are of a node; currents, heat and
+ * what is said of a diode, an amplifier or a source of supply are of that part; resistances both
+ * ways, loading loss and headroom are of the seam by which a block is entered, for which a block
+ * writes the empty place; output, noise and battery life are of the whole path.
+ */
 public enum Quantity {
   // at a node or a test point
   DC_VOLTS("dc-volts", Unit.VOLT),

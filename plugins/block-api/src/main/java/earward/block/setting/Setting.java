@@ -5,6 +5,7 @@ import earward.block.figure.FigureName;
 import earward.block.quantity.Series;
 import earward.block.quantity.Unit;
 import java.util.List;
+import java.util.Set;
 
 /**
  * What a designer may set on a block. Its label is the block's text {@code setting.ID}, its help
@@ -28,7 +29,7 @@ public sealed interface Setting {
       implements Setting {
     public Value {
       requireId(id);
-      if (!(least <= usual && usual <= most)) {
+      if (!(least <= usual && usual <= most) || Double.isInfinite(usual)) {
         throw new IllegalArgumentException(
             "setting '" + id + "': " + usual + " is not from " + least + " to " + most);
       }
@@ -49,6 +50,10 @@ public sealed interface Setting {
       if (options.isEmpty()) {
         throw new IllegalArgumentException("setting '" + id + "' has no options");
       }
+      if (Set.copyOf(options).size() < options.size()) {
+        throw new IllegalArgumentException(
+            "setting '" + id + "' has an option twice; its options are " + options);
+      }
     }
   }
 
@@ -62,6 +67,10 @@ public sealed interface Setting {
   record Part(String id, PartKind kind, String usual) implements Setting {
     public Part {
       requireId(id);
+      if (usual.isBlank()) {
+        throw new IllegalArgumentException(
+            "setting '" + id + "' names no usual part; wanted a name of the parts library");
+      }
     }
   }
 
@@ -75,6 +84,7 @@ public sealed interface Setting {
   record Position(String id, double usual, String partId) implements Setting {
     public Position {
       requireId(id);
+      requireId(partId);
       if (!(usual >= 0 && usual <= 1)) {
         throw new IllegalArgumentException(
             "setting '" + id + "': position " + usual + " is not from 0 to 1");
@@ -94,13 +104,18 @@ public sealed interface Setting {
   record Trim(String id, String partId, FigureName reading, double usualTarget) implements Setting {
     public Trim {
       requireId(id);
+      requireId(partId);
+      if (!Double.isFinite(usualTarget)) {
+        throw new IllegalArgumentException(
+            "setting '" + id + "' has the target " + usualTarget + "; wanted a finite number");
+      }
     }
   }
 
   private static void requireId(String id) {
     if (!id.matches("[A-Za-z0-9]+(-[A-Za-z0-9]+)*")) {
       throw new IllegalArgumentException(
-          "a setting is named '" + id + "'; wanted letters, digits and single hyphens");
+          "a setting or its part is named '" + id + "'; wanted letters, digits and single hyphens");
     }
   }
 }

@@ -1,6 +1,7 @@
 package earward.block.setting;
 
 import earward.block.device.PartModel;
+import java.util.Objects;
 
 /** What a setting is set to. */
 public sealed interface SettingValue {
@@ -15,8 +16,16 @@ public sealed interface SettingValue {
   }
 
   /** Of a choice. */
-  record Option(String word) implements SettingValue {}
+  record Option(String word) implements SettingValue {
+    public Option {
+      Objects.requireNonNull(word);
+    }
+  }
 
   /** Of a part. */
-  record Chosen(PartModel model) implements SettingValue {}
+  record Chosen(PartModel model) implements SettingValue {
+    public Chosen {
+      Objects.requireNonNull(model);
+    }
+  }
 }

@@ -2,17 +2,16 @@ package earward.block.wiring;
 
 import earward.block.device.Device;
 import java.util.Collections;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
-import java.util.Set;
 
 /**
  * The parts of one block with their nodes and places: what a block type describes. Immutable; made
- * by {@link #from(Port)} or {@link #start()}.
+ * by {@link #from(Port)} or {@link #start()}. Refused, with one sentence, where two parts or two
+ * test points share a name or where anything speaks of a part or a node that is not there.
  *
  * @param entry where the signal comes in; empty for a feed or a supply
  * @param exit where it goes out; empty for an end of the path, a supply or a take-off
@@ -39,38 +38,12 @@ public record Wiring(
     fittingOrder = List.copyOf(fittingOrder);
     cautions = List.copyOf(cautions);
     offeredRails = Collections.unmodifiableMap(new LinkedHashMap<>(offeredRails));
-    requireSound(parts, fittingOrder, entry, exit, testPoints);
-  }
-
-  private static void requireSound(
-      List<WiredPart> parts,
-      List<String> fittingOrder,
-      Optional<Port> entry,
-      Optional<Port> exit,
-      List<TestPoint> testPoints) {
-    Set<String> ids = new HashSet<>();
-    Set<String> nodes = new HashSet<>(Set.of(Nodes.GROUND));
-    entry.ifPresent(port -> nodes.addAll(port.nodes()));
-    for (WiredPart part : parts) {
-      if (!ids.add(part.id())) {
-        throw new IllegalArgumentException("two parts are named '" + part.id() + "'");
-      }
-      nodes.addAll(part.nodes().values());
-    }
-    exit.ifPresent(port -> port.nodes().forEach(node -> requireNode(nodes, node, "the exit")));
-    testPoints.forEach(tp -> requireNode(nodes, tp.node(), "test point '" + tp.id() + "'"));
-    for (String id : fittingOrder) {
-      if (!ids.contains(id)) {
-        throw new IllegalArgumentException("the fitting order names '" + id + "', no part of it");
-      }
-    }
-  }
-
-  private static void requireNode(Set<String> nodes, String node, String what) {
-    if (!nodes.contains(node)) {
-      throw new IllegalArgumentException(
-          what + " stands at node '" + node + "', which no part touches; nodes: " + nodes);
-    }
+    new Soundness(entry, parts)
+        .exit(exit)
+        .testPoints(testPoints)
+        .fittingOrder(fittingOrder)
+        .cautions(cautions)
+        .offeredRails(offeredRails);
   }
 
   /** Starts a description whose signal enters at the port. */

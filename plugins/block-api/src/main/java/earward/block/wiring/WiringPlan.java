@@ -10,19 +10,35 @@ import java.util.Map;
 import java.util.Optional;
 
 /**
- * Writes a block down from left to right, one part a call. A cursor stands at a node: RUN moves it,
- * {@link #at} sets it, DOWN and UP leave it where it is.
+ * Writes a block down from left to right, one part a call. A cursor stands at a node: it begins at
+ * the first node of the entry, RUN moves it to the far end, {@link #at} sets it, and all other
+ * calls leave it where it is.
  *
  * <pre>{@code
  * Wiring.from(new Single("in"))
  *     .run("couple", Capacitor.of(220e-9, 63), "hot")
  *     .body("track", potentiometer, Map.of(TOP, "hot", BOTTOM, GROUND, WIPER, "wiper"))
- *     .at("wiper").testPoint("wiper", "wiper")
+ *     .testPoint("wiper", "wiper")
  *     .fit("track", "couple")
  *     .to(new Single("wiper"));
  * }</pre>
  *
- * <p>Not safe for several threads; a plan is used once.
+ * <p>A node exists as soon as a part touches it. Node and part names are letters, digits and single
+ * hyphens, local to the block; {@link Nodes#GROUND} and the rails are shared by the whole kit. A
+ * two-ended part is given by the node at its far end; which way round it goes matters for diodes
+ * (first terminal ANODE) and electrolytic capacitors (first terminal A, the positive one).
+ *
+ * <p>A push-pull pair is a {@link #column column} from rail to ground, written from the top, each
+ * part with the terminal at its upper end:
+ *
+ * <pre>{@code
+ * .column("upper", npn, COLLECTOR, Map.of(COLLECTOR, MAIN_RAIL, BASE, "up", EMITTER, "middle"))
+ * .column("lower", pnp, EMITTER, Map.of(EMITTER, "middle", BASE, "low", COLLECTOR, GROUND))
+ * .at("middle").run("output-capacitor", capacitor, "out")
+ * }</pre>
+ *
+ * <p>All methods that add a part throw IllegalArgumentException with one sentence when its name is
+ * no name, or when a terminal is not one of its device. Not safe for several threads.
  */
 public final class WiringPlan {
   private final Optional<Port> entry;
@@ -38,13 +54,19 @@ public final class WiringPlan {
     this.cursor = entry.map(port -> port.nodes().get(0));
   }
 
-  /** Sets the cursor to a node. */
+  /** Sets the cursor to a node, which the next part may be the first to touch. */
   public WiringPlan at(String node) {
     cursor = Optional.of(node);
     return this;
   }
 
-  /** A two-ended part along the signal, its first terminal at the cursor; moves the cursor. */
+  /**
+   * A two-ended part along the signal, its first terminal at the cursor; moves the cursor.
+   *
+   * @param id local name of the part; its words are the text {@code part.ID}
+   * @param device what it is
+   * @param toNode node at its other end, where the cursor goes
+   */
   public WiringPlan run(String id, Device device, String toNode) {
     return run(id, device, device.terminals().get(0), toNode);
   }
@@ -78,8 +100,10 @@ public final class WiringPlan {
   }
 
   /**
-   * The next part down in a chain from rail to ground beside the signal.
+   * The next part down in a chain from rail to ground beside the signal; the cursor stays.
    *
+   * @param id local name of the part
+   * @param device what it is
    * @param upper the terminal at its upper end
    * @param nodes the node at each connected terminal
    */
@@ -87,7 +111,14 @@ public final class WiringPlan {
     return add(new WiredPart(id, device, Placement.COLUMN, upper, nodes));
   }
 
-  /** A symbol that the signal goes through, entered at the terminal that stands at the cursor. */
+  /**
+   * A symbol that the signal goes through (can, potentiometer, IC), entered at the terminal that
+   * stands at the cursor, or else at its first; the cursor stays.
+   *
+   * @param id local name of the part
+   * @param device what it is
+   * @param nodes the node at each connected terminal; a terminal left out is not connected
+   */
   public WiringPlan body(String id, Device device, Map<Terminal, String> nodes) {
     Terminal entering =
         device.terminals().stream()
@@ -99,18 +130,26 @@ public final class WiringPlan {
     return add(new WiredPart(id, device, Placement.BODY, entering, nodes));
   }
 
-  /** A two-ended part over or under what stands between two nodes, first terminal at the first. */
+  /**
+   * A two-ended part over or under what stands between two nodes (feedback, bootstrap), its first
+   * terminal at the first node; the cursor stays.
+   */
   public WiringPlan bridge(String id, Device device, String fromNode, String toNode) {
     return twoEnded(id, device, Placement.BRIDGE, device.terminals().get(0), fromNode, toNode);
   }
 
-  /** A node where the builder measures. */
+  /**
+   * A node where the builder measures.
+   *
+   * @param id local name; its words are the text {@code test-point.ID}
+   * @param node where it is; where the block has a node named like the test point, that one
+   */
   public WiringPlan testPoint(String id, String node) {
     testPoints.add(new TestPoint(id, node));
     return this;
   }
 
-  /** A hazard that belongs to a part. */
+  /** A hazard that belongs to a part; the sheet has the words for it. */
   public WiringPlan caution(String partId, Caution caution) {
     cautions.add(new PartCaution(partId, caution));
     return this;
