@@ -13,6 +13,7 @@ import earward.block.quantity.Series;
 import earward.block.quantity.Unit;
 import earward.block.setting.Setting;
 import earward.block.setting.Values;
+import earward.block.wiring.Caution;
 import earward.block.wiring.Port.Single;
 import earward.block.wiring.Wiring;
 import java.util.List;
@@ -72,6 +73,7 @@ public final class TunedIf implements BlockType {
             .body("can", can, Map.of(TOP, "out", BOTTOM, GROUND))
             .at("out")
             .testPoint("winding", "out")
+            .caution("can", Caution.OUTDOOR_AERIAL)
             .fit("can")
             .to(new Single("out")));
   }

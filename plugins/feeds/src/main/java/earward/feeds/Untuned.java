@@ -13,6 +13,7 @@ import earward.block.quantity.Series;
 import earward.block.quantity.Unit;
 import earward.block.setting.Setting;
 import earward.block.setting.Values;
+import earward.block.wiring.Caution;
 import earward.block.wiring.Port.Single;
 import earward.block.wiring.Wiring;
 import java.util.List;
@@ -45,6 +46,7 @@ public final class Untuned implements BlockType {
                 Map.of(TOP, "out", BOTTOM, GROUND))
             .at("out")
             .testPoint("carrier", "out")
+            .caution("front-end", Caution.OUTDOOR_AERIAL)
             .to(new Single("out")));
   }
 }

@@ -23,18 +23,23 @@ final class LoadPort {
     return new Setting.Choice("driven-by", List.of("single", BRIDGE));
   }
 
-  static BlockDescription describe(Values values, String partId, Device device) {
+  static BlockDescription describe(
+      Values values, String partId, Device device, List<Caution> cautions) {
     if (values.chosen("driven-by", BRIDGE)) {
-      return BlockDescription.of(
-          ended(Wiring.from(new Pair("plus", "minus")).down(partId, device, "minus"), "plus")
-              .caution(partId, Caution.BRIDGE_NEVER_TO_GROUND)
-              .end());
+      WiringPlan bridged =
+          Wiring.from(new Pair("plus", "minus"))
+              .down(partId, device, "minus")
+              .testPoint("hot", "plus")
+              .caution(partId, Caution.BRIDGE_NEVER_TO_GROUND);
+      return ended(bridged, partId, cautions);
     }
-    return BlockDescription.of(
-        ended(Wiring.from(new Single("in")).down(partId, device, GROUND), "in").end());
+    WiringPlan grounded =
+        Wiring.from(new Single("in")).down(partId, device, GROUND).testPoint("hot", "in");
+    return ended(grounded, partId, cautions);
   }
 
-  private static WiringPlan ended(WiringPlan plan, String hot) {
-    return plan.testPoint("hot", hot);
+  private static BlockDescription ended(WiringPlan plan, String partId, List<Caution> cautions) {
+    cautions.forEach(caution -> plan.caution(partId, caution));
+    return BlockDescription.of(plan.end());
   }
 }

@@ -9,10 +9,14 @@ import earward.block.device.LoudspeakerModel;
 import earward.block.device.PartKind;
 import earward.block.setting.Setting;
 import earward.block.setting.Values;
+import earward.block.wiring.Caution;
 import java.util.List;
 
 /** A loudspeaker at the end of the path. */
 public final class LoudspeakerLoad implements BlockType {
+  /** What bears no more than this is worn at the ear (common practice). */
+  private static final double MOST_WATTS_AT_THE_EAR = 0.25;
+
   @Override
   public String id() {
     return "load.loudspeaker";
@@ -31,7 +35,12 @@ public final class LoudspeakerLoad implements BlockType {
 
   @Override
   public BlockDescription describe(Values values, Conditions conditions) {
+    LoudspeakerModel model = values.part("loudspeaker", LoudspeakerModel.class);
+    boolean atTheEar = model.ratedWatts() <= MOST_WATTS_AT_THE_EAR;
     return LoadPort.describe(
-        values, "loudspeaker", new Loudspeaker(values.part("loudspeaker", LoudspeakerModel.class)));
+        values,
+        "loudspeaker",
+        new Loudspeaker(model),
+        atTheEar ? List.of(Caution.HEARING) : List.of());
   }
 }

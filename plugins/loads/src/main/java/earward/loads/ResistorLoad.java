@@ -34,6 +34,9 @@ public final class ResistorLoad implements BlockType {
   @Override
   public BlockDescription describe(Values values, Conditions conditions) {
     return LoadPort.describe(
-        values, "load", new Resistor(values.amount("ohms"), values.amount("rated-watts")));
+        values,
+        "load",
+        new Resistor(values.amount("ohms"), values.amount("rated-watts")),
+        List.of());
   }
 }

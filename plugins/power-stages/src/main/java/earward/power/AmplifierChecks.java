@@ -29,6 +29,18 @@ final class AmplifierChecks {
             new FigureName("amplifier", Quantity.SUPPLY_VOLTS, CaseName.HIGHEST_SUPPLY),
             model.ratings().mostVolts(),
             "absolute maximum supply of the " + model.name() + ", as the parts library has it"),
+        Check.atLeast(
+            "supply-below-minimum",
+            Severity.WEIGH,
+            new FigureName("amplifier", Quantity.SUPPLY_VOLTS, CaseName.BATTERY_LOW),
+            model.ratings().leastVolts(),
+            "lowest supply of the " + model.name() + ", as the parts library has it"),
+        Check.atMost(
+            "output-current",
+            Severity.STOP,
+            new FigureName("amplifier", Quantity.PEAK_AMPERES, CaseName.FULL_OUTPUT),
+            model.ratings().mostPeakAmperes(),
+            "highest output current of the " + model.name() + ", as the parts library has it"),
         Check.atMost(
             "junction-temperature",
             Severity.STOP,

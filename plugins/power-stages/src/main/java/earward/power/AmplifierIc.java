@@ -54,6 +54,7 @@ public final class AmplifierIc implements BlockType {
         electrolytic("ripple-capacitor", 47e-6),
         new Setting.Choice("bootstrap", List.of("capacitor", "none")),
         electrolytic("bootstrap-capacitor", 100e-6),
+        new Setting.Value("bootstrap-resistor", Unit.OHM, 56, 1, 10e3, Series.E12),
         new Setting.Value("compensation-capacitor", Unit.FARAD, 680e-12, 10e-12, 100e-9, Series.E6),
         electrolytic("output-capacitor", 470e-6),
         new Setting.Choice("network", List.of("fitted", "none")),

@@ -33,6 +33,12 @@ final class Surroundings {
   /** Highest supply for which an electrolytic of the lower rating is fitted (common practice). */
   private static final double MOST_VOLTS_AT_LOW_RATING = 20;
 
+  /** What holds this much can hurt a meter set to ohms, and the IC (common practice). */
+  private static final double LEAST_FARADS_TO_DISCHARGE = 100e-6;
+
+  /** What bears no more than this is worn at the ear (common practice). */
+  private static final double MOST_WATTS_AT_THE_EAR = 0.25;
+
   private final Values values;
   private final AmplifierModel model;
   private final WiringPlan plan = Wiring.from(new Single("in"));
@@ -143,15 +149,27 @@ final class Surroundings {
     }
     downFrom(Terminal.INVERTING, "inverting-capacitor", true);
     downFrom(Terminal.RIPPLE, "ripple-capacitor", values.chosen("ripple", "capacitor"));
-    if (model.has(Terminal.BOOTSTRAP) && values.chosen("bootstrap", "capacitor")) {
-      plan.bridge("bootstrap-capacitor", electrolytic("bootstrap-capacitor"), "bootstrap", output);
-      polarised("bootstrap-capacitor");
-    }
+    bootstrap();
     if (model.has(Terminal.COMPENSATION)) {
       plan.bridge("compensation-capacitor", film("compensation-capacitor"), "compensation", output);
     }
     plan.at(MAIN_RAIL).down("bypass-capacitor", electrolytic("bypass-capacitor"), GROUND);
     polarised("bypass-capacitor");
+  }
+
+  /**
+   * The pin is held near the supply by a resistor and lifted above it by a capacitor at the output.
+   *
+   * <p>Source of the resistor: the test circuit of the Contek TBA820M data sheet (56 Ω); that it
+   * stands between supply and bootstrap pin where the load goes to ground: from memory.
+   */
+  private void bootstrap() {
+    if (model.has(Terminal.BOOTSTRAP) && values.chosen("bootstrap", "capacitor")) {
+      plan.at("bootstrap")
+          .up("bootstrap-resistor", new Resistor(values.amount("bootstrap-resistor")), MAIN_RAIL)
+          .bridge("bootstrap-capacitor", electrolytic("bootstrap-capacitor"), "bootstrap", output);
+      polarised("bootstrap-capacitor");
+    }
   }
 
   private void downFrom(Terminal pin, String capacitorId, boolean fitted) {
@@ -177,8 +195,12 @@ final class Surroundings {
     if (!values.chosen("output", "loudspeaker")) {
       return;
     }
-    Loudspeaker loudspeaker = new Loudspeaker(values.part("loudspeaker", LoudspeakerModel.class));
-    plan.at(exitNode()).down("loudspeaker", loudspeaker, model.bridge() ? "minus" : GROUND);
+    LoudspeakerModel speaker = values.part("loudspeaker", LoudspeakerModel.class);
+    plan.at(exitNode())
+        .down("loudspeaker", new Loudspeaker(speaker), model.bridge() ? "minus" : GROUND);
+    if (speaker.ratedWatts() <= MOST_WATTS_AT_THE_EAR) {
+      plan.caution("loudspeaker", Caution.HEARING);
+    }
     if (model.bridge()) {
       plan.caution("loudspeaker", Caution.BRIDGE_NEVER_TO_GROUND);
     }
@@ -199,6 +221,9 @@ final class Surroundings {
 
   private void polarised(String capacitorId) {
     plan.caution(capacitorId, Caution.POLARITY);
+    if (values.amount(capacitorId) >= LEAST_FARADS_TO_DISCHARGE) {
+      plan.caution(capacitorId, Caution.CAPACITOR_DISCHARGE);
+    }
   }
 
   private Capacitor film(String settingId) {

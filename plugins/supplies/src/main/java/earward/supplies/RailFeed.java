@@ -3,14 +3,21 @@ package earward.supplies;
 import static earward.block.wiring.Nodes.GROUND;
 import static earward.block.wiring.Nodes.MAIN_RAIL;
 
+import earward.block.check.Check;
+import earward.block.check.RemedyHint;
+import earward.block.check.Severity;
 import earward.block.device.Capacitor;
 import earward.block.device.Device;
 import earward.block.device.Diode;
+import earward.block.device.DiodeMaterial;
 import earward.block.device.DiodeModel;
 import earward.block.device.Fuse;
 import earward.block.device.PartKind;
 import earward.block.device.Resistor;
 import earward.block.device.Switch;
+import earward.block.figure.CaseName;
+import earward.block.figure.FigureName;
+import earward.block.figure.Quantity;
 import earward.block.quantity.Series;
 import earward.block.quantity.Unit;
 import earward.block.setting.Setting;
@@ -33,9 +40,16 @@ final class RailFeed {
   /** Cold resistance times rated current of a small glass fuse, in volts (common practice). */
   private static final double FUSE_VOLTS = 0.1;
 
+  /** Share of its rated current that a fuse is to carry for long (common practice). */
+  private static final double FUSE_SHARE = 0.75;
+
+  /** What holds this much can hurt a meter set to ohms (common practice). */
+  private static final double LEAST_FARADS_TO_DISCHARGE = 100e-6;
+
   private final Values values;
   private final WiringPlan plan = Wiring.start();
   private final List<Link> links = new ArrayList<>();
+  private boolean germanium;
 
   /** One part between source and rail. */
   private record Link(String id, Device device) {}
@@ -52,6 +66,7 @@ final class RailFeed {
     if (values.chosen("polarity", "series-diode")) {
       DiodeModel model = values.part("polarity-diode", DiodeModel.class);
       links.add(new Link("polarity-diode", new Diode(model)));
+      germanium = model.material() == DiodeMaterial.GERMANIUM;
     }
   }
 
@@ -71,8 +86,26 @@ final class RailFeed {
         new Setting.Value("quiet-capacitor", Unit.FARAD, 100e-6, 1e-6, 4.7e-3, Series.E6));
   }
 
+  /** What the kit may draw from the source at full output: its own limit, and the fuse's. */
+  List<Check> checks(String sourceId, Severity severity, double mostAmperes, String source) {
+    FigureName drawn = new FigureName(sourceId, Quantity.SUPPLY_AMPERES, CaseName.FULL_OUTPUT);
+    List<Check> checks = new ArrayList<>();
+    checks.add(Check.atMost("supply-current", severity, drawn, mostAmperes, source));
+    if (values.chosen("fuse", "fuse")) {
+      checks.add(
+          Check.atMost(
+              "fuse-current",
+              Severity.WEIGH,
+              drawn,
+              FUSE_SHARE * values.amount("fuse-amperes"),
+              "common practice: three quarters of the fuse's rated current",
+              RemedyHint.raise("fuse-amperes")));
+    }
+    return checks;
+  }
+
   /** The whole supply: its source, what stands in the lead, and the rails. */
-  Wiring wiring(String sourceId, Device source, Caution... cautions) {
+  Wiring wiring(String sourceId, Device source, List<Caution> cautions) {
     plan.at(links.isEmpty() ? MAIN_RAIL : "cell").down(sourceId, source, GROUND);
     for (Caution caution : cautions) {
       plan.caution(sourceId, caution);
@@ -80,6 +113,9 @@ final class RailFeed {
     for (int i = 0; i < links.size(); i++) {
       String to = i == links.size() - 1 ? MAIN_RAIL : "after-" + links.get(i).id();
       plan.run(links.get(i).id(), links.get(i).device(), to);
+    }
+    if (germanium) {
+      plan.caution("polarity-diode", Caution.GERMANIUM_HEAT);
     }
     electrolyticDown("bypass-capacitor", values.chosen("bypass", "capacitor"));
     plan.testPoint("rail", MAIN_RAIL).offerRail("main", MAIN_RAIL);
@@ -100,6 +136,9 @@ final class RailFeed {
     if (fitted) {
       plan.down(id, Capacitor.electrolytic(values.amount(id), RATED_VOLTS), GROUND)
           .caution(id, Caution.POLARITY);
+      if (values.amount(id) >= LEAST_FARADS_TO_DISCHARGE) {
+        plan.caution(id, Caution.CAPACITOR_DISCHARGE);
+      }
     }
   }
 

@@ -4,14 +4,10 @@ import earward.block.BlockDescription;
 import earward.block.BlockType;
 import earward.block.Conditions;
 import earward.block.Role;
-import earward.block.check.Check;
 import earward.block.check.Severity;
 import earward.block.device.Adaptor;
 import earward.block.device.AdaptorModel;
 import earward.block.device.PartKind;
-import earward.block.figure.CaseName;
-import earward.block.figure.FigureName;
-import earward.block.figure.Quantity;
 import earward.block.setting.Setting;
 import earward.block.setting.Values;
 import earward.block.wiring.Caution;
@@ -41,13 +37,14 @@ public final class SupplyAdaptor implements BlockType {
   @Override
   public BlockDescription describe(Values values, Conditions conditions) {
     AdaptorModel model = values.part("adaptor", AdaptorModel.class);
-    return BlockDescription.of(
-        new RailFeed(values).wiring("adaptor", new Adaptor(model), Caution.ADAPTOR_VOLTAGE),
-        Check.atMost(
-            "supply-current",
+    RailFeed feed = new RailFeed(values);
+    return new BlockDescription(
+        feed.wiring("adaptor", new Adaptor(model), List.of(Caution.ADAPTOR_VOLTAGE)),
+        feed.checks(
+            "adaptor",
             Severity.STOP,
-            new FigureName("adaptor", Quantity.SUPPLY_AMPERES, CaseName.FULL_OUTPUT),
             model.ratedAmperes(),
-            "rated current of the " + model.name() + ", as the parts library has it"));
+            "rated current of the " + model.name() + ", as the parts library has it"),
+        List.of());
   }
 }

@@ -4,14 +4,10 @@ import earward.block.BlockDescription;
 import earward.block.BlockType;
 import earward.block.Conditions;
 import earward.block.Role;
-import earward.block.check.Check;
 import earward.block.check.Severity;
 import earward.block.device.Battery;
 import earward.block.device.BatteryModel;
 import earward.block.device.PartKind;
-import earward.block.figure.CaseName;
-import earward.block.figure.FigureName;
-import earward.block.figure.Quantity;
 import earward.block.setting.Setting;
 import earward.block.setting.Values;
 import earward.block.wiring.Caution;
@@ -41,15 +37,20 @@ public final class SupplyBattery implements BlockType {
   @Override
   public BlockDescription describe(Values values, Conditions conditions) {
     BatteryModel model = values.part("battery", BatteryModel.class);
-    return BlockDescription.of(
-        new RailFeed(values)
-            .wiring(
-                "battery", new Battery(model), Caution.BATTERY_SHORT, Caution.LITHIUM_IN_HOLDER),
-        Check.atMost(
-            "supply-current",
+    boolean otherCells = model.highestVolts() > model.newVolts();
+    RailFeed feed = new RailFeed(values);
+    return new BlockDescription(
+        feed.wiring(
+            "battery",
+            new Battery(model),
+            otherCells
+                ? List.of(Caution.BATTERY_SHORT, Caution.LITHIUM_IN_HOLDER)
+                : List.of(Caution.BATTERY_SHORT)),
+        feed.checks(
+            "battery",
             Severity.WEIGH,
-            new FigureName("battery", Quantity.SUPPLY_AMPERES, CaseName.FULL_OUTPUT),
             model.mostAmperes(),
-            "what the " + model.name() + " gives for long, as the parts library has it"));
+            "what the " + model.name() + " gives for long, as the parts library has it"),
+        List.of());
   }
 }

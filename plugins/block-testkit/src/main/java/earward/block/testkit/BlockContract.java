@@ -3,18 +3,20 @@ package earward.block.testkit;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import earward.block.BlockType;
+import earward.block.setting.Values;
+import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 
 /**
  * What every block keeps to. A block author extends this class, names the block, and runs it with
- * JUnit:
+ * JUnit; each test lists what is wrong, one sentence each.
  *
  * <pre>{@code
- * class TwoResistorPadTest extends BlockContract {
+ * class TrebleShelfTest extends BlockContract {
  *   @Override
  *   protected BlockType type() {
- *     return new TwoResistorPad();
+ *     return new TrebleShelf();
  *   }
  * }
  * }</pre>
@@ -25,21 +27,47 @@ public abstract class BlockContract {
   protected abstract BlockType type();
 
   /**
+   * Whether settings go together; all do by default. Settings that do not are tried too: {@code
+   * describe} must refuse them with an IllegalArgumentException of one sentence. Override it where
+   * a part of a right kind can still be the wrong one, such as an npn transistor in a pnp's place.
+   *
+   * @param values every choice and sample part combined
+   */
+  protected boolean goTogether(Values values) {
+    return true;
+  }
+
+  /**
    * The settings in which it is tried: by default every choice and sample part, with values usual,
-   * least and most. A block for which some of these make no sense narrows its limits rather than
-   * this list.
+   * least and most. A block for which some of these make no sense narrows its limits, or says so in
+   * {@link #goTogether}, rather than shorten this list.
    */
   protected List<Variation> variations() {
     return Variations.of(type());
   }
 
   private void keepsTo(BlockRule rule) {
-    assertThat(rule.faults(type(), variations())).as("faults of " + type().id()).isEmpty();
+    assertThat(rule.faults(type(), sound())).as("what is wrong with " + type().id()).isEmpty();
+  }
+
+  private List<Variation> sound() {
+    List<Variation> sound = variations().stream().filter(v -> goTogether(v.values())).toList();
+    assertThat(sound).as("settings of " + type().id() + " that go together").isNotEmpty();
+    return sound;
   }
 
   @Test
   void describesItselfForAllOfItsSettings() {
     keepsTo(new DescriptionRule());
+  }
+
+  @Test
+  void refusesSettingsThatDoNotGoTogether() {
+    List<Variation> others = new ArrayList<>(variations());
+    others.removeIf(v -> goTogether(v.values()));
+    assertThat(new RefusalRule().faults(type(), others))
+        .as("what is wrong with " + type().id())
+        .isEmpty();
   }
 
   @Test
@@ -60,5 +88,10 @@ public abstract class BlockContract {
   @Test
   void whatItProposesStaysWithinItsLimits() {
     keepsTo(new ProposerRule());
+  }
+
+  @Test
+  void itsJudgementBearsAnyFigures() {
+    keepsTo(new JudgementRule());
   }
 }

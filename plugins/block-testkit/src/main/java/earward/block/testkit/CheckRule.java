@@ -7,69 +7,72 @@ import earward.block.check.Check;
 import earward.block.check.RemedyHint;
 import earward.block.figure.FigureName;
 import earward.block.setting.Setting;
-import earward.block.wiring.Port;
-import earward.block.wiring.Wiring;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 
-/** Checks and curves speak of places and settings that the block has. */
+/** Checks and curves speak of figures and settings that the block has. */
 public final class CheckRule implements BlockRule {
   @Override
   public List<String> faults(BlockType type, List<Variation> variations) {
     Faults faults = new Faults();
     for (Variation variation : variations) {
-      BlockDescription description = variation.describe(type);
-      Set<String> places = places(description.wiring());
-      Set<String> codes = new HashSet<>();
-      for (Check check : description.checks()) {
-        String name = "check " + check.code();
-        faults.addIf(!codes.add(check.code() + check.figure()), name + " is there twice");
-        faults.addIf(Double.isInfinite(check.limit()), name + " has no finite limit");
-        place(name, check.figure(), places, faults);
-        check.remedies().forEach(hint -> remedy(name, hint, type, faults));
-      }
-      for (Curve curve : description.curves()) {
-        curve(curve, type, faults);
-        curve.figures().forEach(f -> place("curve " + curve.id(), f, places, faults));
-      }
+      variation.attempt(type).ifPresent(description -> of(description, type, faults));
     }
     return faults.all();
   }
 
-  private static Set<String> places(Wiring wiring) {
-    Set<String> places = new HashSet<>(Set.of(""));
-    for (Optional<Port> port : List.of(wiring.entry(), wiring.exit())) {
-      port.ifPresent(p -> places.addAll(p.nodes()));
+  private static void of(BlockDescription description, BlockType type, Faults faults) {
+    FigurePlaces places = new FigurePlaces(description.wiring());
+    Set<String> codes = new HashSet<>();
+    for (Check check : description.checks()) {
+      String name = "check " + check.code();
+      faults.addIf(
+          !codes.add(check.code() + " of " + check.figure()),
+          name + " of " + check.figure() + " is there twice; leave one out");
+      faults.addIf(
+          Double.isInfinite(check.limit()),
+          name + " has the limit " + check.limit() + "; where nothing is wanted, leave it out");
+      figure(name, check.figure(), places, faults);
+      check.remedies().forEach(hint -> remedy(name, hint, type, faults));
     }
-    wiring.parts().forEach(part -> places.add(part.id()));
-    wiring.parts().forEach(part -> places.addAll(part.nodes().values()));
-    wiring.testPoints().forEach(point -> places.add(point.id()));
-    return places;
+    Set<String> ids = new HashSet<>();
+    for (Curve curve : description.curves()) {
+      faults.addIf(!ids.add(curve.id()), "two curves are named '" + curve.id() + "'");
+      sweep(curve, type, faults);
+      curve.figures().forEach(f -> figure("curve " + curve.id(), f, places, faults));
+    }
   }
 
-  private static void place(String name, FigureName figure, Set<String> places, Faults faults) {
-    faults.addIf(
-        !places.contains(figure.place()),
-        name + " speaks of '" + figure.place() + "', no place of the block");
+  private static void figure(String name, FigureName figure, FigurePlaces places, Faults faults) {
+    places
+        .whyNot(figure)
+        .ifPresent(
+            why -> faults.add(name + ": the block has no " + figure.quantity().key() + " " + why));
   }
 
   private static void remedy(String name, RemedyHint hint, BlockType type, Faults faults) {
     Optional<Setting> setting = setting(type, hint.settingId());
     if (setting.isEmpty()) {
-      faults.add(name + " would turn '" + hint.settingId() + "', no setting of the block");
+      faults.add(
+          name + " would turn '" + hint.settingId() + "'; wanted one of " + settingIds(type));
       return;
     }
     boolean steps = setting.get() instanceof Setting.Value;
+    boolean other = hint.direction() == RemedyHint.Direction.OTHER;
     faults.addIf(
-        (hint.direction() == RemedyHint.Direction.OTHER) == steps,
-        name + " would go " + hint.direction() + " with setting '" + hint.settingId() + "'");
+        other == steps,
+        name
+            + " would go "
+            + hint.direction()
+            + " with setting '"
+            + hint.settingId()
+            + "'; a value is raised or lowered, a choice or a part is changed");
   }
 
-  private static void curve(Curve curve, BlockType type, Faults faults) {
+  private static void sweep(Curve curve, BlockType type, Faults faults) {
     String name = "curve " + curve.id();
-    faults.addIf(!(curve.from() < curve.to()), name + " runs from its end to its start");
     Optional<Setting> setting = setting(type, curve.settingId());
     double least;
     double most;
@@ -80,15 +83,22 @@ public final class CheckRule implements BlockRule {
       least = 0;
       most = 1;
     } else {
-      faults.add(name + " sweeps '" + curve.settingId() + "', no value or position of the block");
+      faults.add(
+          name + " sweeps '" + curve.settingId() + "'; wanted a value or a position of the block");
       return;
     }
     faults.addIf(
         curve.from() < least || curve.to() > most,
-        name + " leaves the limits of setting '" + curve.settingId() + "'");
+        name
+            + (" runs from " + curve.from() + " to " + curve.to() + "; setting '")
+            + (curve.settingId() + "' goes from " + least + " to " + most));
   }
 
   private static Optional<Setting> setting(BlockType type, String id) {
     return type.settings().stream().filter(s -> s.id().equals(id)).findFirst();
+  }
+
+  private static List<String> settingIds(BlockType type) {
+    return type.settings().stream().map(Setting::id).toList();
   }
 }

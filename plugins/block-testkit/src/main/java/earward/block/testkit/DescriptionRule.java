@@ -3,9 +3,11 @@ package earward.block.testkit;
 import earward.block.BlockDescription;
 import earward.block.BlockType;
 import earward.block.setting.Setting;
+import java.lang.reflect.Modifier;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.Set;
 
 /**
@@ -17,7 +19,7 @@ public final class DescriptionRule implements BlockRule {
     Faults faults = new Faults();
     faults.addIf(
         !type.id().matches("[a-z]+(-[a-z]+)*\\.[a-z0-9]+(-[a-z0-9]+)*"),
-        "'" + type.id() + "' is no block type id; wanted role.name in lower case with hyphens");
+        "'" + type.id() + "' is no block type id; wanted like filter.treble-shelf, in lower case");
     hasPlainConstructor(type, faults);
     settings(type, faults);
     Set<String> turned = new HashSet<>();
@@ -28,7 +30,12 @@ public final class DescriptionRule implements BlockRule {
       String partId = turnedBy(setting);
       faults.addIf(
           !partId.isEmpty() && !turned.contains(partId),
-          "setting '" + setting.id() + "' turns '" + partId + "', which is never a part");
+          "setting '"
+              + setting.id()
+              + "' turns '"
+              + partId
+              + "', which is a part in no variation; name the id"
+              + " of the potentiometer");
     }
     return faults.all();
   }
@@ -49,7 +56,10 @@ public final class DescriptionRule implements BlockRule {
         List.of(type.getClass().getConstructors()).stream()
             .anyMatch(constructor -> constructor.getParameterCount() == 0);
     faults.addIf(
-        !plain, type.getClass().getName() + " has no public constructor without arguments");
+        !plain || !Modifier.isPublic(type.getClass().getModifiers()),
+        type.getClass().getName()
+            + " cannot be made by a program: make the class public, with a public constructor"
+            + " without arguments");
   }
 
   private static void settings(BlockType type, Faults faults) {
@@ -59,25 +69,26 @@ public final class DescriptionRule implements BlockRule {
       faults.addIf(
           !setting.id().equals(setting.id().toLowerCase(Locale.ROOT)),
           "setting '" + setting.id() + "' is not in lower case");
-      if (setting instanceof Setting.Choice choice) {
-        faults.addIf(
-            new HashSet<>(choice.options()).size() != choice.options().size(),
-            "setting '" + choice.id() + "' has an option twice");
-      }
     }
   }
 
-  private static java.util.Optional<BlockDescription> describe(
+  private static Optional<BlockDescription> describe(
       BlockType type, Variation variation, Faults faults) {
     try {
       BlockDescription first = variation.describe(type);
       faults.addIf(
           !first.equals(variation.describe(type)),
-          "two descriptions of the same settings differ: " + variation.name());
-      return java.util.Optional.of(first);
+          "two descriptions of the same settings differ ("
+              + variation.name()
+              + "); use nothing but"
+              + " the values and conditions");
+      return Optional.of(first);
     } catch (RuntimeException e) {
-      faults.add("it cannot be described with " + variation.name() + ": " + e);
-      return java.util.Optional.empty();
+      faults.add(
+          "it cannot be described with "
+              + (variation.name() + ": " + e)
+              + "; narrow the limits of its settings, or say in goTogether what does not go");
+      return Optional.empty();
     }
   }
 }

@@ -8,10 +8,7 @@ import earward.block.setting.Values;
 import java.util.List;
 import java.util.Map;
 
-/**
- * What the block proposes are settings of its own within their limits, and its judgement bears any
- * figures, missing ones included.
- */
+/** What the block proposes are settings of its own within their limits, the same each time. */
 public final class ProposerRule implements BlockRule {
   private static final List<Double> OHMS = List.of(1.0, 1e3, 1e6);
 
@@ -20,7 +17,6 @@ public final class ProposerRule implements BlockRule {
     Faults faults = new Faults();
     for (Variation variation : variations) {
       type.proposer().ifPresent(proposer -> proposals(type, proposer, variation, faults));
-      judgement(type, variation, faults);
     }
     return faults.all();
   }
@@ -31,28 +27,42 @@ public final class ProposerRule implements BlockRule {
       for (double load : OHMS) {
         Proposer.Setting asked =
             new Proposer.Setting(variation.values(), variation.conditions(), source, load);
-        Map<String, SettingValue> proposed = proposer.propose(asked);
-        faults.addIf(
-            !proposed.equals(proposer.propose(asked)),
-            "two proposals for the same settings differ");
-        Values after = variation.values();
-        for (Map.Entry<String, SettingValue> one : proposed.entrySet()) {
-          within(type, one.getKey(), one.getValue(), faults);
-          after = after.with(one.getKey(), one.getValue());
+        try {
+          proposal(type, proposer, asked, faults);
+        } catch (RuntimeException e) {
+          faults.add(
+              "its proposer, or a description of what it proposed, fails with "
+                  + variation.name()
+                  + (", a source of " + source + " Ω and a load of " + load + " Ω: " + e));
         }
-        new Variation("proposed", after, variation.conditions()).describe(type);
       }
     }
+  }
+
+  private static void proposal(
+      BlockType type, Proposer proposer, Proposer.Setting asked, Faults faults) {
+    Map<String, SettingValue> proposed = proposer.propose(asked);
+    faults.addIf(
+        !proposed.equals(proposer.propose(asked)),
+        "two proposals for the same settings differ; use nothing but what is asked");
+    Values after = asked.values();
+    for (Map.Entry<String, SettingValue> one : proposed.entrySet()) {
+      within(type, one.getKey(), one.getValue(), faults);
+      after = after.with(one.getKey(), one.getValue());
+    }
+    type.describe(after, asked.conditions());
   }
 
   private static void within(BlockType type, String id, SettingValue value, Faults faults) {
     for (Setting setting : type.settings()) {
       if (setting.id().equals(id)) {
-        faults.addIf(!fits(setting, value), "setting '" + id + "' cannot be " + value);
+        faults.addIf(
+            !fits(setting, value),
+            "it proposes " + value + " for setting '" + id + "', which takes " + setting);
         return;
       }
     }
-    faults.add("it proposes '" + id + "', no setting of the block");
+    faults.add("it proposes a value for '" + id + "', which is no setting of the block");
   }
 
   private static boolean fits(Setting setting, SettingValue value) {
@@ -66,20 +76,5 @@ public final class ProposerRule implements BlockRule {
       return chosen.model().kind() == part.kind();
     }
     return false;
-  }
-
-  private static void judgement(BlockType type, Variation variation, Faults faults) {
-    for (double figure : List.of(Double.NaN, 0.0, 1.0, -1.0, 1e9)) {
-      try {
-        type.judge(variation.values(), variation.conditions(), name -> figure)
-            .forEach(
-                finding ->
-                    faults.addIf(
-                        !finding.code().matches("[a-z0-9]+(-[a-z0-9]+)*"),
-                        "'" + finding.code() + "' is no code of a finding"));
-      } catch (RuntimeException e) {
-        faults.add("its judgement fails where every figure is " + figure + ": " + e);
-      }
-    }
   }
 }

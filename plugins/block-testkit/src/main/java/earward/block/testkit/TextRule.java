@@ -33,10 +33,12 @@ public final class TextRule implements BlockRule {
     Set<String> wanted = wanted(type, variations);
     BlockTexts english = BlockTexts.of(type, Locale.ROOT);
     for (String key : wanted) {
-      String words = english.find(key).orElse("");
-      faults.addIf(words.isBlank(), "there is no English text " + key);
-      if (key.startsWith("check.")) {
-        placeholders(key, words, faults);
+      String words = english.find(key).orElse("").strip();
+      faults.addIf(
+          words.isBlank(),
+          "texts.properties beside the class lacks the line " + type.id() + "." + key + " = ...");
+      if (key.startsWith("check.") && !words.isBlank()) {
+        sentence(key, words, faults);
       }
     }
     for (String language : LANGUAGES) {
@@ -50,27 +52,40 @@ public final class TextRule implements BlockRule {
     return faults.all();
   }
 
-  private static void placeholders(String key, String words, Faults faults) {
+  private static void sentence(String key, String words, Faults faults) {
+    faults.addIf(!words.endsWith("."), "text " + key + " is no sentence; end it with a full stop");
+    for (String placeholder : List.of("{figure}", "{limit}")) {
+      faults.addIf(
+          !words.contains(placeholder),
+          "text " + key + " lacks " + placeholder + ", so it would not say the numbers");
+    }
     Matcher matcher = PLACEHOLDER.matcher(words);
     while (matcher.find()) {
       faults.addIf(
           !KNOWN.contains(matcher.group(1)),
-          "text " + key + " has the placeholder " + matcher.group() + ", which nobody fills in");
+          "text "
+              + key
+              + " has the placeholder "
+              + matcher.group()
+              + ", which nobody fills in;"
+              + " there are {figure}, {limit} and {place}");
     }
   }
 
   private static void compare(String file, Set<String> wanted, Set<String> found, Faults faults) {
     wanted.stream()
         .filter(key -> !found.contains(key))
-        .forEach(key -> faults.add(file + " lacks " + key));
+        .forEach(key -> faults.add(file + " lacks " + key + ", so that would be shown in English"));
     found.stream()
         .filter(key -> !wanted.contains(key))
-        .forEach(key -> faults.add(file + " has " + key + ", which the block does not need"));
+        .forEach(
+            key ->
+                faults.add(file + " has " + key + ", for which the block has no use; remove it"));
   }
 
   private static Set<String> keys(BlockType type, String file) {
     Properties words = new Properties();
-    try (InputStream in = type.getClass().getResourceAsStream(file)) {
+    try (InputStream in = type.besideTexts().getResourceAsStream(file)) {
       if (in != null) {
         words.load(new InputStreamReader(in, StandardCharsets.UTF_8));
       }
@@ -97,12 +112,15 @@ public final class TextRule implements BlockRule {
       }
     }
     for (Variation variation : variations) {
-      BlockDescription description = variation.describe(type);
-      description.wiring().parts().forEach(part -> keys.add("part." + part.id()));
-      description.wiring().testPoints().forEach(point -> keys.add("test-point." + point.id()));
-      description.checks().forEach(check -> keys.add("check." + check.code()));
-      description.curves().forEach(curve -> keys.add("curve." + curve.id()));
+      variation.attempt(type).ifPresent(description -> ofDescription(description, keys));
     }
     return keys;
+  }
+
+  private static void ofDescription(BlockDescription description, Set<String> keys) {
+    description.wiring().parts().forEach(part -> keys.add("part." + part.id()));
+    description.wiring().testPoints().forEach(point -> keys.add("test-point." + point.id()));
+    description.checks().forEach(check -> keys.add("check." + check.code()));
+    description.curves().forEach(curve -> keys.add("curve." + curve.id()));
   }
 }

@@ -5,6 +5,7 @@ import earward.block.BlockType;
 import earward.block.Conditions;
 import earward.block.setting.Values;
 import java.util.Objects;
+import java.util.Optional;
 
 /**
  * One set of settings in which a block is tried.
@@ -28,5 +29,17 @@ public record Variation(String name, Values values, Conditions conditions) {
   /** The block in this variation. */
   public BlockDescription describe(BlockType type) {
     return type.describe(values, conditions);
+  }
+
+  /**
+   * The block in this variation, empty where it cannot be described: {@link DescriptionRule} says
+   * so, and other rules have nothing to look at.
+   */
+  Optional<BlockDescription> attempt(BlockType type) {
+    try {
+      return Optional.of(describe(type));
+    } catch (RuntimeException e) {
+      return Optional.empty();
+    }
   }
 }

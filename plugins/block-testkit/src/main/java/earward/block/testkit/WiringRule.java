@@ -2,21 +2,16 @@ package earward.block.testkit;
 
 import earward.block.BlockType;
 import earward.block.Role;
-import earward.block.device.AudioAmplifier;
-import earward.block.device.Battery;
-import earward.block.device.Capacitor;
-import earward.block.device.Device;
 import earward.block.wiring.Caution;
 import earward.block.wiring.Nodes;
 import earward.block.wiring.PartCaution;
+import earward.block.wiring.TestPoint;
 import earward.block.wiring.WiredPart;
 import earward.block.wiring.Wiring;
-import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 
 /**
  * Ports suit the role, no end hangs loose, every fitted part stands in the fitting order once, and
@@ -27,33 +22,40 @@ public final class WiringRule implements BlockRule {
   public List<String> faults(BlockType type, List<Variation> variations) {
     Faults faults = new Faults();
     for (Variation variation : variations) {
-      Wiring wiring = variation.describe(type).wiring();
-      ports(type.role(), wiring, faults);
-      looseEnds(wiring, faults);
-      fittingOrder(wiring, faults);
-      testPoints(wiring, faults);
-      cautions(wiring, faults);
+      variation.attempt(type).ifPresent(d -> of(type.role(), d.wiring(), faults));
     }
     return faults.all();
+  }
+
+  private static void of(Role role, Wiring wiring, Faults faults) {
+    ports(role, wiring, faults);
+    looseEnds(wiring, faults);
+    fittingOrder(wiring, faults);
+    testPoints(wiring, faults);
+    cautions(wiring, faults);
   }
 
   private static void ports(Role role, Wiring wiring, Faults faults) {
     boolean entered = role != Role.FEED && role != Role.SUPPLY;
     boolean left = role.inPath() && role != Role.LOAD;
+    String of = "a block of role " + role;
     faults.addIf(
-        wiring.entry().isPresent() != entered,
-        "a block of role " + role + (entered ? " has an entry" : " has no entry"));
-    faults.addIf(left && wiring.exit().isEmpty(), "a block of role " + role + " has an exit");
+        entered && wiring.entry().isEmpty(),
+        of + " has an entry: begin with Wiring.from(new Single(\"in\"))");
     faults.addIf(
-        (role == Role.SUPPLY) == wiring.offeredRails().isEmpty(),
-        "a supply, and only a supply, offers rails");
-    wiring
-        .offeredRails()
-        .forEach(
-            (name, node) ->
-                faults.addIf(
-                    wiring.parts().stream().noneMatch(p -> p.nodes().containsValue(node)),
-                    "rail " + name + " is offered at '" + node + "', which no part touches"));
+        !entered && wiring.entry().isPresent(), of + " has no entry: begin with Wiring.start()");
+    faults.addIf(
+        left && wiring.exit().isEmpty(), of + " has an exit: end with to(new Single(\"out\"))");
+    faults.addIf(!left && wiring.exit().isPresent(), of + " has no exit: end with end()");
+    faults.addIf(
+        role == Role.TAKE_OFF && wiring.entry().filter(p -> p.nodes().size() > 1).isPresent(),
+        of + " hangs on one node: begin with Wiring.from(new Single(\"in\"))");
+    faults.addIf(
+        role == Role.SUPPLY && wiring.offeredRails().isEmpty(),
+        of + " offers at least one rail: call offerRail(\"main\", Nodes.MAIN_RAIL)");
+    faults.addIf(
+        role != Role.SUPPLY && !wiring.offeredRails().isEmpty(),
+        of + " offers no rails; a supply does");
   }
 
   private static void looseEnds(Wiring wiring, Faults faults) {
@@ -67,57 +69,62 @@ public final class WiringRule implements BlockRule {
         (node, count) ->
             faults.addIf(
                 count < 2 && !Nodes.isShared(node),
-                "node '" + node + "' has one end only: nothing is connected to it"));
+                "node '"
+                    + node
+                    + "' has one end only; join a second part or a port to it, or correct a"
+                    + " misspelt name"));
     for (WiredPart part : wiring.parts()) {
       faults.addIf(
           part.nodes().size() > 1 && new HashSet<>(part.nodes().values()).size() < 2,
-          "all ends of part '" + part.id() + "' stand at one node");
+          "all ends of part '" + part.id() + "' stand at one node, so it does nothing");
     }
   }
 
   private static void fittingOrder(Wiring wiring, Faults faults) {
-    List<String> order = new ArrayList<>(wiring.fittingOrder());
     for (WiredPart part : wiring.parts()) {
-      boolean named = order.remove(part.id());
+      boolean named = wiring.fittingOrder().contains(part.id());
       faults.addIf(
-          part.device().fitted() != named,
-          part.device().fitted()
-              ? "part '" + part.id() + "' is fitted but not in the fitting order"
-              : "part '" + part.id() + "' is not fitted but in the fitting order");
+          part.device().fitted() && !named,
+          "part '" + part.id() + "' is not in the fitting order, though the builder fits it");
+      faults.addIf(
+          !part.device().fitted() && named,
+          "part '" + part.id() + "' is in the fitting order, though it is not of the kit");
     }
-    order.forEach(id -> faults.add("part '" + id + "' is in the fitting order twice"));
   }
 
   private static void testPoints(Wiring wiring, Faults faults) {
-    HashSet<String> ids = new HashSet<>();
-    wiring
-        .testPoints()
-        .forEach(
-            tp -> faults.addIf(!ids.add(tp.id()), "two test points are named '" + tp.id() + "'"));
+    faults.addIf(
+        wiring.testPoints().isEmpty(),
+        "no test point: name a node where the builder can measure, with testPoint(id, node)");
+    for (TestPoint point : wiring.testPoints()) {
+      faults.addIf(
+          point.node().equals(Nodes.GROUND), "test point '" + point.id() + "' stands at ground");
+      boolean otherNode =
+          !point.node().equals(point.id())
+              && wiring.parts().stream().anyMatch(p -> p.nodes().containsValue(point.id()));
+      faults.addIf(
+          otherNode,
+          "test point '"
+              + point.id()
+              + "' stands at node '"
+              + point.node()
+              + "', and another node has its name; rename one of them");
+    }
   }
 
   private static void cautions(Wiring wiring, Faults faults) {
     for (WiredPart part : wiring.parts()) {
-      needed(part.device())
-          .filter(caution -> !wiring.cautions().contains(new PartCaution(part.id(), caution)))
-          .ifPresent(
-              caution -> faults.add("part '" + part.id() + "' lacks the caution " + caution));
+      for (Caution caution : Hazards.of(part.device())) {
+        faults.addIf(
+            !wiring.cautions().contains(new PartCaution(part.id(), caution)),
+            "part '"
+                + part.id()
+                + "' can do harm: call caution(\""
+                + part.id()
+                + "\", Caution."
+                + caution
+                + ")");
+      }
     }
-    for (PartCaution caution : wiring.cautions()) {
-      faults.addIf(
-          wiring.part(caution.partId()).isEmpty(),
-          "a caution names '" + caution.partId() + "', no part of the block");
-    }
-  }
-
-  private static Optional<Caution> needed(Device device) {
-    if (device instanceof Capacitor capacitor && capacitor.dielectric().polarised()) {
-      return Optional.of(Caution.POLARITY);
-    } else if (device instanceof Battery) {
-      return Optional.of(Caution.BATTERY_SHORT);
-    } else if (device instanceof AudioAmplifier amplifier && amplifier.model().bridge()) {
-      return Optional.of(Caution.BRIDGE_NEVER_TO_GROUND);
-    }
-    return Optional.empty();
   }
 }

@@ -1,0 +1,30 @@
+package earward.block.testkit;
+
+import earward.block.BlockType;
+import java.util.List;
+
+/** Settings that do not go together are refused, with one sentence that a designer can act on. */
+final class RefusalRule implements BlockRule {
+  @Override
+  public List<String> faults(BlockType type, List<Variation> variations) {
+    Faults faults = new Faults();
+    for (Variation variation : variations) {
+      try {
+        variation.describe(type);
+        faults.add(
+            "it takes "
+                + variation.name()
+                + ", though its contract says that they do not go together; throw"
+                + " IllegalArgumentException from describe, or correct goTogether");
+      } catch (IllegalArgumentException e) {
+        faults.addIf(
+            String.valueOf(e.getMessage()).isBlank() || e.getMessage() == null,
+            "it refuses " + variation.name() + " without a word; give the exception a sentence");
+      } catch (RuntimeException e) {
+        faults.add(
+            "it refuses " + variation.name() + " with " + e + "; throw IllegalArgumentException");
+      }
+    }
+    return faults.all();
+  }
+}
