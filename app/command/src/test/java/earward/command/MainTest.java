@@ -2,33 +2,52 @@ package earward.command;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.ByteArrayOutputStream;
-import java.io.PrintStream;
-import java.nio.charset.StandardCharsets;
 import org.junit.jupiter.api.Test;
 
 class MainTest {
-  private final ByteArrayOutputStream results = new ByteArrayOutputStream();
-  private final ByteArrayOutputStream messages = new ByteArrayOutputStream();
-
   @Test
   void theVersionGoesToStandardOutput() {
-    assertThat(run("--version")).isZero();
-    assertThat(results.toString(StandardCharsets.UTF_8)).startsWith("earward ");
-    assertThat(messages.size()).isZero();
+    Ran ran = Ran.earward("--version");
+    assertThat(ran.code()).isZero();
+    assertThat(ran.results()).startsWith("earward ");
+    assertThat(ran.messages()).isEmpty();
   }
 
   @Test
-  void anUnknownCommandIsTheCallsFault() {
-    assertThat(run("fly")).isEqualTo(2);
-    assertThat(results.size()).isZero();
-    assertThat(messages.toString(StandardCharsets.UTF_8)).contains("usage");
+  void helpGoesToStandardOutputAndNamesEveryCommandAndExitCode() {
+    Ran ran = Ran.earward("--help");
+    assertThat(ran.code()).isZero();
+    assertThat(ran.results()).contains("figures", "review", "blocks", "desktop", "Exit code: 0");
+    assertThat(ran.results()).doesNotContain("picocli", "${");
+    assertThat(ran.messages()).isEmpty();
+    for (String command : new String[] {"figures", "review", "blocks", "desktop"}) {
+      Ran help = Ran.earward(command, "--help");
+      assertThat(help.code()).isZero();
+      assertThat(help.results()).startsWith("Usage: earward " + command);
+    }
   }
 
-  private int run(String... arguments) {
-    return Main.run(
-        arguments,
-        new PrintStream(results, true, StandardCharsets.UTF_8),
-        new PrintStream(messages, true, StandardCharsets.UTF_8));
+  @Test
+  void anUnknownCommandIsTheCallsFaultAndTheOthersAreNamed() {
+    assertFault(Ran.earward("fly"), "'fly'", "figures", "review");
+  }
+
+  @Test
+  void anUnknownOptionIsTheCallsFault() {
+    assertFault(Ran.earward("figures", "--jsn", "kit.earward"), "'--jsn'", "--help");
+    assertFault(Ran.earward("--fly"), "'--fly'");
+    assertFault(Ran.earward("blocks", "-x"), "'-x'");
+  }
+
+  @Test
+  void aMissingOrASecondDesignIsTheCallsFault() {
+    assertFault(Ran.earward("figures"), "DESIGN");
+    assertFault(Ran.earward("review", "one.earward", "two.earward"), "'two.earward'");
+  }
+
+  private static void assertFault(Ran ran, String... words) {
+    assertThat(ran.code()).isEqualTo(2);
+    assertThat(ran.results()).isEmpty();
+    assertThat(ran.messages()).hasLineCount(1).contains(words).doesNotContain("\tat ");
   }
 }

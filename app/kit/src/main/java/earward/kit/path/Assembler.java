@@ -21,6 +21,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 
 /**
@@ -80,6 +81,9 @@ public final class Assembler {
   private PlacedBlock joined(PlacedBlock block) {
     String where = block.entry().joinsAt().orElse("");
     Optional<Port> entry = block.description().wiring().entry();
+    if (ofMissingBlock(where)) {
+      return block;
+    }
     if (!globalNodes().contains(where)) {
       findings.add(PathFindings.joinsNowhere(block, where));
       return block;
@@ -91,6 +95,20 @@ public final class Assembler {
     Map<String, String> nodes = new HashMap<>(block.globalNodes());
     nodes.put(entry.get().nodes().get(0), where);
     return new PlacedBlock(block.entry(), block.type(), block.values(), block.description(), nodes);
+  }
+
+  /** Whether the node is one of a block that could not be placed: that is said already. */
+  private boolean ofMissingBlock(String node) {
+    return missing().anyMatch(entry -> node.startsWith(entry.id() + "."));
+  }
+
+  private Stream<BlockEntry> missing() {
+    Set<String> placed = blocks().map(PlacedBlock::id).collect(Collectors.toSet());
+    return design.blocks().stream().filter(entry -> !placed.contains(entry.id()));
+  }
+
+  private boolean supplyMissing() {
+    return missing().anyMatch(design.supplies()::contains);
   }
 
   private Set<String> globalNodes() {
@@ -114,6 +132,9 @@ public final class Assembler {
         }
       }
     }
+    if (supplyMissing()) {
+      return;
+    }
     List<String> offered = offeredBy.keySet().stream().map(Assembler::name).toList();
     blocks()
         .forEach(
@@ -132,10 +153,14 @@ public final class Assembler {
 
   private Assembly finish() {
     TestPoints testPoints = new TestPoints(design, path, beside, globalNodes());
-    findings.addAll(testPoints.findings());
+    if (missing().findAny().isEmpty()) {
+      findings.addAll(testPoints.findings());
+    }
     CircuitBuilder builder = new CircuitBuilder(path, beside, testPoints);
     Circuit circuit = builder.build();
-    findings.addAll(builder.findings());
+    if (path.size() == design.path().size()) {
+      findings.addAll(builder.findings());
+    }
     References references = design.references().completed(neededParts(), testPoints.places());
     boolean complete = findings.stream().noneMatch(finding -> finding.severity() == Severity.STOP);
     return new Assembly(

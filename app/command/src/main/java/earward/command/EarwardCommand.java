@@ -1,0 +1,38 @@
+package earward.command;
+
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.IVersionProvider;
+
+/** The command line as a whole; without a command it opens the desktop. */
+@Command(
+    name = "earward",
+    description = "Designs the back end of an AM receiver kit and prints its build sheet.",
+    mixinStandardHelpOptions = true,
+    versionProvider = EarwardCommand.Version.class,
+    subcommands = {
+      FiguresCommand.class,
+      ReviewCommand.class,
+      BlocksCommand.class,
+      DesktopCommand.class
+    },
+    footer = {
+      "",
+      "Exit code: 0 done; 1 done, and a finding is STOP; 2 the input or the call is at fault;",
+      "3 the program is at fault. Results go to standard output, messages to standard error."
+    })
+final class EarwardCommand implements Callable<Integer> {
+  @Override
+  public Integer call() throws CommandFault {
+    return new DesktopCommand().call();
+  }
+
+  /** The version of the jar that this class came in. */
+  static final class Version implements IVersionProvider {
+    @Override
+    public String[] getVersion() {
+      String version = Main.class.getPackage().getImplementationVersion();
+      return new String[] {"earward " + (version == null ? "(not packaged)" : version)};
+    }
+  }
+}

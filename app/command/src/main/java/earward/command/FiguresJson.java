@@ -1,0 +1,169 @@
+package earward.command;
+
+import static earward.block.figure.CaseName.BATTERY_LOW;
+import static earward.block.figure.CaseName.DEEPEST;
+import static earward.block.figure.CaseName.FULL_OUTPUT;
+import static earward.block.figure.CaseName.HOTTEST;
+import static earward.block.figure.CaseName.NO_SIGNAL;
+import static earward.block.figure.CaseName.STRONG;
+import static earward.block.figure.CaseName.TEST;
+
+import com.fasterxml.jackson.databind.node.ArrayNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import earward.block.device.Battery;
+import earward.block.figure.CaseName;
+import earward.block.figure.FigureName;
+import earward.block.figure.Quantity;
+import earward.engine.CircuitPart;
+import earward.engine.Seam;
+import earward.kit.path.Assembly;
+import earward.kit.path.PlacedTestPoint;
+import earward.kit.review.CleanDepthLimit;
+import earward.kit.review.ReviewedKit;
+
+/** All figures of a kit, for programs: SI base units, peak or rms said in the key. */
+final class FiguresJson {
+  private static final String PATH = "path";
+  private static final CaseName LISTENING = new CaseName("listening");
+
+  private final ReviewedKit kit;
+  private final Assembly assembly;
+  private final PlaceNames names;
+
+  private FiguresJson(ReviewedKit kit) {
+    this.kit = kit;
+    this.assembly = kit.solved().assembly();
+    this.names = new PlaceNames(assembly);
+  }
+
+  static ObjectNode of(ReviewedKit kit) {
+    FiguresJson json = new FiguresJson(kit);
+    ObjectNode root = JsonOut.object().put("schema", "earward-figures-1");
+    root.set("kit", KitHead.json(kit));
+    root.put("solved", kit.solved().solved());
+    root.set("conditions", ConditionsJson.of(json.assembly.design().conditions()));
+    root.set("testPoints", json.testPoints());
+    root.set("seams", json.seams());
+    root.set("path", json.path());
+    root.set("supply", json.supply());
+    root.set("heatedParts", json.heatedParts());
+    ObjectNode all = root.putObject("figures");
+    kit.figures().all().forEach((name, value) -> JsonOut.put(all, name.toString(), value));
+    root.put("doNotBuild", kit.doNotBuild());
+    root.set("findings", ReviewJson.findings(kit));
+    return root;
+  }
+
+  private void put(
+      ObjectNode into, String key, String place, Quantity quantity, CaseName caseName) {
+    JsonOut.put(into, key, kit.figures().orNaN(new FigureName(place, quantity, caseName)));
+  }
+
+  private ArrayNode testPoints() {
+    ArrayNode points = JsonOut.object().arrayNode();
+    for (PlacedTestPoint point : assembly.testPoints()) {
+      String place = point.place();
+      ObjectNode node =
+          points
+              .addObject()
+              .put("reference", point.reference())
+              .put("place", place)
+              .put("node", point.node())
+              .put("words", names.of(point));
+      put(node, "dcVoltsNoSignal", place, Quantity.DC_VOLTS, NO_SIGNAL);
+      put(node, "dcVoltsTest", place, Quantity.DC_VOLTS, TEST);
+      put(node, "audioRmsVoltsTest", place, Quantity.AUDIO_RMS_VOLTS, TEST);
+      put(node, "distortionFractionTest", place, Quantity.DISTORTION, TEST);
+      put(node, "carrierRmsVoltsTest", place, Quantity.CARRIER_RMS_VOLTS, TEST);
+    }
+    return points;
+  }
+
+  private ArrayNode seams() {
+    ArrayNode seams = JsonOut.object().arrayNode();
+    for (Seam seam : assembly.circuit().seams()) {
+      String place = "seam." + seam.name();
+      ObjectNode node =
+          seams
+              .addObject()
+              .put("into", seam.name())
+              .put("nodeBefore", seam.before())
+              .put("nodeAfter", seam.after());
+      put(node, "onwardOhmsTest", place, Quantity.ONWARD_OHMS, TEST);
+      put(node, "backwardOhmsTest", place, Quantity.BACKWARD_OHMS, TEST);
+      put(node, "loadingLossDecibelsTest", place, Quantity.LOADING_LOSS_DECIBELS, TEST);
+      String level = assembly.block(seam.name()).isPresent() ? place : block(place);
+      put(node, "audioRmsVoltsTest", level, Quantity.AUDIO_RMS_VOLTS, TEST);
+      put(node, "dcVoltsTest", level, Quantity.DC_VOLTS, TEST);
+      put(node, "carrierRmsVoltsTest", level, Quantity.CARRIER_RMS_VOLTS, TEST);
+      put(node, "headroomDecibelsTest", level, Quantity.HEADROOM_DECIBELS, TEST);
+      put(node, "headroomDecibelsStrong", level, Quantity.HEADROOM_DECIBELS, STRONG);
+    }
+    return seams;
+  }
+
+  /** Both wires of a pair have the level between them. */
+  private static String block(String wire) {
+    return wire.substring(0, wire.lastIndexOf('.'));
+  }
+
+  private ObjectNode path() {
+    ObjectNode node = JsonOut.object();
+    put(node, "distortionFractionTest", PATH, Quantity.DISTORTION, TEST);
+    put(node, "lowEdgeHertz", PATH, Quantity.LOW_EDGE_HERTZ, TEST);
+    put(node, "highEdgeHertz", PATH, Quantity.HIGH_EDGE_HERTZ, TEST);
+    put(node, "largestCleanDepthFraction", PATH, Quantity.CLEAN_DEPTH, TEST);
+    CleanDepthLimit.of(kit.solved())
+        .ifPresentOrElse(
+            limit -> node.put("largestCleanDepthCause", limit.key()),
+            () -> node.putNull("largestCleanDepthCause"));
+    put(node, "clippingDepthFractionDeepest", PATH, Quantity.CLIPPING_DEPTH, DEEPEST);
+    put(node, "outputRmsVoltsTest", PATH, Quantity.OUTPUT_RMS_VOLTS, TEST);
+    put(node, "outputWattsTest", PATH, Quantity.OUTPUT_WATTS, TEST);
+    put(node, "clipWatts", PATH, Quantity.CLIP_WATTS, FULL_OUTPUT);
+    put(node, "tenPercentWatts", PATH, Quantity.TEN_PERCENT_WATTS, FULL_OUTPUT);
+    put(node, "clipWattsBatteryLow", PATH, Quantity.CLIP_WATTS, BATTERY_LOW);
+    put(node, "tenPercentWattsBatteryLow", PATH, Quantity.TEN_PERCENT_WATTS, BATTERY_LOW);
+    put(node, "signalToNoiseDecibels", PATH, Quantity.SIGNAL_TO_NOISE_DECIBELS, TEST);
+    return node;
+  }
+
+  private ObjectNode supply() {
+    ObjectNode node = JsonOut.object();
+    put(node, "amperesNoSignal", PATH, Quantity.SUPPLY_AMPERES, NO_SIGNAL);
+    put(node, "amperesTest", PATH, Quantity.SUPPLY_AMPERES, TEST);
+    put(node, "amperesFullOutput", PATH, Quantity.SUPPLY_AMPERES, FULL_OUTPUT);
+    ArrayNode batteries = node.putArray("batteries");
+    for (CircuitPart part : assembly.circuit().parts()) {
+      if (part.device() instanceof Battery) {
+        ObjectNode battery =
+            batteries
+                .addObject()
+                .put("place", part.name())
+                .put("reference", names.reference(part.name()));
+        put(battery, "hoursNoSignal", part.name(), Quantity.BATTERY_HOURS, NO_SIGNAL);
+        put(battery, "hoursTest", part.name(), Quantity.BATTERY_HOURS, TEST);
+        put(battery, "hoursListening", part.name(), Quantity.BATTERY_HOURS, LISTENING);
+        put(battery, "hoursFullOutput", part.name(), Quantity.BATTERY_HOURS, FULL_OUTPUT);
+      }
+    }
+    return node;
+  }
+
+  private ArrayNode heatedParts() {
+    ArrayNode parts = JsonOut.object().arrayNode();
+    for (CircuitPart part : assembly.circuit().parts()) {
+      String place = part.name();
+      if (kit.figures().find(place, Quantity.JUNCTION_CELSIUS, HOTTEST).isPresent()) {
+        ObjectNode node =
+            parts.addObject().put("place", place).put("reference", names.reference(place));
+        put(node, "dissipationWattsNoSignal", place, Quantity.DISSIPATION_WATTS, NO_SIGNAL);
+        put(node, "dissipationWattsTest", place, Quantity.DISSIPATION_WATTS, TEST);
+        put(node, "dissipationWattsHottest", place, Quantity.DISSIPATION_WATTS, HOTTEST);
+        put(node, "junctionCelsiusHottest", place, Quantity.JUNCTION_CELSIUS, HOTTEST);
+        put(node, "surfaceCelsiusHottest", place, Quantity.SURFACE_CELSIUS, HOTTEST);
+      }
+    }
+    return parts;
+  }
+}

@@ -1,0 +1,147 @@
+package earward.command;
+
+import static earward.block.figure.CaseName.FULL_OUTPUT;
+import static earward.block.figure.CaseName.HOTTEST;
+import static earward.block.figure.CaseName.NO_SIGNAL;
+import static earward.block.figure.CaseName.STRONG;
+import static earward.block.figure.CaseName.TEST;
+
+import earward.block.figure.CaseName;
+import earward.block.figure.FigureName;
+import earward.block.figure.Quantity;
+import earward.block.quantity.Unit;
+import earward.engine.CircuitPart;
+import earward.engine.Seam;
+import earward.kit.path.Assembly;
+import earward.kit.path.PlacedTestPoint;
+import earward.kit.review.CleanDepthLimit;
+import earward.kit.review.ReviewedKit;
+import java.io.PrintWriter;
+
+/** All figures of a kit, for people: first by place, then every one under its name. */
+final class FiguresText {
+  private final PrintWriter to;
+  private final ReviewedKit kit;
+  private final Assembly assembly;
+  private final PlaceNames names;
+
+  private FiguresText(PrintWriter to, ReviewedKit kit) {
+    this.to = to;
+    this.kit = kit;
+    this.assembly = kit.solved().assembly();
+    this.names = new PlaceNames(assembly);
+  }
+
+  static void print(PrintWriter to, ReviewedKit kit) {
+    FiguresText text = new FiguresText(to, kit);
+    to.println(KitHead.line(kit));
+    text.testPoints();
+    text.seams();
+    text.path();
+    text.heat();
+    text.all();
+  }
+
+  private void section(String title, TextTable table) {
+    if (!table.isEmpty()) {
+      to.println();
+      to.println(title);
+      table.print(to);
+    }
+  }
+
+  private String shown(String place, Quantity quantity, CaseName caseName) {
+    return Shown.quantity(
+        kit.figures().orNaN(new FigureName(place, quantity, caseName)), quantity.unit());
+  }
+
+  private void testPoints() {
+    TextTable table =
+        new TextTable()
+            .row("", "place", "DC rest", "DC test", "audio rms", "distortion", "carrier rms", "");
+    for (PlacedTestPoint point : assembly.testPoints()) {
+      String place = point.place();
+      table.row(
+          point.reference(),
+          place,
+          shown(place, Quantity.DC_VOLTS, NO_SIGNAL),
+          shown(place, Quantity.DC_VOLTS, TEST),
+          shown(place, Quantity.AUDIO_RMS_VOLTS, TEST),
+          shown(place, Quantity.DISTORTION, TEST),
+          shown(place, Quantity.CARRIER_RMS_VOLTS, TEST),
+          names.of(point));
+    }
+    section("Test points (rest: no signal; test: the test signal)", table);
+  }
+
+  private void seams() {
+    TextTable table =
+        new TextTable()
+            .row("into", "audio rms", "onward", "backward", "loss", "headroom test", "strong");
+    for (Seam seam : assembly.circuit().seams()) {
+      String place = "seam." + seam.name();
+      table.row(
+          seam.name(),
+          shown(place, Quantity.AUDIO_RMS_VOLTS, TEST),
+          shown(place, Quantity.ONWARD_OHMS, TEST),
+          shown(place, Quantity.BACKWARD_OHMS, TEST),
+          shown(place, Quantity.LOADING_LOSS_DECIBELS, TEST),
+          shown(place, Quantity.HEADROOM_DECIBELS, TEST),
+          shown(place, Quantity.HEADROOM_DECIBELS, STRONG));
+    }
+    section("Seams, at the test tone", table);
+  }
+
+  private void path() {
+    String path = "path";
+    CaseName listening = new CaseName("listening");
+    TextTable table = new TextTable().row("", "");
+    table.row("distortion of the test signal", shown(path, Quantity.DISTORTION, TEST));
+    table.row(
+        "band, -3 dB",
+        shown(path, Quantity.LOW_EDGE_HERTZ, TEST)
+            + " to "
+            + shown(path, Quantity.HIGH_EDGE_HERTZ, TEST));
+    table.row(
+        "largest clean modulation (3 %)",
+        shown(path, Quantity.CLEAN_DEPTH, TEST)
+            + CleanDepthLimit.of(kit.solved()).map(limit -> ", by " + limit.key()).orElse(""));
+    table.row("output at the edge of clipping", shown(path, Quantity.CLIP_WATTS, FULL_OUTPUT));
+    table.row("output at 10 %", shown(path, Quantity.TEN_PERCENT_WATTS, FULL_OUTPUT));
+    table.row("output of the test signal", shown(path, Quantity.OUTPUT_WATTS, TEST));
+    table.row("supply current at rest", shown(path, Quantity.SUPPLY_AMPERES, NO_SIGNAL));
+    table.row("supply current, test signal", shown(path, Quantity.SUPPLY_AMPERES, TEST));
+    table.row("supply current, full output", shown(path, Quantity.SUPPLY_AMPERES, FULL_OUTPUT));
+    table.row("battery life, listening level", shown(path, Quantity.BATTERY_HOURS, listening));
+    section("Path", table);
+  }
+
+  private void heat() {
+    TextTable table =
+        new TextTable().row("", "part", "dissipation at worst", "junction at worst", "surface");
+    for (CircuitPart part : assembly.circuit().parts()) {
+      String place = part.name();
+      if (kit.figures().find(place, Quantity.JUNCTION_CELSIUS, HOTTEST).isPresent()) {
+        table.row(
+            names.reference(place),
+            place,
+            shown(place, Quantity.DISSIPATION_WATTS, HOTTEST),
+            shown(place, Quantity.JUNCTION_CELSIUS, HOTTEST),
+            shown(place, Quantity.SURFACE_CELSIUS, HOTTEST));
+      }
+    }
+    section("Heat", table);
+  }
+
+  private void all() {
+    TextTable table = new TextTable().row("figure", "value");
+    kit.figures()
+        .all()
+        .forEach(
+            (name, value) -> {
+              Unit unit = name.quantity().unit();
+              table.row(name.toString(), Shown.quantity(value, unit));
+            });
+    section("All figures", table);
+  }
+}
