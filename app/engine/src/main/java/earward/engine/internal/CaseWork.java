@@ -22,9 +22,17 @@ final class CaseWork {
   final AudioTable audioTable;
   final CarrierTable carrierTable;
   final AudioSignal signal;
+
+  /** A second signal, for what is tried at another depth. */
+  final AudioSignal trial;
+
   final Outputs outputs;
   final SmallSignal small;
   final @Nullable Detection detection;
+
+  /** Room for a response over frequency. */
+  final double[] magnitudes = new double[SmallResponse.POINTS];
+
   private final double[] scratch;
   private final double[] former;
 
@@ -49,6 +57,7 @@ final class CaseWork {
     audioTable = new AudioTable(network, harmonics);
     carrierTable = new CarrierTable(network);
     signal = new AudioSignal(harmonics, network.size);
+    trial = new AudioSignal(harmonics, network.size);
     outputs = new Outputs(network);
     small = new SmallSignal(network.ports.size());
     detection =
@@ -172,7 +181,7 @@ final class CaseWork {
       }
       signal.clear();
       if (detection != null) {
-        gather(detection);
+        gather(detection, signal);
       }
       outputs.clip(audioTable, signal, stage());
       outputs.measureSignal(signal, stage());
@@ -235,11 +244,12 @@ final class CaseWork {
     return true;
   }
 
-  private void gather(Detection parts) {
+  /** Adds what the ports' mean currents make in all unknowns. */
+  void gather(Detection parts, AudioSignal into) {
     int ports = network.ports.size();
-    for (int h = 1; h <= signal.harmonics; h++) {
+    for (int h = 1; h <= into.harmonics; h++) {
       for (int j = 0; j < ports; j++) {
-        signal.add(
+        into.add(
             audioTable,
             h,
             j,

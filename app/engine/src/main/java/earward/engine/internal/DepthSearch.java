@@ -1,88 +1,123 @@
 package earward.engine.internal;
 
-import java.util.function.DoublePredicate;
+import java.util.function.DoubleSupplier;
 
-/** Searches the depth of modulation for which something first happens. */
+/** Searches the depth of modulation at which something first happens. */
 final class DepthSearch {
   /** Distortion up to which an envelope counts as clean. */
   static final double CLEAN_DISTORTION = 0.03;
 
-  private static final double LEAST = 0.02;
-  private static final double MOST = 1;
-  private static final int HALVINGS = 9;
+  /** Largest depth of the averaged method's domain. */
+  static final double MOST = 0.95;
 
-  private DepthSearch() {}
+  private static final double LEAST = 0.02;
+  private static final double CLOSE = 2e-3;
+  private static final int MOST_STEPS = 12;
+
+  private final CaseWork work;
+  private final Detection detection;
+  private final DoubleSupplier margin;
 
   /**
-   * Depth at which the detector's own distortion between two nodes reaches 3 %, outputs unclipped;
-   * 1 where it never does.
+   * A search.
+   *
+   * @param margin of the present solution, above 0 where all is well
+   */
+  private DepthSearch(CaseWork work, Detection detection, DoubleSupplier margin) {
+    this.work = work;
+    this.detection = detection;
+    this.margin = margin;
+  }
+
+  /**
+   * Depth at which the detector's own distortion between two nodes reaches 3 %, outputs unclipped:
+   * 0.95, the end of the method's domain, where it stays below, and 0 where it never does.
    */
   static double clean(CaseWork work, int plus, int minus) {
     Detection detection = work.detection;
     if (detection == null || !work.solved()) {
       return Double.NaN;
     }
-    AudioSignal trial = new AudioSignal(work.signal.harmonics, work.network.size);
-    return search(
-        work,
-        detection,
-        depth -> {
-          trial.clear();
-          int ports = work.network.ports.size();
-          for (int h = 1; h <= trial.harmonics; h++) {
-            for (int j = 0; j < ports; j++) {
-              double real = detection.modulated.audioReal[h * ports + j];
-              double imaginary = detection.modulated.audioImaginary[h * ports + j];
-              trial.add(work.audioTable, h, j, real, imaginary);
-            }
-          }
-          return trial.distortion(plus, minus) <= CLEAN_DISTORTION;
-        });
+    DoubleSupplier margin =
+        () -> {
+          work.trial.clear();
+          work.gather(detection, work.trial);
+          return CLEAN_DISTORTION - work.trial.distortion(plus, minus);
+        };
+    return new DepthSearch(work, detection, margin).run();
   }
 
-  /** Depth at which a port's mean current first reverses; 1 where it never does. */
+  /** Depth at which a port's mean current first reverses; 0.95 where it never does. */
   static double reversal(CaseWork work, int port) {
     Detection detection = work.detection;
     if (detection == null || !work.solved()) {
       return Double.NaN;
     }
     int samples = detection.modulated.audioSamples();
-    return search(
-        work,
-        detection,
-        depth -> {
+    DoubleSupplier margin =
+        () -> {
+          double least = Double.POSITIVE_INFINITY;
+          double sum = 0;
           for (int s = 0; s < samples; s++) {
-            if (detection.modulated.meanAmperes[port * samples + s] < 0) {
-              return false;
-            }
+            double amperes = detection.modulated.meanAmperes[port * samples + s];
+            least = Math.min(least, amperes);
+            sum += Math.abs(amperes) / samples;
           }
-          return true;
-        });
+          return least / sum;
+        };
+    return new DepthSearch(work, detection, margin).run();
   }
 
-  /** The largest depth that is well; the case's own solution is restored. */
-  private static double search(CaseWork work, Detection detection, DoublePredicate well) {
-    double low = LEAST;
+  /** The search; afterwards the case's own solution stands again. */
+  private double run() {
+    double found = search();
+    return Double.isNaN(at(work.depth())) ? Double.NaN : found;
+  }
+
+  /** False position with the stale end's margin halved (Illinois), from the case's own depth. */
+  private double search() {
+    double low = Math.min(MOST, Math.max(LEAST, work.depth()));
+    double lowMargin = at(low);
     double high = MOST;
-    double found = Double.NaN;
-    if (solves(work, detection, LEAST) && well.test(LEAST)) {
-      boolean clean = solves(work, detection, MOST) && well.test(MOST);
-      for (int i = 0; i < HALVINGS && !clean; i++) {
-        double middle = (low + high) / 2;
-        if (solves(work, detection, middle) && well.test(middle)) {
-          low = middle;
-        } else {
-          high = middle;
-        }
+    if (!(lowMargin > 0)) {
+      high = low;
+      low = LEAST;
+      lowMargin = at(low);
+      if (!(lowMargin > 0)) {
+        return 0;
       }
-      found = clean ? MOST : (low + high) / 2;
-    } else {
-      found = 0;
     }
-    return solves(work, detection, work.depth()) ? found : Double.NaN;
+    double highMargin = at(high);
+    if (highMargin > 0) {
+      return high;
+    }
+    for (int i = 0; i < MOST_STEPS && high - low > CLOSE; i++) {
+      double middle =
+          Double.isNaN(highMargin)
+              ? (low + high) / 2
+              : low + (high - low) * inside(lowMargin / (lowMargin - highMargin));
+      double here = at(middle);
+      if (here > 0) {
+        low = middle;
+        lowMargin = here;
+        highMargin /= 2;
+      } else {
+        high = middle;
+        highMargin = here;
+        lowMargin /= 2;
+      }
+    }
+    return (low + high) / 2;
   }
 
-  private static boolean solves(CaseWork work, Detection detection, double depth) {
-    return detection.solveModulated(work.peakVolts(), depth, work.toneRadians());
+  private static double inside(double share) {
+    return Math.min(0.98, Math.max(0.02, share));
+  }
+
+  /** Margin at a depth, NaN where the cycle does not settle there. */
+  private double at(double depth) {
+    return detection.solveModulated(work.peakVolts(), depth, work.toneRadians())
+        ? margin.getAsDouble()
+        : Double.NaN;
   }
 }

@@ -20,6 +20,7 @@ final class DirectSolver {
   private final DirectStage stage;
   private final double[] step;
   private final double[] kept;
+  private final double[] before;
   private int worst;
 
   DirectSolver(Network network) {
@@ -33,6 +34,7 @@ final class DirectSolver {
             network.diodes);
     step = new double[network.size];
     kept = new double[network.size];
+    before = new double[network.size];
   }
 
   DirectStage stage() {
@@ -73,8 +75,7 @@ final class DirectSolver {
     double grow = 0.1;
     for (int tries = 0; tries < 60; tries++) {
       double next = Math.min(1, share + grow);
-      System.arraycopy(stage.solution(), 0, step, 0, step.length);
-      double[] before = step.clone();
+      System.arraycopy(stage.solution(), 0, before, 0, before.length);
       stage.continuation(next, DirectStage.FLOOR_SIEMENS);
       if (newton()) {
         share = next;

@@ -4,7 +4,7 @@ package earward.engine.internal;
 final class SmallResponse {
   private static final double LOWEST_HERTZ = 5;
   private static final double HIGHEST_HERTZ = 100e3;
-  private static final int POINTS = 48;
+  static final int POINTS = 48;
   private static final int HALVINGS = 12;
 
   private SmallResponse() {}
@@ -69,7 +69,7 @@ final class SmallResponse {
    */
   static double edge(CaseWork work, int plus, int minus, boolean upper) {
     double step = Math.pow(HIGHEST_HERTZ / LOWEST_HERTZ, 1.0 / (POINTS - 1));
-    double[] magnitudes = new double[POINTS];
+    double[] magnitudes = work.magnitudes;
     int best = 0;
     for (int i = 0; i < POINTS; i++) {
       magnitudes[i] = magnitude(work, LOWEST_HERTZ * Math.pow(step, i), plus, minus);
