@@ -43,6 +43,8 @@ class ClosedFormsTest {
     "2e-7, 1.3, 0.1, 0.025206, 136.86",
     "2e-7, 1.3, 0.5, 0.328039, 74.376",
     "2e-7, 1.3, 1, 0.787939, 62.953",
+    "2e-7, 1.3, 2, 1.749865, 56.982",
+    "2e-7, 1.3, 5, 4.701448, 53.129",
     "3e-6, 1.06, 0.05, 0.017726, 11.801",
     "3e-6, 1.06, 0.2, 0.137738, 24.598",
     "2.117e-7, 1.016, 0.5, 0.361330, 67.148",
@@ -58,7 +60,7 @@ class ClosedFormsTest {
             .want("out", Quantity.DC_VOLTS)
             .want("detector.d1", Quantity.CARRIER_INPUT_OHMS)
             .figures();
-    assertThat(figures[0]).isCloseTo(direct, within(Math.max(6e-7, 2e-4 * direct)));
+    assertThat(figures[0]).isCloseTo(direct, within(Math.max(6e-7, 5e-4 * direct)));
     assertThat(figures[1] / 1e3).isCloseTo(inputKilohms, within(1e-3 * inputKilohms));
   }
 
@@ -107,10 +109,10 @@ class ClosedFormsTest {
             .generator(1e-3, "in")
             .diode("detector.d1", 1e-6, 1, 0, "in", "out")
             .resistor("detector.r", 220e3, "out", Circuit.GROUND)
-            .capacitor("detector.c", 100e-12, "out", Circuit.GROUND)
-            .capacitor("detector.cc", 1e-6, "out", "next")
+            .capacitor("detector.c", 1e-9, "out", Circuit.GROUND)
+            .capacitor("detector.cc", 10e-6, "out", "next")
             .resistor("detector.rl", 470e3, "next", Circuit.GROUND)
-            .signal(8, 0.3, 400)
+            .signal(8, 0.3, 50)
             .want("detector.d1", Quantity.CLIPPING_DEPTH)
             .want("detector.d1", Quantity.CLIPPING_DEPTH_WITHOUT_CAPACITOR)
             .want("detector.d1", Quantity.CLIPPING_DEPTH_WITHOUT_COUPLING)
