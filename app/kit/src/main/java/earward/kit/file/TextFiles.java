@@ -1,6 +1,8 @@
 package earward.kit.file;
 
 import java.io.IOException;
+import java.io.InputStream;
+import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.AccessDeniedException;
@@ -8,10 +10,14 @@ import java.nio.file.AtomicMoveNotSupportedException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.nio.file.StandardOpenOption;
+import java.nio.file.attribute.PosixFileAttributeView;
+import java.util.UUID;
+import org.jspecify.annotations.Nullable;
 
 /** Whole text files, read and written with one sentence for each thing that can fail. */
 final class TextFiles {
-  private static final long LONGEST_BYTES = 40_000_000;
+  private static final int LONGEST_BYTES = 40_000_000;
 
   private TextFiles() {}
 
@@ -22,14 +28,12 @@ final class TextFiles {
     if (!Files.exists(file)) {
       throw fault("missing-file", file, "there is no such file; check the name and the folder");
     }
-    try {
-      if (Files.size(file) > LONGEST_BYTES) {
+    try (InputStream in = Files.newInputStream(file)) {
+      byte[] bytes = in.readNBytes(LONGEST_BYTES + 1);
+      if (bytes.length > LONGEST_BYTES) {
         throw fault("too-long", file, "the file is longer than 40 MB; this is no kit design");
       }
-      return StandardCharsets.UTF_8
-          .newDecoder()
-          .decode(java.nio.ByteBuffer.wrap(Files.readAllBytes(file)))
-          .toString();
+      return StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
     } catch (CharacterCodingException e) {
       throw fault("not-utf-8", file, "the file is no text in UTF-8; save it in that encoding");
     } catch (AccessDeniedException e) {
@@ -43,15 +47,17 @@ final class TextFiles {
     if (Files.isDirectory(file)) {
       throw fault("is-folder", file, "this is a folder; name a file in it");
     }
-    Path folder = file.toAbsolutePath().getParent();
-    if (folder == null || !Files.isDirectory(folder)) {
-      throw fault("missing-folder", file, "its folder does not exist; make it or name another");
-    }
     Path beside = null;
     try {
-      beside = Files.createTempFile(folder, ".earward-", ".part");
-      Files.writeString(beside, text, StandardCharsets.UTF_8);
-      moveOver(beside, file);
+      Path target = Files.exists(file) ? file.toRealPath() : file.toAbsolutePath();
+      Path folder = target.getParent();
+      if (folder == null || !Files.isDirectory(folder)) {
+        throw fault("missing-folder", file, "its folder does not exist; make it or name another");
+      }
+      beside = folder.resolve(".earward-" + UUID.randomUUID() + ".part");
+      Files.writeString(beside, text, StandardCharsets.UTF_8, StandardOpenOption.CREATE_NEW);
+      keepPermissions(target, beside);
+      moveOver(beside, target);
     } catch (IOException e) {
       remove(beside);
       throw fault(
@@ -63,6 +69,14 @@ final class TextFiles {
     }
   }
 
+  /** The new file may be read and written by whom the old one could. */
+  private static void keepPermissions(Path old, Path fresh) throws IOException {
+    if (Files.exists(old)
+        && Files.getFileStore(fresh).supportsFileAttributeView(PosixFileAttributeView.class)) {
+      Files.setPosixFilePermissions(fresh, Files.getPosixFilePermissions(old));
+    }
+  }
+
   private static void moveOver(Path from, Path to) throws IOException {
     try {
       Files.move(from, to, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
@@ -71,7 +85,7 @@ final class TextFiles {
     }
   }
 
-  private static void remove(@org.jspecify.annotations.Nullable Path part) {
+  private static void remove(@Nullable Path part) {
     if (part != null && !part.toFile().delete()) {
       part.toFile().deleteOnExit();
     }

@@ -7,6 +7,7 @@ final class DampedFit {
   private static final int FIGURES = 3;
   private static final int MOST_STEPS = 400;
   private static final double MOST_DAMPING = 1e12;
+  private static final double LEAST_COST = 1e-20;
   private static final double STEP = 1e-6;
 
   private final List<DiodePoint> points;
@@ -21,7 +22,7 @@ final class DampedFit {
     double[] at = {start.logSaturation(), start.emission(), start.seriesOhms()};
     double cost = curve(at).cost(points, thermalVolts);
     double damping = 1e-3;
-    for (int k = 0; k < MOST_STEPS && damping < MOST_DAMPING; k++) {
+    for (int k = 0; k < MOST_STEPS && damping < MOST_DAMPING && cost > LEAST_COST; k++) {
       double[] next = clamped(step(at, damping));
       double nextCost = curve(next).cost(points, thermalVolts);
       if (nextCost < cost) {

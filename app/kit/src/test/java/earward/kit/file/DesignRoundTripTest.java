@@ -13,8 +13,11 @@ import earward.kit.design.SettingEntry;
 import earward.kit.design.SheetOptions;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.attribute.PosixFileAttributeView;
+import java.nio.file.attribute.PosixFilePermissions;
 import java.util.Locale;
 import java.util.Map;
+import org.junit.jupiter.api.Assumptions;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -137,6 +140,21 @@ class DesignRoundTripTest {
     try (var files = Files.list(folder)) {
       assertThat(files).containsExactly(file);
     }
+  }
+
+  @Test
+  void aLinkStaysALinkAndAFileKeepsItsPermissions(@TempDir Path folder) throws Exception {
+    Assumptions.assumeTrue(
+        Files.getFileStore(folder).supportsFileAttributeView(PosixFileAttributeView.class));
+    Path file = Files.writeString(folder.resolve("real.earward"), "old");
+    Files.setPosixFilePermissions(file, PosixFilePermissions.fromString("rw-rw-r--"));
+    Path link = Files.createSymbolicLink(folder.resolve("link.earward"), file);
+    KitDesign design = Designs.read(Samples.LEAST, Samples.NAME).design();
+    Designs.write(design, link);
+    assertThat(link).isSymbolicLink();
+    assertThat(Files.readString(file)).isEqualTo(Designs.text(design));
+    assertThat(PosixFilePermissions.toString(Files.getPosixFilePermissions(file)))
+        .isEqualTo("rw-rw-r--");
   }
 
   @Test
