@@ -20,14 +20,25 @@ final class DescribedNets {
   private DescribedNets() {}
 
   static Netlist of(List<SheetBlock> path, List<SheetBlock> beside) {
-    DescribedNets nets = new DescribedNets();
-    for (int i = 1; i < path.size(); i++) {
-      nets.joinSeam(path.get(i - 1), path.get(i));
-    }
+    DescribedNets nets = joining(path);
     SortedMap<String, SortedSet<String>> found = new TreeMap<>();
     path.forEach(block -> nets.add(block, found));
     beside.forEach(block -> nets.add(block, found));
     return new Netlist(found);
+  }
+
+  /** The nets of a path, joined at its seams. */
+  static DescribedNets joining(List<SheetBlock> path) {
+    DescribedNets nets = new DescribedNets();
+    for (int i = 1; i < path.size(); i++) {
+      nets.joinSeam(path.get(i - 1), path.get(i));
+    }
+    return nets;
+  }
+
+  /** The net of a block's node. */
+  String net(SheetBlock block, String node) {
+    return root(block.globalNode(node));
   }
 
   private void joinSeam(SheetBlock left, SheetBlock right) {
@@ -70,6 +81,6 @@ final class DescribedNets {
 
   private SortedSet<String> net(
       SortedMap<String, SortedSet<String>> found, SheetBlock block, String node) {
-    return found.computeIfAbsent(root(block.globalNode(node)), any -> new TreeSet<>());
+    return found.computeIfAbsent(net(block, node), any -> new TreeSet<>());
   }
 }

@@ -1,10 +1,10 @@
 package earward.drawing;
 
+import earward.drawing.internal.element.Box;
 import earward.drawing.internal.element.Element;
 import earward.drawing.internal.element.Mark;
 import earward.drawing.internal.element.Symbol;
 import earward.drawing.internal.element.Text;
-import earward.drawing.internal.paint.Painter;
 import earward.drawing.internal.reading.NetReader;
 import earward.drawing.internal.reading.OverlapReader;
 import java.awt.Font;
@@ -20,6 +20,7 @@ import java.util.TreeSet;
 public final class Schematic {
   private final double width;
   private final double height;
+  private final double scale;
   private final Font font;
   private final List<Element> elements;
   private final List<Rectangle2D.Double> rows;
@@ -27,11 +28,13 @@ public final class Schematic {
   Schematic(
       double width,
       double height,
+      double scale,
       Font font,
       List<Element> elements,
       List<Rectangle2D.Double> rows) {
     this.width = width;
     this.height = height;
+    this.scale = scale;
     this.font = font;
     this.elements = List.copyOf(elements);
     this.rows = List.copyOf(rows);
@@ -57,7 +60,7 @@ public final class Schematic {
     Map<String, Rectangle2D> found = new TreeMap<>();
     for (Element element : elements) {
       if (element instanceof Symbol symbol) {
-        found.put(symbol.part(), rectangle(symbol));
+        found.put(symbol.part(), rectangle(symbol.bounds()));
       }
     }
     return found;
@@ -68,20 +71,23 @@ public final class Schematic {
     Map<String, Rectangle2D> found = new TreeMap<>();
     for (Element element : elements) {
       if (element instanceof Mark mark && mark.kind() == Mark.Kind.TEST_POINT) {
-        found.put(mark.name(), rectangle(mark));
+        found.put(mark.name(), rectangle(mark.bounds()));
       }
     }
     return found;
   }
 
-  private static Rectangle2D rectangle(Element element) {
-    var box = element.bounds();
-    return new Rectangle2D.Double(box.left(), box.top(), box.width(), box.height());
+  private Rectangle2D rectangle(Box box) {
+    return new Rectangle2D.Double(
+        box.left() * scale, box.top() * scale, box.width() * scale, box.height() * scale);
   }
 
   /** Draws all of it with its upper left corner at the origin; the graphics' state is kept. */
   public void paint(Graphics2D graphics, Ink ink) {
-    new Painter(graphics, ink, font).paint(elements);
+    Graphics2D scaled = (Graphics2D) graphics.create();
+    scaled.scale(scale, scale);
+    new Painter(scaled, ink, font).paint(elements);
+    scaled.dispose();
   }
 
   /**
@@ -89,7 +95,7 @@ public final class Schematic {
    * Wires that cross without a dot are not connected.
    */
   public Netlist readBack() {
-    return NetReader.read(elements);
+    return new Netlist(NetReader.read(elements));
   }
 
   /**
@@ -105,7 +111,7 @@ public final class Schematic {
     SortedSet<Double> found = new TreeSet<>();
     for (Element element : elements) {
       if (element instanceof Text text) {
-        found.add(text.sizePoints());
+        found.add(text.sizePoints() * scale);
       }
     }
     return found;
@@ -118,6 +124,6 @@ public final class Schematic {
 
   /** The same drawing with other geometry, for tests. */
   Schematic withElements(List<Element> changed) {
-    return new Schematic(width, height, font, changed, rows);
+    return new Schematic(width, height, scale, font, changed, rows);
   }
 }

@@ -1,9 +1,24 @@
 package earward.drawing;
 
+import earward.drawing.internal.element.Box;
+import earward.drawing.internal.element.Element;
+import earward.drawing.internal.form.Lettering;
+import earward.drawing.internal.page.Page;
+import earward.drawing.internal.place.BlockPlan;
+import earward.drawing.internal.place.BlockTask;
+import earward.drawing.internal.place.Placer;
+import earward.drawing.internal.reading.OverlapReader;
+import earward.drawing.internal.route.Router;
+import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** Lays circuit drawings out from block descriptions. */
 public final class Schematics {
+  /** Air beyond the usual, in points, tried one after the other until every wire finds a way. */
+  private static final double[] SPACINGS = {0, 2, 4, 7, 12};
+
   private Schematics() {}
 
   /**
@@ -14,7 +29,62 @@ public final class Schematics {
    */
   public static Schematic lay(
       List<SheetBlock> path, List<SheetBlock> beside, LayoutOptions options) {
-    return new Schematic(options.widthPoints(), 0, options.font(), List.of(), List.of());
+    Lettering lettering = new Lettering(options.font());
+    double scale = options.textPoints() / Lettering.SIZE_POINTS;
+    Tasks tasks = new Tasks(path, beside);
+    List<BlockPlan> pathPlans = new ArrayList<>();
+    List<Integer> gaps = List.of();
+    for (SheetBlock block : path) {
+      BlockPlan plan = plan(tasks.task(block, gaps), lettering);
+      pathPlans.add(plan);
+      gaps = plan.exitRows().stream().map(row -> row - plan.exitRows().get(0)).toList();
+    }
+    List<BlockPlan> besidePlans =
+        beside.stream().map(block -> plan(tasks.task(block, List.of()), lettering)).toList();
+    Page page =
+        new Page(
+            lettering, options.widthPoints() / scale, options.words().to(), options.words().from());
+    Page.Laid laid = page.lay(pathPlans, besidePlans, tasks.flagNames());
+    return schematic(laid, scale, options);
+  }
+
+  private static Schematic schematic(Page.Laid laid, double scale, LayoutOptions options) {
+    double width = options.widthPoints();
+    double height = 0;
+    List<Rectangle2D.Double> rows = new ArrayList<>();
+    for (Box line : laid.lines()) {
+      width = Math.max(width, line.right() * scale);
+      height = Math.max(height, line.bottom() * scale);
+      rows.add(
+          new Rectangle2D.Double(
+              line.left() * scale,
+              line.top() * scale,
+              line.width() * scale,
+              line.height() * scale));
+    }
+    return new Schematic(width, height, scale, options.font(), laid.elements(), rows);
+  }
+
+  private static BlockPlan plan(BlockTask task, Lettering lettering) {
+    BlockPlan second = null;
+    for (double spacing : SPACINGS) {
+      Optional<BlockPlan> plan = Placer.plan(task, lettering, spacing);
+      if (plan.isEmpty()) {
+        continue;
+      }
+      Optional<List<Element>> drawn = Router.draw(plan.get(), Router.groundRow(plan.get()));
+      if (drawn.isPresent()) {
+        if (OverlapReader.read(drawn.get()).isEmpty()) {
+          return plan.get();
+        }
+        second = second == null ? plan.get() : second;
+      }
+    }
+    if (second != null) {
+      return second;
+    }
+    throw new IllegalStateException(
+        "block '" + task.id() + "' cannot be drawn: some part or wire finds no place");
   }
 
   /** The drawing of one block alone. */

@@ -58,4 +58,14 @@ public record Box(double left, double top, double right, double bottom) {
   public double height() {
     return bottom - top;
   }
+
+  /** The x within the box that is nearest to one. */
+  public double nearestX(double x) {
+    return Math.max(left, Math.min(right, x));
+  }
+
+  /** The y within the box that is nearest to one. */
+  public double nearestY(double y) {
+    return Math.max(top, Math.min(bottom, y));
+  }
 }

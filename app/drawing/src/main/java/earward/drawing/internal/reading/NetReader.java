@@ -1,7 +1,6 @@
 package earward.drawing.internal.reading;
 
 import earward.block.wiring.Nodes;
-import earward.drawing.Netlist;
 import earward.drawing.internal.element.Dot;
 import earward.drawing.internal.element.Element;
 import earward.drawing.internal.element.End;
@@ -38,12 +37,12 @@ public final class NetReader {
     }
   }
 
-  /** The netlist of a drawing. */
-  public static Netlist read(List<Element> elements) {
+  /** The ends that are joined, by net. */
+  public static SortedMap<String, SortedSet<String>> read(List<Element> elements) {
     return new NetReader().readAll(elements);
   }
 
-  private Netlist readAll(List<Element> elements) {
+  private SortedMap<String, SortedSet<String>> readAll(List<Element> elements) {
     for (Element element : elements) {
       if (element instanceof Wire wire) {
         wires.add(wire);
@@ -60,7 +59,7 @@ public final class NetReader {
     return collect(elements);
   }
 
-  private Netlist collect(List<Element> elements) {
+  private SortedMap<String, SortedSet<String>> collect(List<Element> elements) {
     Map<Integer, SortedSet<String>> ends = new LinkedHashMap<>();
     for (Element element : elements) {
       if (element instanceof Symbol symbol) {
@@ -83,7 +82,7 @@ public final class NetReader {
     SortedMap<String, SortedSet<String>> nets = new TreeMap<>();
     ends.forEach(
         (net, set) -> nets.put(sharedNames.getOrDefault(net, "net of " + set.first()), set));
-    return new Netlist(nets);
+    return nets;
   }
 
   private int named(Mark mark) {

@@ -3,6 +3,7 @@ package earward.drawing.internal.reading;
 import earward.drawing.internal.element.Box;
 import earward.drawing.internal.element.Dot;
 import earward.drawing.internal.element.Element;
+import earward.drawing.internal.element.End;
 import earward.drawing.internal.element.Mark;
 import earward.drawing.internal.element.Rule;
 import earward.drawing.internal.element.Symbol;
@@ -10,57 +11,147 @@ import earward.drawing.internal.element.Text;
 import earward.drawing.internal.element.Wire;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /** Finds what lies over what. */
 public final class OverlapReader {
   private static final double HAIR = 0.01;
 
-  private final List<Element> elements;
+  private final List<Dot> dots = new ArrayList<>();
   private final List<String> found = new ArrayList<>();
 
-  private OverlapReader(List<Element> elements) {
-    this.elements = elements;
-  }
+  private OverlapReader() {}
 
-  /** The overlaps of a drawing, one sentence each. */
+  /** The overlaps of a drawing and its missing dots, one sentence each. */
   public static List<String> read(List<Element> elements) {
-    OverlapReader reader = new OverlapReader(elements);
+    OverlapReader reader = new OverlapReader();
+    elements.forEach(reader::keep);
     for (int i = 0; i < elements.size(); i++) {
       for (int k = i + 1; k < elements.size(); k++) {
         reader.compare(elements.get(i), elements.get(k));
       }
     }
+    reader.found.addAll(DotReader.read(elements));
     return List.copyOf(reader.found);
+  }
+
+  private void keep(Element element) {
+    if (element instanceof Dot dot) {
+      dots.add(dot);
+    }
   }
 
   private void compare(Element a, Element b) {
     if (a instanceof Dot || b instanceof Dot) {
       return;
     }
-    if (a instanceof Wire one && b instanceof Wire two) {
-      wires(one, two);
+    if (a instanceof Text || b instanceof Text) {
+      if (!owns(a, b) && !owns(b, a) && anyMeet(a, b)) {
+        report(a, b);
+      }
     } else if (a instanceof Rule || b instanceof Rule) {
       seam(a, b);
-    } else if (a instanceof Text || b instanceof Text) {
-      text(a, b);
     } else {
-      bodies(a, b);
+      lines(a, b);
+      if (anyMeet(a, b)) {
+        report(a, b);
+      }
     }
   }
 
-  private void wires(Wire a, Wire b) {
-    if (a.across() == b.across()) {
-      boolean sameLine = a.across() ? a.y1() == b.y1() : a.x1() == b.x1();
-      if (sameLine && stretch(a, b) > HAIR) {
-        report(a, b);
-      }
-    } else if (endsInside(a, b) || endsInside(b, a)) {
-      Wire across = a.across() ? a : b;
-      Wire down = a.across() ? b : a;
-      if (!dotAt(down.x1(), across.y1())) {
-        found.add("a wire ends on another without a dot: " + name(a) + ", " + name(b));
+  /** Whether a text stands within the outline of its own symbol or mark. */
+  private static boolean owns(Element owner, Element text) {
+    return text instanceof Text line
+        && !line.inside().isEmpty()
+        && name(owner).equals(line.inside());
+  }
+
+  private static boolean anyMeet(Element a, Element b) {
+    for (Box one : solids(a)) {
+      for (Box two : solids(b)) {
+        boolean crossing = isLine(a, one) && isLine(b, two);
+        if (!crossing && meets(one, two)) {
+          return true;
+        }
       }
     }
+    return false;
+  }
+
+  private static boolean isLine(Element element, Box box) {
+    return !(element instanceof Text) && (box.width() < HAIR || box.height() < HAIR);
+  }
+
+  /** The body, and each lead as a line without breadth. */
+  private static List<Box> solids(Element element) {
+    List<Box> all = new ArrayList<>();
+    if (element instanceof Symbol symbol) {
+      all.add(symbol.body());
+      symbol.ends().forEach(end -> all.add(lead(end.x(), end.y(), symbol.body())));
+    } else if (element instanceof Mark mark) {
+      all.add(mark.body());
+      all.add(lead(mark.x(), mark.y(), mark.body()));
+    } else {
+      all.add(element.bounds());
+    }
+    return all;
+  }
+
+  private static Box lead(double x, double y, Box body) {
+    return Box.between(x, y, body.nearestX(x), body.nearestY(y));
+  }
+
+  private static List<Wire> wires(Element element) {
+    if (element instanceof Wire wire) {
+      return List.of(wire);
+    }
+    List<Wire> all = new ArrayList<>();
+    for (Box box : solids(element)) {
+      if (isLine(element, box) && box.width() + box.height() > HAIR) {
+        all.add(new Wire(box.left(), box.top(), box.right(), box.bottom()));
+      }
+    }
+    return all;
+  }
+
+  private void lines(Element a, Element b) {
+    for (Wire one : wires(a)) {
+      for (Wire two : wires(b)) {
+        if (one.across() == two.across()) {
+          boolean sameLine = one.across() ? one.y1() == two.y1() : one.x1() == two.x1();
+          if (sameLine && stretch(one, two) > HAIR) {
+            report(a, b);
+          }
+        } else if (endsInside(one, two) || endsInside(two, one)) {
+          Wire across = one.across() ? one : two;
+          Wire down = one.across() ? two : one;
+          if (!dotAt(down.x1(), across.y1())) {
+            found.add("a wire ends on another without a dot: " + place(a) + ", " + place(b));
+          }
+        } else if (crosses(one, two) && !(a instanceof Wire && b instanceof Wire)) {
+          report(a, b);
+        }
+      }
+    }
+    endsOn(a, b);
+    endsOn(b, a);
+  }
+
+  /** A wire that runs over the end of a symbol looks joined to it. */
+  private void endsOn(Element a, Element b) {
+    if (a instanceof Wire wire && b instanceof Symbol symbol) {
+      for (End end : symbol.ends()) {
+        if (inside(end.x(), end.y(), wire) && !dotAt(end.x(), end.y())) {
+          found.add("a wire passes an end without a dot: " + end.name());
+        }
+      }
+    }
+  }
+
+  private static boolean crosses(Wire a, Wire b) {
+    Box one = a.bounds();
+    Box two = b.bounds();
+    return meets(one, two);
   }
 
   private static double stretch(Wire a, Wire b) {
@@ -83,56 +174,17 @@ public final class OverlapReader {
   }
 
   private boolean dotAt(double x, double y) {
-    return elements.stream()
-        .anyMatch(e -> e instanceof Dot dot && Math.hypot(dot.x() - x, dot.y() - y) < HAIR);
+    return dots.stream().anyMatch(dot -> Math.hypot(dot.x() - x, dot.y() - y) < HAIR);
   }
 
   private void seam(Element a, Element b) {
+    Element rule = a instanceof Rule ? a : b;
     Element other = a instanceof Rule ? b : a;
-    if (other instanceof Symbol || other instanceof Text) {
-      Element rule = a instanceof Rule ? a : b;
-      Box box = other instanceof Symbol symbol ? symbol.body() : other.bounds();
-      if (meets(rule.bounds(), box)) {
+    if (other instanceof Symbol || other instanceof Mark) {
+      if (solids(other).stream().anyMatch(box -> meets(rule.bounds(), box))) {
         report(a, b);
       }
     }
-  }
-
-  private void text(Element a, Element b) {
-    if (a instanceof Text one && b instanceof Text two) {
-      if (one.box().overlaps(two.box())) {
-        report(a, b);
-      }
-      return;
-    }
-    Text text = (Text) (a instanceof Text ? a : b);
-    Element other = a instanceof Text ? b : a;
-    if (owner(other).equals(text.inside())) {
-      return;
-    }
-    if (meets(text.box(), other.bounds())) {
-      report(a, b);
-    }
-  }
-
-  private void bodies(Element a, Element b) {
-    if (meets(body(a), body(b)) && !touchesAtItsPoint(a, b) && !touchesAtItsPoint(b, a)) {
-      report(a, b);
-    }
-  }
-
-  /** A wire may lie on the box of a mark only where the mark hangs on it. */
-  private static boolean touchesAtItsPoint(Element wire, Element mark) {
-    if (!(wire instanceof Wire piece) || !(mark instanceof Mark hung)) {
-      return false;
-    }
-    return inside(hung.x(), hung.y(), piece)
-        || (Math.abs(piece.x1() - hung.x()) < HAIR && Math.abs(piece.y1() - hung.y()) < HAIR)
-        || (Math.abs(piece.x2() - hung.x()) < HAIR && Math.abs(piece.y2() - hung.y()) < HAIR);
-  }
-
-  private static Box body(Element element) {
-    return element instanceof Symbol symbol ? symbol.body() : element.bounds();
   }
 
   /** As {@link Box#overlaps}, but a line without breadth counts too. */
@@ -143,29 +195,25 @@ public final class OverlapReader {
         && b.top() < a.bottom() - HAIR;
   }
 
-  private static String owner(Element element) {
+  private void report(Element a, Element b) {
+    found.add(place(a) + " lies over " + place(b));
+  }
+
+  private static String name(Element element) {
     if (element instanceof Symbol symbol) {
       return symbol.part();
     }
     return element instanceof Mark mark ? mark.kind() + " " + mark.name() : "";
   }
 
-  private void report(Element a, Element b) {
-    found.add(name(a) + " lies over " + name(b));
-  }
-
-  private static String name(Element element) {
+  private static String place(Element element) {
     Box box = element.bounds();
-    String place = String.format(java.util.Locale.ROOT, " at (%.0f, %.0f)", box.left(), box.top());
-    if (element instanceof Text text) {
-      return "text '" + text.text() + "'" + place;
-    }
-    if (element instanceof Symbol symbol) {
-      return "symbol " + symbol.part() + place;
-    }
-    if (element instanceof Mark mark) {
-      return "mark " + mark.kind() + " " + mark.name() + place;
-    }
-    return (element instanceof Wire ? "wire" : "seam") + place;
+    String what =
+        element instanceof Text text
+            ? "text '" + text.text() + "'"
+            : element instanceof Wire
+                ? "a wire"
+                : element instanceof Rule ? "a seam" : name(element);
+    return String.format(Locale.ROOT, "%s at (%.0f, %.0f)", what, box.left(), box.top());
   }
 }

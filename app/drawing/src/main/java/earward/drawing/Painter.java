@@ -1,6 +1,5 @@
-package earward.drawing.internal.paint;
+package earward.drawing;
 
-import earward.drawing.Ink;
 import earward.drawing.internal.element.Dot;
 import earward.drawing.internal.element.Element;
 import earward.drawing.internal.element.Mark;
@@ -19,7 +18,7 @@ import java.awt.geom.Line2D;
 import java.util.List;
 
 /** Draws elements; used once, on one thread. */
-public final class Painter {
+final class Painter {
   private static final float SYMBOL_POINTS = 1.2f;
   private static final float WIRE_POINTS = 0.8f;
   private static final float BOLD_POINTS = 2.0f;
@@ -32,14 +31,14 @@ public final class Painter {
   private final Font font;
 
   /** A painter of one drawing. */
-  public Painter(Graphics2D graphics, Ink ink, Font font) {
+  Painter(Graphics2D graphics, Ink ink, Font font) {
     this.graphics = (Graphics2D) graphics.create();
     this.ink = ink;
     this.font = font;
   }
 
   /** Draws them in order: seams first, then wires, symbols and text. */
-  public void paint(List<Element> elements) {
+  void paint(List<Element> elements) {
     graphics.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
     graphics.setRenderingHint(
         RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);

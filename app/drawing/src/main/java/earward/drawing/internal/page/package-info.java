@@ -1,0 +1,5 @@
+/** Blocks side by side in rows. */
+@NullMarked
+package earward.drawing.internal.page;
+
+import org.jspecify.annotations.NullMarked;

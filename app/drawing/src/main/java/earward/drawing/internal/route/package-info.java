@@ -1,0 +1,5 @@
+/** Wires between placed parts. */
+@NullMarked
+package earward.drawing.internal.route;
+
+import org.jspecify.annotations.NullMarked;
