@@ -94,4 +94,14 @@ public abstract class BlockContract {
   void itsJudgementBearsAnyFigures() {
     keepsTo(new JudgementRule());
   }
+
+  @Test
+  void itHasADirectCurrentSolutionWithEachFaultToo() {
+    keepsTo(new DirectCurrentRule());
+  }
+
+  @Test
+  void aWholeKitAroundItIsSolved() {
+    keepsTo(new WholeKitRule());
+  }
 }

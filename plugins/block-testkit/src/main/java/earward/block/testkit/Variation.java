@@ -16,6 +16,9 @@ import java.util.Optional;
  */
 public record Variation(String name, Values values, Conditions conditions) {
 
+  /** How the name of a variation begins whose values are those of a new block. */
+  static final String USUAL = "usual values";
+
   /** Conditions of a plain medium-wave receiver, for tries. */
   public static final Conditions PLAIN_CONDITIONS =
       new Conditions(455e3, 400, 4.5e3, 150, 0.3, 0.8, 0.15, 1.2, 3, 25, 40, 0.1);
@@ -24,6 +27,11 @@ public record Variation(String name, Values values, Conditions conditions) {
     Objects.requireNonNull(name);
     Objects.requireNonNull(values);
     Objects.requireNonNull(conditions);
+  }
+
+  /** Whether all values stand as in a new block; choices and parts may differ. */
+  boolean usual() {
+    return name.startsWith(USUAL);
   }
 
   /** The block in this variation. */

@@ -23,7 +23,7 @@ public final class Variations {
   private Variations() {}
 
   private enum Stand {
-    USUAL("usual values"),
+    USUAL(Variation.USUAL),
     LEAST("least values"),
     MOST("most values");
 
