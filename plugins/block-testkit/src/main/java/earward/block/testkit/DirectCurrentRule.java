@@ -8,6 +8,7 @@ import earward.block.device.Terminal;
 import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
 import earward.block.figure.Quantity;
+import earward.block.wiring.Wiring;
 import earward.engine.Circuit;
 import earward.engine.CircuitException;
 import earward.engine.CircuitPart;
@@ -18,6 +19,7 @@ import earward.engine.SolveCase;
 import earward.engine.SolveOutcome;
 import earward.engine.Solver;
 import earward.kit.path.Assembly;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -39,8 +41,12 @@ public final class DirectCurrentRule implements BlockRule {
   @Override
   public List<String> faults(BlockType type, List<Variation> variations) {
     Faults faults = new Faults();
+    Set<Wiring> seen = new HashSet<>();
     for (Variation variation : variations) {
-      variation.attempt(type).ifPresent(d -> tried(type, d, variation, faults));
+      variation
+          .attempt(type)
+          .filter(description -> seen.add(description.wiring()))
+          .ifPresent(description -> tried(type, description, variation, faults));
     }
     return faults.all();
   }

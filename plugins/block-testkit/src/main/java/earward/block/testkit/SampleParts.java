@@ -77,29 +77,22 @@ public final class SampleParts {
     return amplifier(
         "sample single-ended amplifier",
         new AmplifierGain(50, 6000, 5000, 20e3, 5e-6, List.of()),
-        INVERTING,
-        GAIN,
-        COMPENSATION,
-        INPUT,
-        GROUND,
-        OUTPUT,
-        SUPPLY,
-        BOOTSTRAP,
-        RIPPLE);
+        pins(COMPENSATION, GAIN, INPUT, GROUND, OUTPUT, SUPPLY, BOOTSTRAP, RIPPLE));
   }
 
+  /** Pin 5 is not used by the bridge, as in types that are a pair of amplifiers. */
   private static AmplifierModel bridge() {
     return amplifier(
         "sample bridge amplifier",
         new AmplifierGain(90, NONE, 5000, 100e3, 0, List.of()),
-        OUTPUT,
-        SUPPLY,
-        OUTPUT_TWO,
-        GROUND,
-        INVERTING,
-        GROUND,
-        INPUT,
-        INVERTING);
+        List.of(
+            new Pin(1, OUTPUT),
+            new Pin(2, SUPPLY),
+            new Pin(3, OUTPUT_TWO),
+            new Pin(4, GROUND),
+            new Pin(6, GROUND),
+            new Pin(7, INPUT),
+            new Pin(8, INVERTING)));
   }
 
   private static AmplifierModel controlledBridge() {
@@ -112,23 +105,21 @@ public final class SampleParts {
             100e3,
             0,
             List.of(new ControlPoint(0.4, -60), new ControlPoint(1.2, 0))),
-        SUPPLY,
-        INPUT,
-        GROUND,
-        CONTROL,
-        OUTPUT,
-        GROUND,
-        OUTPUT_TWO);
+        pins(SUPPLY, INPUT, GROUND, CONTROL, OUTPUT, GROUND, OUTPUT_TWO));
   }
 
-  private static AmplifierModel amplifier(String name, AmplifierGain gain, Terminal... terminals) {
+  private static List<Pin> pins(Terminal... terminals) {
     List<Pin> pins = new ArrayList<>();
     for (Terminal terminal : terminals) {
       pins.add(new Pin(pins.size() + 1, terminal));
     }
+    return pins;
+  }
+
+  private static AmplifierModel amplifier(String name, AmplifierGain gain, List<Pin> pins) {
     return new AmplifierModel(
         name,
-        List.of(terminals).contains(OUTPUT_TWO),
+        pins.stream().anyMatch(pin -> pin.terminal() == OUTPUT_TWO),
         gain,
         new OutputSwing(0.8, 1.5, 0.6, 1.2, 1),
         new AmplifierRatings(3, 16, 4, 1.5, 150, 100, 30),

@@ -9,7 +9,9 @@ import earward.kit.path.Assembly;
 import earward.kit.path.Figures;
 import earward.kit.path.KitSolver;
 import earward.kit.path.SolvedKit;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 
 /**
  * In the smallest whole kit every case of the kit is solved with the block in it, and each figure
@@ -23,7 +25,12 @@ public final class WholeKitRule implements BlockRule {
   @Override
   public List<String> faults(BlockType type, List<Variation> variations) {
     Faults faults = new Faults();
-    List<Variation> usual = variations.stream().filter(Variation::usual).toList();
+    Set<BlockDescription> seen = new HashSet<>();
+    List<Variation> usual =
+        variations.stream()
+            .filter(Variation::usual)
+            .filter(variation -> variation.attempt(type).filter(seen::add).isPresent())
+            .toList();
     int step = Math.max(1, (usual.size() + MOST_VARIATIONS - 1) / MOST_VARIATIONS);
     for (int i = 0; i < usual.size(); i += step) {
       Variation variation = usual.get(i);

@@ -18,6 +18,7 @@ import earward.block.device.BatteryModel;
 import earward.block.device.Capacitor;
 import earward.block.device.PartKind;
 import earward.block.device.Resistor;
+import earward.block.device.Terminal;
 import earward.block.figure.FigureName;
 import earward.block.quantity.Series;
 import earward.block.quantity.Unit;
@@ -399,5 +400,61 @@ class RulesGoRedTest {
     for (PartKind kind : PartKind.values()) {
       assertThat(SampleParts.of(kind)).isNotEmpty().allMatch(part -> part.kind() == kind);
     }
+  }
+
+  @Test
+  void anElectrolyticTheWrongWayRoundIsFoundInTheSolvedCircuit() {
+    SampleBlock reversed =
+        wired(
+            values ->
+                Wiring.from(new Single("in"))
+                    .run("couple", Capacitor.of(1e-7, 63), "out")
+                    .up("r1", new Resistor(10e3), Nodes.MAIN_RAIL)
+                    .down("r2", new Resistor(10e3), GROUND)
+                    .down("c1", Capacitor.of(10e-6, 25), Terminal.B, GROUND)
+                    .testPoint("out", "out")
+                    .to(new Single("out")));
+
+    assertThat(faults(new DirectCurrentRule(), reversed))
+        .isNotEmpty()
+        .allMatch(f -> f.contains("'c1'") && f.contains("terminal A at the more positive"));
+  }
+
+  @Test
+  void aBlockThatDoesNotFitIntoAKitIsFound() {
+    SampleBlock plain =
+        wired(
+            values ->
+                Wiring.from(new Single("in"))
+                    .run("r1", new Resistor(1e3), "out")
+                    .testPoint("out", "out")
+                    .to(new Single("out")));
+    SampleBlock asLoad =
+        new SampleBlock() {
+          @Override
+          public Role role() {
+            return Role.LOAD;
+          }
+        };
+
+    assertThat(faults(new DirectCurrentRule(), plain)).isEmpty();
+    assertThat(faults(new DirectCurrentRule(), asLoad))
+        .anyMatch(f -> f.contains("does not fit into a kit"));
+    assertThat(faults(new WholeKitRule(), asLoad)).anyMatch(f -> f.contains("is not solved"));
+  }
+
+  @Test
+  void aCheckThatTheKitCannotHoldIsFound() {
+    SampleBlock heated =
+        new SampleBlock() {
+          @Override
+          protected Check check() {
+            return SampleBlock.check("r1:junction-celsius@hottest", 1);
+          }
+        };
+
+    assertThat(faults(new WholeKitRule(), heated))
+        .isNotEmpty()
+        .allMatch(f -> f.contains("check treble cannot be held"));
   }
 }
