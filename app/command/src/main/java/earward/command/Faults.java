@@ -62,6 +62,6 @@ final class Faults {
   }
 
   static void say(PrintWriter messages, String sentence) {
-    messages.println("earward: " + sentence);
+    messages.println("earward: " + Shown.plain(sentence));
   }
 }

@@ -1,5 +1,8 @@
 package earward.command;
 
+import earward.host.PluginSet;
+import earward.kit.parts.PartsLibrary;
+import earward.kit.proposal.Remedies;
 import earward.kit.review.ReviewedKit;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -9,6 +12,11 @@ import picocli.CommandLine.Option;
 final class ReviewCommand extends DesignCommand {
   @Option(names = "--json", description = "As JSON, in SI base units (review.schema.json).")
   private boolean json;
+
+  @Override
+  ReviewedKit completed(ReviewedKit reviewed, PluginSet types, PartsLibrary parts) {
+    return Remedies.sought(reviewed, types, parts);
+  }
 
   @Override
   void show(ReviewedKit reviewed) {

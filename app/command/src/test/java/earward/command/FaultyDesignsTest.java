@@ -112,6 +112,21 @@ class FaultyDesignsTest {
   }
 
   @Test
+  void aSupplyOverTheLimit() throws IOException {
+    String text = Files.readString(TestHome.starterKit("boathouse"));
+    String given = "\"adaptor\": \"12 V 1 A regulated\"";
+    assertThat(text).contains(given);
+    Path file =
+        write(
+            text.replace(
+                given,
+                """
+                "adaptor": {"name": "old brick", "rated voltage": "24 V", "rated current": "1 A",
+                  "unloaded voltage": "31 V", "internal resistance": "2 Ω"}"""));
+    assertFault(file, "'adaptor'", "31 V", "26 V");
+  }
+
+  @Test
   void severalFaultsAreASentenceEach() throws IOException {
     Path file =
         write(

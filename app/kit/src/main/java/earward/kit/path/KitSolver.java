@@ -9,6 +9,7 @@ import earward.engine.SolveCase;
 import earward.engine.SolveOutcome;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 
 /** Solves an assembled kit in all its cases. */
 public final class KitSolver {
@@ -55,6 +56,33 @@ public final class KitSolver {
     Map<String, Double> worst = worstPosition(assembly, cases);
     CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases.all(worst), wanted);
     return new CompiledKit(assembly, circuit, worst);
+  }
+
+  /**
+   * One figure of an assembly, with no more solved than it needs; NaN where it does not exist.
+   *
+   * @param assembly a complete one
+   * @param name of the figure in the whole path
+   */
+  public static double figure(Assembly assembly, FigureName name) {
+    Optional<FigureName> asked = new Places(assembly.circuit()).inEngine(name);
+    if (asked.isEmpty()) {
+      return solve(assembly).figures().orNaN(name);
+    }
+    try {
+      KitCases cases = new KitCases(assembly);
+      boolean deepest = name.caseName().equals(CaseName.DEEPEST);
+      List<SolveCase> only =
+          cases.all(deepest ? worstPosition(assembly, cases) : Map.of()).stream()
+              .filter(each -> each.name().equals(name.caseName()))
+              .toList();
+      CompiledCircuit circuit = Engine.compile(assembly.circuit(), only, List.of(asked.get()));
+      double[] row = new double[1];
+      boolean solved = circuit.newSolver().solve(circuit.nominalValues(), row).solved();
+      return solved ? row[0] : Double.NaN;
+    } catch (CircuitException e) {
+      return Double.NaN; // whoever proves an edit solves it whole and sees the finding
+    }
   }
 
   private static Map<String, Double> worstPosition(Assembly assembly, KitCases cases) {

@@ -1,4 +1,7 @@
-/** Remedies: edits that were solved and found to clear a finding. */
+/**
+ * Edits that the program offers, solved and proven before they are: {@link
+ * earward.kit.proposal.Remedies}.
+ */
 @NullMarked
 package earward.kit.proposal;
 
