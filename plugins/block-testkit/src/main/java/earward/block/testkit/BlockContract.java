@@ -104,4 +104,9 @@ public abstract class BlockContract {
   void aWholeKitAroundItIsSolved() {
     keepsTo(new WholeKitRule());
   }
+
+  @Test
+  void itsDrawingReadBackIsTheSameCircuit() {
+    keepsTo(new PictureRule());
+  }
 }
