@@ -39,13 +39,13 @@ abstract class DesignCommand implements Callable<Integer> {
       program.sayRefusals(messages());
       reading.findings().forEach(finding -> Faults.say(messages(), finding.sentence()));
       ReviewedKit reviewed = review(reading, program.types(), program.parts());
-      show(reviewed);
+      show(reviewed, program);
       return reviewed.doNotBuild() ? Exit.DO_NOT_BUILD : Exit.DONE;
     }
   }
 
   /** Shows or writes what the command is for. */
-  abstract void show(ReviewedKit reviewed) throws CommandFault;
+  abstract void show(ReviewedKit reviewed, Program program) throws CommandFault;
 
   /** What is still to be done to the review of a solved kit before it is shown. */
   ReviewedKit completed(ReviewedKit reviewed, PluginSet types, PartsLibrary parts) {

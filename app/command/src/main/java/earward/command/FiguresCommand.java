@@ -11,7 +11,7 @@ final class FiguresCommand extends DesignCommand {
   private boolean json;
 
   @Override
-  void show(ReviewedKit reviewed) {
+  void show(ReviewedKit reviewed, Program program) {
     if (json) {
       JsonOut.print(results(), FiguresJson.of(reviewed));
     } else {

@@ -77,6 +77,11 @@ final class Program implements AutoCloseable {
     }
   }
 
+  /** Where a club may keep its own wording of the sheet. */
+  Path sheetWordings() {
+    return home.resolve("templates").resolve("sheets");
+  }
+
   /** Says on standard error which plug-ins are not used and why. */
   void sayRefusals(PrintWriter messages) {
     types.refusals().forEach(refusal -> Faults.say(messages, refusal.sentence()));

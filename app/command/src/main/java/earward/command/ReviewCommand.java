@@ -19,7 +19,7 @@ final class ReviewCommand extends DesignCommand {
   }
 
   @Override
-  void show(ReviewedKit reviewed) {
+  void show(ReviewedKit reviewed, Program program) {
     if (json) {
       JsonOut.print(results(), ReviewJson.of(reviewed));
     } else {
