@@ -39,6 +39,8 @@ final class Surroundings {
   /** What bears no more than this is worn at the ear (common practice). */
   private static final double MOST_WATTS_AT_THE_EAR = 0.25;
 
+  private static final String INVERTING_CAPACITOR = "inverting-capacitor";
+
   private final Values values;
   private final AmplifierModel model;
   private final WiringPlan plan = Wiring.from(new Single("in"));
@@ -136,7 +138,7 @@ final class Surroundings {
     } else if (terminal == Terminal.GROUND) {
       return GROUND;
     }
-    return terminal.name().toLowerCase(java.util.Locale.ROOT);
+    return terminal.name().toLowerCase(java.util.Locale.ROOT).replace('_', '-');
   }
 
   private void aroundThePins() {
@@ -147,7 +149,7 @@ final class Surroundings {
           .down("gain-capacitor", electrolytic("gain-capacitor"), GROUND);
       polarised("gain-capacitor");
     }
-    downFrom(Terminal.INVERTING, "inverting-capacitor", true);
+    invertingInputs();
     downFrom(Terminal.RIPPLE, "ripple-capacitor", values.chosen("ripple", "capacitor"));
     bootstrap();
     if (model.has(Terminal.COMPENSATION)) {
@@ -155,6 +157,27 @@ final class Surroundings {
     }
     plan.at(MAIN_RAIL).down("bypass-capacitor", electrolytic("bypass-capacitor"), GROUND);
     polarised("bypass-capacitor");
+  }
+
+  /**
+   * One inverting input is held at ground for the signal; the two of a bridge are joined, so that
+   * the second half amplifies what the first one leaves.
+   *
+   * <p>Source: the stereo and bridge test circuits of the ST TDA2822M (March 1995) and of the Contek
+   * TDA2822 data sheet (10 µF in the bridge).
+   */
+  private void invertingInputs() {
+    if (model.has(Terminal.INVERTING_TWO)) {
+      plan.at(nodeAt(Terminal.INVERTING))
+          .bridge(
+              INVERTING_CAPACITOR,
+              electrolytic(INVERTING_CAPACITOR),
+              nodeAt(Terminal.INVERTING),
+              nodeAt(Terminal.INVERTING_TWO));
+      polarised(INVERTING_CAPACITOR);
+    } else {
+      downFrom(Terminal.INVERTING, INVERTING_CAPACITOR, true);
+    }
   }
 
   /**

@@ -24,6 +24,9 @@ public final class AmplifierLaw extends Law {
   private static final int BIAS = 5;
   private static final int HEAT_SINK = 6;
 
+  private static final List<Terminal> INVERTING_INPUTS =
+      List.of(Terminal.INVERTING, Terminal.INVERTING_TWO);
+
   private static final double RIPPLE_SIEMENS = 1e-4;
   private static final double BOOTSTRAP_SIEMENS = 1e-3;
 
@@ -184,9 +187,11 @@ public final class AmplifierLaw extends Law {
     if (has(Terminal.BOOTSTRAP)) {
       stage.conductance(supply, at(nodes, Terminal.BOOTSTRAP), BOOTSTRAP_SIEMENS);
     }
-    if (has(Terminal.INVERTING)) {
-      stage.conductance(
-          at(nodes, Terminal.INVERTING), at(nodes, Terminal.GROUND), 1 / value(stage, INPUT_OHMS));
+    for (Terminal input : INVERTING_INPUTS) {
+      if (has(input)) {
+        stage.conductance(
+            at(nodes, input), at(nodes, Terminal.GROUND), 1 / value(stage, INPUT_OHMS));
+      }
     }
     if (model.gain().setFromOutside()) {
       stage.conductance(
@@ -221,8 +226,10 @@ public final class AmplifierLaw extends Law {
     if (has(Terminal.BOOTSTRAP)) {
       stage.admittance(supply, at(nodes, Terminal.BOOTSTRAP), BOOTSTRAP_SIEMENS, 0);
     }
-    if (has(Terminal.INVERTING)) {
-      stage.admittance(at(nodes, Terminal.INVERTING), ground, 1 / value(stage, INPUT_OHMS), 0);
+    for (Terminal input : INVERTING_INPUTS) {
+      if (has(input)) {
+        stage.admittance(at(nodes, input), ground, 1 / value(stage, INPUT_OHMS), 0);
+      }
     }
     if (model.gain().setFromOutside()) {
       stage.admittance(

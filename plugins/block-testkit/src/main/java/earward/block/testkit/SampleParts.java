@@ -7,6 +7,7 @@ import static earward.block.device.Terminal.GAIN;
 import static earward.block.device.Terminal.GROUND;
 import static earward.block.device.Terminal.INPUT;
 import static earward.block.device.Terminal.INVERTING;
+import static earward.block.device.Terminal.INVERTING_TWO;
 import static earward.block.device.Terminal.OUTPUT;
 import static earward.block.device.Terminal.OUTPUT_TWO;
 import static earward.block.device.Terminal.RIPPLE;
@@ -90,6 +91,7 @@ public final class SampleParts {
             new Pin(2, SUPPLY),
             new Pin(3, OUTPUT_TWO),
             new Pin(4, GROUND),
+            new Pin(5, INVERTING_TWO),
             new Pin(6, GROUND),
             new Pin(7, INPUT),
             new Pin(8, INVERTING)));

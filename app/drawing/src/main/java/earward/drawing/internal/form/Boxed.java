@@ -118,6 +118,7 @@ public final class Boxed {
     return switch (terminal) {
       case INPUT -> "IN";
       case INVERTING -> "IN\u2212";
+      case INVERTING_TWO -> "IN2\u2212";
       case OUTPUT -> "OUT";
       case OUTPUT_TWO -> "OUT2";
       case SUPPLY -> "V+";
