@@ -163,8 +163,8 @@ final class Surroundings {
    * One inverting input is held at ground for the signal; the two of a bridge are joined, so that
    * the second half amplifies what the first one leaves.
    *
-   * <p>Source: the stereo and bridge test circuits of the ST TDA2822M (March 1995) and of the Contek
-   * TDA2822 data sheet (10 µF in the bridge).
+   * <p>Source: the stereo and bridge test circuits of the ST TDA2822M (March 1995) and of the
+   * Contek TDA2822 data sheet (10 µF in the bridge).
    */
   private void invertingInputs() {
     if (model.has(Terminal.INVERTING_TWO)) {

@@ -42,7 +42,9 @@ public enum Terminal {
   INPUT,
   /** The inverting input. */
   INVERTING,
-  /** The inverting input of a bridge amplifier's second half, joined to the first by a capacitor. */
+  /**
+   * The inverting input of a bridge amplifier's second half, joined to the first by a capacitor.
+   */
   INVERTING_TWO,
   /** The output, or the first one of a bridge amplifier. */
   OUTPUT,
