@@ -95,7 +95,7 @@ class FaultyDesignsTest {
 
   @Test
   void anUnknownUnit() throws IOException {
-    assertFault(edited("\"1.5 nF\"", "\"1.5 furlong\""), "'detector'", "'c1'", "furlong");
+    assertFault(edited("\"1.5 nF\"", "\"1.5 furlong\""), "'detector'", "'c1'", "'furlong'");
     assertFault(edited("\"1.5 nF\"", "\"1.5 nH\""), "'detector'", "'c1'");
   }
 

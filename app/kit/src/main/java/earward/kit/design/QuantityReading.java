@@ -122,7 +122,13 @@ final class QuantityReading {
         return "'" + text + "' is in " + other.symbol() + "; wanted " + wanted();
       }
     }
-    return "'" + text + "' has the unknown unit '" + tail + "'; wanted " + wanted();
+    return "'" + text + "' has the unknown unit '" + asWritten(tail) + "'; wanted " + wanted();
+  }
+
+  /** The end of the text as the user wrote it: {@code furlong}, where a u reads as µ. */
+  private String asWritten(String tail) {
+    String end = text.substring(Math.max(0, text.length() - tail.length()));
+    return normalised(end).equals(tail) ? end : tail;
   }
 
   private String wanted() {
