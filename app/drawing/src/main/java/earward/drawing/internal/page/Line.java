@@ -10,7 +10,9 @@ import earward.drawing.internal.form.Lettering;
 import earward.drawing.internal.place.BlockPlan;
 import earward.drawing.internal.route.Router;
 import java.util.ArrayList;
+import java.util.IdentityHashMap;
 import java.util.List;
+import java.util.function.ObjIntConsumer;
 
 /** One line of the drawing: titles above, segments below, one line of grounds. Used once. */
 final class Line {
@@ -24,6 +26,7 @@ final class Line {
   private final List<Segment> segments;
   private final Lettering lettering;
   private final List<Element> elements = new ArrayList<>();
+  private final IdentityHashMap<BlockPlan, List<Element>> drawn = new IdentityHashMap<>();
   private double top;
   private int groundRow;
 
@@ -52,15 +55,27 @@ final class Line {
     return new Drawn(elements, new Box(0, titleTop, x, bottom));
   }
 
+  /** Draws the blocks on one line of grounds, and finds the upper edge of all of them. */
   private void measure() {
-    top = Double.POSITIVE_INFINITY;
     groundRow = Integer.MIN_VALUE;
+    eachBlock((block, row) -> groundRow = Math.max(groundRow, row + Router.groundRow(block)));
+    top = Double.POSITIVE_INFINITY;
+    eachBlock(
+        (block, row) -> {
+          List<Element> all = drawn(block, groundRow - row);
+          drawn.put(block, all);
+          for (Element element : all) {
+            top = Math.min(top, Grid.points(row) + element.bounds().top());
+          }
+        });
+    top = Math.min(top, 0);
+  }
+
+  private void eachBlock(ObjIntConsumer<BlockPlan> action) {
     for (Segment segment : segments) {
       List<Integer> origins = segment.origins();
       for (int i = 0; i < origins.size(); i++) {
-        BlockPlan block = segment.blocks().get(i);
-        top = Math.min(top, Grid.points(origins.get(i)) + block.top());
-        groundRow = Math.max(groundRow, origins.get(i) + Router.groundRow(block));
+        action.accept(segment.blocks().get(i), origins.get(i));
       }
     }
   }
@@ -78,7 +93,7 @@ final class Line {
       int row = origins.get(i);
       double dx = x;
       double dy = Grid.points(row);
-      drawn(block, groundRow - row).forEach(e -> elements.add(e.moved(dx, dy)));
+      drawn.getOrDefault(block, List.of()).forEach(e -> elements.add(e.moved(dx, dy)));
       double start = i == 0 ? left : x;
       titleTop = Math.min(titleTop, title(block, start, x + Grid.points(block.width())));
       x += Grid.points(block.width());

@@ -7,6 +7,7 @@ import earward.drawing.internal.form.Grid;
 import earward.drawing.internal.form.Lead;
 import earward.drawing.internal.form.Lettering;
 import earward.drawing.internal.form.Side;
+import java.awt.Point;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
@@ -36,6 +37,7 @@ final class Board {
   private final List<Box> solids = new ArrayList<>();
   private final List<Box> verticals = new ArrayList<>();
   private final List<Lane> lanes = new ArrayList<>();
+  private final Map<Point, String> ends = new HashMap<>();
   private int recentX = 2;
 
   /** A stretch of wire along a row. */
@@ -120,7 +122,21 @@ final class Board {
         .noneMatch(wire -> meets(wire, solids) || meets(wire, verticals));
   }
 
+  /** Whether no end of it stands where an end of another net stands. */
+  private boolean meetsNoOther(Placed piece) {
+    for (Lead lead : piece.ends()) {
+      String there = ends.get(new Point(lead.x(), lead.y()));
+      if (there != null && !there.equals(piece.nets().get(lead.name()))) {
+        return false;
+      }
+    }
+    return true;
+  }
+
   private boolean fits(Placed piece) {
+    if (!meetsNoOther(piece)) {
+      return false;
+    }
     Form form = piece.form();
     List<Box> boxes = piece.footprint(spacing);
     int firstLead = 1 + form.texts().size();
@@ -219,6 +235,7 @@ final class Board {
   }
 
   private void take(String net, Lead lead) {
+    ends.put(new Point(lead.x(), lead.y()), net);
     if (marked(net)) {
       return;
     }
