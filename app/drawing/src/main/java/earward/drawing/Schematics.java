@@ -13,6 +13,8 @@ import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeSet;
 
 /** Lays circuit drawings out from block descriptions. */
 public final class Schematics {
@@ -65,26 +67,40 @@ public final class Schematics {
     return new Schematic(width, height, scale, options.font(), laid.elements(), rows);
   }
 
+  /** With wires where they find a way; a block that is too tangled gets flags instead. */
   private static BlockPlan plan(BlockTask task, Lettering lettering) {
-    BlockPlan second = null;
+    Set<String> split = new TreeSet<>();
+    Optional<BlockPlan> found = wired(task, lettering);
+    for (String net : task.splittable()) {
+      if (found.isPresent()) {
+        break;
+      }
+      found = wired(task.split(Set.of(net)), lettering);
+    }
+    for (String net : task.splittable()) {
+      if (found.isPresent()) {
+        break;
+      }
+      split.add(net);
+      found = wired(task.split(split), lettering);
+    }
+    return found.orElseThrow(
+        () ->
+            new IllegalStateException(
+                "block '" + task.id() + "' cannot be drawn: some part or wire finds no place"));
+  }
+
+  private static Optional<BlockPlan> wired(BlockTask task, Lettering lettering) {
     for (double spacing : SPACINGS) {
       Optional<BlockPlan> plan = Placer.plan(task, lettering, spacing);
-      if (plan.isEmpty()) {
-        continue;
-      }
-      Optional<List<Element>> drawn = Router.draw(plan.get(), Router.groundRow(plan.get()));
-      if (drawn.isPresent()) {
-        if (OverlapReader.read(drawn.get()).isEmpty()) {
-          return plan.get();
+      if (plan.isPresent()) {
+        Optional<List<Element>> drawn = Router.draw(plan.get(), Router.groundRow(plan.get()));
+        if (drawn.isPresent() && OverlapReader.read(drawn.get()).isEmpty()) {
+          return plan;
         }
-        second = second == null ? plan.get() : second;
       }
     }
-    if (second != null) {
-      return second;
-    }
-    throw new IllegalStateException(
-        "block '" + task.id() + "' cannot be drawn: some part or wire finds no place");
+    return Optional.empty();
   }
 
   /** The drawing of one block alone. */

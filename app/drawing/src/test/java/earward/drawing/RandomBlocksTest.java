@@ -1,7 +1,9 @@
 package earward.drawing;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import earward.drawing.internal.element.Mark;
 import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.Test;
@@ -20,5 +22,18 @@ class RandomBlocksTest {
       }
     }
     assertEquals(List.of(), faults);
+  }
+
+  /** Seeds 588, 862 and 1133 are so tangled that some net cannot be drawn as a wire. */
+  @Test
+  void aTangleIsDrawnWithNamedFlags() {
+    LayoutOptions usual = LayoutOptions.usual(Examples.font());
+    for (long seed : new long[] {588, 862, 1133}) {
+      SheetBlock block = RandomBlocks.of(seed);
+      assertEquals(List.of(), DrawingRule.broken(block, usual));
+      assertTrue(
+          Schematics.single(block, usual).elements().stream()
+              .anyMatch(e -> e instanceof Mark mark && mark.kind() == Mark.Kind.FLAG));
+    }
   }
 }
