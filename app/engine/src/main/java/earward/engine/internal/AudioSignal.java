@@ -4,6 +4,9 @@ import java.util.Arrays;
 
 /** Harmonics of the tone (peak, complex) in all unknowns. Mutable, for one thread. */
 final class AudioSignal {
+  /** Fundamental below which distortion means nothing, peak, in V. */
+  private static final double LEAST_VOLTS = 1e-6;
+
   final int harmonics;
   private final int size;
   private final double[] re;
@@ -45,7 +48,7 @@ final class AudioSignal {
         re(harmonic, plus) - re(harmonic, minus), im(harmonic, plus) - im(harmonic, minus));
   }
 
-  /** Harmonics 2 to 10 over the fundamental; NaN where there is no fundamental. */
+  /** Harmonics 2 to 10 over the fundamental; NaN below a microvolt, where nothing is heard. */
   double distortion(int plus, int minus) {
     double fundamental = peak(1, plus, minus);
     double sum = 0;
@@ -53,7 +56,7 @@ final class AudioSignal {
       double here = peak(h, plus, minus);
       sum += here * here;
     }
-    return fundamental > 1e-15 ? Math.sqrt(sum) / fundamental : Double.NaN;
+    return fundamental > LEAST_VOLTS ? Math.sqrt(sum) / fundamental : Double.NaN;
   }
 
   /** Writes the wave of an unknown; returns the largest magnitude. */

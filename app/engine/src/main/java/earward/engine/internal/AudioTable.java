@@ -19,7 +19,7 @@ final class AudioTable {
     this.network = network;
     this.harmonics = harmonics;
     size = network.size;
-    columns = network.ports.size() + Outputs.count(network);
+    columns = network.ports.length + Outputs.count(network);
     re = new double[(harmonics + 1) * columns * size];
     im = new double[re.length];
   }

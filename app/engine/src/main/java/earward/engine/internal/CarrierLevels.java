@@ -21,7 +21,7 @@ final class CarrierLevels {
       return harmonic == 1 ? undetected(work, work.network.feed, plus, minus) : 0;
     }
     EnvelopeSolver solved = detection.modulated;
-    int ports = work.network.ports.size();
+    int ports = work.network.ports.length;
     int width = (solved.carrierHarmonics() + 1) * ports;
     double sum = 0;
     for (int s = 0; s < solved.audioSamples(); s++) {
@@ -75,7 +75,7 @@ final class CarrierLevels {
   private static double portVolts(CaseWork work, Detection detection, int port, boolean real) {
     EnvelopeSolver solved = detection.carrierOnly;
     CarrierSurroundings around = detection.around;
-    int ports = work.network.ports.size();
+    int ports = work.network.ports.length;
     double er = solved.feedReal[0];
     double ei = solved.feedImaginary[0];
     double tr = around.transferReal[port];
@@ -107,7 +107,7 @@ final class CarrierLevels {
       return Double.NaN;
     }
     double rectified = 0;
-    for (int j = 0; j < work.network.ports.size(); j++) {
+    for (int j = 0; j < work.network.ports.length; j++) {
       rectified +=
           detection.around.audioRealOhms[detection.around.index(0, port, j)]
               * detection.carrierOnly.audioReal[j];
@@ -123,7 +123,7 @@ final class CarrierLevels {
     }
     double vr = portVolts(work, detection, port, true);
     double vi = portVolts(work, detection, port, false);
-    int at = work.network.ports.size() + port;
+    int at = work.network.ports.length + port;
     double power =
         vr * detection.carrierOnly.carrierReal[at]
             + vi * detection.carrierOnly.carrierImaginary[at];
@@ -134,7 +134,7 @@ final class CarrierLevels {
   static double admittance(CaseWork work, Detection detection, int port, boolean real) {
     double vr = portVolts(work, detection, port, true);
     double vi = portVolts(work, detection, port, false);
-    int at = work.network.ports.size() + port;
+    int at = work.network.ports.length + port;
     double ir = detection.carrierOnly.carrierReal[at];
     double ii = detection.carrierOnly.carrierImaginary[at];
     double norm = vr * vr + vi * vi;

@@ -23,7 +23,7 @@ final class CarrierTable {
   CarrierTable(Network network) {
     this.network = network;
     size = network.size;
-    columns = network.ports.size() + 1;
+    columns = network.ports.length + 1;
     re = new double[(SHOWN + 1) * columns * size];
     im = new double[re.length];
   }
@@ -67,8 +67,8 @@ final class CarrierTable {
     int branch = feed.heldBranch();
     around.loadRealSiemens = branch < 0 ? 0 : solver.re[branch];
     around.loadImaginarySiemens = branch < 0 ? 0 : solver.im[branch];
-    for (int i = 0; i < network.ports.size(); i++) {
-      Port port = network.ports.get(i);
+    for (int i = 0; i < network.ports.length; i++) {
+      Port port = network.ports[i];
       int anode = port.law().anode(point);
       int cathode = port.law().cathode(point);
       around.transferReal[i] = solver.re(anode) - solver.re(cathode);
@@ -78,17 +78,17 @@ final class CarrierTable {
 
   private void ports(
       AlternatingSolver solver, DirectStage point, int k, CarrierSurroundings around) {
-    for (int j = 0; j < network.ports.size(); j++) {
-      Port port = network.ports.get(j);
+    for (int j = 0; j < network.ports.length; j++) {
+      Port port = network.ports[j];
       solver.rest();
       solver.push(port.law().anode(point), port.law().cathode(point), 1, 0);
       solver.solve();
       if (k <= SHOWN) {
         store(solver, k, j + 1);
       }
-      for (int i = 0; i < network.ports.size() && k <= around.carrierHarmonics(); i++) {
-        int anode = network.ports.get(i).law().anode(point);
-        int cathode = network.ports.get(i).law().cathode(point);
+      for (int i = 0; i < network.ports.length && k <= around.carrierHarmonics(); i++) {
+        int anode = network.ports[i].law().anode(point);
+        int cathode = network.ports[i].law().cathode(point);
         int entry = around.index(k, i, j);
         around.carrierRealOhms[entry] = solver.re(cathode) - solver.re(anode);
         around.carrierImaginaryOhms[entry] = solver.im(cathode) - solver.im(anode);

@@ -59,9 +59,9 @@ final class CaseWork {
     signal = new AudioSignal(harmonics, network.size);
     trial = new AudioSignal(harmonics, network.size);
     outputs = new Outputs(network);
-    small = new SmallSignal(network.ports.size());
+    small = new SmallSignal(network.ports.length);
     detection =
-        network.ports.isEmpty() || network.feed == null
+        network.ports.length == 0 || network.feed == null
             ? null
             : new Detection(network, direct.stage());
     scratch = new double[network.size];
@@ -222,7 +222,7 @@ final class CaseWork {
     if (!detection.solveModulated(peakVolts(), depth(), toneRadians())) {
       return fail("the detector's cycle did not settle");
     }
-    for (int j = 0; j < network.ports.size(); j++) {
+    for (int j = 0; j < network.ports.length; j++) {
       stage().drivenAmperes()[j] = detection.modulated.audioReal[j];
     }
     return true;
@@ -246,7 +246,7 @@ final class CaseWork {
 
   /** Adds what the ports' mean currents make in all unknowns. */
   void gather(Detection parts, AudioSignal into) {
-    int ports = network.ports.size();
+    int ports = network.ports.length;
     for (int h = 1; h <= into.harmonics; h++) {
       for (int j = 0; j < ports; j++) {
         into.add(
@@ -297,7 +297,7 @@ final class CaseWork {
   /** Share of the feed's level across each port when none of the ports conducts. */
   double[] carrierShares() {
     FeedLaw feed = network.feed;
-    double[] shares = new double[network.ports.size()];
+    double[] shares = new double[network.ports.length];
     if (feed == null || detection == null) {
       return shares;
     }

@@ -30,7 +30,7 @@ final class ClippingRule {
     CarrierSurroundings around = detection.around;
     double directOhms = around.audioRealOhms[around.index(0, port, port)];
     work.small.fill(around, detection.carrierOnly, work.peakVolts(), 0);
-    int own = port * work.network.ports.size() + port;
+    int own = port * work.network.ports.length + port;
     double sourceOhms = Math.max(0, 1 / work.small.admittanceRe[own]);
     double dividing = COUPLES / (work.toneRadians() * directOhms);
     AlternatingSolver solver = work.alternating;
@@ -44,7 +44,7 @@ final class ClippingRule {
     if (!factored) {
       return Double.NaN;
     }
-    Port of = work.network.ports.get(port);
+    Port of = work.network.ports[port];
     int anode = of.law().anode(work.stage());
     int cathode = of.law().cathode(work.stage());
     solver.rest();

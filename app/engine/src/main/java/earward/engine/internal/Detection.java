@@ -20,14 +20,14 @@ final class Detection {
 
   Detection(Network network, DirectStage stage) {
     this.network = network;
-    int ports = network.ports.size();
+    int ports = network.ports.length;
     modulated = new EnvelopeSolver(ports, CARRIER_SAMPLES, AUDIO_SAMPLES);
     carrierOnly = new EnvelopeSolver(ports, CARRIER_SAMPLES, 2);
     around =
         new CarrierSurroundings(ports, modulated.carrierHarmonics(), modulated.audioHarmonics());
     junctions = new JunctionLaw[ports];
     for (int i = 0; i < ports; i++) {
-      junctions[i] = stage.junction(network.ports.get(i).law().ordinal());
+      junctions[i] = stage.junction(network.ports[i].law().ordinal());
     }
   }
 
@@ -44,18 +44,18 @@ final class Detection {
   /** Takes over DC: Thévenin's equivalent at each port about the present point. */
   void direct(DirectSolver direct, double[] scratch) {
     DirectStage stage = direct.stage();
-    for (int i = 0; i < network.ports.size(); i++) {
-      around.seriesOhms[i] = network.ports.get(i).law().seriesOhms(stage);
-      int anode = network.ports.get(i).law().anode(stage);
-      int cathode = network.ports.get(i).law().cathode(stage);
+    for (int i = 0; i < network.ports.length; i++) {
+      around.seriesOhms[i] = network.ports[i].law().seriesOhms(stage);
+      int anode = network.ports[i].law().anode(stage);
+      int cathode = network.ports[i].law().cathode(stage);
       around.openVolts[i] = stage.volts(anode) - stage.volts(cathode);
     }
-    for (int j = 0; j < network.ports.size(); j++) {
-      Port from = network.ports.get(j);
+    for (int j = 0; j < network.ports.length; j++) {
+      Port from = network.ports[j];
       direct.push(from.law().anode(stage), from.law().cathode(stage), scratch);
-      for (int i = 0; i < network.ports.size(); i++) {
-        int anode = network.ports.get(i).law().anode(stage);
-        int cathode = network.ports.get(i).law().cathode(stage);
+      for (int i = 0; i < network.ports.length; i++) {
+        int anode = network.ports[i].law().anode(stage);
+        int cathode = network.ports[i].law().cathode(stage);
         double ohms = (cathode < 0 ? 0 : scratch[cathode]) - (anode < 0 ? 0 : scratch[anode]);
         around.audioRealOhms[around.index(0, i, j)] = ohms;
         around.audioImaginaryOhms[around.index(0, i, j)] = 0;
@@ -67,10 +67,10 @@ final class Detection {
   /** Takes over the audio impedances. */
   void audio(AudioTable table, DirectStage stage) {
     for (int h = 1; h <= around.audioHarmonics(); h++) {
-      for (int i = 0; i < network.ports.size(); i++) {
-        int anode = network.ports.get(i).law().anode(stage);
-        int cathode = network.ports.get(i).law().cathode(stage);
-        for (int j = 0; j < network.ports.size(); j++) {
+      for (int i = 0; i < network.ports.length; i++) {
+        int anode = network.ports[i].law().anode(stage);
+        int cathode = network.ports[i].law().cathode(stage);
+        for (int j = 0; j < network.ports.length; j++) {
           int entry = around.index(h, i, j);
           around.audioRealOhms[entry] = table.re(h, j, cathode) - table.re(h, j, anode);
           around.audioImaginaryOhms[entry] = table.im(h, j, cathode) - table.im(h, j, anode);

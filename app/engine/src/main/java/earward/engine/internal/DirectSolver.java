@@ -29,8 +29,8 @@ final class DirectSolver {
         new DirectStage(
             network.nodes,
             network.size,
-            network.ports.size(),
-            network.amplifiers.size(),
+            network.ports.length,
+            network.amplifiers.length,
             network.diodes);
     step = new double[network.size];
     kept = new double[network.size];

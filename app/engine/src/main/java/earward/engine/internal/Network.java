@@ -7,22 +7,23 @@ import earward.engine.Slot;
 import earward.engine.law.AmplifierLaw;
 import earward.engine.law.FeedLaw;
 import earward.engine.law.Law;
-import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 
-/** The structure of a circuit: nodes, laws, ports, slots. Immutable once built; shared. */
+/**
+ * The structure of a circuit: nodes, laws, ports, slots. Immutable once built; shared. Arrays rather
+ * than lists, since a solve that walks them must make no garbage; they are not to be written.
+ */
 public final class Network {
   final Circuit circuit;
   final Slots slots;
   final int nodes;
   final int size;
-  final List<Law> laws;
+  final Law[] laws;
   final Map<String, Law> lawOf = new HashMap<>();
-  final List<Port> ports;
-  final List<AmplifierLaw> amplifiers = new ArrayList<>();
+  final Port[] ports;
+  final AmplifierLaw[] amplifiers;
   final int diodes;
   final @Nullable FeedLaw feed;
   final int[] probePlus;
@@ -46,16 +47,16 @@ public final class Network {
     nodeOf = Map.copyOf(from.nodeOf());
     nodes = nodeOf.size();
     size = from.size();
-    laws = List.copyOf(from.laws());
-    laws.forEach(law -> lawOf.put(law.seat().name(), law));
-    ports = List.copyOf(from.ports());
+    laws = from.laws().toArray(Law[]::new);
+    from.laws().forEach(law -> lawOf.put(law.seat().name(), law));
+    ports = from.ports().toArray(Port[]::new);
     diodes = from.diodes();
     feed = from.feed();
-    for (Law law : laws) {
-      if (law instanceof AmplifierLaw amplifier) {
-        amplifiers.add(amplifier);
-      }
-    }
+    amplifiers =
+        from.laws().stream()
+            .filter(AmplifierLaw.class::isInstance)
+            .map(AmplifierLaw.class::cast)
+            .toArray(AmplifierLaw[]::new);
     firstSeamBranch = size - circuit.seams().size();
     names = new String[size];
     nodeOf.forEach((name, node) -> names[node] = name);

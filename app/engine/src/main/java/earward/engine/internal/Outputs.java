@@ -3,6 +3,7 @@ package earward.engine.internal;
 import earward.block.law.ClippedSine;
 import earward.engine.law.AmplifierLaw;
 import earward.engine.law.DirectStage;
+import java.util.Arrays;
 
 /**
  * What the amplifiers' outputs do in one case: clipping of a given signal, or the edge of clipping
@@ -42,7 +43,7 @@ final class Outputs {
 
   Outputs(Network network) {
     this.network = network;
-    int count = network.amplifiers.size();
+    int count = network.amplifiers.length;
     outWatts = new double[count];
     clipWatts = new double[count];
     tenPercentWatts = new double[count];
@@ -59,7 +60,7 @@ final class Outputs {
 
   /** How many outputs all amplifiers have together. */
   static int count(Network network) {
-    return network.amplifiers.stream().mapToInt(AmplifierLaw::branches).sum();
+    return Arrays.stream(network.amplifiers).mapToInt(AmplifierLaw::branches).sum();
   }
 
   /** Impedances at the outputs, from a solver that is factored at the tone. */
@@ -91,7 +92,7 @@ final class Outputs {
    * @param signal harmonics of all unknowns, changed in place
    */
   void clip(AudioTable table, AudioSignal signal, DirectStage point) {
-    int column = network.ports.size();
+    int column = network.ports.length;
     for (AmplifierLaw amplifier : network.amplifiers) {
       int a = amplifier.ordinal();
       double ohms = Math.hypot(loadRe[a], loadIm[a]);

@@ -59,8 +59,8 @@ final class SeamView {
     if (detection != null && carrier && atCarrier(work, seam)) {
       work.alternating.stage().beginFreeCarrier(work.carrierRadians());
       work.alternating.stamp();
-      for (int i = 0; i < work.network.ports.size(); i++) {
-        Port port = work.network.ports.get(i);
+      for (int i = 0; i < work.network.ports.length; i++) {
+        Port port = work.network.ports[i];
         work.alternating
             .stage()
             .admittance(

@@ -27,10 +27,10 @@ final class SmallResponse {
       return false;
     }
     work.alternating.rest();
-    for (int j = 0; j < work.network.ports.size(); j++) {
+    for (int j = 0; j < work.network.ports.length; j++) {
       work.alternating.push(
-          work.network.ports.get(j).law().anode(work.stage()),
-          work.network.ports.get(j).law().cathode(work.stage()),
+          work.network.ports[j].law().anode(work.stage()),
+          work.network.ports[j].law().cathode(work.stage()),
           work.small.drivenRe[j],
           work.small.drivenIm[j]);
     }
@@ -40,13 +40,13 @@ final class SmallResponse {
 
   /** Adds the small-signal admittances between the ports to the stamped circuit. */
   static void addPorts(CaseWork work) {
-    int ports = work.network.ports.size();
+    int ports = work.network.ports.length;
     for (int i = 0; i < ports; i++) {
-      int from = work.network.ports.get(i).law().anode(work.stage());
-      int to = work.network.ports.get(i).law().cathode(work.stage());
+      int from = work.network.ports[i].law().anode(work.stage());
+      int to = work.network.ports[i].law().cathode(work.stage());
       for (int j = 0; j < ports; j++) {
-        int plus = work.network.ports.get(j).law().anode(work.stage());
-        int minus = work.network.ports.get(j).law().cathode(work.stage());
+        int plus = work.network.ports[j].law().anode(work.stage());
+        int minus = work.network.ports[j].law().cathode(work.stage());
         double real = work.small.admittanceRe[i * ports + j];
         double imaginary = work.small.admittanceIm[i * ports + j];
         work.alternating.stage().transconductance(from, to, plus, real, imaginary);
