@@ -5,12 +5,15 @@ import static org.assertj.core.api.Assertions.assertThat;
 import earward.block.BlockType;
 import earward.block.BlockTypes;
 import earward.block.check.Severity;
+import earward.engine.CompiledCircuit;
 import earward.kit.design.KitDesign;
 import earward.kit.file.Designs;
 import earward.kit.file.PartsFiles;
 import earward.kit.parts.PartsLibrary;
 import earward.kit.path.Assembler;
 import earward.kit.path.Assembly;
+import earward.kit.path.Figures;
+import earward.kit.path.KitSolver;
 import earward.kit.review.ReviewFinding;
 import earward.kit.review.ReviewedKit;
 import earward.kit.review.Reviewer;
@@ -19,6 +22,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.ServiceLoader;
+import org.assertj.core.data.Offset;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -59,6 +63,27 @@ class StarterKitsTest {
     assertThat(reviewed.solved().solved()).isTrue();
     assertThat(stops(reviewed)).isEmpty();
     assertThat(reviewed.doNotBuild()).isFalse();
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"lantern", "hayloft", "boathouse"})
+  void theHeadlineIsPartOfTheWholeAndTheSame(String name) throws Exception {
+    Assembly assembly = Assembler.assemble(kit(name), Shipped.types(), library());
+    CompiledCircuit headline = KitSolver.compileHeadline(assembly).circuit();
+    double[] row = new double[headline.figures().size()];
+    assertThat(headline.newSolver().solve(headline.nominalValues(), row).solved()).isTrue();
+    Figures whole = KitSolver.solve(assembly).figures();
+    assertThat(row).hasSizeGreaterThan(100);
+    for (int i = 0; i < row.length; i++) {
+      double wanted = whole.orNaN(headline.figures().get(i));
+      if (Double.isNaN(wanted)) {
+        assertThat(row[i]).as(headline.figures().get(i).toString()).isNaN();
+      } else {
+        assertThat(row[i])
+            .as(headline.figures().get(i).toString())
+            .isCloseTo(wanted, Offset.offset(1e-9 + 1e-6 * Math.abs(wanted)));
+      }
+    }
   }
 
   @Test

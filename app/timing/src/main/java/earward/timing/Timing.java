@@ -27,7 +27,14 @@ public final class Timing {
 
   private static List<Bar> bars() {
     return List.of(
-        new RepeatedBar("earward blocks from a cold start", 1.0, 10, () -> Program.start("blocks")),
-        new WarmBar("all plug-ins loaded", 0.25, "PluginLoading.allPlugins"));
+        new RepeatedBar("earward review from a cold start", 3.0, 10, () -> review("hayloft")),
+        new WarmBar("all plug-ins loaded", 0.25, "PluginLoading.allPlugins"),
+        new WarmBar("a design's blocks described and joined", 0.016, "AfterAnEdit.assembled"),
+        new WarmBar("the headline after an edited value", 0.016, "EditedValue.headline"),
+        new ThousandKits("hayloft"));
+  }
+
+  private static void review(String kit) throws IOException, InterruptedException {
+    Program.start("review", StarterKit.file(kit).toString());
   }
 }

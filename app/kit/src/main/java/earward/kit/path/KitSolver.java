@@ -2,6 +2,7 @@ package earward.kit.path;
 
 import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
+import earward.block.figure.Quantity;
 import earward.engine.CircuitException;
 import earward.engine.CompiledCircuit;
 import earward.engine.Engine;
@@ -10,11 +11,16 @@ import earward.engine.SolveOutcome;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 
 /** Solves an assembled kit in all its cases. */
 public final class KitSolver {
   /** Difference in depth over the turn below which no position counts as the worst. */
   private static final double LEAST_SPREAD = 1e-3;
+
+  /** What an edit shows at once: the kit at rest, at the test signal and at full output. */
+  private static final Set<CaseName> HEADLINE =
+      Set.of(CaseName.NO_SIGNAL, CaseName.TEST, CaseName.FULL_OUTPUT);
 
   private KitSolver() {}
 
@@ -83,6 +89,27 @@ public final class KitSolver {
     } catch (CircuitException e) {
       return Double.NaN; // whoever proves an edit solves it whole and sees the finding
     }
+  }
+
+  /**
+   * The kit compiled for the figures that an edit shows at once: all of {@link #compile} at rest,
+   * at the test signal and at full output, but for the largest clean modulation, which is a search.
+   * They are the same figures; the rest is left to a solve that may take longer.
+   *
+   * @param assembly a complete one
+   * @throws CircuitException with a finding when the circuit makes no sense to the engine
+   */
+  public static CompiledKit compileHeadline(Assembly assembly) {
+    List<SolveCase> cases =
+        new KitCases(assembly)
+            .all(Map.of()).stream().filter(one -> HEADLINE.contains(one.name())).toList();
+    List<FigureName> wanted =
+        WantedFigures.of(assembly, new Places(assembly.circuit())).stream()
+            .filter(figure -> HEADLINE.contains(figure.caseName()))
+            .filter(figure -> !figure.quantity().equals(Quantity.CLEAN_DEPTH))
+            .toList();
+    CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases, wanted);
+    return new CompiledKit(assembly, circuit, Map.of());
   }
 
   private static Map<String, Double> worstPosition(Assembly assembly, KitCases cases) {
