@@ -12,6 +12,12 @@ final class Detection {
 
   static final int AUDIO_SAMPLES = 32;
 
+  /**
+   * Samples where the carrier alone is solved: cheap, and pulses as narrow as those of 150 thermal
+   * voltages are still met by two samples.
+   */
+  private static final int LONE_CARRIER_SAMPLES = 64;
+
   private final Network network;
   final EnvelopeSolver modulated;
   final EnvelopeSolver carrierOnly;
@@ -22,9 +28,9 @@ final class Detection {
     this.network = network;
     int ports = network.ports.length;
     modulated = new EnvelopeSolver(ports, CARRIER_SAMPLES, AUDIO_SAMPLES);
-    carrierOnly = new EnvelopeSolver(ports, CARRIER_SAMPLES, 2);
+    carrierOnly = new EnvelopeSolver(ports, LONE_CARRIER_SAMPLES, 2);
     around =
-        new CarrierSurroundings(ports, modulated.carrierHarmonics(), modulated.audioHarmonics());
+        new CarrierSurroundings(ports, carrierOnly.carrierHarmonics(), modulated.audioHarmonics());
     junctions = new JunctionLaw[ports];
     for (int i = 0; i < ports; i++) {
       junctions[i] = stage.junction(network.ports[i].law().ordinal());
