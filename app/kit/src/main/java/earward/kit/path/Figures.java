@@ -12,13 +12,13 @@ import java.util.TreeMap;
 
 /** The figures of a solved kit by name. Immutable; figures that do not exist are not in it. */
 public final class Figures {
-  /** No figures. */
-  public static final Figures NONE = new Figures(Map.of());
-
   private static final Comparator<FigureName> BY_NAME =
       Comparator.comparing(FigureName::place)
           .thenComparing(FigureName::quantity)
           .thenComparing(name -> name.caseName().text());
+
+  /** No figures; made after the order that it needs. */
+  public static final Figures NONE = new Figures(Map.of());
 
   private final SortedMap<FigureName, Double> byName;
 
