@@ -91,6 +91,30 @@ public final class Schematic {
   }
 
   /**
+   * Draws what stands between two heights, moved up so that the upper one is at the origin: one row
+   * of a drawing that goes over several pages. Nothing is cut; what stands elsewhere is left out.
+   *
+   * @param top upper height in points
+   * @param bottom lower height in points
+   */
+  public void paint(Graphics2D graphics, Ink ink, double top, double bottom) {
+    List<Element> between =
+        elements.stream()
+            .filter(
+                element -> {
+                  Box box = element.bounds();
+                  double middle = (box.top() + box.bottom()) / 2 * scale;
+                  return middle >= top && middle < bottom;
+                })
+            .toList();
+    Graphics2D moved = (Graphics2D) graphics.create();
+    moved.translate(0, -top);
+    moved.scale(scale, scale);
+    new Painter(moved, ink, font).paint(between);
+    moved.dispose();
+  }
+
+  /**
    * The netlist read from the geometry alone: what touches what, and what bears the same name.
    * Wires that cross without a dot are not connected.
    */
