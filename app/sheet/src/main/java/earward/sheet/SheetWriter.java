@@ -17,6 +17,7 @@ import earward.sheet.internal.page.Sheet;
 import earward.sheet.internal.section.PageFrame;
 import earward.sheet.internal.section.Sections;
 import earward.sheet.internal.section.Words;
+import earward.sheet.wording.Wording;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.OutputStream;
@@ -29,24 +30,37 @@ public final class SheetWriter {
   private SheetWriter() {}
 
   /**
-   * Writes one sheet. Nothing is written when the sheet cannot be made.
+   * Writes one sheet in the program's own wording. Nothing is written when it cannot be made.
    *
    * @param content all that it says
    * @param out is left open
    * @throws IOException when it cannot be written
    */
   public static void write(SheetContent content, OutputStream out) throws IOException {
+    write(content, Wording.of(content.language()), out);
+  }
+
+  /**
+   * Writes one sheet. Nothing is written when it cannot be made.
+   *
+   * @param content all that it says
+   * @param wording in which it was made
+   * @param out is left open
+   * @throws IOException when it cannot be written
+   */
+  public static void write(SheetContent content, Wording wording, OutputStream out)
+      throws IOException {
     ByteArrayOutputStream whole = new ByteArrayOutputStream();
     try {
-      make(content, whole);
+      make(content, Words.of(wording), whole);
     } catch (DocumentException e) {
       throw new IllegalStateException("the sheet of " + content.title().name() + " failed", e);
     }
     whole.writeTo(out);
   }
 
-  private static void make(SheetContent content, OutputStream out) throws DocumentException {
-    Words words = Words.of(content.language());
+  private static void make(SheetContent content, Words words, OutputStream out)
+      throws DocumentException {
     Sheet sheet = Sheet.of(content.paper());
     List<List<Placed>> pages = Flow.over(sheet, Sections.of(content, words));
     Document document = new Document(new Rectangle(sheet.width(), sheet.height()), 0, 0, 0, 0);

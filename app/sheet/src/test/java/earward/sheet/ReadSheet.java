@@ -76,6 +76,25 @@ final class ReadSheet implements AutoCloseable {
     return letters;
   }
 
+  /** Letters whose middle lies inside another letter: text printed over text. */
+  List<String> overprinted(int page) throws IOException {
+    List<TextPosition> letters = letters(page);
+    List<String> over = new ArrayList<>();
+    for (int i = 0; i < letters.size(); i++) {
+      TextPosition a = letters.get(i);
+      for (int j = i + 1; j < letters.size(); j++) {
+        TextPosition b = letters.get(j);
+        double apart = Math.abs(a.getX() + a.getWidth() / 2 - b.getX() - b.getWidth() / 2);
+        double least = (a.getWidth() + b.getWidth()) / 4;
+        boolean sameLine = Math.abs(a.getY() - b.getY()) < 0.5 * a.getFontSizeInPt();
+        if (sameLine && apart < least) {
+          over.add(a.getUnicode() + " and " + b.getUnicode() + " at " + a.getX() + ", " + a.getY());
+        }
+      }
+    }
+    return over;
+  }
+
   /** The box of every corner of every path of a page, in the paper's points. */
   Rectangle2D paths(int page) throws IOException {
     Corners corners = new Corners(document.getPage(page - 1));

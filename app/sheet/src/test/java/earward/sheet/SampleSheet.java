@@ -152,6 +152,7 @@ final class SampleSheet {
     return new SeamRow(
         from,
         to,
+        "",
         volt(0.123),
         new Amount(0.012, Unit.FRACTION),
         new Amount(1470, Unit.OHM),

@@ -104,7 +104,7 @@ class SheetWriterTest {
     return SampleSheet.of(name + word, List.of(SampleSheet.STOP, SampleSheet.weigh()));
   }
 
-  private static void requireInside(ReadSheet sheet, int page, Paper paper) throws IOException {
+  static void requireInside(ReadSheet sheet, int page, Paper paper) throws IOException {
     for (TextPosition letter : sheet.letters(page)) {
       assertThat(letter.getFontSizeInPt()).isGreaterThanOrEqualTo(Style.LEAST_POINTS - 0.01f);
       assertThat(letter.getX()).isGreaterThanOrEqualTo(Sheet.SIDE - 1.5f);

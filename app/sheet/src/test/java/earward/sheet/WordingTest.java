@@ -3,11 +3,20 @@ package earward.sheet;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import earward.block.check.Severity;
+import earward.block.device.Dielectric;
+import earward.block.device.DiodeMaterial;
+import earward.block.device.Taper;
+import earward.block.device.Terminal;
 import earward.block.quantity.Unit;
+import earward.block.wiring.Caution;
+import earward.kit.design.FrontEndSupply;
 import earward.kit.parts.BandColour;
 import earward.sheet.content.Amount;
+import earward.sheet.content.CautionRow.Signal;
 import earward.sheet.wording.Numbers;
 import earward.sheet.wording.Wording;
+import earward.sheet.wording.WordingException;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -19,6 +28,7 @@ import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 
 class WordingTest {
   private static final Pattern KEY = Pattern.compile("\"([a-z-]+(?:\\.[a-z0-9-]+)+)\"");
@@ -39,10 +49,27 @@ class WordingTest {
   }
 
   @Test
-  void everyColourHasAName() {
+  void whateverAPartOrAFindingCanBeHasWords() {
+    requireWords("colour.", BandColour.values());
+    requireWords("terminal.", Terminal.values());
+    requireWords("taper.", Taper.values());
+    requireWords("dielectric.", Dielectric.values());
+    requireWords("material.", DiodeMaterial.values());
+    requireWords("severity.", Severity.values());
+    requireWords("signal.", Signal.values());
+    requireWords("front-end.", FrontEndSupply.values());
+    requireWords("caution.", Caution.values());
+  }
+
+  private static void requireWords(String prefix, Enum<?>... constants) {
     Wording english = Wording.of("en");
-    for (BandColour colour : BandColour.values()) {
-      assertThat(english.text("colour." + colour.name().toLowerCase(Locale.ROOT))).isNotBlank();
+    assertThat(constants).isNotEmpty();
+    for (Enum<?> constant : constants) {
+      String key = prefix + constant.name().toLowerCase(Locale.ROOT).replace('_', '-');
+      assertThat(english.text(key)).isNotBlank();
+      if (prefix.equals("caution.")) {
+        assertThat(english.text(key + ".do")).endsWith(".");
+      }
     }
   }
 
@@ -71,7 +98,7 @@ class WordingTest {
   void voltagesThatNoMeterTellsFromNothingAreNotPrintedInNanovolts() {
     Numbers numbers = new Numbers(Locale.ENGLISH);
     assertThat(numbers.text(3e-17, Unit.VOLT)).isEqualTo("0\u00a0V");
-    assertThat(numbers.text(-4e-5, Unit.VOLT)).isEqualTo("<\u00a0100\u00a0µV");
+    assertThat(numbers.text(-4e-5, Unit.VOLT)).isEqualTo("<\u00a00.1\u00a0mV");
     assertThat(numbers.text(1.3e-4, Unit.VOLT)).isEqualTo("130\u00a0µV");
   }
 
@@ -84,5 +111,45 @@ class WordingTest {
   void placeholdersOfAKeyAreKnown() {
     assertThat(Wording.of("en").placeholders("foot.page")).isEqualTo(Set.of("page", "pages"));
     assertThat(List.copyOf(Wording.of("en").placeholders("parts.how"))).isEmpty();
+  }
+
+  @Test
+  void aFileInTheTemplatesFolderGoesOverTheProgramsOwnWords(@TempDir Path folder) throws Exception {
+    Files.writeString(folder.resolve("en.properties"), "title.sheet = Bauzettel für Ω\n");
+    Wording wording = Wording.of(folder, "en");
+    assertThat(wording.text("title.sheet")).isEqualTo("Bauzettel für Ω");
+    assertThat(wording.text("severity.weigh")).isEqualTo("WEIGH");
+  }
+
+  @Test
+  void aNewLanguageNeedsNothingButItsFile(@TempDir Path folder) throws Exception {
+    Files.writeString(folder.resolve("fr.properties"), "section.heat = Chaleur\n");
+    Wording wording = Wording.of(folder, "fr");
+    assertThat(wording.locale()).isEqualTo(Locale.FRENCH);
+    assertThat(wording.text("section.heat")).isEqualTo("Chaleur");
+    assertThat(Wording.of(folder, "sw").text("section.heat")).isEqualTo("Heat");
+  }
+
+  @Test
+  void wordsThatWantWhatIsNotGivenAreRefusedInOneSentence(@TempDir Path folder) throws Exception {
+    Files.writeString(folder.resolve("en.properties"), "foot.page = {seite} of {pages}\n");
+    assertThatThrownBy(() -> Wording.of(folder, "en"))
+        .isInstanceOf(WordingException.class)
+        .hasMessageContaining("en.properties")
+        .hasMessageContaining("foot.page")
+        .hasMessageContaining("{seite}")
+        .hasMessageContaining("{page}, {pages}");
+  }
+
+  @Test
+  void aFileThatIsNoTextIsRefusedInOneSentence(@TempDir Path folder) throws Exception {
+    Files.write(folder.resolve("en.properties"), new byte[] {'a', '=', (byte) 0xff, (byte) 0xfe});
+    assertThatThrownBy(() -> Wording.of(folder, "en"))
+        .isInstanceOf(WordingException.class)
+        .hasMessageContaining("UTF-8");
+    Files.writeString(folder.resolve("en.properties"), "a = \\u12\n");
+    assertThatThrownBy(() -> Wording.of(folder, "en"))
+        .isInstanceOf(WordingException.class)
+        .hasMessageContaining("backslash");
   }
 }

@@ -7,7 +7,8 @@ import java.util.Objects;
  *
  * @param from name of the block on the left
  * @param to name of the block on the right
- * @param level audio rms there
+ * @param note what else must be said of it; may be empty
+ * @param level audio rms there, carrier rms before the detector
  * @param distortion there
  * @param backward impedance seen towards the feed
  * @param onward impedance seen towards the load
@@ -17,6 +18,7 @@ import java.util.Objects;
 public record SeamRow(
     String from,
     String to,
+    String note,
     Amount level,
     Amount distortion,
     Amount backward,
@@ -26,6 +28,7 @@ public record SeamRow(
   public SeamRow {
     Objects.requireNonNull(from);
     Objects.requireNonNull(to);
+    Objects.requireNonNull(note);
     Objects.requireNonNull(level);
     Objects.requireNonNull(distortion);
     Objects.requireNonNull(backward);

@@ -3,6 +3,8 @@ package earward.sheet.wording;
 import earward.block.quantity.Unit;
 import earward.kit.design.QuantityText;
 import earward.sheet.content.Amount;
+import java.math.BigDecimal;
+import java.text.DecimalFormatSymbols;
 import java.util.Locale;
 
 /** Writes numbers as the sheet prints them: a true minus sign, the language's decimal sign. */
@@ -14,8 +16,7 @@ public final class Numbers {
   private static final char NO_BREAK_SPACE = '\u00a0';
   private static final char MINUS = '\u2212';
 
-  /** No meter that a builder owns tells less from nothing. */
-  private static final double LEAST_VOLTS = 1e-4;
+  private static final double NOTHING = 1e-3;
 
   /** A number and its unit, apart so that they can be aligned. */
   public record Written(String number, String unit) {
@@ -37,13 +38,48 @@ public final class Numbers {
     if (!amount.known()) {
       return new Written(DASH, "");
     }
-    if (amount.unit() == Unit.VOLT && Math.abs(amount.si()) < LEAST_VOLTS) {
-      boolean nothing = Math.abs(amount.si()) < LEAST_VOLTS / 1000;
-      return nothing
-          ? new Written("0", "V")
-          : split("<" + NO_BREAK_SPACE, QuantityText.format(LEAST_VOLTS, Unit.VOLT, locale));
+    double least = least(amount.unit());
+    if (Math.abs(amount.si()) >= least) {
+      double shown = amount.unit() == Unit.DECIBEL ? tenths(amount.si()) : amount.si();
+      return split("", QuantityText.format(shown, amount.unit(), locale));
     }
-    return split("", QuantityText.format(amount.si(), amount.unit(), locale));
+    boolean nothing = Math.abs(amount.si()) <= NOTHING * least || amount.unit() == Unit.DECIBEL;
+    if (nothing) {
+      return new Written("0", amount.unit().symbol());
+    }
+    return amount.unit() == Unit.VOLT
+        ? new Written("<" + NO_BREAK_SPACE + decimal("0.1"), "mV")
+        : split("<" + NO_BREAK_SPACE, QuantityText.format(least, amount.unit(), locale));
+  }
+
+  private static double tenths(double decibels) {
+    return Double.isInfinite(decibels) ? decibels : Math.rint(decibels * 10) / 10;
+  }
+
+  /**
+   * Below this a figure cannot be told from nothing with what a builder owns, and is printed so
+   * rather than in nanovolts.
+   */
+  private static double least(Unit unit) {
+    return switch (unit) {
+      case VOLT -> 1e-4;
+      case AMPERE -> 1e-8;
+      case WATT -> 1e-6;
+      case OHM -> 1e-3;
+      case DECIBEL -> 0.05;
+      case FRACTION -> 1e-5;
+      case FARAD,
+          HENRY,
+          HERTZ,
+          SECOND,
+          METRE,
+          AMPERE_HOUR,
+          HOUR,
+          CELSIUS,
+          KELVIN_PER_WATT,
+          NUMBER ->
+          0;
+    };
   }
 
   private static Written split(String before, String text) {
@@ -52,6 +88,17 @@ public final class Numbers {
     return gap < 0
         ? new Written(before + printed, "")
         : new Written(before + printed.substring(0, gap), printed.substring(gap + 1));
+  }
+
+  /** The number in its unit without a prefix, as ratings are written: 0.25 W. */
+  public String plain(double si, Unit unit) {
+    String number = BigDecimal.valueOf(si).stripTrailingZeros().toPlainString();
+    return decimal(number) + NO_BREAK_SPACE + unit.symbol();
+  }
+
+  private String decimal(String number) {
+    char decimal = DecimalFormatSymbols.getInstance(locale).getDecimalSeparator();
+    return decimal == ',' ? number.replace('.', ',') : number;
   }
 
   /** The number with its unit, in one line. */

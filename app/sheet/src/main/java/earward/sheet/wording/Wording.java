@@ -6,12 +6,15 @@ import java.io.InputStreamReader;
 import java.io.Reader;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.Locale;
 import java.util.Properties;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.stream.Stream;
 
 /**
  * The words of the sheet in one language, from {@code templates/sheets/LANGUAGE.properties}; what a
@@ -30,7 +33,7 @@ public final class Wording {
   }
 
   /**
-   * The wording of a language; English where there is none.
+   * The wording that the program holds; English where it does not hold the language.
    *
    * @param languageTag for instance {@code en} or {@code de-AT}
    */
@@ -38,12 +41,59 @@ public final class Wording {
     Locale locale = Locale.forLanguageTag(languageTag);
     Properties english = new Properties();
     load(ENGLISH, english);
-    if (locale.getLanguage().equals(ENGLISH)) {
-      return new Wording(locale, english);
-    }
     Properties words = new Properties(english);
     boolean found = load(locale.getLanguage(), words);
     return new Wording(found ? locale : Locale.ENGLISH, words);
+  }
+
+  /**
+   * The wording of a file in a folder, over the one that the program holds.
+   *
+   * @param folder where {@code LANGUAGE.properties} may be; where it is not, the program's own
+   *     wording holds
+   * @param languageTag for instance {@code en} or {@code de-AT}
+   * @throws WordingException when the file cannot be read, or its words want other placeholders
+   */
+  public static Wording of(Path folder, String languageTag) throws WordingException {
+    Locale locale = Locale.forLanguageTag(languageTag);
+    Path file = folder.resolve(locale.getLanguage() + ".properties");
+    Wording own = of(languageTag);
+    if (!Files.isRegularFile(file)) {
+      return own;
+    }
+    Properties words = new Properties(own.words);
+    try (Reader reader = Files.newBufferedReader(file)) {
+      words.load(reader);
+    } catch (IOException e) {
+      throw new WordingException("The sheet's wording " + file + " cannot be read as UTF-8.");
+    } catch (IllegalArgumentException e) {
+      throw new WordingException(
+          "The sheet's wording " + file + " has a backslash that begins no letter: \\uXXXX.");
+    }
+    Wording read = new Wording(locale, words);
+    requireSamePlaceholders(read, file);
+    return read;
+  }
+
+  private static void requireSamePlaceholders(Wording read, Path file) throws WordingException {
+    Wording english = of(ENGLISH);
+    for (String key : english.keys()) {
+      Set<String> wanted = english.placeholders(key);
+      Set<String> found = read.placeholders(key);
+      if (!wanted.containsAll(found)) {
+        found.removeAll(wanted);
+        throw new WordingException(
+            "In the sheet's wording "
+                + file
+                + ", '"
+                + key
+                + "' wants {"
+                + String.join("}, {", found)
+                + "}, which the program does not give; it gives "
+                + (wanted.isEmpty() ? "nothing" : "{" + String.join("}, {", wanted) + "}")
+                + ".");
+      }
+    }
   }
 
   private static boolean load(String language, Properties into) {
@@ -105,18 +155,9 @@ public final class Wording {
   /** The names of the placeholders of a key. */
   public Set<String> placeholders(String key) {
     Set<String> names = new TreeSet<>();
-    Matcher matcher = PLACEHOLDER.matcher(text(key, filler(key)));
-    while (matcher.find()) {
-      names.add(matcher.group(1));
-    }
+    Stream<String> found =
+        PLACEHOLDER.matcher(words.getProperty(key, "")).results().map(match -> match.group(1));
+    found.forEach(names::add);
     return names;
-  }
-
-  private String[] filler(String key) {
-    Matcher matcher = PLACEHOLDER.matcher(words.getProperty(key, ""));
-    return matcher
-        .results()
-        .flatMap(found -> java.util.stream.Stream.of(found.group(1), found.group()))
-        .toArray(String[]::new);
   }
 }

@@ -34,19 +34,34 @@ public final class Flow {
       while (pieces.get(to - 1).keptWithNext() && to < pieces.size()) {
         to++;
       }
+      int rest = Math.min(pieces.size(), from + 1 + pieces.get(from).together());
+      flow.breakBefore(pieces.subList(from, Math.max(to, rest)));
       flow.put(pieces.subList(from, to));
       from = to;
     }
     return List.copyOf(flow.pages);
   }
 
+  /** Begins a page where what should stay together does not fit here, but fits on one page. */
+  private void breakBefore(List<Piece> section) {
+    float whole = heightOf(section);
+    boolean fits = used + section.get(0).spaceAbove() + whole <= height;
+    if (!page.isEmpty() && !fits && whole <= height) {
+      newPage();
+    }
+  }
+
+  private void newPage() {
+    page = new ArrayList<>();
+    pages.add(page);
+    used = 0;
+  }
+
   private void put(List<Piece> together) {
     Piece first = together.get(0);
     boolean fits = used + first.spaceAbove() + heightOf(together) <= height;
     if (!page.isEmpty() && (first.beginsPage() || !fits)) {
-      page = new ArrayList<>();
-      pages.add(page);
-      used = 0;
+      newPage();
     }
     if (page.isEmpty()) {
       Optional<Piece> repeated = first.repeatedAbove();

@@ -20,6 +20,14 @@ public interface Piece {
     return false;
   }
 
+  /**
+   * The pieces after it that should stand on its page where one page can hold them all: the rest of
+   * its section.
+   */
+  default int together() {
+    return 0;
+  }
+
   /** Whether it begins a page. */
   default boolean beginsPage() {
     return false;

@@ -16,7 +16,7 @@ public record Sheet(float width, float height) {
   public static final float TOP = 48;
 
   /** Below the content; the foot of the page stands in it. */
-  public static final float BOTTOM = 54;
+  public static final float BOTTOM = 50;
 
   /** Nothing is printed nearer to the edge than this: 7 mm, which every printer can do. */
   public static final float EDGE = 20;

@@ -18,6 +18,7 @@ public record Style(float size, Weight weight, Tone tone) {
   public static final Style LEAD = new Style(10.5f, Weight.REGULAR, Tone.INK);
   public static final Style BODY = new Style(9, Weight.REGULAR, Tone.INK);
   public static final Style STRONG = new Style(9, Weight.BOLD, Tone.INK);
+  public static final Style CLOSE = new Style(8.5f, Weight.REGULAR, Tone.INK);
   public static final Style NOTE = new Style(8, Weight.REGULAR, Tone.DARK);
   public static final Style LABEL = new Style(7.5f, Weight.REGULAR, Tone.DARK);
   public static final Style LABEL_STRONG = new Style(7.5f, Weight.BOLD, Tone.INK);

@@ -3,6 +3,7 @@ package earward.sheet.internal.page;
 import com.lowagie.text.DocumentException;
 import com.lowagie.text.pdf.BaseFont;
 import earward.sheet.internal.page.Style.Weight;
+import java.awt.GraphicsEnvironment;
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
@@ -10,6 +11,7 @@ import java.io.UncheckedIOException;
 import java.security.SecureRandom;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /**
  * The letters of the sheet: Liberation Sans, and DejaVu Sans for what it lacks. A character that
@@ -124,13 +126,26 @@ public final class Typeface {
     }
   }
 
-  /** The regular face for drawings, whose metrics are those of the face in the PDF. */
+  /**
+   * The face for drawings, whose metrics are those of the faces in the PDF, the bold one among
+   * them: made bold, it becomes the shipped bold face and not a thickened regular one.
+   */
   public static java.awt.Font forDrawings() {
     return Drawn.REGULAR;
   }
 
   private static final class Drawn {
-    static final java.awt.Font REGULAR = drawn("/liberation/LiberationSans-Regular.ttf");
+    static final java.awt.Font REGULAR = registered();
+
+    private static java.awt.Font registered() {
+      java.awt.Font regular = drawn("/liberation/LiberationSans-Regular.ttf");
+      java.awt.Font bold = drawn("/liberation/LiberationSans-Bold.ttf");
+      GraphicsEnvironment known = GraphicsEnvironment.getLocalGraphicsEnvironment();
+      // where the machine has the family itself, its own faces hold; their widths are the same
+      known.registerFont(regular);
+      known.registerFont(bold);
+      return new java.awt.Font(regular.getFamily(Locale.ROOT), java.awt.Font.PLAIN, 1);
+    }
 
     private static java.awt.Font drawn(String resource) {
       try (InputStream in = new ByteArrayInputStream(bytes(resource))) {

@@ -28,7 +28,7 @@ record CautionPiece(CautionRow caution, Words words) implements Piece {
     float headline = headlineLines(width).size() * Style.STRONG.leading();
     return Math.max(BOX_HEIGHT, headline)
         + BELOW
-        + Lines.of(caution.sentence(), Style.BODY, width).size() * Style.BODY.leading();
+        + Lines.of(caution.sentence(), Style.CLOSE, width).size() * Style.CLOSE.leading();
   }
 
   private String signal() {
@@ -66,10 +66,10 @@ record CautionPiece(CautionRow caution, Words words) implements Piece {
       baseline += Style.STRONG.leading();
     }
     float top = y + Math.max(BOX_HEIGHT, headline.size() * Style.STRONG.leading()) + BELOW;
-    baseline = top + Style.BODY.rise();
-    for (String line : Lines.of(caution.sentence(), Style.BODY, width)) {
-      canvas.text(line, x, baseline, Style.BODY);
-      baseline += Style.BODY.leading();
+    baseline = top + Style.CLOSE.rise();
+    for (String line : Lines.of(caution.sentence(), Style.CLOSE, width)) {
+      canvas.text(line, x, baseline, Style.CLOSE);
+      baseline += Style.CLOSE.leading();
     }
   }
 }

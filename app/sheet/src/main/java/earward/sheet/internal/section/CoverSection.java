@@ -47,7 +47,7 @@ final class CoverSection {
     for (int i = 0; i < cautions.size(); i += 2) {
       Piece right =
           i + 1 < cautions.size() ? new CautionPiece(cautions.get(i + 1), words) : new Gap(0);
-      pieces.add(new SideBySide(new CautionPiece(cautions.get(i), words), right, i == 0 ? 0 : 9));
+      pieces.add(new SideBySide(new CautionPiece(cautions.get(i), words), right, i == 0 ? 0 : 8));
     }
     pieces.add(Paragraph.note(words.text("cautions.defer")));
     return pieces;
@@ -58,12 +58,8 @@ final class CoverSection {
     List<Piece> pieces = new ArrayList<>();
     pieces.add(new Heading(words.text("section.findings"), false));
     String legend = findings.isEmpty() ? "findings.none" : "findings.legend";
-    pieces.add(findings.isEmpty() ? text(words, legend) : text(words, legend).kept());
+    pieces.add(Paragraph.wide(words.text(legend)));
     findings.forEach(finding -> pieces.add(new FindingPiece(finding, words)));
     return pieces;
-  }
-
-  private static Paragraph text(Words words, String key) {
-    return Paragraph.note(words.text(key));
   }
 }

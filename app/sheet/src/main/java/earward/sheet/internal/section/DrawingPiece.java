@@ -15,11 +15,6 @@ record DrawingPiece(PathDrawing.Row row) implements Piece {
     return (float) row.heightPoints() * scale(width);
   }
 
-  @Override
-  public float spaceAbove() {
-    return 6;
-  }
-
   /** A drawing that is wider than the page is made smaller rather than cut. */
   private float scale(float width) {
     return Math.min(1, width / (float) row.widthPoints());

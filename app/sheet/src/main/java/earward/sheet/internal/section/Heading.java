@@ -2,7 +2,6 @@ package earward.sheet.internal.section;
 
 import earward.sheet.internal.page.Canvas;
 import earward.sheet.internal.page.Piece;
-import earward.sheet.internal.page.Sheet;
 import earward.sheet.internal.page.Style;
 import earward.sheet.internal.page.Style.Tone;
 import java.util.Optional;
@@ -12,10 +11,20 @@ import java.util.Optional;
  *
  * @param title of the section
  * @param beginsPage whether it always begins a page
+ * @param together how many pieces after it should stand on its page
  */
-record Heading(String title, boolean beginsPage) implements Piece {
+record Heading(String title, boolean beginsPage, int together) implements Piece {
   private static final float RULE = 1.6f;
-  private static final float BELOW = 8;
+  private static final float BELOW = 6;
+
+  Heading(String title, boolean beginsPage) {
+    this(title, beginsPage, 0);
+  }
+
+  /** The heading of a section that stands on one page where one page can hold it. */
+  Heading keepingTogether(int pieces) {
+    return new Heading(title, beginsPage, pieces);
+  }
 
   @Override
   public float height(float width) {
@@ -30,7 +39,7 @@ record Heading(String title, boolean beginsPage) implements Piece {
 
   @Override
   public float spaceAbove() {
-    return Sheet.TOP / 2;
+    return 20;
   }
 
   @Override

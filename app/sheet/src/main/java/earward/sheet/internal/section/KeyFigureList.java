@@ -19,7 +19,7 @@ import java.util.stream.Collectors;
  * @param words of the sheet
  */
 record KeyFigureList(String title, List<KeyFigure> figures, Words words) implements Piece {
-  private static final float PADDING = 3;
+  private static final float PADDING = 2.4f;
   private static final float GAP = 8;
   private static final float LEAST_LABEL = 70;
 

@@ -41,7 +41,7 @@ final class LevelsSection {
       String between = words.text("seams.from-to", "from", row.from(), "to", row.to());
       table.row(
           List.of(
-              Cell.text(between, Style.BODY),
+              Cell.stacked(Cell.text(between, Style.BODY), Cell.text(row.note(), Style.LABEL)),
               amount(row.level(), words),
               amount(row.distortion(), words),
               amount(row.backward(), words),

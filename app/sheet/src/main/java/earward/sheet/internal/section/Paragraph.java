@@ -26,8 +26,14 @@ record Paragraph(String text, Style style, float most, float spaceAbove, boolean
     return new Paragraph(text, Style.NOTE, READABLE, 4, false);
   }
 
+  /** A legend over a list: as wide as it, and kept with it. */
+  static Paragraph wide(String text) {
+    return new Paragraph(text, Style.NOTE, 1, 0, true);
+  }
+
+  /** The same as the first thing below a heading. */
   Paragraph kept() {
-    return new Paragraph(text, style, most, spaceAbove, true);
+    return new Paragraph(text, style, most, 0, true);
   }
 
   @Override

@@ -4,9 +4,9 @@ import earward.kit.parts.BandColour;
 import earward.sheet.content.PartMarking.Body;
 import earward.sheet.content.PartMarking.Printed;
 import earward.sheet.internal.page.Canvas;
-import earward.sheet.internal.page.Lines;
 import earward.sheet.internal.page.Style;
 import earward.sheet.internal.page.Style.Tone;
+import earward.sheet.internal.page.Typeface;
 import java.awt.Color;
 import java.util.List;
 
@@ -60,7 +60,8 @@ final class PartPicture {
       canvas.rounded(left, y + 0.5f, wide, HEIGHT - 1, radius(body), LINE, PAPER);
     }
     float taken = decorate(canvas, body, left, y, wide);
-    String print = Lines.cut(printed.print(), Style.PRINT, wide - taken - 3);
+    boolean fits = Typeface.width(printed.print(), Style.PRINT) <= wide - taken - 3;
+    String print = fits ? printed.print() : "";
     float middle = body == Body.INTEGRATED_CIRCUIT ? taken / 2 : -taken / 2;
     canvas.textCentred(print, left + wide / 2 + middle, y + 9.6f, Style.PRINT);
   }

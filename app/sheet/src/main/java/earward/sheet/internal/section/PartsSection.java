@@ -14,6 +14,9 @@ import java.util.List;
 final class PartsSection {
   private static final float LEAST_ROW = 22;
 
+  /** A list that begins low on a page begins with more than a row or two. */
+  private static final int LEAST_TOGETHER = 14;
+
   private PartsSection() {}
 
   static List<Piece> parts(List<PartRow> parts, Words words) {
@@ -21,7 +24,7 @@ final class PartsSection {
     if (parts.isEmpty()) {
       return pieces;
     }
-    pieces.add(new Heading(words.text("section.parts"), true));
+    pieces.add(new Heading(words.text("section.parts"), false).keepingTogether(LEAST_TOGETHER));
     pieces.add(Paragraph.body(words.text("parts.how")).kept());
     pieces.add(new Gap(6));
     Table table =

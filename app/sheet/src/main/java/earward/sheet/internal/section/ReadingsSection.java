@@ -22,7 +22,7 @@ final class ReadingsSection {
 
   static List<Piece> firstPower(SheetContent content, Words words) {
     List<Piece> pieces = new ArrayList<>();
-    pieces.add(new Heading(words.text("section.first-power"), true));
+    pieces.add(new Heading(words.text("section.first-power"), false));
     for (int step = 1; step <= 5; step++) {
       pieces.add(new StepPiece(words.text("first-power." + step)));
     }
@@ -111,8 +111,12 @@ final class ReadingsSection {
 
   /** Where there is nothing to expect there is nothing to write. */
   private static Cell reading(Amount expected, Words words) {
-    return expected.known()
-        ? new ReadingCell(words.numbers().write(expected).unit())
-        : Cell.empty();
+    return expected.known() ? new ReadingCell(unitToWrite(expected, words)) : Cell.empty();
+  }
+
+  /** No meter of a builder reads microvolts. */
+  private static String unitToWrite(Amount expected, Words words) {
+    String unit = words.numbers().write(expected).unit();
+    return unit.equals("µV") ? "mV" : unit;
   }
 }

@@ -11,8 +11,7 @@ import earward.sheet.wording.Wording;
  */
 public record Words(Wording wording, Numbers numbers) {
   /** The words of a language. */
-  public static Words of(String languageTag) {
-    Wording wording = Wording.of(languageTag);
+  public static Words of(Wording wording) {
     return new Words(wording, new Numbers(wording.locale()));
   }
 

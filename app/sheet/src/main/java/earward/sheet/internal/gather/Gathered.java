@@ -1,0 +1,64 @@
+package earward.sheet.internal.gather;
+
+import earward.block.check.Finding;
+import earward.kit.design.Digest;
+import earward.kit.design.KitDesign;
+import earward.kit.design.SheetOptions;
+import earward.kit.path.Assembly;
+import earward.kit.path.Figures;
+import earward.kit.review.Remedy;
+import earward.kit.review.ReviewFinding;
+import earward.kit.review.ReviewedKit;
+import earward.sheet.content.FindingRow;
+import earward.sheet.content.KitTitle;
+import earward.sheet.content.SheetContent;
+import earward.sheet.internal.section.Words;
+import java.util.List;
+
+/** All that a reviewed kit says, as the content of its sheet. */
+public final class Gathered {
+  private Gathered() {}
+
+  /** The content. */
+  public static SheetContent of(ReviewedKit kit, Digest digest, Words words) {
+    Assembly assembly = kit.solved().assembly();
+    Figures figures = kit.figures();
+    KitDesign design = assembly.design();
+    SheetOptions options = design.sheet();
+    BlockNames names = new BlockNames(assembly, words.wording().locale());
+    PartRows parts = new PartRows(assembly, names, words);
+    FigureRows rows = new FigureRows(assembly, figures, names, words);
+    CoverFigures cover = new CoverFigures(assembly, figures, names, words);
+    String name = design.title().isBlank() ? words.text("title.nameless") : design.title();
+    return new SheetContent(
+        new KitTitle(
+            name, design.revision(), digest.shortForm(), options.clubName(), options.kitNumber()),
+        options.paper(),
+        options.language(),
+        cover.introduction(),
+        cover.conditions(),
+        cover.keyFigures(),
+        new CautionRows(assembly, figures, words).rows(),
+        new Drawn(assembly, names, parts, words).drawing(),
+        parts.pinOuts(),
+        parts.rows(),
+        cover.method(),
+        rows.testPoints(),
+        rows.currents(),
+        rows.heat(),
+        rows.seams(),
+        findings(kit.findings()));
+  }
+
+  private static List<FindingRow> findings(List<ReviewFinding> findings) {
+    return findings.stream()
+        .map(
+            reviewed -> {
+              Finding finding = reviewed.finding();
+              List<String> remedies = reviewed.remedies().stream().map(Remedy::sentence).toList();
+              return new FindingRow(
+                  finding.severity(), finding.sentence(), finding.source(), remedies);
+            })
+        .toList();
+  }
+}
