@@ -153,6 +153,9 @@ final class CoverFigures {
     add(rows, "figures.noise", Quantity.SIGNAL_TO_NOISE_DECIBELS, CaseName.TEST);
     add(rows, "figures.current", Quantity.SUPPLY_AMPERES, CaseName.NO_SIGNAL);
     life(rows);
+    if (rows.isEmpty()) {
+      rows.add(KeyFigure.words(words.text("figures.none"), words.text("figures.not-solved")));
+    }
     return rows;
   }
 
