@@ -2,19 +2,13 @@ package earward.drawing;
 
 import static earward.block.device.Terminal.A;
 import static earward.block.device.Terminal.B;
-import static earward.block.device.Terminal.BASE;
 import static earward.block.device.Terminal.BOTTOM;
-import static earward.block.device.Terminal.COLLECTOR;
-import static earward.block.device.Terminal.EMITTER;
 import static earward.block.device.Terminal.GAIN;
 import static earward.block.device.Terminal.INPUT;
 import static earward.block.device.Terminal.INVERTING;
 import static earward.block.device.Terminal.OUTPUT;
 import static earward.block.device.Terminal.OUTPUT_TWO;
-import static earward.block.device.Terminal.PRIMARY_END;
-import static earward.block.device.Terminal.PRIMARY_START;
 import static earward.block.device.Terminal.SUPPLY;
-import static earward.block.device.Terminal.TAP;
 import static earward.block.device.Terminal.TOP;
 import static earward.block.device.Terminal.WIPER;
 import static earward.block.wiring.Nodes.GROUND;
@@ -43,13 +37,11 @@ import earward.block.device.Resistor;
 import earward.block.device.Switch;
 import earward.block.device.Taper;
 import earward.block.device.Terminal;
-import earward.block.device.Transformer;
 import earward.block.device.TransistorModel;
 import earward.block.device.TunedFeed;
 import earward.block.wiring.Nodes;
 import earward.block.wiring.Port.Pair;
 import earward.block.wiring.Port.Single;
-import earward.block.wiring.Port.TappedPair;
 import earward.block.wiring.Wiring;
 import java.awt.Font;
 import java.awt.FontFormatException;
@@ -507,136 +499,6 @@ final class Examples {
         Map.of("rail", "TP11", "quiet-rail", "TP12"));
   }
 
-  /** An op-amp with feedback over it, biased from half the rail. */
-  static SheetBlock preamplifier() {
-    Wiring wiring =
-        Wiring.from(new Single("in"))
-            .run("c-in", farads(100e-9), "plus-in")
-            .down("r-low", ohms(100e3), GROUND)
-            .up("r-high", ohms(100e3), MAIN_RAIL)
-            .body(
-                "op-amp",
-                opAmp(),
-                Map.of(
-                    INPUT,
-                    "plus-in",
-                    INVERTING,
-                    "minus-in",
-                    OUTPUT,
-                    "amp",
-                    SUPPLY,
-                    MAIN_RAIL,
-                    Terminal.GROUND,
-                    GROUND))
-            .bridge("r-feedback", ohms(47e3), "minus-in", "amp")
-            .at("minus-in")
-            .down("r-gain", ohms(4.7e3), "gain-foot")
-            .at("gain-foot")
-            .down("c-gain", farads(10e-6), GROUND)
-            .at("amp")
-            .run("c-out", farads(1e-6), "out")
-            .testPoint("amp", "amp")
-            .testPoint("foot", "gain-foot")
-            .testPoint("supply", MAIN_RAIL)
-            .testPoint("ground", GROUND)
-            .to(new Single("out"));
-    return SheetBlock.plain("preamplifier", wiring);
-  }
-
-  /** One transistor with its base divider, emitter network and collector load. */
-  static SheetBlock commonEmitter(boolean pnp) {
-    String upper = pnp ? GROUND : MAIN_RAIL;
-    String lower = pnp ? MAIN_RAIL : GROUND;
-    Wiring wiring =
-        Wiring.from(new Single("in"))
-            .run("c-in", farads(1e-6), "base")
-            .up("r-high", ohms(100e3), pnp ? MAIN_RAIL : upper)
-            .down("r-low", ohms(22e3), pnp ? GROUND : lower)
-            .body(
-                "q1",
-                transistor(pnp),
-                Map.of(BASE, "base", COLLECTOR, "collector", EMITTER, "emitter"))
-            .at("collector")
-            .up("r-collector", ohms(4.7e3), upper)
-            .at("emitter")
-            .down("r-emitter", ohms(1e3), lower)
-            .down("c-emitter", farads(47e-6), lower)
-            .at("collector")
-            .run("c-out", farads(1e-6), "out")
-            .bridge("r-feedback", ohms(1e6), "base", "collector")
-            .to(new Single("out"));
-    return SheetBlock.plain("stage", wiring);
-  }
-
-  /** A push-pull pair as a column, driven at both bases through diodes. */
-  static SheetBlock pushPull() {
-    Wiring wiring =
-        Wiring.from(new Single("in"))
-            .run("c-drive", farads(10e-6), "drive")
-            .up("d-up", diode(), "upper-base")
-            .at("upper-base")
-            .up("r-up", ohms(1e3), MAIN_RAIL)
-            .at("drive")
-            .down("d-down", diode(), Terminal.CATHODE, "lower-base")
-            .at("lower-base")
-            .down("r-down", ohms(1e3), GROUND)
-            .column(
-                "q1",
-                transistor(false),
-                COLLECTOR,
-                Map.of(COLLECTOR, MAIN_RAIL, BASE, "upper-base", EMITTER, "upper-emitter"))
-            .column("re1", ohms(0.5), A, Map.of(A, "upper-emitter", B, "middle"))
-            .column("re2", ohms(0.5), A, Map.of(A, "middle", B, "lower-emitter"))
-            .column(
-                "q2",
-                transistor(true),
-                EMITTER,
-                Map.of(EMITTER, "lower-emitter", BASE, "lower-base", COLLECTOR, GROUND))
-            .at("middle")
-            .run("c-out", farads(470e-6), "out")
-            .testPoint("middle", "middle")
-            .to(new Single("out"));
-    return SheetBlock.plain("push-pull", wiring);
-  }
-
-  /** A phase-splitting transformer into two halves. */
-  static SheetBlock splitter() {
-    Wiring wiring =
-        Wiring.from(new Single("in"))
-            .body(
-                "transformer",
-                new Transformer(1, 1, 100, 100),
-                Map.of(
-                    PRIMARY_START,
-                    "in",
-                    PRIMARY_END,
-                    MAIN_RAIL,
-                    TOP,
-                    "plus",
-                    TAP,
-                    "tap",
-                    BOTTOM,
-                    "minus"))
-            .to(new TappedPair("plus", "tap", "minus"));
-    return SheetBlock.plain("splitter", wiring);
-  }
-
-  /** Two diodes on the halves of a tapped winding. */
-  static SheetBlock fullWave() {
-    Wiring wiring =
-        Wiring.from(new TappedPair("plus", "tap", "minus"))
-            .run("d1", diode(), "out")
-            .at("minus")
-            .run("d2", diode(), "out")
-            .at("tap")
-            .down("r-tap", ohms(1e3), GROUND)
-            .at("out")
-            .down("c1", farads(1e-9), GROUND)
-            .testPoint("out", "out")
-            .to(new Single("out"));
-    return SheetBlock.plain("full-wave", wiring);
-  }
-
   static List<SheetBlock> lantern() {
     return List.of(feed(), detector(false), filter(), volume(false), bridgePower(true));
   }
@@ -653,10 +515,13 @@ final class Examples {
         new DrawingRuleTest.Case(
             "boathouse", List.of(feed(), detector(true), filter(), controlledPower()), beside),
         new DrawingRuleTest.Case("load", List.of(bridgePower(false), bridgeLoad()), List.of()),
-        new DrawingRuleTest.Case("preamplifier", List.of(preamplifier()), List.of()),
+        new DrawingRuleTest.Case("preamplifier", List.of(StageExamples.preamplifier()), List.of()),
         new DrawingRuleTest.Case(
-            "transistors", List.of(commonEmitter(false), pushPull()), List.of()),
-        new DrawingRuleTest.Case("pnp", List.of(commonEmitter(true)), List.of()),
-        new DrawingRuleTest.Case("split", List.of(splitter(), fullWave()), List.of()));
+            "transistors",
+            List.of(StageExamples.commonEmitter(false), StageExamples.pushPull()),
+            List.of()),
+        new DrawingRuleTest.Case("pnp", List.of(StageExamples.commonEmitter(true)), List.of()),
+        new DrawingRuleTest.Case(
+            "split", List.of(StageExamples.splitter(), StageExamples.fullWave()), List.of()));
   }
 }
