@@ -12,8 +12,9 @@ import java.util.Map;
 import org.jspecify.annotations.Nullable;
 
 /**
- * The structure of a circuit: nodes, laws, ports, slots. Immutable once built; shared. Arrays rather
- * than lists, since a solve that walks them must make no garbage; they are not to be written.
+ * The structure of a circuit: nodes, laws, ports, slots. Immutable once built; shared. Arrays
+ * rather than lists, since a solve that walks them must make no garbage; they are not to be
+ * written.
  */
 public final class Network {
   final Circuit circuit;
