@@ -11,6 +11,7 @@ import picocli.CommandLine.IVersionProvider;
     mixinStandardHelpOptions = true,
     versionProvider = EarwardCommand.Version.class,
     subcommands = {
+      SheetCommand.class,
       FiguresCommand.class,
       ReviewCommand.class,
       BlocksCommand.class,

@@ -8,6 +8,8 @@ import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.nio.file.StandardOpenOption;
+import java.util.UUID;
 import org.jspecify.annotations.Nullable;
 
 /** A file that a command writes: whole or not at all, and never over the design that was read. */
@@ -61,10 +63,14 @@ final class OutputFile {
     if (folder == null || !Files.isDirectory(folder)) {
       throw new NoSuchFileException(String.valueOf(folder));
     }
-    Path draft = Files.createTempFile(folder, ".earward", ".part");
+    // not a temporary file of the JDK's, which only its owner may read
+    Path draft = folder.resolve(".earward-" + UUID.randomUUID() + ".part");
     try {
-      try (OutputStream out = Files.newOutputStream(draft)) {
+      try (OutputStream out = Files.newOutputStream(draft, StandardOpenOption.CREATE_NEW)) {
         bytes.to(out);
+      }
+      if (Files.exists(real) && Files.getFileStore(real).supportsFileAttributeView("posix")) {
+        Files.setPosixFilePermissions(draft, Files.getPosixFilePermissions(real));
       }
       Files.move(draft, real, StandardCopyOption.REPLACE_EXISTING);
     } finally {

@@ -25,8 +25,8 @@ final class Shown {
     };
   }
 
-  /** A text with its narrow spaces made ordinary, so that it can be searched for. */
+  /** A text with ordinary spaces and minus signs, so that it can be searched for. */
   static String plain(String text) {
-    return text.replace('\u202f', ' ');
+    return text.replace('\u202f', ' ').replace('\u00a0', ' ').replace('\u2212', '-');
   }
 }

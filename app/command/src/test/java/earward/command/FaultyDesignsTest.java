@@ -31,7 +31,7 @@ class FaultyDesignsTest {
   }
 
   private static void assertFault(Path file, String... words) {
-    for (String command : List.of("figures", "review")) {
+    for (String command : List.of("sheet", "figures", "review")) {
       Ran ran = Ran.earward(command, file);
       assertThat(ran.code()).as(ran.messages()).isEqualTo(2);
       assertThat(ran.results()).isEmpty();

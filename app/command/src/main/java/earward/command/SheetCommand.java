@@ -1,0 +1,75 @@
+package earward.command;
+
+import earward.kit.review.ReviewedKit;
+import earward.sheet.SheetWriter;
+import earward.sheet.Sheets;
+import earward.sheet.content.KeyFigure;
+import earward.sheet.content.SheetContent;
+import earward.sheet.wording.Numbers;
+import earward.sheet.wording.Wording;
+import earward.sheet.wording.WordingException;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Path;
+import java.util.Locale;
+import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+
+/** The build sheet of a design, as PDF. */
+@Command(
+    name = "sheet",
+    description = "Writes the build sheet of a kit design, and says its name and key figures.")
+final class SheetCommand extends DesignCommand {
+  private static final String ENDING = ".pdf";
+
+  @Option(
+      names = {"-o", "--output"},
+      paramLabel = "PDF",
+      description = "File to write; else the design's name with .pdf, in the current folder.")
+  private @Nullable Path output;
+
+  @Override
+  void show(ReviewedKit reviewed, Program program) throws CommandFault {
+    Path target = output == null ? besideTheUser() : output;
+    OutputFile file = OutputFile.at(target, file());
+    SheetContent content;
+    try {
+      Wording wording =
+          Wording.of(
+              program.sheetWordings(), reviewed.solved().assembly().design().sheet().language());
+      content = Sheets.of(reviewed, wording);
+      file.write(out -> SheetWriter.write(content, wording, out));
+    } catch (WordingException e) {
+      throw CommandFault.ofInput(String.valueOf(e.getMessage()));
+    } catch (IOException | UncheckedIOException e) {
+      throw OutputFile.fault(target, e);
+    }
+    results().println(target);
+    keyFigures(content);
+    if (reviewed.doNotBuild()) {
+      results().println("DO NOT BUILD: a finding is STOP; 'earward review' says which.");
+    }
+  }
+
+  private void keyFigures(SheetContent content) {
+    Numbers numbers = new Numbers(Locale.ROOT);
+    TextTable table = new TextTable();
+    for (KeyFigure figure : content.keyFigures()) {
+      String amounts =
+          figure.amounts().stream()
+              .map(amount -> numbers.write(amount).whole())
+              .collect(Collectors.joining(" to "));
+      table.row(Shown.plain(figure.label()), Shown.plain(amounts), Shown.plain(figure.note()));
+    }
+    table.print(results());
+  }
+
+  private Path besideTheUser() {
+    @Nullable Path name = file().getFileName();
+    String text = name == null ? "kit" : name.toString();
+    int point = text.lastIndexOf('.');
+    return Path.of((point > 0 ? text.substring(0, point) : text) + ENDING);
+  }
+}
