@@ -1,8 +1,13 @@
 package earward.command;
 
+import java.util.Objects;
+import java.util.Optional;
 import java.util.concurrent.Callable;
+import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.IVersionProvider;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Spec;
 
 /** The command line as a whole; without a command it opens the desktop. */
 @Command(
@@ -23,9 +28,12 @@ import picocli.CommandLine.IVersionProvider;
       "3 the program is at fault. Results go to standard output, messages to standard error."
     })
 final class EarwardCommand implements Callable<Integer> {
+  @Spec private @Nullable CommandSpec spec;
+
   @Override
   public Integer call() throws CommandFault {
-    return new DesktopCommand().call();
+    return DesktopCommand.open(
+        Optional.empty(), Objects.requireNonNull(spec).commandLine().getErr());
   }
 
   /** The version of the jar that this class came in. */

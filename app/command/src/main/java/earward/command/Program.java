@@ -8,10 +8,15 @@ import earward.kit.parts.PartsLibrary;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.net.URISyntaxException;
+import java.nio.file.DirectoryIteratorException;
+import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.security.CodeSource;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 
@@ -80,6 +85,19 @@ final class Program implements AutoCloseable {
   /** Where a club may keep its own wording of the sheet. */
   Path sheetWordings() {
     return home.resolve("templates").resolve("sheets");
+  }
+
+  /** The design files of the starter kits, by name; none where the folder cannot be read. */
+  List<Path> starterKits() {
+    List<Path> kits = new ArrayList<>();
+    try (DirectoryStream<Path> files =
+        Files.newDirectoryStream(home.resolve("templates").resolve("kits"), "*.earward")) {
+      files.forEach(kits::add);
+    } catch (IOException | DirectoryIteratorException e) {
+      return List.of();
+    }
+    kits.sort(Comparator.naturalOrder());
+    return kits;
   }
 
   /** Says on standard error which plug-ins are not used and why. */

@@ -1,4 +1,4 @@
-/** The desktop program. */
+/** The Swing program: {@code Desktop} opens it. */
 @NullMarked
 package earward.desktop;
 

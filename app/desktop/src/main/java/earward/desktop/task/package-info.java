@@ -1,0 +1,5 @@
+/** Work off the event thread. */
+@NullMarked
+package earward.desktop.task;
+
+import org.jspecify.annotations.NullMarked;

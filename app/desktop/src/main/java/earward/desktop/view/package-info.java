@@ -1,0 +1,5 @@
+/** Windows and panels; only these touch widgets. */
+@NullMarked
+package earward.desktop.view;
+
+import org.jspecify.annotations.NullMarked;
