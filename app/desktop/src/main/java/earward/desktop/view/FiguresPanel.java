@@ -6,6 +6,7 @@ import earward.desktop.model.Words;
 import earward.desktop.model.Workbench;
 import java.util.ArrayList;
 import java.util.List;
+import javax.swing.BorderFactory;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
@@ -40,7 +41,7 @@ final class FiguresPanel extends JPanel {
     table.getColumnModel().getColumn(3).setPreferredWidth(110);
     table.getColumnModel().getColumn(1).setPreferredWidth(220);
     JScrollPane scroll = new JScrollPane(table);
-    scroll.setBorder(null);
+    scroll.setBorder(BorderFactory.createEmptyBorder());
     add(keys, "wmin 0");
     add(scroll);
   }

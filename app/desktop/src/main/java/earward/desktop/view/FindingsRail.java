@@ -6,6 +6,7 @@ import earward.desktop.model.Words;
 import earward.desktop.model.Workbench;
 import java.util.List;
 import java.util.Locale;
+import javax.swing.BorderFactory;
 import javax.swing.JButton;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
@@ -35,7 +36,7 @@ final class FindingsRail extends JPanel {
             list,
             ScrollPaneConstants.VERTICAL_SCROLLBAR_AS_NEEDED,
             ScrollPaneConstants.HORIZONTAL_SCROLLBAR_NEVER);
-    scroll.setBorder(null);
+    scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.getVerticalScrollBar().setUnitIncrement(16);
     add(title, "split 2, growx");
     add(counts, "gapleft push");
@@ -59,6 +60,13 @@ final class FindingsRail extends JPanel {
     now.forEach(this::addFinding);
     list.revalidate();
     list.repaint();
+  }
+
+  /** Draws everything anew in the colours of the present look. */
+  void relook() {
+    shown = List.of();
+    list.removeAll();
+    refresh();
   }
 
   private long count(Severity severity) {
@@ -96,7 +104,7 @@ final class FindingsRail extends JPanel {
     area.setEditable(false);
     area.setFocusable(false);
     area.setOpaque(false);
-    area.setBorder(null);
+    area.setBorder(BorderFactory.createEmptyBorder());
     area.setFont(new JLabel().getFont());
     area.getAccessibleContext().setAccessibleName(text);
     if (quiet) {

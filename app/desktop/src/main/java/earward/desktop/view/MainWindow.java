@@ -10,6 +10,7 @@ import java.awt.event.WindowEvent;
 import java.io.File;
 import java.nio.file.Path;
 import java.util.Optional;
+import javax.swing.BorderFactory;
 import javax.swing.JFileChooser;
 import javax.swing.JFrame;
 import javax.swing.JLabel;
@@ -73,12 +74,12 @@ public final class MainWindow extends JFrame {
 
   private JTabbedPane desks() {
     JScrollPane paper = new JScrollPane(drawing);
-    paper.setBorder(null);
+    paper.setBorder(BorderFactory.createEmptyBorder());
     paper.getVerticalScrollBar().setUnitIncrement(24);
     JSplitPane middle = new JSplitPane(JSplitPane.VERTICAL_SPLIT, paper, figures);
     middle.setResizeWeight(1);
     middle.setDividerLocation(UIScale.scale(DRAWING_HEIGHT));
-    middle.setBorder(null);
+    middle.setBorder(BorderFactory.createEmptyBorder());
     JPanel design = new JPanel(new BorderLayout());
     settings.setPreferredSize(UIScale.scale(new java.awt.Dimension(250, 10)));
     design.add(settings, BorderLayout.WEST);
@@ -123,6 +124,8 @@ public final class MainWindow extends JFrame {
 
   void dark(boolean wanted) {
     Look.change(wanted);
+    settings.relook();
+    findings.relook();
     refresh();
   }
 

@@ -8,6 +8,7 @@ import java.awt.event.FocusAdapter;
 import java.awt.event.FocusEvent;
 import java.util.List;
 import javax.swing.AbstractAction;
+import javax.swing.BorderFactory;
 import javax.swing.JComboBox;
 import javax.swing.JComponent;
 import javax.swing.JLabel;
@@ -41,7 +42,7 @@ final class SettingsForm extends JPanel {
             rows,
             ScrollPaneConstants.VERTICAL_SCROLLBAR_AS_NEEDED,
             ScrollPaneConstants.HORIZONTAL_SCROLLBAR_NEVER);
-    scroll.setBorder(null);
+    scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.getVerticalScrollBar().setUnitIncrement(16);
     add(title);
     add(scroll);
@@ -68,6 +69,12 @@ final class SettingsForm extends JPanel {
         field.requestFocusInWindow();
       }
     }
+  }
+
+  /** Draws everything anew in the colours of the present look. */
+  void relook() {
+    shown = List.of();
+    refresh();
   }
 
   private String focusedName() {

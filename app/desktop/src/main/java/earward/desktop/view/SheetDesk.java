@@ -9,6 +9,7 @@ import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import javax.swing.BorderFactory;
 import javax.swing.ImageIcon;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
@@ -36,7 +37,7 @@ final class SheetDesk extends JPanel {
     setName("sheet");
     getAccessibleContext().setAccessibleName(Words.of("sheet.name"));
     JScrollPane scroll = new JScrollPane(pages);
-    scroll.setBorder(null);
+    scroll.setBorder(BorderFactory.createEmptyBorder());
     scroll.getVerticalScrollBar().setUnitIncrement(32);
     add(scroll, "grow, push");
   }
