@@ -21,11 +21,14 @@ import java.util.Properties;
  *   <li>{@code setting.ID.OPTION}: of each option of a choice;
  *   <li>{@code part.ID}, {@code test-point.ID}, {@code curve.ID}: of each of these;
  *   <li>{@code check.CODE}: one sentence with {@code {figure}} and {@code {limit}}, into which the
- *       host puts the numbers with their units, then one that says what to do.
+ *       host puts the numbers with their units, then one that says what to do; where it helps, with
+ *       {@code {place}}, the id that the block has in the design, for instance {@code volume}.
  * </ul>
  *
  * <p>Example: {@code volume.two-resistor-pad.check.coupling-edge = The bass ends at {figure}; the
  * band wanted goes down to {limit}. Take a larger capacitor.}
+ *
+ * <p>All blocks of a package share one file, told apart by the type id in front of each key.
  *
  * <p>Immutable.
  */

@@ -18,9 +18,17 @@ import java.util.function.ToDoubleFunction;
  *   <li>the class, public, with a public constructor without arguments, holding no state, safe for
  *       several threads, using nothing but the JDK and {@code earward.block};
  *   <li>its name in {@code META-INF/services/earward.block.BlockType};
- *   <li>its words in {@code texts.properties} beside the class (see {@link BlockTexts});
+ *   <li>its words in {@code texts.properties} beside the class (see {@link BlockTexts}), one file
+ *       for all blocks of a package;
  *   <li>{@code Block-Api-Version: 1}, {@code Plugin-Id} and {@code Plugin-Version} in its manifest.
  * </ul>
+ *
+ * <p>A plug-in may hold several blocks: one class and one line of the services file each, and a
+ * contract test for each. Each block type id and each {@code Plugin-Id} belongs to one jar. Where a
+ * second jar, in the order of their file names, brings one that is there already, its block, or
+ * with the same {@code Plugin-Id} the whole jar, is refused with a sentence; the first stays. Take
+ * a name of your own after the point, such as {@code filter.reedbank-shelf}: {@code earward blocks}
+ * lists the ids that are taken, the program's own among them.
  *
  * <p>The contract test of {@code block-testkit} says what is missing, in sentences.
  */
@@ -48,7 +56,12 @@ public interface BlockType {
    */
   BlockDescription describe(Values values, Conditions conditions);
 
-  /** How it chooses its own values, where it can. */
+  /**
+   * How it chooses its own values, where it can. Wanted where a designer might turn the value
+   * later: a proposal becomes settings, which are shown, rounded to a series and edited. What is
+   * never turned by hand and follows from the settings alone is worked out in {@link #describe}: it
+   * moves with every edit and cannot be set.
+   */
   default Optional<Proposer> proposer() {
     return Optional.empty();
   }

@@ -5,8 +5,9 @@ import earward.block.setting.Values;
 import java.util.Map;
 
 /**
- * Chooses values for a block by its design equations. What it proposes is solved and reviewed
- * before it is offered.
+ * Chooses values for a block by its design equations, when a designer asks for it and not at every
+ * edit (see {@link BlockType#proposer}). What it proposes is solved and reviewed before it is
+ * offered.
  */
 @FunctionalInterface
 public interface Proposer {

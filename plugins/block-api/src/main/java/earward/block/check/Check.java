@@ -5,9 +5,10 @@ import java.util.List;
 import java.util.Objects;
 
 /**
- * One thing that must hold, as data: figure, relation, limit. No plug-in code runs when it is
- * judged. Its sentence is the block's text {@code check.CODE}, with {@code {figure}}, {@code
- * {limit}} and {@code {place}} filled in by the host.
+ * One thing that must hold, as data: figure, relation, limit. Which figures there are, in which
+ * cases, says {@link earward.block.figure}. No plug-in code runs when it is judged. Its sentence is
+ * the block's text {@code check.CODE}, with {@code {figure}}, {@code {limit}} and {@code {place}}
+ * filled in by the host.
  *
  * @param code stable, lower case with hyphens, for instance {@code clipping-depth}
  * @param severity what a failure weighs

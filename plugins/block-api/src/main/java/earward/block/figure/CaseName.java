@@ -8,10 +8,19 @@ import java.util.List;
  * @param text lower case with hyphens
  */
 public record CaseName(String text) {
+  /** No supply, no carrier. */
   public static final CaseName UNPOWERED = new CaseName("unpowered");
+
+  /** Supply on, no carrier: everything at rest. */
   public static final CaseName NO_SIGNAL = new CaseName("no-signal");
+
+  /** The weakest station wanted, test tone at test depth. */
   public static final CaseName WEAK = new CaseName("weak");
+
+  /** The test signal, knobs where the design has them. */
   public static final CaseName TEST = new CaseName("test");
+
+  /** The strongest station, test tone at test depth. */
   public static final CaseName STRONG = new CaseName("strong");
 
   /** Strong carrier, highest tone, deepest modulation. */
@@ -20,7 +29,10 @@ public record CaseName(String text) {
   /** The test signal with every volume control at full. */
   public static final CaseName FULL_VOLUME = new CaseName("full-volume");
 
-  /** The amplifier at the edge of clipping, whatever drives it. */
+  /**
+   * Each amplifier IC at the edge of clipping, whatever drives it. It drives nothing else: discrete
+   * stages are at rest.
+   */
   public static final CaseName FULL_OUTPUT = new CaseName("full-output");
 
   /** Full output from a battery at its end. */
@@ -32,7 +44,11 @@ public record CaseName(String text) {
    */
   public static final CaseName HIGHEST_SUPPLY = new CaseName("highest-supply");
 
-  /** Highest ambient and supply, any drive, the least load. */
+  /**
+   * Highest ambient and mains, the least load, each amplifier IC at the drive that heats it most,
+   * from silence to a square wave. Discrete parts are at rest: their heat is that of no signal at
+   * the highest ambient.
+   */
   public static final CaseName HOTTEST = new CaseName("hottest");
 
   /** All that every design is solved in, in the order in which they are shown. */

@@ -6,23 +6,22 @@ import java.util.Optional;
 /**
  * What a figure measures. The key is its one name in Java, files, JSON and CSV.
  *
- * <p>Which places have it: voltages, distortion and the two edges are of a node; currents, heat and
- * what is said of a diode, an amplifier or a source of supply are of that part; resistances both
- * ways, loading loss and headroom are of the seam by which a block is entered, for which a block
- * writes the empty place; output, noise and battery life are of the whole path.
+ * <p>Which place has it in which case, and its sign: the table of {@link earward.block.figure}.
  */
 public enum Quantity {
   // at a node or a test point
   DC_VOLTS("dc-volts", Unit.VOLT),
   /** Fundamental of the test tone. */
   AUDIO_RMS_VOLTS("audio-rms-volts", Unit.VOLT),
-  /** Harmonics 2 to 10 over the fundamental. */
+  /** Harmonics 2 to 10 over the fundamental: of detector and clipping IC, not of transistors. */
   DISTORTION("distortion", Unit.FRACTION),
   CARRIER_RMS_VOLTS("carrier-rms-volts", Unit.VOLT),
   SECOND_CARRIER_RMS_VOLTS("second-carrier-rms-volts", Unit.VOLT),
   THIRD_CARRIER_RMS_VOLTS("third-carrier-rms-volts", Unit.VOLT),
   // of a part
+  /** Positive from the first terminal to the second; of a transistor from collector to emitter. */
   DC_AMPERES("dc-amperes", Unit.AMPERE),
+  /** Heat of DC; of an amplifier IC with its drive. Nothing is said of a detector diode's heat. */
   DISSIPATION_WATTS("dissipation-watts", Unit.WATT),
   JUNCTION_CELSIUS("junction-celsius", Unit.CELSIUS),
   /** Touchable surface: case or heat sink. */
@@ -45,10 +44,13 @@ public enum Quantity {
   REVERSAL_DEPTH("reversal-depth", Unit.FRACTION),
   /** Depth of 3 % distortion, solved. */
   CLEAN_DEPTH("clean-depth", Unit.FRACTION),
-  /** Supply voltage across a part, rails at the case's state. */
+  /** Supply voltage across an amplifier IC, rails at the case's state. */
   SUPPLY_VOLTS("supply-volts", Unit.VOLT),
+  /** Of the output of an amplifier IC. */
   PEAK_AMPERES("peak-amperes", Unit.AMPERE),
+  /** Output of an amplifier IC at the edge of clipping. */
   CLIP_WATTS("clip-watts", Unit.WATT),
+  /** Output of an amplifier IC at 10 % distortion. */
   TEN_PERCENT_WATTS("ten-percent-watts", Unit.WATT),
   // of a seam
   ONWARD_OHMS("onward-ohms", Unit.OHM),

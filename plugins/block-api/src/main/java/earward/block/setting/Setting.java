@@ -9,7 +9,9 @@ import java.util.Set;
 
 /**
  * What a designer may set on a block. Its label is the block's text {@code setting.ID}, its help
- * {@code setting.ID.help}.
+ * {@code setting.ID.help}. All settings of a block are always shown and always have a value, also
+ * those for which a choice leaves no use: none can be hidden. Say in the help under which choice it
+ * counts.
  */
 public sealed interface Setting {
   /** Local to the block: letters, digits and hyphens. */
@@ -62,7 +64,9 @@ public sealed interface Setting {
    *
    * @param id local name
    * @param kind of part
-   * @param usual name in the parts library for a new block
+   * @param usual name in the parts library for a new block, letter by letter as the {@code name} of
+   *     an entry of that kind in {@code templates/parts/}: {@code "BC547B"} in {@code
+   *     transistors.json}
    */
   record Part(String id, PartKind kind, String usual) implements Setting {
     public Part {

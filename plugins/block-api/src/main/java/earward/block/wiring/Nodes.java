@@ -1,8 +1,9 @@
 package earward.block.wiring;
 
 /**
- * The names of nodes that blocks share. All other node names are local to a block: letters, digits
- * and hyphens.
+ * The names of nodes that blocks share, in wirings and as places of figures: {@code
+ * rail-main:dc-volts@no-signal} is the rail that the block takes. All other node names are local to
+ * a block: letters, digits and hyphens.
  */
 public final class Nodes {
   /** The common ground of the kit. */
