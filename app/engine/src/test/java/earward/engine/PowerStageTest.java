@@ -142,4 +142,17 @@ class PowerStageTest {
     double peak = 3 / (1 + 15 / (2 * Math.PI * 8));
     assertThat(watts).isCloseTo(peak * peak / 16, within(1e-3));
   }
+
+  @Test
+  void statedPowerIsThatOfTheLoadAlone() {
+    // A second resistor at the output takes current, and none of the stated power.
+    double[] figures =
+        clipping(
+                singleEnded(9, 8, 0)
+                    .resistor("power.r", 56, "plus", "rail-main")
+                    .probe("path", "out", Circuit.GROUND))
+            .want("power.amplifier", Quantity.CLIP_WATTS, CaseName.FULL_OUTPUT)
+            .figures();
+    assertThat(figures[0]).isCloseTo(4.5 * 4.5 / 16, within(2e-3));
+  }
 }

@@ -1,5 +1,8 @@
 package earward.engine.internal;
 
+import earward.block.device.Device;
+import earward.block.device.Loudspeaker;
+import earward.block.device.Resistor;
 import earward.engine.Circuit;
 import earward.engine.Probe;
 import earward.engine.Seam;
@@ -8,7 +11,9 @@ import earward.engine.law.AmplifierLaw;
 import earward.engine.law.FeedLaw;
 import earward.engine.law.Law;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
+import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -17,6 +22,9 @@ import org.jspecify.annotations.Nullable;
  * written.
  */
 public final class Network {
+  /** The probe at the path's end. */
+  private static final String PATH = "path";
+
   final Circuit circuit;
   final Slots slots;
   final int nodes;
@@ -33,6 +41,12 @@ public final class Network {
   final int[] seamBefore;
   final int[] seamAfter;
   final int firstSeamBranch;
+
+  /** Nodes of the path's end, both ground where there is none, and what loads it there. */
+  final int endPlus;
+
+  final int endMinus;
+  final int[] loads;
   final int carrierHertz;
   final int carrierPeak;
   final int depth;
@@ -70,6 +84,10 @@ public final class Network {
       probeMinus[i] = node(probe.minus());
       probeMeter[i] = slots.of(probe.name() + ":meter-siemens");
     }
+    int end = endProbe();
+    endPlus = end < 0 ? -1 : probePlus[end];
+    endMinus = end < 0 ? -1 : probeMinus[end];
+    loads = loadsAt(endPlus, endMinus);
     seamBefore = circuit.seams().stream().map(Seam::before).mapToInt(this::node).toArray();
     seamAfter = circuit.seams().stream().map(Seam::after).mapToInt(this::node).toArray();
     carrierHertz = slots.of(Slot.CARRIER_HERTZ);
@@ -78,6 +96,30 @@ public final class Network {
     tone = slots.of(Slot.TONE_HERTZ);
     ambient = slots.of(Slot.AMBIENT_CELSIUS);
     loadTolerance = slots.of(Slot.LOAD_TOLERANCE);
+  }
+
+  private int endProbe() {
+    for (int i = 0; i < probePlus.length; i++) {
+      if (circuit.probes().get(i).name().equals(PATH)) {
+        return i;
+      }
+    }
+    return -1;
+  }
+
+  /** Loudspeakers between two nodes or, where there is none, resistors. */
+  private int[] loadsAt(int plus, int minus) {
+    for (Class<? extends Device> kind : List.of(Loudspeaker.class, Resistor.class)) {
+      int[] found =
+          IntStream.range(0, laws.length)
+              .filter(i -> kind.isInstance(circuit.parts().get(i).device()))
+              .filter(i -> laws[i].node(0) == plus && laws[i].node(1) == minus)
+              .toArray();
+      if (found.length > 0 && plus != minus) {
+        return found;
+      }
+    }
+    return new int[0];
   }
 
   /** Its values. */

@@ -28,7 +28,9 @@ final class Outputs {
   /** Power that leaves each amplifier, in W. */
   final double[] outWatts;
 
+  /** Into the load, in W. */
   final double[] clipWatts;
+
   final double[] tenPercentWatts;
   final double[] peakAmperes;
   final double[] overloadDecibels;
@@ -37,6 +39,9 @@ final class Outputs {
   final double[] loadRe;
 
   final double[] loadIm;
+
+  /** Share of the power that leaves each amplifier which reaches the load at the path's end. */
+  private final double[] loadShare;
 
   /** Heat of each amplifier, in W. */
   final double[] heatWatts;
@@ -52,6 +57,7 @@ final class Outputs {
     loadRe = new double[count];
     loadIm = new double[count];
     heatWatts = new double[count];
+    loadShare = new double[count];
     for (int s = 0; s < SAMPLES; s++) {
       cosine[s] = Math.cos(2 * Math.PI * s / SAMPLES);
       sine[s] = Math.sin(2 * Math.PI * s / SAMPLES);
@@ -83,7 +89,20 @@ final class Outputs {
       double norm = ir * ir + ii * ii;
       loadRe[a] = norm == 0 ? Double.POSITIVE_INFINITY : (vr * ir + vi * ii) / norm;
       loadIm[a] = norm == 0 ? 0 : (vi * ir - vr * ii) / norm;
+      loadShare[a] = shareOfLoad(solver, point, norm * loadRe[a]);
     }
+  }
+
+  /** All of it where nothing at the path's end is a load. */
+  private double shareOfLoad(AlternatingSolver solver, DirectStage point, double wholeWatts) {
+    double siemens = 0;
+    for (int load : network.loads) {
+      siemens += network.laws[load].loadSiemens(point);
+    }
+    double vr = solver.re(network.endPlus) - solver.re(network.endMinus);
+    double vi = solver.im(network.endPlus) - solver.im(network.endMinus);
+    double watts = siemens * (vr * vr + vi * vi);
+    return watts > 0 && watts < wholeWatts ? watts / wholeWatts : 1;
   }
 
   /**
@@ -173,12 +192,12 @@ final class Outputs {
       if (Double.isNaN(settle(direct, amplifier, 1, tenPercentOverdrive))) {
         return false;
       }
-      tenPercentWatts[a] = outWatts[a];
+      tenPercentWatts[a] = loadShare[a] * outWatts[a];
       double peak = settle(direct, amplifier, 1, 1);
       if (Double.isNaN(peak)) {
         return false;
       }
-      clipWatts[a] = outWatts[a];
+      clipWatts[a] = loadShare[a] * outWatts[a];
       peakAmperes[a] = peak;
     }
     measureHeat(direct.stage());

@@ -6,8 +6,8 @@ import earward.engine.Probe;
 import earward.engine.Seam;
 import earward.engine.law.AmplifierLaw;
 import earward.engine.law.DiodeLaw;
+import earward.engine.law.Heated;
 import earward.engine.law.Law;
-import earward.engine.law.RegulatorLaw;
 import java.util.List;
 
 /** Finds how a figure is read: the one place that knows which quantity exists where. */
@@ -137,11 +137,11 @@ final class Readings {
           work -> work.solved() ? law.amperes(work.stage()) : Double.NaN;
       case DISSIPATION_WATTS -> work -> work.solved() ? law.watts(work.stage()) : Double.NaN;
       case JUNCTION_CELSIUS ->
-          law instanceof RegulatorLaw regulator
+          law instanceof Heated heated
               ? work ->
                   work.solved()
                       ? work.stage().celsius()
-                          + law.watts(work.stage()) * regulator.model().junctionToAirKelvinPerWatt()
+                          + law.watts(work.stage()) * heated.junctionToAirKelvinPerWatt()
                       : Double.NaN
               : NONE;
       case REVERSE_PEAK_VOLTS ->

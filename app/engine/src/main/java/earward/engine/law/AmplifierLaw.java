@@ -27,6 +27,9 @@ public final class AmplifierLaw extends Law {
   private static final List<Terminal> INVERTING_INPUTS =
       List.of(Terminal.INVERTING, Terminal.INVERTING_TWO);
 
+  /** Keeps the equations regular where an output is shorted or an IC stands the wrong way round. */
+  private static final double OUTPUT_OHMS = 1e-3;
+
   private static final double RIPPLE_SIEMENS = 1e-4;
   private static final double BOOTSTRAP_SIEMENS = 1e-3;
 
@@ -208,6 +211,7 @@ public final class AmplifierLaw extends Law {
     int reference = has(Terminal.RIPPLE) ? at(nodes, Terminal.RIPPLE) : supply;
     double fraction = value(stage, REST_FRACTION);
     stage.term(branch, node, 1);
+    stage.term(branch, branch, OUTPUT_OHMS);
     stage.term(branch, ground, -1 + fraction);
     stage.term(branch, reference, -fraction);
     stage.leaves(branch, -on * model.restVolts(), Math.abs(model.restVolts()));
@@ -249,6 +253,7 @@ public final class AmplifierLaw extends Law {
     stage.add(at(nodes, Terminal.SUPPLY), branch, 0.5, 0);
     stage.add(ground, branch, 0.5, 0);
     stage.add(branch, node, 1, 0);
+    stage.add(branch, branch, OUTPUT_OHMS, 0);
     stage.add(branch, ground, -1, 0);
     double on = on(supplyVolts(stage.point()));
     if (model.gain().setFromOutside()) {

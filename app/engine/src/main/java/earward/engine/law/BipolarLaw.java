@@ -8,7 +8,7 @@ import earward.block.device.TransistorModel;
  * COLLECTOR, BASE, EMITTER. One ohm stands between base lead and inner base, whose voltage is an
  * unknown of its own.
  */
-final class BipolarLaw extends Law {
+final class BipolarLaw extends Law implements Heated {
   private static final double BASE_SIEMENS = 1;
 
   /** Beyond this exponent the law goes on along its tangent. */
@@ -26,6 +26,11 @@ final class BipolarLaw extends Law {
   @Override
   public int branches() {
     return 1;
+  }
+
+  @Override
+  public double junctionToAirKelvinPerWatt() {
+    return model.junctionToAirKelvinPerWatt();
   }
 
   private double saturation(DirectStage stage) {

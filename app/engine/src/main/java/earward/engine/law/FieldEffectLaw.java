@@ -6,12 +6,19 @@ import earward.block.device.FieldEffectModel;
  * A junction field-effect transistor by the square law (Shockley 1952), below pinch-off too;
  * terminals DRAIN, GATE, SOURCE. No current flows in the gate.
  */
-final class FieldEffectLaw extends Law {
+final class FieldEffectLaw extends Law implements Heated {
   private final double sign;
+  private final double toAirKelvinPerWatt;
 
   FieldEffectLaw(Seat seat, FieldEffectModel model) {
     super(seat);
     this.sign = model.pChannel() ? -1 : 1;
+    this.toAirKelvinPerWatt = model.junctionToAirKelvinPerWatt();
+  }
+
+  @Override
+  public double junctionToAirKelvinPerWatt() {
+    return toAirKelvinPerWatt;
   }
 
   /** Drain current and its slopes for given voltages, all in n-channel sense. */

@@ -81,6 +81,11 @@ public abstract class Law {
         : amperes(stage) * (stage.volts(nodes[0]) - stage.volts(nodes[nodes.length - 1]));
   }
 
+  /** Conductance of what stands for a load where output power is stated, in S; 0 for no load. */
+  public double loadSiemens(DirectStage stage) {
+    return 0;
+  }
+
   final boolean isOpen(DirectStage stage) {
     return stage.value(seat.openSlot()) > 0.5;
   }

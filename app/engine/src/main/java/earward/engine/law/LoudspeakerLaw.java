@@ -54,4 +54,9 @@ final class LoudspeakerLaw extends Law {
         ? 0
         : (stage.volts(node(0)) - stage.volts(node(1))) / value(stage, DC_OHMS);
   }
+
+  @Override
+  public double loadSiemens(DirectStage stage) {
+    return isOpen(stage) ? 0 : 1 / ratedOhms;
+  }
 }

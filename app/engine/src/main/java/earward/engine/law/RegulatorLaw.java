@@ -6,7 +6,7 @@ import earward.block.device.RegulatorModel;
  * A three-ended series regulator: its output aims at the smaller of its voltage and what its input
  * leaves it, behind its output resistance, and gives current only; terminals INPUT, GROUND, OUTPUT.
  */
-public final class RegulatorLaw extends Law {
+public final class RegulatorLaw extends Law implements Heated {
   private static final double KNEE_VOLTS = 0.02;
   private static final double KNEE_AMPERES = 1e-4;
 
@@ -17,9 +17,9 @@ public final class RegulatorLaw extends Law {
     this.model = model;
   }
 
-  /** Its data. */
-  public RegulatorModel model() {
-    return model;
+  @Override
+  public double junctionToAirKelvinPerWatt() {
+    return model.junctionToAirKelvinPerWatt();
   }
 
   private double lack(DirectStage stage, int[] nodes) {

@@ -20,4 +20,9 @@ final class ResistiveLaw extends Law {
   public double amperes(DirectStage stage) {
     return isOpen(stage) ? 0 : (stage.volts(node(0)) - stage.volts(node(1))) / value(stage, 0);
   }
+
+  @Override
+  public double loadSiemens(DirectStage stage) {
+    return isOpen(stage) ? 0 : 1 / value(stage, 0);
+  }
 }
