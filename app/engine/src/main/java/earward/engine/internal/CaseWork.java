@@ -26,6 +26,8 @@ final class CaseWork {
   /** A second signal, for what is tried at another depth. */
   final AudioSignal trial;
 
+  final DepthSearch depths = new DepthSearch(this);
+
   final Outputs outputs;
   final SmallSignal small;
   final @Nullable Detection detection;

@@ -1,8 +1,9 @@
 package earward.engine.internal;
 
-import java.util.function.DoubleSupplier;
-
-/** Searches the depth of modulation at which something first happens. */
+/**
+ * Searches the depth of modulation at which something first happens, by false position. Mutable,
+ * for one thread; makes no garbage.
+ */
 final class DepthSearch {
   /** Distortion up to which an envelope counts as clean. */
   static final double CLEAN_DISTORTION = 0.03;
@@ -15,61 +16,60 @@ final class DepthSearch {
   private static final int MOST_STEPS = 12;
 
   private final CaseWork work;
-  private final Detection detection;
-  private final DoubleSupplier margin;
+  private int plus;
+  private int minus;
+  private int port;
 
-  /**
-   * A search.
-   *
-   * @param margin of the present solution, above 0 where all is well
-   */
-  private DepthSearch(CaseWork work, Detection detection, DoubleSupplier margin) {
+  /** Room for the searches of one case. */
+  DepthSearch(CaseWork work) {
     this.work = work;
-    this.detection = detection;
-    this.margin = margin;
   }
 
   /**
    * Depth at which the detector's own distortion between two nodes reaches 3 %, outputs unclipped:
    * 0.95, the end of the method's domain, where it stays below, and 0 where it never does.
    */
-  static double clean(CaseWork work, int plus, int minus) {
-    Detection detection = work.detection;
-    if (detection == null || !work.solved()) {
-      return Double.NaN;
-    }
-    DoubleSupplier margin =
-        () -> {
-          work.trial.clear();
-          work.gather(detection, work.trial);
-          return CLEAN_DISTORTION - work.trial.distortion(plus, minus);
-        };
-    return new DepthSearch(work, detection, margin).run();
+  double clean(int plusNode, int minusNode) {
+    plus = plusNode;
+    minus = minusNode;
+    port = -1;
+    return run();
   }
 
   /** Depth at which a port's mean current first reverses; 0.95 where it never does. */
-  static double reversal(CaseWork work, int port) {
-    Detection detection = work.detection;
-    if (detection == null || !work.solved()) {
-      return Double.NaN;
-    }
+  double reversal(int portIndex) {
+    port = portIndex;
+    return run();
+  }
+
+  /** How far the present solution is from what is sought; above 0 where all is well. */
+  private double margin(Detection detection) {
+    return port < 0 ? distortionMargin(detection) : currentMargin(detection);
+  }
+
+  private double distortionMargin(Detection detection) {
+    work.trial.clear();
+    work.gather(detection, work.trial);
+    return CLEAN_DISTORTION - work.trial.distortion(plus, minus);
+  }
+
+  private double currentMargin(Detection detection) {
     int samples = detection.modulated.audioSamples();
-    DoubleSupplier margin =
-        () -> {
-          double least = Double.POSITIVE_INFINITY;
-          double sum = 0;
-          for (int s = 0; s < samples; s++) {
-            double amperes = detection.modulated.meanAmperes[port * samples + s];
-            least = Math.min(least, amperes);
-            sum += Math.abs(amperes) / samples;
-          }
-          return least / sum;
-        };
-    return new DepthSearch(work, detection, margin).run();
+    double least = Double.POSITIVE_INFINITY;
+    double sum = 0;
+    for (int s = 0; s < samples; s++) {
+      double amperes = detection.modulated.meanAmperes[port * samples + s];
+      least = Math.min(least, amperes);
+      sum += Math.abs(amperes) / samples;
+    }
+    return least / sum;
   }
 
   /** The search; afterwards the case's own solution stands again. */
   private double run() {
+    if (work.detection == null || !work.solved()) {
+      return Double.NaN;
+    }
     double found = search();
     return Double.isNaN(at(work.depth())) ? Double.NaN : found;
   }
@@ -116,8 +116,10 @@ final class DepthSearch {
 
   /** Margin at a depth, NaN where the cycle does not settle there. */
   private double at(double depth) {
-    return detection.solveModulated(work.peakVolts(), depth, work.toneRadians())
-        ? margin.getAsDouble()
+    Detection detection = work.detection;
+    return detection != null
+            && detection.solveModulated(work.peakVolts(), depth, work.toneRadians())
+        ? margin(detection)
         : Double.NaN;
   }
 }

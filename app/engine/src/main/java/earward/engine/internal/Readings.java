@@ -174,9 +174,8 @@ final class Readings {
           work -> ClippingRule.depth(work, port, ClippingRule.Without.CAPACITOR);
       case CLIPPING_DEPTH_WITHOUT_COUPLING ->
           work -> ClippingRule.depth(work, port, ClippingRule.Without.COUPLING);
-      case REVERSAL_DEPTH -> work -> DepthSearch.reversal(work, port);
-      case CLEAN_DEPTH ->
-          work -> DepthSearch.clean(work, endPlus(work, diode), endMinus(work, diode));
+      case REVERSAL_DEPTH -> work -> work.depths.reversal(port);
+      case CLEAN_DEPTH -> work -> work.depths.clean(endPlus(work, diode), endMinus(work, diode));
       default -> ofAny(quantity, diode);
     };
   }

@@ -5,6 +5,7 @@ import earward.block.device.AudioAmplifier;
 import earward.block.device.ControlPoint;
 import earward.block.device.Terminal;
 import earward.block.law.ThermalChain;
+import java.util.EnumMap;
 import java.util.List;
 
 /**
@@ -24,9 +25,6 @@ public final class AmplifierLaw extends Law {
   private static final int BIAS = 5;
   private static final int HEAT_SINK = 6;
 
-  private static final List<Terminal> INVERTING_INPUTS =
-      List.of(Terminal.INVERTING, Terminal.INVERTING_TWO);
-
   /** Keeps the equations regular where an output is shorted or an IC stands the wrong way round. */
   private static final double OUTPUT_OHMS = 1e-3;
 
@@ -35,7 +33,10 @@ public final class AmplifierLaw extends Law {
 
   private final AmplifierModel model;
   private final int ordinal;
-  private final List<Terminal> terminals;
+
+  /** Place of each terminal that the type has among the nodes. */
+  private final EnumMap<Terminal, Integer> places = new EnumMap<>(Terminal.class);
+
   private final CapacitorLaw[] compensation;
   private final CapacitorLaw[] bootstrap;
 
@@ -55,7 +56,10 @@ public final class AmplifierLaw extends Law {
     super(seat);
     this.model = amplifier.model();
     this.ordinal = ordinal;
-    this.terminals = amplifier.terminals();
+    List<Terminal> terminals = amplifier.terminals();
+    for (int i = 0; i < terminals.size(); i++) {
+      places.put(terminals.get(i), i);
+    }
     this.compensation = compensation.toArray(CapacitorLaw[]::new);
     this.bootstrap = bootstrap.toArray(CapacitorLaw[]::new);
   }
@@ -112,7 +116,7 @@ public final class AmplifierLaw extends Law {
   }
 
   private boolean bootstrapped(DirectStage stage) {
-    if (!terminals.contains(Terminal.BOOTSTRAP)) {
+    if (!has(Terminal.BOOTSTRAP)) {
       return true;
     }
     for (CapacitorLaw capacitor : bootstrap) {
@@ -150,12 +154,12 @@ public final class AmplifierLaw extends Law {
   }
 
   private int at(int[] nodes, Terminal terminal) {
-    int index = terminals.indexOf(terminal);
-    return index < 0 ? -1 : nodes[index];
+    Integer place = places.get(terminal);
+    return place == null ? -1 : nodes[place];
   }
 
   private boolean has(Terminal terminal) {
-    return terminals.contains(terminal);
+    return places.containsKey(terminal);
   }
 
   @Override
@@ -190,11 +194,13 @@ public final class AmplifierLaw extends Law {
     if (has(Terminal.BOOTSTRAP)) {
       stage.conductance(supply, at(nodes, Terminal.BOOTSTRAP), BOOTSTRAP_SIEMENS);
     }
-    for (Terminal input : INVERTING_INPUTS) {
-      if (has(input)) {
-        stage.conductance(
-            at(nodes, input), at(nodes, Terminal.GROUND), 1 / value(stage, INPUT_OHMS));
-      }
+    double inputSiemens = 1 / value(stage, INPUT_OHMS);
+    if (has(Terminal.INVERTING)) {
+      stage.conductance(at(nodes, Terminal.INVERTING), at(nodes, Terminal.GROUND), inputSiemens);
+    }
+    if (has(Terminal.INVERTING_TWO)) {
+      stage.conductance(
+          at(nodes, Terminal.INVERTING_TWO), at(nodes, Terminal.GROUND), inputSiemens);
     }
     if (model.gain().setFromOutside()) {
       stage.conductance(
@@ -230,10 +236,12 @@ public final class AmplifierLaw extends Law {
     if (has(Terminal.BOOTSTRAP)) {
       stage.admittance(supply, at(nodes, Terminal.BOOTSTRAP), BOOTSTRAP_SIEMENS, 0);
     }
-    for (Terminal input : INVERTING_INPUTS) {
-      if (has(input)) {
-        stage.admittance(at(nodes, input), ground, 1 / value(stage, INPUT_OHMS), 0);
-      }
+    double inputSiemens = 1 / value(stage, INPUT_OHMS);
+    if (has(Terminal.INVERTING)) {
+      stage.admittance(at(nodes, Terminal.INVERTING), ground, inputSiemens, 0);
+    }
+    if (has(Terminal.INVERTING_TWO)) {
+      stage.admittance(at(nodes, Terminal.INVERTING_TWO), ground, inputSiemens, 0);
     }
     if (model.gain().setFromOutside()) {
       stage.admittance(
