@@ -166,13 +166,18 @@ public final class Marking {
   }
 
   /**
-   * The capacitance of a three-digit code, in farads.
+   * The capacitance of a code, in farads: three digits, or picofarads with R or a point for the
+   * decimal sign ({@code 8R2}, {@code 8.2}).
    *
-   * @throws IllegalArgumentException when it is not three digits
+   * @throws IllegalArgumentException when it is neither
    */
   public static double capacitorFarads(String code) {
+    if (code.matches("[0-9]{1,2}[R.][0-9]{1,2}")) {
+      return new BigDecimal(code.replace('R', '.')).scaleByPowerOfTen(-12).doubleValue();
+    }
     if (!code.matches("[0-9]{3}")) {
-      throw new IllegalArgumentException("'" + code + "' is no three-digit code");
+      throw new IllegalArgumentException(
+          "'" + code + "' is no capacitor code: wanted three digits as 473, or picofarads as 8R2");
     }
     int last = code.charAt(2) - '0';
     int exponent = last == 9 ? -1 : last;
