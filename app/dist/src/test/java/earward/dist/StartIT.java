@@ -18,6 +18,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.condition.DisabledOnOs;
 import org.junit.jupiter.api.condition.OS;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** The shipped folder, started as a process from a place of which the build knows nothing. */
 @DisabledOnOs(value = OS.WINDOWS, disabledReason = "bin/earward is the start script for the others")
@@ -61,6 +63,34 @@ class StartIT {
       String id = String.valueOf(jar.getFileName()).replaceFirst("earward-(.*)-[0-9].*", "$1");
       assertThat(ended.out()).contains("earward." + id);
     }
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"lantern", "hayloft", "boathouse"})
+  void aStarterKitBecomesASheetWithItsNameAndKeyFigures(String kit) throws Exception {
+    Path design = program.resolve("templates/kits").resolve(kit + ".earward");
+    Path sheet = elsewhere.resolve("sheet of " + kit + ".pdf");
+    Ended ended =
+        start(
+            program.resolve("bin/earward"),
+            elsewhere,
+            Map.of(),
+            "sheet",
+            design.toString(),
+            "-o",
+            sheet.getFileName().toString());
+    assertThat(ended.code()).as(ended.err()).isZero();
+    assertThat(ended.out()).contains(sheet.getFileName().toString()).contains(" mA", " %");
+    assertThat(Files.readAllBytes(sheet)).startsWith("%PDF-".getBytes(StandardCharsets.US_ASCII));
+  }
+
+  @Test
+  void aMissingDesignIsSaidInOneSentence() throws Exception {
+    Ended ended =
+        start(program.resolve("bin/earward"), elsewhere, Map.of(), "sheet", "no such.earward");
+    assertThat(ended.code()).isEqualTo(2);
+    assertThat(ended.out()).isEmpty();
+    assertThat(ended.err()).contains("no such.earward").hasLineCount(1);
   }
 
   @Test

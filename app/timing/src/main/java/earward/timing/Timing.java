@@ -1,6 +1,9 @@
 package earward.timing;
 
 import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import org.openjdk.jmh.Main;
 
@@ -26,15 +29,27 @@ public final class Timing {
   }
 
   private static List<Bar> bars() {
-    return List.of(
-        new RepeatedBar("earward review from a cold start", 3.0, 10, () -> review("hayloft")),
-        new WarmBar("all plug-ins loaded", 0.25, "PluginLoading.allPlugins"),
-        new WarmBar("a design's blocks described and joined", 0.016, "AfterAnEdit.assembled"),
-        new WarmBar("the headline after an edited value", 0.016, "EditedValue.headline"),
-        new ThousandKits("hayloft"));
+    List<Bar> bars = new ArrayList<>();
+    for (String kit : StarterKit.NAMES) {
+      bars.add(new RepeatedBar("earward sheet " + kit + " from a cold start", 3, 10, sheet(kit)));
+    }
+    bars.add(new WarmBar("all plug-ins loaded", 0.25, "PluginLoading.allPlugins"));
+    bars.add(new WarmBar("blocks described and joined", 0.016, "AfterAnEdit.assembled"));
+    bars.add(new WarmBar("the headline after an edited value", 0.016, "EditedValue.headline"));
+    bars.add(new ThousandKits("hayloft"));
+    return bars;
   }
 
-  private static void review(String kit) throws IOException, InterruptedException {
-    Program.start("review", StarterKit.file(kit).toString());
+  private static RepeatedBar.Work sheet(String kit) {
+    return () -> {
+      Path folder = Files.createTempDirectory("earward-timing");
+      Path sheet = folder.resolve("sheet.pdf");
+      try {
+        Program.start("sheet", StarterKit.file(kit).toString(), "-o", sheet.toString());
+      } finally {
+        Files.deleteIfExists(sheet);
+        Files.delete(folder);
+      }
+    };
   }
 }

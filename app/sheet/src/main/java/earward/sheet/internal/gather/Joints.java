@@ -4,9 +4,10 @@ import earward.block.device.AudioAmplifier;
 import earward.block.device.Pin;
 import earward.block.device.Terminal;
 import earward.block.wiring.Nodes;
-import earward.engine.CircuitPart;
-import earward.engine.Seam;
+import earward.block.wiring.Port;
+import earward.block.wiring.WiredPart;
 import earward.kit.path.Assembly;
+import earward.kit.path.PlacedBlock;
 import earward.sheet.internal.section.Words;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -27,23 +28,39 @@ final class Joints {
 
   Joints(Assembly assembly, Words words) {
     this.words = words;
-    for (Seam seam : assembly.circuit().seams()) {
-      join(seam.before(), seam.after());
+    List<PlacedBlock> path = assembly.path();
+    for (int i = 1; i < path.size(); i++) {
+      meet(path.get(i - 1), path.get(i));
     }
-    for (CircuitPart part : assembly.circuit().parts()) {
-      Optional<String> reference = assembly.references().ofPart(part.name());
-      if (part.device().fitted() && reference.isPresent()) {
-        part.nodes().forEach((terminal, node) -> add(part, reference.get(), terminal, node));
+    for (PlacedBlock block : assembly.blocks()) {
+      for (WiredPart part : block.description().wiring().parts()) {
+        Optional<String> reference = assembly.references().ofPart(block.partName(part));
+        if (part.device().fitted() && reference.isPresent()) {
+          part.nodes().keySet().forEach(terminal -> add(block, part, reference.get(), terminal));
+        }
       }
     }
   }
 
-  private void add(CircuitPart part, String reference, Terminal terminal, String node) {
-    ends.computeIfAbsent(root(node), any -> new ArrayList<>())
-        .add(new End(part.name(), shown(part, reference, terminal)));
+  /** Where two blocks meet, the nodes of their ports are one. */
+  private void meet(PlacedBlock left, PlacedBlock right) {
+    Optional<Port> out = left.description().wiring().exit();
+    Optional<Port> in = right.description().wiring().entry();
+    if (out.isPresent() && in.isPresent()) {
+      List<String> before = out.get().nodes();
+      List<String> after = in.get().nodes();
+      for (int i = 0; i < Math.min(before.size(), after.size()); i++) {
+        join(left.globalNode(before.get(i)), right.globalNode(after.get(i)));
+      }
+    }
   }
 
-  private String shown(CircuitPart part, String reference, Terminal terminal) {
+  private void add(PlacedBlock block, WiredPart part, String reference, Terminal terminal) {
+    ends.computeIfAbsent(root(block.globalNode(part.node(terminal))), any -> new ArrayList<>())
+        .add(new End(block.partName(part), shown(part, reference, terminal)));
+  }
+
+  private String shown(WiredPart part, String reference, Terminal terminal) {
     if (part.device() instanceof AudioAmplifier amplifier) {
       Optional<Pin> pin =
           amplifier.pins().stream().filter(p -> p.terminal() == terminal).findFirst();
