@@ -58,9 +58,9 @@ public interface BlockType {
 
   /**
    * How it chooses its own values, where it can. Wanted where a designer might turn the value
-   * later: a proposal becomes settings, which are shown, rounded to a series and edited. What is
-   * never turned by hand and follows from the settings alone is worked out in {@link #describe}: it
-   * moves with every edit and cannot be set.
+   * later: a proposal becomes settings, shown and edited like any. What is never turned by hand and
+   * follows from the settings alone is worked out in {@link #describe}: it moves with every edit
+   * and cannot be set.
    */
   default Optional<Proposer> proposer() {
     return Optional.empty();

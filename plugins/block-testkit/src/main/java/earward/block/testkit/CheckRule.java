@@ -6,6 +6,7 @@ import earward.block.Curve;
 import earward.block.check.Check;
 import earward.block.check.RemedyHint;
 import earward.block.figure.FigureName;
+import earward.block.quantity.Unit;
 import earward.block.setting.Setting;
 import java.util.HashSet;
 import java.util.List;
@@ -33,7 +34,7 @@ public final class CheckRule implements BlockRule {
           name + " of " + check.figure() + " is there twice; leave one out");
       faults.addIf(
           Double.isInfinite(check.limit()),
-          name + " has the limit " + check.limit() + "; where nothing is wanted, leave it out");
+          name + " has an infinite limit; where nothing is wanted, leave it out");
       figure(name, check.figure(), places, faults);
       check.remedies().forEach(hint -> remedy(name, hint, type, faults));
     }
@@ -64,19 +65,26 @@ public final class CheckRule implements BlockRule {
     faults.addIf(
         other == steps,
         name
-            + " would go "
-            + hint.direction()
-            + " with setting '"
-            + hint.settingId()
-            + "'; a value is raised or lowered, a choice or a part is changed");
+            + (" would " + verb(hint.direction()) + " setting '" + hint.settingId() + "'; ")
+            + "a value is raised or lowered, a choice or a part is changed");
+  }
+
+  private static String verb(RemedyHint.Direction direction) {
+    return switch (direction) {
+      case UP -> "raise";
+      case DOWN -> "lower";
+      case OTHER -> "change";
+    };
   }
 
   private static void sweep(Curve curve, BlockType type, Faults faults) {
     String name = "curve " + curve.id();
     Optional<Setting> setting = setting(type, curve.settingId());
+    Unit unit = Unit.NUMBER;
     double least;
     double most;
     if (setting.isPresent() && setting.get() instanceof Setting.Value value) {
+      unit = value.unit();
       least = value.least();
       most = value.most();
     } else if (setting.isPresent() && setting.get() instanceof Setting.Position) {
@@ -90,8 +98,10 @@ public final class CheckRule implements BlockRule {
     faults.addIf(
         curve.from() < least || curve.to() > most,
         name
-            + (" runs from " + curve.from() + " to " + curve.to() + "; setting '")
-            + (curve.settingId() + "' goes from " + least + " to " + most));
+            + (" runs from " + Shown.quantity(curve.from(), unit))
+            + (" to " + Shown.quantity(curve.to(), unit) + "; setting '")
+            + (curve.settingId() + "' goes from " + Shown.quantity(least, unit))
+            + (" to " + Shown.quantity(most, unit)));
   }
 
   private static Optional<Setting> setting(BlockType type, String id) {

@@ -76,17 +76,19 @@ public final class DescriptionRule implements BlockRule {
       BlockType type, Variation variation, Faults faults) {
     try {
       BlockDescription first = variation.describe(type);
-      faults.addIf(
-          !first.equals(variation.describe(type)),
-          "two descriptions of the same settings differ ("
-              + variation.name()
-              + "); use nothing but"
-              + " the values and conditions");
+      if (!first.equals(variation.describe(type))) {
+        faults.addIn(
+            variation,
+            "two descriptions of the same settings differ; use nothing but the values and"
+                + " conditions");
+      }
       return Optional.of(first);
     } catch (RuntimeException e) {
-      faults.add(
+      faults.addIn(
+          variation,
+          "not described " + e.getClass() + Shown.place(type, e),
           "it cannot be described with "
-              + (variation.name() + ": " + e)
+              + (Shown.settings(type, variation.values()) + ": " + Shown.thrown(type, e))
               + "; narrow the limits of its settings, or say in goTogether what does not go");
       return Optional.empty();
     }

@@ -8,6 +8,7 @@ import earward.block.device.Terminal;
 import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
 import earward.block.figure.Quantity;
+import earward.block.quantity.Unit;
 import earward.block.wiring.Wiring;
 import earward.engine.Circuit;
 import earward.engine.CircuitException;
@@ -55,23 +56,21 @@ public final class DirectCurrentRule implements BlockRule {
       BlockType type, BlockDescription description, Variation variation, Faults faults) {
     Assembly assembly = TrialKit.around(type, description, variation);
     if (!assembly.complete()) {
-      faults.add(
-          "it does not fit into a kit with "
-              + (variation.name() + ": ")
-              + TrialKit.sentences(assembly.findings()));
+      faults.addIn(
+          variation, "it does not fit into a kit: " + TrialKit.sentences(assembly.findings()));
       return;
     }
     try {
       new Trial(assembly.circuit(), variation, faults).run();
     } catch (CircuitException e) {
-      faults.add("with " + variation.name() + ": " + e.finding().sentence());
+      faults.addIn(variation, e.finding().sentence());
     }
   }
 
   /** One circuit at DC, healthy and with each fault. */
   private static final class Trial {
     private final Circuit circuit;
-    private final String name;
+    private final Variation variation;
     private final boolean withFaults;
     private final Faults faults;
     private final CompiledCircuit compiled;
@@ -80,7 +79,7 @@ public final class DirectCurrentRule implements BlockRule {
 
     Trial(Circuit circuit, Variation variation, Faults faults) {
       this.circuit = circuit;
-      this.name = variation.name();
+      this.variation = variation;
       this.withFaults = variation.usual();
       this.faults = faults;
       compiled = Engine.compile(circuit, List.of(AT_REST), wanted(circuit));
@@ -102,7 +101,7 @@ public final class DirectCurrentRule implements BlockRule {
     }
 
     void run() {
-      if (!solves(compiled.nominalValues(), "with " + name)) {
+      if (!solves(compiled.nominalValues(), "as it is")) {
         return;
       }
       ownParts().forEach(this::polarity);
@@ -113,7 +112,7 @@ public final class DirectCurrentRule implements BlockRule {
         for (String fault : FAULTS) {
           double[] values = compiled.nominalValues();
           values[compiled.slot(part.name() + ":" + fault)] = 1;
-          solves(values, "with " + name + " and part '" + local(part) + "' " + fault);
+          solves(values, "with part '" + local(part) + "' " + fault);
         }
       }
     }
@@ -131,12 +130,16 @@ public final class DirectCurrentRule implements BlockRule {
       SolveOutcome outcome = solver.solve(values, figures);
       if (!outcome.solved()) {
         List<String> sentences = outcome.findings().stream().map(Finding::sentence).toList();
-        faults.add("no DC solution " + how + ": " + String.join(" ", sentences));
+        faults.addIn(
+            variation,
+            "no DC solution " + how,
+            "no DC solution " + how + ": " + String.join(" ", sentences));
         return false;
       }
       for (int i = 0; i < figures.length; i++) {
         if (!Double.isFinite(figures[i])) {
-          faults.add(
+          faults.addIn(
+              variation,
               how + ", " + compiled.figures().get(i) + " is " + figures[i] + "; wanted a number");
           return false;
         }
@@ -151,12 +154,15 @@ public final class DirectCurrentRule implements BlockRule {
         return;
       }
       double volts = volts(part, Terminal.A) - volts(part, Terminal.B);
-      faults.addIf(
-          volts < -MOST_REVERSE_VOLTS,
-          "with "
-              + name
-              + (", the electrolytic capacitor '" + local(part) + "' has " + volts)
-              + " V from A to B; put its terminal A at the more positive node");
+      if (volts < -MOST_REVERSE_VOLTS) {
+        String which = "the electrolytic capacitor '" + local(part) + "' has ";
+        faults.addIn(
+            variation,
+            which,
+            which
+                + Shown.quantity(volts, Unit.VOLT)
+                + " from A to B; put its terminal A at the more positive node");
+      }
     }
 
     private double volts(CircuitPart part, Terminal terminal) {

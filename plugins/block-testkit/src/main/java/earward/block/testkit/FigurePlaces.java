@@ -7,7 +7,6 @@ import earward.block.device.BipolarTransistor;
 import earward.block.device.Device;
 import earward.block.device.Diode;
 import earward.block.device.FieldEffectTransistor;
-import earward.block.device.OperationalAmplifier;
 import earward.block.device.Regulator;
 import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
@@ -57,7 +56,7 @@ final class FigurePlaces {
           HIGH_EDGE_HERTZ ->
           unless(nodes.contains(place), place, "a node or test point; there are " + nodes);
       case DC_AMPERES, DISSIPATION_WATTS -> ofPart(place, Device.class);
-      case JUNCTION_CELSIUS, SURFACE_CELSIUS ->
+      case JUNCTION_CELSIUS ->
           ofPart(
               place,
               List.of(
@@ -75,12 +74,17 @@ final class FigurePlaces {
           REVERSAL_DEPTH,
           CLEAN_DEPTH ->
           ofPart(place, Diode.class);
-      case SUPPLY_VOLTS ->
-          ofPart(place, List.of(AudioAmplifier.class, OperationalAmplifier.class, Regulator.class));
-      case PEAK_AMPERES, CLIP_WATTS, TEN_PERCENT_WATTS, OVERLOAD_DECIBELS ->
+      case SURFACE_CELSIUS,
+          SUPPLY_VOLTS,
+          PEAK_AMPERES,
+          CLIP_WATTS,
+          TEN_PERCENT_WATTS,
+          OVERLOAD_DECIBELS ->
           ofPart(place, AudioAmplifier.class);
       case SUPPLY_AMPERES ->
-          place.isEmpty() ? Optional.empty() : ofPart(place, List.of(Battery.class, Adaptor.class));
+          place.isEmpty() && hasSource()
+              ? Optional.empty()
+              : ofPart(place, List.of(Battery.class, Adaptor.class));
       case BATTERY_HOURS -> ofPart(place, Battery.class);
       case ONWARD_OHMS, BACKWARD_OHMS, LOADING_LOSS_DECIBELS, HEADROOM_DECIBELS ->
           unless(
@@ -106,11 +110,24 @@ final class FigurePlaces {
     for (Class<? extends Device> kind : kinds) {
       wiring.partsOf(kind).stream().map(WiredPart::id).forEach(there::add);
     }
-    List<String> words = kinds.stream().map(Class::getSimpleName).toList();
+    String words = String.join(" or ", kinds.stream().map(FigurePlaces::withArticle).toList());
     return unless(
         there.contains(place),
         place,
-        "a part that is a " + String.join(" or ", words) + "; there are " + there);
+        kinds.contains(Device.class)
+            ? "a part; there are " + there
+            : "a part that is "
+                + words
+                + (there.isEmpty() ? "; this variation has none" : "; there are " + there));
+  }
+
+  private static String withArticle(Class<? extends Device> kind) {
+    String word = kind.getSimpleName();
+    return ("AEIO".indexOf(word.charAt(0)) < 0 ? "a " : "an ") + word;
+  }
+
+  private boolean hasSource() {
+    return !wiring.partsOf(Battery.class).isEmpty() || !wiring.partsOf(Adaptor.class).isEmpty();
   }
 
   private static Optional<String> unless(boolean sound, String place, String wanted) {

@@ -11,10 +11,32 @@ import earward.block.device.FieldEffectTransistor;
 import earward.block.device.Regulator;
 import earward.block.wiring.Caution;
 import java.util.List;
+import java.util.Optional;
 
 /** The cautions without which a part must not be handed to a builder. */
 final class Hazards {
   private Hazards() {}
+
+  /**
+   * Where the hazard depends on the part that was chosen: when it is there, as the code says it.
+   */
+  static Optional<String> onlyWhen(Caution caution) {
+    return switch (caution) {
+      case POLARITY -> Optional.of("capacitor.dielectric().polarised()");
+      case GERMANIUM_HEAT -> Optional.of("diode.model().material() == DiodeMaterial.GERMANIUM");
+      case BRIDGE_NEVER_TO_GROUND -> Optional.of("amplifier.model().bridge()");
+      case HOT_PART,
+          CAPACITOR_DISCHARGE,
+          BATTERY_SHORT,
+          LITHIUM_IN_HOLDER,
+          ADAPTOR_VOLTAGE,
+          GLASS_DIODE,
+          HEARING,
+          STATIC_DISCHARGE,
+          OUTDOOR_AERIAL ->
+          Optional.empty();
+    };
+  }
 
   static List<Caution> of(Device device) {
     if (device instanceof Capacitor capacitor && capacitor.dielectric().polarised()) {

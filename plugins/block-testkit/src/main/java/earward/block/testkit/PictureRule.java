@@ -33,17 +33,18 @@ public final class PictureRule implements BlockRule {
           .attempt(type)
           .map(description -> description.wiring())
           .filter(seen::add)
-          .ifPresent(wiring -> drawn(wiring, options, variation.name(), faults));
+          .ifPresent(wiring -> drawn(wiring, options, variation, faults));
     }
     return faults.all();
   }
 
-  private static void drawn(Wiring wiring, LayoutOptions options, String name, Faults faults) {
+  private static void drawn(
+      Wiring wiring, LayoutOptions options, Variation variation, Faults faults) {
     try {
       DrawingRule.broken(SheetBlock.plain("block", wiring), options)
-          .forEach(sentence -> faults.add("drawn with " + name + ": " + sentence));
+          .forEach(sentence -> faults.addIn(variation, "drawn: " + sentence));
     } catch (RuntimeException e) {
-      faults.add("it cannot be drawn with " + name + ": " + e);
+      faults.addIn(variation, "it cannot be drawn: " + e);
     }
   }
 

@@ -2,6 +2,7 @@ package earward.block.testkit;
 
 import earward.block.BlockType;
 import earward.block.Proposer;
+import earward.block.quantity.Unit;
 import earward.block.setting.Setting;
 import earward.block.setting.SettingValue;
 import earward.block.setting.Values;
@@ -28,37 +29,50 @@ public final class ProposerRule implements BlockRule {
         Proposer.Setting asked =
             new Proposer.Setting(variation.values(), variation.conditions(), source, load);
         try {
-          proposal(type, proposer, asked, faults);
+          proposal(type, proposer, asked, variation, faults);
         } catch (RuntimeException e) {
-          faults.add(
+          faults.addIn(
+              variation,
+              "fails " + e.getClass() + Shown.place(type, e),
               "its proposer, or a description of what it proposed, fails with "
-                  + variation.name()
-                  + (", a source of " + source + " Ω and a load of " + load + " Ω: " + e));
+                  + (Shown.settings(type, variation.values()) + ", a source of ")
+                  + (Shown.quantity(source, Unit.OHM) + " and a load of ")
+                  + (Shown.quantity(load, Unit.OHM) + ": " + Shown.thrown(type, e)));
         }
       }
     }
   }
 
   private static void proposal(
-      BlockType type, Proposer proposer, Proposer.Setting asked, Faults faults) {
+      BlockType type,
+      Proposer proposer,
+      Proposer.Setting asked,
+      Variation variation,
+      Faults faults) {
     Map<String, SettingValue> proposed = proposer.propose(asked);
     faults.addIf(
         !proposed.equals(proposer.propose(asked)),
         "two proposals for the same settings differ; use nothing but what is asked");
     Values after = asked.values();
     for (Map.Entry<String, SettingValue> one : proposed.entrySet()) {
-      within(type, one.getKey(), one.getValue(), faults);
+      within(type, one.getKey(), one.getValue(), variation, faults);
       after = after.with(one.getKey(), one.getValue());
     }
     type.describe(after, asked.conditions());
   }
 
-  private static void within(BlockType type, String id, SettingValue value, Faults faults) {
+  private static void within(
+      BlockType type, String id, SettingValue value, Variation variation, Faults faults) {
     for (Setting setting : type.settings()) {
       if (setting.id().equals(id)) {
-        faults.addIf(
-            !fits(setting, value),
-            "it proposes " + value + " for setting '" + id + "', which takes " + setting);
+        if (!fits(setting, value)) {
+          faults.addIn(
+              variation,
+              "beyond " + id,
+              "it proposes "
+                  + (Shown.value(setting, value) + " for setting '" + id + "', which takes ")
+                  + Shown.limits(setting));
+        }
         return;
       }
     }

@@ -11,18 +11,21 @@ final class RefusalRule implements BlockRule {
     for (Variation variation : variations) {
       try {
         variation.describe(type);
-        faults.add(
-            "it takes "
-                + variation.name()
-                + ", though its contract says that they do not go together; throw"
+        faults.addIn(
+            variation,
+            "it takes settings of which its contract says that they do not go together; throw"
                 + " IllegalArgumentException from describe, or correct goTogether");
       } catch (IllegalArgumentException e) {
-        faults.addIf(
-            String.valueOf(e.getMessage()).isBlank() || e.getMessage() == null,
-            "it refuses " + variation.name() + " without a word; give the exception a sentence");
+        if (e.getMessage() == null || e.getMessage().isBlank()) {
+          faults.addIn(
+              variation, "it refuses settings without a word; give the exception a sentence");
+        }
       } catch (RuntimeException e) {
-        faults.add(
-            "it refuses " + variation.name() + " with " + e + "; throw IllegalArgumentException");
+        faults.addIn(
+            variation,
+            "it refuses settings with "
+                + Shown.thrown(type, e)
+                + "; throw IllegalArgumentException");
       }
     }
     return faults.all();

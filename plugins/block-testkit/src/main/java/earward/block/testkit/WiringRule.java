@@ -23,6 +23,7 @@ public final class WiringRule implements BlockRule {
     Faults faults = new Faults();
     for (Variation variation : variations) {
       variation.attempt(type).ifPresent(d -> of(type.role(), d.wiring(), faults));
+      variation.attempt(type).ifPresent(d -> cautions(d.wiring(), variation, faults));
     }
     return faults.all();
   }
@@ -32,7 +33,6 @@ public final class WiringRule implements BlockRule {
     looseEnds(wiring, faults);
     fittingOrder(wiring, faults);
     testPoints(wiring, faults);
-    cautions(wiring, faults);
   }
 
   private static void ports(Role role, Wiring wiring, Faults faults) {
@@ -112,18 +112,18 @@ public final class WiringRule implements BlockRule {
     }
   }
 
-  private static void cautions(Wiring wiring, Faults faults) {
+  private static void cautions(Wiring wiring, Variation variation, Faults faults) {
     for (WiredPart part : wiring.parts()) {
       for (Caution caution : Hazards.of(part.device())) {
-        faults.addIf(
-            !wiring.cautions().contains(new PartCaution(part.id(), caution)),
-            "part '"
-                + part.id()
-                + "' can do harm: call caution(\""
-                + part.id()
-                + "\", Caution."
-                + caution
-                + ")");
+        if (!wiring.cautions().contains(new PartCaution(part.id(), caution))) {
+          faults.addIn(
+              variation,
+              "part '"
+                  + part.id()
+                  + ("' can do harm: call caution(\"" + part.id())
+                  + ("\", Caution." + caution + ")")
+                  + Hazards.onlyWhen(caution).map(when -> ", only when " + when).orElse(""));
+        }
       }
     }
   }

@@ -152,7 +152,7 @@ class RulesGoRedTest {
 
   @ParameterizedTest
   @CsvSource({
-    "out:junction-celsius@test, wanted a part that is a AudioAmplifier",
+    "out:junction-celsius@test, wanted a part that is an AudioAmplifier",
     "far:dc-volts@test, wanted a node or test point",
     "r1:dc-volts@test, wanted a node or test point",
     "out:high-edge-hertz@sometimes, in the case 'sometimes'",
@@ -216,8 +216,8 @@ class RulesGoRedTest {
 
     assertThat(faults(new CheckRule(), block))
         .hasSize(3)
-        .anyMatch(f -> f.contains("Infinity"))
-        .anyMatch(f -> f.contains("curve wide") && f.contains("10.0 to 1000000.0"))
+        .anyMatch(f -> f.contains("infinite limit"))
+        .anyMatch(f -> f.contains("curve wide") && f.contains("10 Ω to 1 MΩ"))
         .anyMatch(f -> f.contains("curve worded") && f.contains("a value or a position"));
   }
 
@@ -306,7 +306,7 @@ class RulesGoRedTest {
     assertThat(faults(rule, proposing(asked -> Map.of("r1", new SettingValue.Amount(1)))))
         .singleElement()
         .asString()
-        .contains("'r1'", "number=1.0");
+        .contains("'r1'", "1 Ω", "from 10 Ω to 1 MΩ");
     assertThat(faults(rule, proposing(asked -> Map.of("r9", new SettingValue.Amount(1)))))
         .anyMatch(f -> f.contains("'r9'") && f.contains("no setting"));
     assertThat(faults(rule, proposing(asked -> Map.of("size", new SettingValue.Option("huge")))))
