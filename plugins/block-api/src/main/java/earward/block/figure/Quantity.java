@@ -48,9 +48,9 @@ public enum Quantity {
   SUPPLY_VOLTS("supply-volts", Unit.VOLT),
   /** Of the output of an amplifier IC. */
   PEAK_AMPERES("peak-amperes", Unit.AMPERE),
-  /** Output of an amplifier IC at the edge of clipping. */
+  /** What an amplifier IC gives the load at the edge of clipping. */
   CLIP_WATTS("clip-watts", Unit.WATT),
-  /** Output of an amplifier IC at 10 % distortion. */
+  /** What an amplifier IC gives the load at 10 % distortion. */
   TEN_PERCENT_WATTS("ten-percent-watts", Unit.WATT),
   // of a seam
   ONWARD_OHMS("onward-ohms", Unit.OHM),

@@ -69,6 +69,15 @@ public final class DescriptionRule implements BlockRule {
       faults.addIf(
           !setting.id().equals(setting.id().toLowerCase(Locale.ROOT)),
           "setting '" + setting.id() + "' is not in lower case");
+      if (setting instanceof Setting.Part part) {
+        List<String> names = LibraryNames.of(part.kind());
+        faults.addIf(
+            !names.contains(part.usual()),
+            "setting '"
+                + (part.id() + "' has the usual part '" + part.usual())
+                + ("', which the parts library does not have as a " + part.kind().key())
+                + ("; there are " + names));
+      }
     }
   }
 

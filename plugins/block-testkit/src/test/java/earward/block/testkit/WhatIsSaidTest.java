@@ -156,4 +156,26 @@ class WhatIsSaidTest {
         .contains("Caution.GERMANIUM_HEAT), only when diode.model().material()")
         .contains("diode sample germanium diode");
   }
+
+  @Test
+  void aUsualPartThatTheLibraryDoesNotHaveIsFound() {
+    SampleBlock misnamed =
+        new SampleBlock() {
+          @Override
+          public List<Setting> settings() {
+            return List.of(
+                new Setting.Part("npn", PartKind.TRANSISTOR, "BC547B"),
+                new Setting.Part("pnp", PartKind.TRANSISTOR, "BC 557"));
+          }
+        };
+
+    assertThat(faults(new DescriptionRule(), misnamed))
+        .filteredOn(fault -> fault.contains("parts library"))
+        .singleElement()
+        .asString()
+        .contains("'pnp'", "'BC 557'", "BC557B");
+    for (PartKind kind : PartKind.values()) {
+      assertThat(LibraryNames.of(kind)).as(kind.key()).isNotEmpty();
+    }
+  }
 }
