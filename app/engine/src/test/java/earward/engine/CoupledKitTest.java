@@ -113,7 +113,7 @@ class CoupledKitTest {
         double[] values = compiled.nominalValues();
         values[compiled.slot(part.name() + ":" + fault)] = 1;
         SolveOutcome outcome = solver.solve(values, figures);
-        assertThat(outcome.findings()).as("%s %s", part.name(), fault).isEmpty();
+        assertThat(outcome.solved()).as("%s %s", part.name(), fault).isTrue();
         assertThat(Arrays.stream(figures).limit(NODES.size()))
             .as("%s %s", part.name(), fault)
             .allMatch(Double::isFinite);

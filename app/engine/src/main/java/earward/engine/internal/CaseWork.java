@@ -99,6 +99,11 @@ final class CaseWork {
     return trouble;
   }
 
+  /** Whether a figure asked for the whole state and it was found. */
+  boolean done() {
+    return point == Part.DONE;
+  }
+
   double peakVolts() {
     return row[network.carrierPeak];
   }

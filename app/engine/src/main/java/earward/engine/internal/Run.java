@@ -55,26 +55,33 @@ public final class Run {
       figures[i] = plan.readings[i].of(works[plan.caseOf[i]]);
     }
     boolean well = true;
+    boolean inside = true;
     for (CaseWork work : works) {
       well &= work.trouble().isEmpty();
+      inside &= !work.done() || Domain.left(work).isEmpty();
     }
-    return well ? WELL : troubled();
+    return well && inside ? WELL : outcome(well);
   }
 
-  private SolveOutcome troubled() {
+  private SolveOutcome outcome(boolean well) {
     List<Finding> findings = new ArrayList<>();
     for (CaseWork work : works) {
+      String name = work.plan.name.text();
+      String left = work.done() ? Domain.left(work) : "";
       if (!work.trouble().isEmpty()) {
-        String name = work.plan.name.text();
-        findings.add(
-            Finding.of(
-                Severity.STOP,
-                "no-solution",
-                name,
-                "The kit could not be solved in the case '" + name + "': " + work.trouble() + "."));
+        String sentence = "The kit could not be solved in the case '%s': %s.";
+        findings.add(finding(Severity.STOP, "no-solution", sentence, name, work.trouble()));
+      } else if (!left.isEmpty()) {
+        String sentence = "In the case '%s' detection is solved outside its proven domain: %s.";
+        findings.add(finding(Severity.WEIGH, "outside-domain", sentence, name, left));
       }
     }
-    return new SolveOutcome(false, findings);
+    return new SolveOutcome(well, findings);
+  }
+
+  private static Finding finding(
+      Severity severity, String code, String sentence, String caseName, String what) {
+    return Finding.of(severity, code, caseName, sentence.formatted(caseName, what));
   }
 
   /** The small-signal response at a place, per volt of the recovered envelope's drive. */

@@ -33,6 +33,16 @@ public final class DiodeLaw extends Law {
     return driven;
   }
 
+  /** Its data. */
+  public DiodeModel model() {
+    return model;
+  }
+
+  /** Junction capacitance at no bias, in F. */
+  public double junctionFarads(DirectStage stage) {
+    return value(stage, 3);
+  }
+
   /** Place among all diodes. */
   public int ordinal() {
     return ordinal;
