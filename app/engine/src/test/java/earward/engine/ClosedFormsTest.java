@@ -85,6 +85,28 @@ class ClosedFormsTest {
   }
 
   @Test
+  void aNearlyStraightDiodeHeatsAsItsCurrentPulsesSay() {
+    // Rd·mean of i², i = (E/Rd)(cos φ − cos θ) within ±θ (Terman's straight-line diode); R/Rd = 10.
+    double theta = 0.86917;
+    double rd = 10e3;
+    double cos = Math.cos(theta);
+    double meanSquare =
+        (theta / 2 + Math.sin(2 * theta) / 4 - 2 * cos * Math.sin(theta) + theta * cos * cos)
+            / Math.PI;
+    double watts =
+        new TrialCircuit()
+            .generator(1e-3, "in")
+            .diode("detector.d1", 1e-6, 1, rd, "in", "out")
+            .resistor("detector.r", 100e3, "out", Circuit.GROUND)
+            .capacitor("detector.c", 100e-9, "out", Circuit.GROUND)
+            .signal(20, 0, 400)
+            .want("detector.d1", Quantity.DISSIPATION_WATTS)
+            .figure();
+    double expected = 20 * 20 / rd * meanSquare;
+    assertThat(watts).isCloseTo(expected, within(0.05 * expected));
+  }
+
+  @Test
   void theClippingRuleComesDownToTheStrictDiagonalOne() {
     // Worked answer (interviewmania 70595): 1 kΩ, 10 nF, 10 kHz -> 0.847; a diode without
     // resistance.

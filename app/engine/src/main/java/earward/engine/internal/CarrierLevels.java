@@ -130,6 +130,42 @@ final class CarrierLevels {
     return (vr * vr + vi * vi) / power;
   }
 
+  /**
+   * Heat of a device on the bare carrier, in W: what it takes from the carrier less what it gives
+   * as DC and as harmonics, Σ ½·Re(V·conj(I)) + V0·I0.
+   */
+  static double heatWatts(CaseWork work, int port) {
+    Detection detection = work.detection;
+    if (detection == null || !work.carrierSolved()) {
+      return Double.NaN;
+    }
+    CarrierSurroundings around = detection.around;
+    EnvelopeSolver solved = detection.carrierOnly;
+    int ports = work.network.ports.length;
+    double direct = around.openVolts[port];
+    for (int j = 0; j < ports; j++) {
+      direct -= around.audioRealOhms[around.index(0, port, j)] * solved.audioReal[j];
+    }
+    double watts = direct * solved.audioReal[port];
+    for (int k = 1; k <= solved.carrierHarmonics(); k++) {
+      double real = k == 1 ? portVolts(work, detection, port, true) : 0;
+      double imaginary = k == 1 ? portVolts(work, detection, port, false) : 0;
+      for (int j = 0; j < ports && k > 1; j++) {
+        double zr = around.carrierRealOhms[around.index(k, port, j)];
+        double zi = around.carrierImaginaryOhms[around.index(k, port, j)];
+        double ir = solved.carrierReal[k * ports + j];
+        double ii = solved.carrierImaginary[k * ports + j];
+        real -= zr * ir - zi * ii;
+        imaginary -= zr * ii + zi * ir;
+      }
+      watts +=
+          0.5
+              * (real * solved.carrierReal[k * ports + port]
+                  + imaginary * solved.carrierImaginary[k * ports + port]);
+    }
+    return watts;
+  }
+
   /** Admittance of a device to the bare carrier: real part or imaginary part, in S. */
   static double admittance(CaseWork work, Detection detection, int port, boolean real) {
     double vr = portVolts(work, detection, port, true);

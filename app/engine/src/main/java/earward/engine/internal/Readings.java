@@ -166,6 +166,11 @@ final class Readings {
               work.detection != null && work.solved()
                   ? work.detection.modulated.reversePeakVolts[port]
                   : Double.NaN;
+      case DISSIPATION_WATTS ->
+          work ->
+              work.plan.drive == earward.engine.Drive.SIGNAL
+                  ? CarrierLevels.heatWatts(work, port)
+                  : work.solved() ? diode.watts(work.stage()) : Double.NaN;
       case CARRIER_PEAK_VOLTS -> work -> CarrierLevels.portPeakVolts(work, port);
       case DETECTION_EFFICIENCY -> work -> CarrierLevels.efficiency(work, port);
       case CARRIER_INPUT_OHMS -> work -> CarrierLevels.inputOhms(work, port);

@@ -21,7 +21,7 @@ public enum Quantity {
   // of a part
   /** Positive from the first terminal to the second; of a transistor from collector to emitter. */
   DC_AMPERES("dc-amperes", Unit.AMPERE),
-  /** Heat of DC; of an amplifier IC with its drive. Nothing is said of a detector diode's heat. */
+  /** Heat of DC; of an amplifier IC with its drive, of a detector diode with its bare carrier. */
   DISSIPATION_WATTS("dissipation-watts", Unit.WATT),
   JUNCTION_CELSIUS("junction-celsius", Unit.CELSIUS),
   /** Touchable surface: case or heat sink. */
