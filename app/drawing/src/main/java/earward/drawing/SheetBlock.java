@@ -2,8 +2,10 @@ package earward.drawing;
 
 import earward.block.wiring.Nodes;
 import earward.block.wiring.Wiring;
+import java.util.Collections;
 import java.util.Map;
 import java.util.Objects;
+import java.util.TreeMap;
 
 /**
  * One block as it is to be drawn. Immutable.
@@ -29,9 +31,9 @@ public record SheetBlock(
     Objects.requireNonNull(id);
     Objects.requireNonNull(title);
     Objects.requireNonNull(wiring);
-    globalNodes = Map.copyOf(globalNodes);
-    labels = Map.copyOf(labels);
-    testPointFlags = Map.copyOf(testPointFlags);
+    globalNodes = Collections.unmodifiableMap(new TreeMap<>(globalNodes));
+    labels = Collections.unmodifiableMap(new TreeMap<>(labels));
+    testPointFlags = Collections.unmodifiableMap(new TreeMap<>(testPointFlags));
   }
 
   /** A block whose parts and test points show their ids. */

@@ -1,5 +1,6 @@
 package earward.drawing;
 
+import earward.block.device.Terminal;
 import earward.block.wiring.Nodes;
 import earward.block.wiring.Placement;
 import earward.block.wiring.Port;
@@ -8,6 +9,7 @@ import earward.block.wiring.WiredPart;
 import earward.drawing.internal.place.BlockTask;
 import earward.drawing.internal.place.Part;
 import java.util.ArrayList;
+import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -41,7 +43,7 @@ final class Tasks {
   BlockTask task(SheetBlock block, List<Integer> entryGaps) {
     List<Part> parts = new ArrayList<>();
     for (WiredPart part : block.wiring().parts()) {
-      Map<earward.block.device.Terminal, String> ends = new HashMap<>();
+      Map<Terminal, String> ends = new EnumMap<>(Terminal.class);
       part.nodes().forEach((terminal, node) -> ends.put(terminal, nets.net(block, node)));
       PartLabel label = block.label(part.id());
       parts.add(

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import earward.drawing.internal.element.Dot;
 import earward.drawing.internal.element.Element;
+import earward.drawing.internal.element.Mark;
 import earward.drawing.internal.element.Wire;
 import java.util.ArrayList;
 import java.util.List;
@@ -64,15 +65,26 @@ class DrawingRuleTest {
     assertTrue(tried > 40, "only " + tried);
   }
 
-  /** A wire to a port that nothing follows joins no two ends. */
+  /** A wire to a port that nothing follows joins no two ends, with a corner in it or without. */
   private static boolean hangsLoose(Element element, Schematic drawn) {
-    return element instanceof Wire wire
-        && drawn.elements().stream()
-            .anyMatch(
-                other ->
-                    other instanceof earward.drawing.internal.element.Mark mark
-                        && mark.kind() == earward.drawing.internal.element.Mark.Kind.PORT
-                        && Math.hypot(mark.x() - wire.x2(), mark.y() - wire.y2()) < 0.001);
+    return element instanceof Wire wire && leadsToPort(wire.x2(), wire.y2(), drawn, 2);
+  }
+
+  private static boolean leadsToPort(double x, double y, Schematic drawn, int corners) {
+    for (Element other : drawn.elements()) {
+      if (other instanceof Mark mark
+          && mark.kind() == Mark.Kind.PORT
+          && Math.hypot(mark.x() - x, mark.y() - y) < 0.001) {
+        return true;
+      }
+      if (corners > 0
+          && other instanceof Wire next
+          && Math.hypot(next.x1() - x, next.y1() - y) < 0.001
+          && leadsToPort(next.x2(), next.y2(), drawn, corners - 1)) {
+        return true;
+      }
+    }
+    return false;
   }
 
   @Test

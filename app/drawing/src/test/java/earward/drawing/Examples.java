@@ -133,7 +133,10 @@ final class Examples {
         10,
         2e-6,
         "DIP-8",
-        pins.entrySet().stream().map(e -> new Pin(e.getKey(), e.getValue())).toList());
+        pins.entrySet().stream()
+            .sorted(Map.Entry.comparingByKey())
+            .map(e -> new Pin(e.getKey(), e.getValue()))
+            .toList());
   }
 
   static SheetBlock feed() {

@@ -3,11 +3,13 @@ package earward.drawing.internal.place;
 import earward.block.device.Terminal;
 import earward.block.wiring.Nodes;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.TreeMap;
 import java.util.TreeSet;
 
 /**
@@ -51,9 +53,10 @@ public record BlockTask(
     exit = List.copyOf(exit);
     entryGaps = List.copyOf(entryGaps);
     points = List.copyOf(points);
-    flags = Map.copyOf(flags);
-    railNames = Map.copyOf(railNames);
-    lanes = Set.copyOf(lanes);
+    // in one order always, so that the same circuit gives the same drawing
+    flags = Collections.unmodifiableMap(new TreeMap<>(flags));
+    railNames = Collections.unmodifiableMap(new TreeMap<>(railNames));
+    lanes = Collections.unmodifiableSet(new TreeSet<>(lanes));
   }
 
   /** The nets that could be split: all but ground and rails. */

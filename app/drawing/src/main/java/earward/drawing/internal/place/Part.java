@@ -6,6 +6,8 @@ import earward.block.device.FieldEffectTransistor;
 import earward.block.device.Potentiometer;
 import earward.block.device.Terminal;
 import earward.block.wiring.Placement;
+import java.util.Collections;
+import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 
@@ -27,7 +29,9 @@ public record Part(
     Map<Terminal, String> nets,
     List<String> label) {
   public Part {
-    nets = Map.copyOf(nets);
+    EnumMap<Terminal, String> copy = new EnumMap<>(Terminal.class);
+    copy.putAll(nets);
+    nets = Collections.unmodifiableMap(copy);
     label = List.copyOf(label);
   }
 

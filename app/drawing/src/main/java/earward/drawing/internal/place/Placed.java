@@ -11,9 +11,11 @@ import earward.drawing.internal.form.Grid;
 import earward.drawing.internal.form.Lead;
 import java.awt.geom.AffineTransform;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 
 /**
  * A form in its place.
@@ -28,7 +30,8 @@ import java.util.Optional;
 public record Placed(
     Form form, int x, int y, String name, Optional<Mark.Kind> kind, Map<String, String> nets) {
   public Placed {
-    nets = Map.copyOf(nets);
+    // in one order always, so that the same circuit gives the same drawing
+    nets = Collections.unmodifiableMap(new TreeMap<>(nets));
   }
 
   static Placed mark(Mark.Kind kind, String name, Form form, int x, int y, String net) {
