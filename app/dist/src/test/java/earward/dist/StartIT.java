@@ -7,10 +7,14 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.security.MessageDigest;
 import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.HexFormat;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.Set;
 import java.util.concurrent.TimeUnit;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
@@ -68,20 +72,25 @@ class StartIT {
   @ParameterizedTest
   @ValueSource(strings = {"lantern", "hayloft", "boathouse"})
   void aStarterKitBecomesASheetWithItsNameAndKeyFigures(String kit) throws Exception {
-    Path design = program.resolve("templates/kits").resolve(kit + ".earward");
     Path sheet = elsewhere.resolve("sheet of " + kit + ".pdf");
-    Ended ended =
-        start(
-            program.resolve("bin/earward"),
-            elsewhere,
-            Map.of(),
-            "sheet",
-            design.toString(),
-            "-o",
-            sheet.getFileName().toString());
+    Ended ended = sheet(kit, sheet);
     assertThat(ended.code()).as(ended.err()).isZero();
     assertThat(ended.out()).contains(sheet.getFileName().toString()).contains(" mA", " %");
     assertThat(Files.readAllBytes(sheet)).startsWith("%PDF-".getBytes(StandardCharsets.US_ASCII));
+  }
+
+  /** Some sets and maps of the JDK change their order from one process to the next. */
+  @ParameterizedTest
+  @ValueSource(strings = {"lantern", "hayloft", "boathouse"})
+  void everyProcessMakesTheSameSheetOutOfTheSameDesign(String kit) throws Exception {
+    Set<String> sheets = new HashSet<>();
+    for (int i = 0; i < 3; i++) {
+      Path sheet = elsewhere.resolve(i + ".pdf");
+      assertThat(sheet(kit, sheet).code()).isZero();
+      MessageDigest digest = MessageDigest.getInstance("SHA-256");
+      sheets.add(HexFormat.of().formatHex(digest.digest(Files.readAllBytes(sheet))));
+    }
+    assertThat(sheets).hasSize(1);
   }
 
   @Test
@@ -172,6 +181,13 @@ class StartIT {
 
   private static String property(String name) {
     return System.getProperty(name);
+  }
+
+  private Ended sheet(String kit, Path to) throws IOException, InterruptedException {
+    Path design = program.resolve("templates/kits").resolve(kit + ".earward");
+    Path script = program.resolve("bin/earward");
+    return start(
+        script, elsewhere, Map.of(), "sheet", design.toString(), "-o", to.getFileName().toString());
   }
 
   private Ended start(Path script, Path from, Map<String, String> environment, String... arguments)

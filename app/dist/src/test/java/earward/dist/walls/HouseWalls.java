@@ -37,6 +37,16 @@ final class HouseWalls {
                       .getName()
                       .matches("java\\.(time\\..*|lang\\.System|util\\.Calendar)"));
 
+  /** Their order changes from one process to the next; what is drawn or printed must not. */
+  private static final DescribedPredicate<JavaCall<?>> LOSES_ORDER =
+      describe(
+          "makes a set or a map without an order",
+          call ->
+              (call.getName().equals("copyOf")
+                      && call.getTargetOwner().getName().matches("java\\.util\\.(Set|Map)"))
+                  || (call.getName().matches("to(Unmodifiable)?(Set|Map)|groupingBy")
+                      && call.getTargetOwner().getName().equals("java.util.stream.Collectors")));
+
   private HouseWalls() {}
 
   static List<Wall> all() {
@@ -58,6 +68,13 @@ final class HouseWalls {
             "no clock is read in the engine",
             noClasses().that(in("earward.engine")).should().callCodeUnitWhere(READS_CLOCK),
             earward.engine.fixture.ReadsClock.class),
+        new Wall(
+            "what is drawn or printed keeps its order",
+            noClasses()
+                .that(in("earward.drawing", "earward.sheet"))
+                .should()
+                .callCodeUnitWhere(LOSES_ORDER),
+            earward.drawing.fixture.LosesOrder.class),
         new Wall(
             "JSON in kit.file and command alone",
             noClasses()
