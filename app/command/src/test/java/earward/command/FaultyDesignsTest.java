@@ -91,12 +91,23 @@ class FaultyDesignsTest {
     assertFault(edited("\"1.5 nF\"", "\"-1.5 nF\""), "'detector'", "'c1'", "-1.5 nF");
     assertFault(edited("\"test depth\": \"30 %\"", "\"test depth\": \"130 %\""), "test depth");
     assertFault(edited("\"carrier\": \"455 kHz\"", "\"carrier\": \"0 Hz\""), "carrier");
+    assertFault(edited("\"ambient\": \"25 °C\"", "\"ambient\": \"-300 °C\""), "ambient", "-40");
+    assertFault(edited("\"c1\": \"1.5 nF\"", "\"c1\": null"), "'detector'", "'c1'");
   }
 
   @Test
   void anUnknownUnit() throws IOException {
     assertFault(edited("\"1.5 nF\"", "\"1.5 furlong\""), "'detector'", "'c1'", "'furlong'");
     assertFault(edited("\"1.5 nF\"", "\"1.5 nH\""), "'detector'", "'c1'");
+  }
+
+  @Test
+  void aTakeOffThatJoinsNowhereIsToldByTheFilesOwnWord() throws IOException {
+    assertFault(
+        edited("\"joins at\": \"detector.out\"", "\"joins at\": \"moon.out\""),
+        "'agc'",
+        "'moon.out'",
+        "'joins at'");
   }
 
   @Test

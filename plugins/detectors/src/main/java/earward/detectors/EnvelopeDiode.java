@@ -10,6 +10,8 @@ import earward.block.Conditions;
 import earward.block.Curve;
 import earward.block.Proposer;
 import earward.block.Role;
+import earward.block.check.Finding;
+import earward.block.check.Severity;
 import earward.block.device.Capacitor;
 import earward.block.device.Diode;
 import earward.block.device.DiodeMaterial;
@@ -32,10 +34,15 @@ import earward.block.wiring.WiringPlan;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.ToDoubleFunction;
 
 /** A diode, its reservoir capacitor and, where nothing else loads it, its load resistor. */
 public final class EnvelopeDiode implements BlockType {
   static final String OWN_LOAD = "resistor";
+
+  /** Depth below which a detector follows nothing: there is no way for its DC. */
+  private static final double LEAST_DEPTH = 0.01;
+
   private static final double LEAST_FARADS = 10e-12;
   private static final double MOST_FARADS = 470e-9;
   private static final double FILM_RATED_VOLTS = 63;
@@ -82,6 +89,23 @@ public final class EnvelopeDiode implements BlockType {
     Wiring wiring = plan.fit("d1", "c1").testPoint("out", "out").to(new Single("out"));
     return new BlockDescription(
         wiring, DetectorChecks.of(model, conditions, ownLoad), List.of(clippingOverC1(values)));
+  }
+
+  @Override
+  public List<Finding> judge(
+      Values values, Conditions conditions, ToDoubleFunction<String> figure) {
+    double depth = figure.applyAsDouble("d1:clipping-depth@deepest");
+    if (values.chosen("load", OWN_LOAD) || !(depth < LEAST_DEPTH)) {
+      return List.of();
+    }
+    return List.of(
+        Finding.of(
+            Severity.WEIGH,
+            "no-direct-load",
+            "",
+            "Nothing loads the detector for DC: C1 stays charged to the highest peak, and no audio"
+                + " comes out. Give it a load resistor of its own, or put a block after it that"
+                + " leads to ground."));
   }
 
   private static Curve clippingOverC1(Values values) {

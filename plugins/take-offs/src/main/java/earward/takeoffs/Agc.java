@@ -8,10 +8,14 @@ import earward.block.BlockDescription;
 import earward.block.BlockType;
 import earward.block.Conditions;
 import earward.block.Role;
+import earward.block.check.Check;
 import earward.block.check.Finding;
 import earward.block.check.Severity;
 import earward.block.device.Capacitor;
 import earward.block.device.Resistor;
+import earward.block.figure.CaseName;
+import earward.block.figure.FigureName;
+import earward.block.figure.Quantity;
 import earward.block.quantity.Series;
 import earward.block.quantity.Unit;
 import earward.block.setting.Setting;
@@ -29,6 +33,9 @@ import java.util.function.ToDoubleFunction;
  */
 public final class Agc implements BlockType {
   private static final double RATED_VOLTS = 25;
+
+  /** What a line may stand at the other way without harm, V. */
+  private static final double STILL_VOLTS = 0.05;
 
   @Override
   public String id() {
@@ -62,7 +69,16 @@ public final class Agc implements BlockType {
     if (capacitor.dielectric().polarised()) {
       plan.caution("c-agc", Caution.POLARITY);
     }
-    return BlockDescription.of(plan.end());
+    return new BlockDescription(plan.end(), List.of(direction(values)), List.of());
+  }
+
+  /** The line against its stated direction: its capacitor would stand reversed. */
+  private static Check direction(Values values) {
+    FigureName line = new FigureName("agc", Quantity.DC_VOLTS, CaseName.STRONG);
+    String source = "common practice: an electrolytic capacitor is not reversed";
+    return values.chosen("direction", "positive")
+        ? Check.atLeast("agc-direction", Severity.WEIGH, line, -STILL_VOLTS, source)
+        : Check.atMost("agc-direction", Severity.WEIGH, line, STILL_VOLTS, source);
   }
 
   @Override

@@ -19,12 +19,19 @@ public record KitConditions(
     List<SidebandPoint> sidebands,
     WantedLimits wanted,
     AsWritten written) {
+  /** Coldest and hottest air in which common parts are specified (common practice), °C. */
+  private static final double LEAST_CELSIUS = -40;
+
+  private static final double MOST_CELSIUS = 85;
+
   public KitConditions {
     Objects.requireNonNull(core);
     Objects.requireNonNull(frontEndSupply);
     Objects.requireNonNull(wanted);
     Objects.requireNonNull(written);
     sidebands = List.copyOf(sidebands);
+    requireTemperature(core.ambientCelsius(), "ambient");
+    requireTemperature(core.highestAmbientCelsius(), "highest ambient");
     for (int i = 1; i < sidebands.size(); i++) {
       if (!(sidebands.get(i).offsetHertz() > sidebands.get(i - 1).offsetHertz())) {
         throw new IllegalArgumentException(
@@ -34,6 +41,20 @@ public record KitConditions(
                 + sidebands.get(i - 1).offsetHertz()
                 + " Hz");
       }
+    }
+  }
+
+  private static void requireTemperature(double celsius, String what) {
+    if (!(celsius >= LEAST_CELSIUS && celsius <= MOST_CELSIUS)) {
+      throw new IllegalArgumentException(
+          what
+              + " is "
+              + celsius
+              + " °C; it must be from "
+              + LEAST_CELSIUS
+              + " to "
+              + MOST_CELSIUS
+              + " °C");
     }
   }
 

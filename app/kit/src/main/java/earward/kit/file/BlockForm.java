@@ -52,6 +52,9 @@ final class BlockForm {
     }
   }
 
+  /** What an entry of the parts library says beside the part's figures. */
+  private static final List<String> LIBRARY_WORDS = List.of("source", "notes", "package", "points");
+
   private static SettingEntry setting(MembersReader block, Json.Member member)
       throws DesignFileException {
     if (member.value() instanceof Json.Scalar scalar && !scalar.isNull()) {
@@ -64,6 +67,8 @@ final class BlockForm {
       Optional<PartKind> kind = kind(part, member.name());
       if (kind.isPresent()) {
         PartModel model = PartForms.read(kind.get(), part, member.name() + " as given");
+        LIBRARY_WORDS.forEach(
+            part::find); // of an entry copied from the library: kept, not asked for
         part.noteUnknown();
         return new SettingEntry.Inline(model, json);
       }

@@ -34,8 +34,7 @@ public final class SettingReader {
     String place = "setting '" + setting.id() + "' of block '" + blockId + "'";
     if (entry.isPresent() && entry.get() instanceof SettingEntry.Unread) {
       throw new SettingException(
-          "setting-form",
-          place + " is a list or an object that is no part of a known kind; give it as a text");
+          "setting-form", place + " is no text, number or part of a known kind; give it as a text");
     }
     if (setting instanceof Setting.Part part) {
       return new SettingValue.Chosen(part(place, part, entry));

@@ -135,7 +135,7 @@ final class PathFindings {
             + (where.isEmpty()
                 ? "does not say where it joins"
                 : "joins at '" + where + "', and no block has such a node")
-            + "; wanted joinsAt with a node such as 'detector.out'.");
+            + "; wanted 'joins at' with a node such as 'detector.out'.");
   }
 
   static Finding railMissing(PlacedBlock block, String rail, List<String> offered) {

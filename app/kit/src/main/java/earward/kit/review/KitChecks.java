@@ -1,6 +1,7 @@
 package earward.kit.review;
 
 import earward.block.Conditions;
+import earward.block.Role;
 import earward.block.check.Check;
 import earward.block.check.Severity;
 import earward.block.figure.CaseName;
@@ -41,13 +42,15 @@ final class KitChecks {
             figure(Quantity.DISTORTION, CaseName.TEST),
             wanted.distortion(),
             SOURCE));
-    checks.add(
-        Check.atLeast(
-            "little-output",
-            Severity.WEIGH,
-            figure(Quantity.CLIP_WATTS, CaseName.FULL_OUTPUT),
-            core.wantedWatts(),
-            SOURCE));
+    if (assembly.path().stream().anyMatch(block -> block.type().role() == Role.LOAD)) {
+      checks.add(
+          Check.atLeast(
+              "little-output",
+              Severity.WEIGH,
+              figure(Quantity.CLIP_WATTS, CaseName.FULL_OUTPUT),
+              core.wantedWatts(),
+              SOURCE));
+    }
     wanted
         .batteryHours()
         .ifPresent(
