@@ -1,6 +1,7 @@
 package earward.command;
 
 import java.io.PrintWriter;
+import java.nio.file.InvalidPathException;
 import java.util.List;
 import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
@@ -35,6 +36,11 @@ final class Faults {
               + String.join(", ", line.getSubcommands().keySet())
               + "."
           : "'" + name + "' has no use for '" + found + "'" + help;
+    }
+    for (Throwable cause = thrown; cause != null; cause = cause.getCause()) {
+      if (cause instanceof InvalidPathException path) {
+        return "'" + path.getInput() + "' is no name that a file can have here; give another.";
+      }
     }
     String what = String.valueOf(thrown.getMessage()).strip().replaceAll("\\s+", " ");
     return (what.endsWith(".") ? what.substring(0, what.length() - 1) : what) + help;

@@ -46,6 +46,11 @@ class MainTest {
     assertFault(Ran.earward("review", "one.earward", "two.earward"), "'two.earward'");
   }
 
+  @Test
+  void aNameThatNoFileCanHaveIsTheCallsFault() {
+    assertFault(Ran.earward("figures", "kit\0.earward"), "no name that a file can have");
+  }
+
   private static void assertFault(Ran ran, String... words) {
     assertThat(ran.code()).isEqualTo(2);
     assertThat(ran.results()).isEmpty();

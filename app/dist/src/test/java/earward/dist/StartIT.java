@@ -128,6 +128,21 @@ class StartIT {
   }
 
   @Test
+  void aFileNameBeyondAsciiIsReadInThePlainestLocaleToo() throws Exception {
+    // through a shell, since this test may itself run where Java cannot say such a name
+    Path call = elsewhere.resolve("call.sh");
+    Files.writeString(
+        call,
+        "cp \"$1/templates/kits/lantern.earward\" 'K\u00eft.earward'\n"
+            + "exec \"$1/bin/earward\" review 'K\u00eft.earward'\n");
+    Map<String, String> environment = Map.of("LC_ALL", "C", "LANG", "C");
+    Ended ended =
+        start(Path.of("/bin/sh"), elsewhere, environment, call.toString(), program.toString());
+    assertThat(ended.err()).isEmpty();
+    assertThat(ended.code()).isZero();
+  }
+
+  @Test
   void anUnknownCommandIsTheCallsFault() throws Exception {
     Ended ended = start(program.resolve("bin/earward"), elsewhere, Map.of(), "no-such-command");
     assertThat(ended.code()).isEqualTo(2);
