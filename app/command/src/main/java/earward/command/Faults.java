@@ -37,12 +37,11 @@ final class Faults {
               + "."
           : "'" + name + "' has no use for '" + found + "'" + help;
     }
-    for (Throwable cause = thrown; cause != null; cause = cause.getCause()) {
-      if (cause instanceof InvalidPathException path) {
-        return "'" + path.getInput() + "' is no name that a file can have here; give another.";
-      }
+    String told = String.valueOf(thrown.getMessage());
+    if (told.contains(InvalidPathException.class.getName())) { // the parser keeps no cause
+      return "'" + thrown.getValue() + "' is no name that a file can have here; give another.";
     }
-    String what = String.valueOf(thrown.getMessage()).strip().replaceAll("\\s+", " ");
+    String what = told.strip().replaceAll("\\s+", " ");
     return (what.endsWith(".") ? what.substring(0, what.length() - 1) : what) + help;
   }
 

@@ -133,8 +133,10 @@ class StartIT {
     Path call = elsewhere.resolve("call.sh");
     Files.writeString(
         call,
-        "cp \"$1/templates/kits/lantern.earward\" 'K\u00eft.earward'\n"
-            + "exec \"$1/bin/earward\" review 'K\u00eft.earward'\n");
+        """
+        cp "$1/templates/kits/lantern.earward" K\u00eft.earward
+        exec "$1/bin/earward" review K\u00eft.earward
+        """);
     Map<String, String> environment = Map.of("LC_ALL", "C", "LANG", "C");
     Ended ended =
         start(Path.of("/bin/sh"), elsewhere, environment, call.toString(), program.toString());
