@@ -5,8 +5,8 @@ interface Bar {
   /** A run of quick bars takes a fifth of the length. */
   int QUICK_SHARE = 5;
 
-  /** A quick bar may take four times as long: its machine is busy with other things. */
-  double QUICK_SLACK = 4;
+  /** A quick bar may take twice as long: its machine is busy with other things. */
+  double QUICK_SLACK = 2;
 
   /** What is timed. */
   String name();
