@@ -8,8 +8,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.condition.EnabledIfEnvironmentVariable;
 
 /**
- * All bars against the runnable folder, at a fifth of their length with twice their time. In
- * CI alone: times by the wall clock say nothing on a desk where other things run.
+ * All bars against the runnable folder, at a fifth of their length with twice their time. In CI
+ * alone: times by the wall clock say nothing on a desk where other things run.
  */
 @EnabledIfEnvironmentVariable(named = "CI", matches = "true")
 class BarsIT {
