@@ -30,9 +30,7 @@ final class AlternatingSolver {
     }
     for (int i = 0; i < network.probePlus.length; i++) {
       double siemens = stage.value(network.probeMeter[i]);
-      if (siemens != 0) {
-        stage.admittance(network.probePlus[i], network.probeMinus[i], siemens, 0);
-      }
+      stage.admittance(network.probePlus[i], network.probeMinus[i], siemens, 0);
     }
     for (int i = 0; i < network.seamBefore.length; i++) {
       int branch = network.firstSeamBranch + i;

@@ -88,6 +88,8 @@ final class CaseWork {
   /** Makes the present solution the start of all later ones. */
   void keep() {
     direct.keep();
+    stage().matrix().freeze();
+    alternating.stage().matrix().freeze();
     if (detection != null) {
       detection.keep();
     }

@@ -126,9 +126,7 @@ final class DirectSolver {
     }
     for (int i = 0; i < network.probePlus.length; i++) {
       double siemens = stage.value(network.probeMeter[i]);
-      if (siemens != 0) {
-        stage.conductance(network.probePlus[i], network.probeMinus[i], siemens);
-      }
+      stage.conductance(network.probePlus[i], network.probeMinus[i], siemens);
     }
     for (int i = 0; i < network.seamBefore.length; i++) {
       int branch = network.firstSeamBranch + i;

@@ -1,12 +1,14 @@
 package earward.engine.linear;
 
 import java.util.Arrays;
+import org.jspecify.annotations.Nullable;
 
 /**
- * A complex linear system, solved by elimination with partial pivoting by magnitude; it keeps the
- * matrix beside its factors, so that the residual of a solution can be had.
+ * A complex linear system. Its order of elimination is found once and replayed (Markowitz 1957);
+ * each solution's residual is looked at, and where it is not that of rounding the system is solved
+ * anew, densely, with partial pivoting by magnitude.
  *
- * <p>Mutable, for one thread; allocates nothing after construction.
+ * <p>Mutable, for one thread; allocates nothing once its pattern is known.
  */
 public final class ComplexLu {
   private final int size;
@@ -14,7 +16,18 @@ public final class ComplexLu {
   private final double[] im;
   private final double[] keptRe;
   private final double[] keptIm;
-  private final int[] pivots;
+  private final double[] inverseRe;
+  private final double[] inverseIm;
+  private final double[] unknownRe;
+  private final double[] unknownIm;
+  private final double[] sideRe;
+  private final double[] sideIm;
+  private final double[] offRe;
+  private final double[] offIm;
+  private final double[] scale;
+  private final DenseComplexLu dense;
+  private final Pattern pattern;
+  private @Nullable Elimination replayed;
 
   public ComplexLu(int size) {
     this.size = size;
@@ -22,19 +35,42 @@ public final class ComplexLu {
     im = new double[size * size];
     keptRe = new double[size * size];
     keptIm = new double[size * size];
-    pivots = new int[size];
+    inverseRe = new double[size];
+    inverseIm = new double[size];
+    unknownRe = new double[size];
+    unknownIm = new double[size];
+    sideRe = new double[size];
+    sideIm = new double[size];
+    offRe = new double[size];
+    offIm = new double[size];
+    scale = new double[size];
+    dense = new DenseComplexLu(size, re, im);
+    pattern = new Pattern(size);
   }
 
   /** Sets all elements to 0. */
   public void clear() {
-    Arrays.fill(re, 0);
-    Arrays.fill(im, 0);
+    pattern.clear(re, replayed);
+    pattern.clear(im, replayed);
+    pattern.begin();
   }
 
   /** Adds to one element. */
   public void add(int row, int column, double real, double imaginary) {
-    re[row * size + column] += real;
-    im[row * size + column] += imaginary;
+    int at = row * size + column;
+    pattern.touch(at);
+    re[at] += real;
+    im[at] += imaginary;
+  }
+
+  /** Keeps the order of elimination from now on; a system that does not fit is solved densely. */
+  public void freeze() {
+    pattern.freeze();
+  }
+
+  /** How many systems were solved densely. */
+  public int fallBacks() {
+    return pattern.fallBacks();
   }
 
   /**
@@ -43,60 +79,46 @@ public final class ComplexLu {
    * @return whether a pivot other than 0 was found in every column
    */
   public boolean factor() {
-    System.arraycopy(re, 0, keptRe, 0, re.length);
-    System.arraycopy(im, 0, keptIm, 0, im.length);
+    Elimination order = pattern.order(re, im);
+    if (order == null) {
+      System.arraycopy(re, 0, keptRe, 0, re.length);
+      System.arraycopy(im, 0, keptIm, 0, im.length);
+      replayed = null;
+      return dense.factor();
+    }
+    if (replayed != order) {
+      Arrays.fill(keptRe, 0);
+      Arrays.fill(keptIm, 0);
+    }
+    for (int at : order.entries) {
+      keptRe[at] = re[at];
+      keptIm[at] = im[at];
+    }
+    replayed = order;
+    return replay(order) || startDensely();
+  }
+
+  private boolean replay(Elimination order) {
     for (int k = 0; k < size; k++) {
-      int best = k;
-      double most = 0;
-      for (int row = k; row < size; row++) {
-        double here = squared(row * size + k);
-        if (here > most) {
-          most = here;
-          best = row;
-        }
-      }
-      pivots[k] = best;
-      if (!(most > 0) || Double.isInfinite(most)) {
+      int at = order.pivot[k];
+      double norm = re[at] * re[at] + im[at] * im[at];
+      if (!(norm > 0) || Double.isInfinite(norm)) {
         return false;
       }
-      if (best != k) {
-        swapRows(k, best);
-      }
-      eliminate(k);
-    }
-    return true;
-  }
-
-  private double squared(int at) {
-    return re[at] * re[at] + im[at] * im[at];
-  }
-
-  private void swapRows(int one, int other) {
-    for (int c = 0; c < size; c++) {
-      double r = re[one * size + c];
-      re[one * size + c] = re[other * size + c];
-      re[other * size + c] = r;
-      double i = im[one * size + c];
-      im[one * size + c] = im[other * size + c];
-      im[other * size + c] = i;
-    }
-  }
-
-  private void eliminate(int k) {
-    int from = k * size;
-    double norm = squared(from + k);
-    double inverseRe = re[from + k] / norm;
-    double inverseIm = -im[from + k] / norm;
-    for (int row = k + 1; row < size; row++) {
-      int to = row * size;
-      double br = re[to + k];
-      double bi = im[to + k];
-      if (br != 0 || bi != 0) {
-        double fr = br * inverseRe - bi * inverseIm;
-        double fi = br * inverseIm + bi * inverseRe;
-        re[to + k] = fr;
-        im[to + k] = fi;
-        for (int c = k + 1; c < size; c++) {
+      inverseRe[k] = re[at] / norm;
+      inverseIm[k] = -im[at] / norm;
+      int from = order.row[k] * size;
+      int column = order.column[k];
+      for (int l = order.lowerFrom[k]; l < order.lowerFrom[k + 1]; l++) {
+        int to = order.lowerRow[l] * size;
+        double br = re[to + column];
+        double bi = im[to + column];
+        double fr = br * inverseRe[k] - bi * inverseIm[k];
+        double fi = br * inverseIm[k] + bi * inverseRe[k];
+        re[to + column] = fr;
+        im[to + column] = fi;
+        for (int u = order.upperFrom[k]; u < order.upperFrom[k + 1]; u++) {
+          int c = order.upperColumn[u];
           double pr = re[from + c];
           double pi = im[from + c];
           re[to + c] -= fr * pr - fi * pi;
@@ -104,63 +126,143 @@ public final class ComplexLu {
         }
       }
     }
+    return true;
+  }
+
+  /** Starts again from the kept matrix. */
+  private boolean startDensely() {
+    pattern.fellBack();
+    System.arraycopy(keptRe, 0, re, 0, re.length);
+    System.arraycopy(keptIm, 0, im, 0, im.length);
+    replayed = null;
+    return dense.factor();
   }
 
   /** Replaces the right side by the solution. */
-  public void solve(double[] sideRe, double[] sideIm) {
-    for (int k = 0; k < size; k++) {
-      int p = pivots[k];
-      double r = sideRe[p];
-      sideRe[p] = sideRe[k];
-      sideRe[k] = r;
-      double i = sideIm[p];
-      sideIm[p] = sideIm[k];
-      sideIm[k] = i;
-    }
-    for (int row = 1; row < size; row++) {
-      reduce(row, 0, row, sideRe, sideIm);
-    }
-    for (int row = size - 1; row >= 0; row--) {
-      reduce(row, row + 1, size, sideRe, sideIm);
-      int at = row * size + row;
-      double norm = squared(at);
-      double r = sideRe[row];
-      double i = sideIm[row];
-      sideRe[row] = (r * re[at] + i * im[at]) / norm;
-      sideIm[row] = (i * re[at] - r * im[at]) / norm;
-    }
+  public void solve(double[] valuesRe, double[] valuesIm) {
+    solve(valuesRe, valuesIm, false);
   }
 
-  private void reduce(int row, int from, int to, double[] sideRe, double[] sideIm) {
-    double r = sideRe[row];
-    double i = sideIm[row];
-    for (int c = from; c < to; c++) {
-      int at = row * size + c;
-      r -= re[at] * sideRe[c] - im[at] * sideIm[c];
-      i -= re[at] * sideIm[c] + im[at] * sideRe[c];
-    }
-    sideRe[row] = r;
-    sideIm[row] = i;
+  /** Replaces the right side by the solution of the transposed system: an adjoint solve. */
+  public void solveTransposed(double[] valuesRe, double[] valuesIm) {
+    solve(valuesRe, valuesIm, true);
   }
 
-  /** Writes side − matrix · solution. */
-  public void residual(
-      double[] solutionRe,
-      double[] solutionIm,
-      double[] sideRe,
-      double[] sideIm,
-      double[] residualRe,
-      double[] residualIm) {
-    for (int row = 0; row < size; row++) {
-      double r = sideRe[row];
-      double i = sideIm[row];
-      for (int c = 0; c < size; c++) {
-        int at = row * size + c;
-        r -= keptRe[at] * solutionRe[c] - keptIm[at] * solutionIm[c];
-        i -= keptRe[at] * solutionIm[c] + keptIm[at] * solutionRe[c];
+  private void solve(double[] valuesRe, double[] valuesIm, boolean transposed) {
+    Elimination order = replayed;
+    if (order == null) {
+      solveDensely(valuesRe, valuesIm, transposed);
+      return;
+    }
+    System.arraycopy(valuesRe, 0, sideRe, 0, size);
+    System.arraycopy(valuesIm, 0, sideIm, 0, size);
+    if (transposed) {
+      substituteTransposed(order, valuesRe, valuesIm);
+    } else {
+      substitute(order, valuesRe, valuesIm);
+    }
+    if (!good(order, valuesRe, valuesIm, transposed)) {
+      System.arraycopy(sideRe, 0, valuesRe, 0, size);
+      System.arraycopy(sideIm, 0, valuesIm, 0, size);
+      if (startDensely()) {
+        solveDensely(valuesRe, valuesIm, transposed);
       }
-      residualRe[row] = r;
-      residualIm[row] = i;
     }
+  }
+
+  private void solveDensely(double[] valuesRe, double[] valuesIm, boolean transposed) {
+    if (transposed) {
+      dense.solveTransposed(valuesRe, valuesIm);
+    } else {
+      dense.solve(valuesRe, valuesIm);
+    }
+  }
+
+  private void substitute(Elimination order, double[] valuesRe, double[] valuesIm) {
+    for (int k = 0; k < size; k++) {
+      double r = valuesRe[order.row[k]];
+      double i = valuesIm[order.row[k]];
+      if (r != 0 || i != 0) {
+        int column = order.column[k];
+        for (int l = order.lowerFrom[k]; l < order.lowerFrom[k + 1]; l++) {
+          int row = order.lowerRow[l];
+          int at = row * size + column;
+          valuesRe[row] -= re[at] * r - im[at] * i;
+          valuesIm[row] -= re[at] * i + im[at] * r;
+        }
+      }
+    }
+    for (int k = size - 1; k >= 0; k--) {
+      int from = order.row[k] * size;
+      double r = valuesRe[order.row[k]];
+      double i = valuesIm[order.row[k]];
+      for (int u = order.upperFrom[k]; u < order.upperFrom[k + 1]; u++) {
+        int c = order.upperColumn[u];
+        r -= re[from + c] * unknownRe[c] - im[from + c] * unknownIm[c];
+        i -= re[from + c] * unknownIm[c] + im[from + c] * unknownRe[c];
+      }
+      unknownRe[order.column[k]] = r * inverseRe[k] - i * inverseIm[k];
+      unknownIm[order.column[k]] = r * inverseIm[k] + i * inverseRe[k];
+    }
+    System.arraycopy(unknownRe, 0, valuesRe, 0, size);
+    System.arraycopy(unknownIm, 0, valuesIm, 0, size);
+  }
+
+  private void substituteTransposed(Elimination order, double[] valuesRe, double[] valuesIm) {
+    for (int k = 0; k < size; k++) {
+      double br = valuesRe[order.column[k]];
+      double bi = valuesIm[order.column[k]];
+      double r = br * inverseRe[k] - bi * inverseIm[k];
+      double i = br * inverseIm[k] + bi * inverseRe[k];
+      int from = order.row[k] * size;
+      for (int u = order.upperFrom[k]; u < order.upperFrom[k + 1]; u++) {
+        int c = order.upperColumn[u];
+        valuesRe[c] -= re[from + c] * r - im[from + c] * i;
+        valuesIm[c] -= re[from + c] * i + im[from + c] * r;
+      }
+      unknownRe[order.row[k]] = r;
+      unknownIm[order.row[k]] = i;
+    }
+    for (int k = size - 1; k >= 0; k--) {
+      int column = order.column[k];
+      double r = unknownRe[order.row[k]];
+      double i = unknownIm[order.row[k]];
+      for (int l = order.lowerFrom[k]; l < order.lowerFrom[k + 1]; l++) {
+        int row = order.lowerRow[l];
+        int at = row * size + column;
+        r -= re[at] * unknownRe[row] - im[at] * unknownIm[row];
+        i -= re[at] * unknownIm[row] + im[at] * unknownRe[row];
+      }
+      unknownRe[order.row[k]] = r;
+      unknownIm[order.row[k]] = i;
+    }
+    System.arraycopy(unknownRe, 0, valuesRe, 0, size);
+    System.arraycopy(unknownIm, 0, valuesIm, 0, size);
+  }
+
+  /** Whether every equation is met but for rounding. */
+  private boolean good(
+      Elimination order, double[] valuesRe, double[] valuesIm, boolean transposed) {
+    int[] rows = transposed ? order.entryColumn : order.entryRow;
+    int[] columns = transposed ? order.entryRow : order.entryColumn;
+    for (int row = 0; row < size; row++) {
+      offRe[row] = sideRe[row];
+      offIm[row] = sideIm[row];
+      scale[row] = Math.abs(sideRe[row]) + Math.abs(sideIm[row]);
+    }
+    for (int e = 0; e < rows.length; e++) {
+      int at = order.entries[e];
+      double r = keptRe[at] * valuesRe[columns[e]] - keptIm[at] * valuesIm[columns[e]];
+      double i = keptRe[at] * valuesIm[columns[e]] + keptIm[at] * valuesRe[columns[e]];
+      offRe[rows[e]] -= r;
+      offIm[rows[e]] -= i;
+      scale[rows[e]] += Math.abs(r) + Math.abs(i);
+    }
+    for (int row = 0; row < size; row++) {
+      if (!(Math.abs(offRe[row]) + Math.abs(offIm[row]) <= RealLu.GOOD * scale[row])) {
+        return false;
+      }
+    }
+    return true;
   }
 }

@@ -1,33 +1,62 @@
 package earward.engine.linear;
 
 import java.util.Arrays;
+import org.jspecify.annotations.Nullable;
 
 /**
- * A real linear system, solved by elimination with partial pivoting by magnitude.
+ * A real linear system. Its order of elimination is found once and replayed (Markowitz 1957); each
+ * solution's residual is looked at, and where it is not that of rounding the system is solved anew,
+ * densely, with partial pivoting by magnitude.
  *
- * <p>Mutable, for one thread; allocates nothing after construction. Fill the matrix, {@link
- * #factor()}, then {@link #solve} as often as wanted; a second {@link #factor()} needs a fresh
- * matrix.
+ * <p>Mutable, for one thread; allocates nothing once its pattern is known. Fill the matrix, {@link
+ * #factor()}, then solve as often as wanted; a second {@link #factor()} needs a fresh matrix.
  */
 public final class RealLu {
+  /** Residual over the sum of its terms' magnitudes beyond which a replay is not trusted. */
+  static final double GOOD = 1e-11;
+
   private final int size;
   private final double[] a;
+  private final double[] kept;
+  private final double[] zero;
   private final int[] pivots;
+  private final double[] unknown;
+  private final double[] side;
+  private final Pattern pattern;
+  private @Nullable Elimination replayed;
 
   public RealLu(int size) {
     this.size = size;
     a = new double[size * size];
+    kept = new double[size * size];
+    zero = new double[size * size];
     pivots = new int[size];
+    unknown = new double[size];
+    side = new double[size];
+    pattern = new Pattern(size);
   }
 
   /** Sets all elements to 0. */
   public void clear() {
-    Arrays.fill(a, 0);
+    pattern.clear(a, replayed);
+    pattern.begin();
   }
 
   /** Adds to one element. */
   public void add(int row, int column, double value) {
-    a[row * size + column] += value;
+    int at = row * size + column;
+    pattern.touch(at);
+    a[at] += value;
+  }
+
+  /** Keeps the order of elimination from now on; a system that does not fit is solved densely. */
+  public void freeze() {
+    pattern.freeze();
+  }
+
+  /** How many systems were solved densely. */
+  public int fallBacks() {
+    return pattern.fallBacks();
   }
 
   /**
@@ -36,6 +65,54 @@ public final class RealLu {
    * @return whether a pivot other than 0 was found in every column
    */
   public boolean factor() {
+    Elimination order = pattern.order(a, zero);
+    if (order == null) {
+      System.arraycopy(a, 0, kept, 0, a.length);
+      replayed = null;
+      return factorDensely();
+    }
+    if (replayed != order) {
+      Arrays.fill(kept, 0);
+    }
+    for (int at : order.entries) {
+      kept[at] = a[at];
+    }
+    replayed = order;
+    return replay(order) || dense();
+  }
+
+  private boolean replay(Elimination order) {
+    for (int k = 0; k < size; k++) {
+      double pivot = a[order.pivot[k]];
+      if (pivot == 0 || !Double.isFinite(pivot)) {
+        return false;
+      }
+      double inverse = 1 / pivot;
+      int from = order.row[k] * size;
+      int column = order.column[k];
+      int last = order.upperFrom[k + 1];
+      for (int l = order.lowerFrom[k]; l < order.lowerFrom[k + 1]; l++) {
+        int to = order.lowerRow[l] * size;
+        double factor = a[to + column] * inverse;
+        a[to + column] = factor;
+        for (int u = order.upperFrom[k]; u < last; u++) {
+          int c = order.upperColumn[u];
+          a[to + c] -= factor * a[from + c];
+        }
+      }
+    }
+    return true;
+  }
+
+  /** Starts again from the kept matrix, densely. */
+  private boolean dense() {
+    pattern.fellBack();
+    System.arraycopy(kept, 0, a, 0, a.length);
+    replayed = null;
+    return factorDensely();
+  }
+
+  private boolean factorDensely() {
     for (int k = 0; k < size; k++) {
       int best = k;
       double most = Math.abs(a[k * size + k]);
@@ -60,9 +137,9 @@ public final class RealLu {
 
   private void swapRows(int one, int other) {
     for (int c = 0; c < size; c++) {
-      double kept = a[one * size + c];
+      double former = a[one * size + c];
       a[one * size + c] = a[other * size + c];
-      a[other * size + c] = kept;
+      a[other * size + c] = former;
     }
   }
 
@@ -83,26 +160,83 @@ public final class RealLu {
   }
 
   /** Replaces the right side by the solution. */
-  public void solve(double[] side) {
+  public void solve(double[] values) {
+    Elimination order = replayed;
+    if (order == null) {
+      solveDensely(values);
+      return;
+    }
+    System.arraycopy(values, 0, side, 0, size);
+    substitute(order, values);
+    if (!good(order, values)) {
+      System.arraycopy(side, 0, values, 0, size);
+      if (dense()) {
+        solveDensely(values);
+      }
+    }
+  }
+
+  private void substitute(Elimination order, double[] values) {
+    for (int k = 0; k < size; k++) {
+      double here = values[order.row[k]];
+      if (here != 0) {
+        int column = order.column[k];
+        for (int l = order.lowerFrom[k]; l < order.lowerFrom[k + 1]; l++) {
+          values[order.lowerRow[l]] -= a[order.lowerRow[l] * size + column] * here;
+        }
+      }
+    }
+    for (int k = size - 1; k >= 0; k--) {
+      int from = order.row[k] * size;
+      double sum = values[order.row[k]];
+      for (int u = order.upperFrom[k]; u < order.upperFrom[k + 1]; u++) {
+        sum -= a[from + order.upperColumn[u]] * unknown[order.upperColumn[u]];
+      }
+      unknown[order.column[k]] = sum / a[order.pivot[k]];
+    }
+    System.arraycopy(unknown, 0, values, 0, size);
+  }
+
+  /** Whether every equation is met but for rounding. */
+  private boolean good(Elimination order, double[] values) {
+    int[] entries = order.entries;
+    int at = 0;
+    for (int row = 0; row < size; row++) {
+      double sum = -side[row];
+      double scale = Math.abs(sum);
+      int end = (row + 1) * size;
+      for (; at < entries.length && entries[at] < end; at++) {
+        double term = kept[entries[at]] * values[entries[at] - row * size];
+        sum += term;
+        scale += Math.abs(term);
+      }
+      if (!(Math.abs(sum) <= GOOD * scale)) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private void solveDensely(double[] values) {
     for (int k = 0; k < size; k++) {
       int p = pivots[k];
-      double kept = side[p];
-      side[p] = side[k];
-      side[k] = kept;
+      double former = values[p];
+      values[p] = values[k];
+      values[k] = former;
     }
     for (int row = 1; row < size; row++) {
-      double sum = side[row];
+      double sum = values[row];
       for (int c = 0; c < row; c++) {
-        sum -= a[row * size + c] * side[c];
+        sum -= a[row * size + c] * values[c];
       }
-      side[row] = sum;
+      values[row] = sum;
     }
     for (int row = size - 1; row >= 0; row--) {
-      double sum = side[row];
+      double sum = values[row];
       for (int c = row + 1; c < size; c++) {
-        sum -= a[row * size + c] * side[c];
+        sum -= a[row * size + c] * values[c];
       }
-      side[row] = sum / a[row * size + row];
+      values[row] = sum / a[row * size + row];
     }
   }
 }
