@@ -2,13 +2,14 @@ package earward.engine.law;
 
 import earward.block.device.DiodeModel;
 import earward.engine.detection.JunctionLaw;
+import earward.engine.detection.PortLaw;
 
 /**
  * A diode: series resistance, then the junction, with an unknown for the voltage between them. One
  * that the carrier drives stands as a source of its mean current while the carrier is on, and as
  * nothing at all to audio and carrier: its cycle is solved apart.
  */
-public final class DiodeLaw extends Law {
+public final class DiodeLaw extends Law implements CarrierDriven {
   /** What stands for no series resistance, in Ω. */
   private static final double LEAST_OHMS = 1e-3;
 
@@ -28,7 +29,12 @@ public final class DiodeLaw extends Law {
     return 1;
   }
 
-  /** Place among the carrier-driven devices, −1 for one that is not driven. */
+  @Override
+  public int ports() {
+    return 1;
+  }
+
+  @Override
   public int driven() {
     return driven;
   }
@@ -43,10 +49,29 @@ public final class DiodeLaw extends Law {
     return value(stage, 3);
   }
 
-  /** Place among all diodes. */
-  public int ordinal() {
-    return ordinal;
+  @Override
+  public int anode(DirectStage stage, int port) {
+    return anode(stage);
   }
+
+  @Override
+  public int cathode(DirectStage stage, int port) {
+    return cathode(stage);
+  }
+
+  @Override
+  public double seriesOhms(DirectStage stage, int port) {
+    return seriesOhms(stage);
+  }
+
+  @Override
+  public PortLaw portLaw(DirectStage stage) {
+    return stage.junction(ordinal);
+  }
+
+  /** Nothing: its junction is that of DC, and was prepared with it. */
+  @Override
+  public void fill(DirectStage stage, PortLaw law) {}
 
   /** Node of the anode as fitted. */
   public int anode(DirectStage stage) {
