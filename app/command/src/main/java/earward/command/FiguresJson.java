@@ -7,9 +7,11 @@ import static earward.block.figure.CaseName.HOTTEST;
 import static earward.block.figure.CaseName.NO_SIGNAL;
 import static earward.block.figure.CaseName.STRONG;
 import static earward.block.figure.CaseName.TEST;
+import static earward.block.figure.CaseName.WEAK;
 
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import earward.block.Role;
 import earward.block.device.Battery;
 import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
@@ -17,6 +19,7 @@ import earward.block.figure.Quantity;
 import earward.engine.CircuitPart;
 import earward.engine.Seam;
 import earward.kit.path.Assembly;
+import earward.kit.path.PlacedBlock;
 import earward.kit.path.PlacedTestPoint;
 import earward.kit.review.CleanDepthLimit;
 import earward.kit.review.ReviewedKit;
@@ -98,6 +101,7 @@ final class FiguresJson {
       put(node, "carrierRmsVoltsTest", level, Quantity.CARRIER_RMS_VOLTS, TEST);
       put(node, "headroomDecibelsTest", level, Quantity.HEADROOM_DECIBELS, TEST);
       put(node, "headroomDecibelsStrong", level, Quantity.HEADROOM_DECIBELS, STRONG);
+      put(node, "noiseRmsVoltsTest", level, Quantity.NOISE_RMS_VOLTS, TEST);
     }
     return seams;
   }
@@ -124,8 +128,27 @@ final class FiguresJson {
     put(node, "tenPercentWatts", PATH, Quantity.TEN_PERCENT_WATTS, FULL_OUTPUT);
     put(node, "clipWattsBatteryLow", PATH, Quantity.CLIP_WATTS, BATTERY_LOW);
     put(node, "tenPercentWattsBatteryLow", PATH, Quantity.TEN_PERCENT_WATTS, BATTERY_LOW);
-    put(node, "signalToNoiseDecibels", PATH, Quantity.SIGNAL_TO_NOISE_DECIBELS, TEST);
+    noise(node);
     return node;
+  }
+
+  private void noise(ObjectNode node) {
+    put(node, "signalToNoiseDecibels", PATH, Quantity.SIGNAL_TO_NOISE_DECIBELS, TEST);
+    Quantity weighted = Quantity.A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS;
+    put(node, "aWeightedSignalToNoiseDecibels", PATH, weighted, TEST);
+    put(node, "signalToNoiseDecibelsWeak", PATH, Quantity.SIGNAL_TO_NOISE_DECIBELS, WEAK);
+    put(node, "noiseRmsVoltsTest", PATH, Quantity.NOISE_RMS_VOLTS, TEST);
+    put(node, "noiseRmsVoltsNoSignal", PATH, Quantity.NOISE_RMS_VOLTS, NO_SIGNAL);
+    Quantity hiss = Quantity.A_WEIGHTED_NOISE_RMS_VOLTS;
+    put(node, "aWeightedNoiseRmsVoltsNoSignal", PATH, hiss, NO_SIGNAL);
+    String detector =
+        assembly.path().stream()
+            .filter(block -> block.type().role() == Role.DETECTOR)
+            .map(PlacedBlock::id)
+            .findFirst()
+            .orElse("");
+    Quantity there = Quantity.SIGNAL_TO_NOISE_DECIBELS;
+    put(node, "signalToNoiseDecibelsDetector", detector, there, TEST);
   }
 
   private ObjectNode supply() {

@@ -6,6 +6,7 @@ import static earward.block.figure.CaseName.NO_SIGNAL;
 import static earward.block.figure.CaseName.STRONG;
 import static earward.block.figure.CaseName.TEST;
 
+import earward.block.Conditions;
 import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
 import earward.block.figure.Quantity;
@@ -77,7 +78,7 @@ final class FiguresText {
   private void seams() {
     TextTable table =
         new TextTable()
-            .row("into", "audio rms", "onward", "backward", "loss", "headroom test", "strong");
+            .row("into", "audio rms", "onward", "backward", "loss", "headroom", "strong", "noise");
     for (Seam seam : assembly.circuit().seams()) {
       String place = "seam." + seam.name();
       table.row(
@@ -87,9 +88,10 @@ final class FiguresText {
           shown(place, Quantity.BACKWARD_OHMS, TEST),
           shown(place, Quantity.LOADING_LOSS_DECIBELS, TEST),
           shown(place, Quantity.HEADROOM_DECIBELS, TEST),
-          shown(place, Quantity.HEADROOM_DECIBELS, STRONG));
+          shown(place, Quantity.HEADROOM_DECIBELS, STRONG),
+          shown(place, Quantity.NOISE_RMS_VOLTS, TEST));
     }
-    section("Seams, at the test tone", table);
+    section("Seams, at the test tone (headroom of the test and the strong signal)", table);
   }
 
   private void path() {
@@ -109,11 +111,25 @@ final class FiguresText {
     table.row("output at the edge of clipping", shown(path, Quantity.CLIP_WATTS, FULL_OUTPUT));
     table.row("output at 10 %", shown(path, Quantity.TEN_PERCENT_WATTS, FULL_OUTPUT));
     table.row("output of the test signal", shown(path, Quantity.OUTPUT_WATTS, TEST));
+    table.row(
+        "signal to noise (" + band() + ", not weighted)",
+        shown(path, Quantity.SIGNAL_TO_NOISE_DECIBELS, TEST));
+    table.row(
+        "signal to noise (A-weighted)",
+        shown(path, Quantity.A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS, TEST));
     table.row("supply current at rest", shown(path, Quantity.SUPPLY_AMPERES, NO_SIGNAL));
     table.row("supply current, test signal", shown(path, Quantity.SUPPLY_AMPERES, TEST));
     table.row("supply current, full output", shown(path, Quantity.SUPPLY_AMPERES, FULL_OUTPUT));
     table.row("battery life, listening level", shown(path, Quantity.BATTERY_HOURS, listening));
     section("Path", table);
+  }
+
+  /** The audio band of the conditions. */
+  private String band() {
+    Conditions core = assembly.design().conditions().core();
+    return Shown.quantity(core.lowestToneHertz(), Unit.HERTZ)
+        + " to "
+        + Shown.quantity(core.highestToneHertz(), Unit.HERTZ);
   }
 
   private void heat() {

@@ -22,6 +22,7 @@ public record Slot(String name, double nominal, Unit unit, ToleranceClass tolera
   public static final String DEPTH = "signal:depth";
   public static final String TONE_HERTZ = "signal:tone-hertz";
   public static final String HIGHEST_TONE_HERTZ = "signal:highest-tone-hertz";
+  public static final String LOWEST_TONE_HERTZ = "signal:lowest-tone-hertz";
   public static final String AMBIENT_CELSIUS = "ambient:celsius";
 
   /** Fraction by which the least load lies under the nominal one. */

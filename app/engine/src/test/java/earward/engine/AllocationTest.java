@@ -37,6 +37,8 @@ class AllocationTest {
             .want("out", Quantity.DISTORTION)
             .want("out", Quantity.CARRIER_RMS_VOLTS)
             .want("w", Quantity.LOW_EDGE_HERTZ)
+            .want("w", Quantity.NOISE_RMS_VOLTS)
+            .want("out", Quantity.A_WEIGHTED_NOISE_RMS_VOLTS)
             .want("detector.d1", Quantity.CLIPPING_DEPTH)
             .want("detector.d1", Quantity.CLEAN_DEPTH)
             .want("power.amplifier", Quantity.CLIP_WATTS, CaseName.FULL_OUTPUT)

@@ -75,6 +75,14 @@ final class AlternatingSolver {
     stage.matrix().solve(re, im);
   }
 
+  /**
+   * Replaces what stands in the right-hand side, one at the output, by how that output answers to a
+   * source in each row.
+   */
+  void solveTransposed() {
+    stage.matrix().solveTransposed(re, im);
+  }
+
   double re(int node) {
     return node < 0 ? 0 : re[node];
   }

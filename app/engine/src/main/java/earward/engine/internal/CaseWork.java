@@ -30,6 +30,7 @@ final class CaseWork {
 
   final Outputs outputs;
   final SmallSignal small;
+  final Noise noise;
   final @Nullable Detection detection;
 
   /** Room for a response over frequency. */
@@ -62,6 +63,7 @@ final class CaseWork {
     trial = new AudioSignal(harmonics, network.size);
     outputs = new Outputs(network);
     small = new SmallSignal(network.ports.length);
+    noise = new Noise(plan, network, alternating);
     detection =
         network.ports.length == 0 || network.feed == null
             ? null
@@ -77,6 +79,7 @@ final class CaseWork {
     carrier = Part.TO_DO;
     trouble = "";
     signal.clear();
+    noise.clear();
     if (warm) {
       direct.recall();
       if (detection != null) {

@@ -51,6 +51,8 @@ public final class Network {
   final int carrierPeak;
   final int depth;
   final int tone;
+  final int lowestTone;
+  final int highestTone;
   final int ambient;
   final int loadTolerance;
   private final Map<String, Integer> nodeOf;
@@ -94,6 +96,8 @@ public final class Network {
     carrierPeak = slots.of(Slot.CARRIER_PEAK_VOLTS);
     depth = slots.of(Slot.DEPTH);
     tone = slots.of(Slot.TONE_HERTZ);
+    lowestTone = slots.of(Slot.LOWEST_TONE_HERTZ);
+    highestTone = slots.of(Slot.HIGHEST_TONE_HERTZ);
     ambient = slots.of(Slot.AMBIENT_CELSIUS);
     loadTolerance = slots.of(Slot.LOAD_TOLERANCE);
   }

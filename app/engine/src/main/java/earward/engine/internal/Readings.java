@@ -5,7 +5,6 @@ import earward.block.figure.Quantity;
 import earward.engine.Probe;
 import earward.engine.Seam;
 import earward.engine.law.AmplifierLaw;
-import earward.engine.law.CarrierDriven;
 import earward.engine.law.DiodeLaw;
 import earward.engine.law.Heated;
 import earward.engine.law.Law;
@@ -27,9 +26,10 @@ final class Readings {
    *
    * @throws IllegalArgumentException with one sentence when there is no such place
    */
-  Reading of(FigureName name) {
+  Reading of(FigureName name, CasePlan plan) {
     Quantity quantity = name.quantity();
     return switch (quantity) {
+      case NOISE_RMS_VOLTS, A_WEIGHTED_NOISE_RMS_VOLTS -> noise(name, plan);
       case DC_VOLTS,
           AUDIO_RMS_VOLTS,
           DISTORTION,
@@ -44,6 +44,7 @@ final class Readings {
           OUTPUT_RMS_VOLTS,
           OUTPUT_WATTS,
           SIGNAL_TO_NOISE_DECIBELS,
+          A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           BATTERY_HOURS,
           SOUND_DECIBELS,
           RAIL_LOOP_MARGIN_DECIBELS ->
@@ -61,16 +62,29 @@ final class Readings {
   }
 
   private Reading atNodes(FigureName name) {
+    int[] place = place(name);
+    return between(name.quantity(), place[0], place[1]);
+  }
+
+  private Reading noise(FigureName name, CasePlan plan) {
+    int[] nodes = place(name);
+    int place = plan.addNoise(nodes[0], nodes[1]);
+    boolean byCurveA = name.quantity() == Quantity.A_WEIGHTED_NOISE_RMS_VOLTS;
+    return work -> work.noise.rmsVolts(work, place, byCurveA);
+  }
+
+  /** The two nodes of a place, −1 for ground. */
+  private int[] place(FigureName name) {
     for (Probe probe : network.circuit.probes()) {
       if (probe.name().equals(name.place())) {
-        return between(name.quantity(), network.node(probe.plus()), network.node(probe.minus()));
+        return new int[] {network.node(probe.plus()), network.node(probe.minus())};
       }
     }
     if (!network.hasNode(name.place())) {
       throw new IllegalArgumentException(
           "there is no node or probe '" + name.place() + "' in the circuit");
     }
-    return between(name.quantity(), network.node(name.place()), -1);
+    return new int[] {network.node(name.place()), -1};
   }
 
   private static Reading between(Quantity quantity, int plus, int minus) {
@@ -126,8 +140,8 @@ final class Readings {
     if (law instanceof AmplifierLaw amplifier) {
       return ofAmplifier(quantity, amplifier);
     }
-    if (law instanceof CarrierDriven driven && driven.driven() >= 0) {
-      return ofDriven(quantity, driven, law);
+    if (law instanceof DiodeLaw diode && diode.driven() >= 0) {
+      return ofDriven(quantity, diode);
     }
     return ofAny(quantity, law);
   }
@@ -159,8 +173,8 @@ final class Readings {
     };
   }
 
-  private Reading ofDriven(Quantity quantity, CarrierDriven part, Law law) {
-    int port = part.driven();
+  private Reading ofDriven(Quantity quantity, DiodeLaw diode) {
+    int port = diode.driven();
     return switch (quantity) {
       case REVERSE_PEAK_VOLTS ->
           work ->
@@ -171,7 +185,7 @@ final class Readings {
           work ->
               work.plan.drive == earward.engine.Drive.SIGNAL
                   ? CarrierLevels.heatWatts(work, port)
-                  : work.solved() ? law.watts(work.stage()) : Double.NaN;
+                  : work.solved() ? diode.watts(work.stage()) : Double.NaN;
       case CARRIER_PEAK_VOLTS -> work -> CarrierLevels.portPeakVolts(work, port);
       case DETECTION_EFFICIENCY -> work -> CarrierLevels.efficiency(work, port);
       case CARRIER_INPUT_OHMS -> work -> CarrierLevels.inputOhms(work, port);
@@ -181,28 +195,28 @@ final class Readings {
       case CLIPPING_DEPTH_WITHOUT_COUPLING ->
           work -> ClippingRule.depth(work, port, ClippingRule.Without.COUPLING);
       case REVERSAL_DEPTH -> work -> work.depths.reversal(port);
-      case CLEAN_DEPTH -> work -> work.depths.clean(endPlus(work, part), endMinus(work, part));
-      default -> ofAny(quantity, law);
+      case CLEAN_DEPTH -> work -> work.depths.clean(endPlus(work, diode), endMinus(work, diode));
+      default -> ofAny(quantity, diode);
     };
   }
 
   /** Distortion is judged at the end of the path, or across the diode where no end is named. */
-  private int endPlus(CaseWork work, CarrierDriven part) {
+  private int endPlus(CaseWork work, DiodeLaw diode) {
     for (int i = 0; i < network.probePlus.length; i++) {
       if (network.circuit.probes().get(i).name().equals("path")) {
         return network.probePlus[i];
       }
     }
-    return part.cathode(work.stage(), 0);
+    return diode.cathode(work.stage());
   }
 
-  private int endMinus(CaseWork work, CarrierDriven part) {
+  private int endMinus(CaseWork work, DiodeLaw diode) {
     for (int i = 0; i < network.probeMinus.length; i++) {
       if (network.circuit.probes().get(i).name().equals("path")) {
         return network.probeMinus[i];
       }
     }
-    return part.anode(work.stage(), 0);
+    return diode.anode(work.stage());
   }
 
   private static Reading ofAmplifier(Quantity quantity, AmplifierLaw amplifier) {

@@ -41,6 +41,7 @@ public final class Slots {
     signal(Slot.DEPTH, 0.3, Unit.FRACTION, cases);
     signal(Slot.TONE_HERTZ, 400, Unit.HERTZ, cases);
     signal(Slot.HIGHEST_TONE_HERTZ, 5000, Unit.HERTZ, cases);
+    signal(Slot.LOWEST_TONE_HERTZ, 100, Unit.HERTZ, cases);
     signal(Slot.AMBIENT_CELSIUS, 25, Unit.CELSIUS, cases);
     signal(Slot.LOAD_TOLERANCE, 0, Unit.FRACTION, cases);
   }

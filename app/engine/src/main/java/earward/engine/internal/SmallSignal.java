@@ -100,6 +100,17 @@ final class SmallSignal {
     }
   }
 
+  /**
+   * What one ampere of noise beside a junction drives through all ports that are shorted; after
+   * {@link #fill}.
+   */
+  void junctionColumn(int port, double[] intoRe, double[] intoIm) {
+    Arrays.fill(intoRe, 0);
+    Arrays.fill(intoIm, 0);
+    intoRe[port] = 1;
+    series.solve(intoRe, intoIm);
+  }
+
   /** Puts the series resistances between the junctions and the terminals. */
   private void addSeries(CarrierSurroundings around) {
     series.clear();

@@ -28,6 +28,9 @@ public final class AmplifierLaw extends Law {
   /** Keeps the equations regular where an output is shorted or an IC stands the wrong way round. */
   private static final double OUTPUT_OHMS = 1e-3;
 
+  /** Band over which data sheets give the input noise: 22 Hz to 22 kHz. */
+  private static final double NOISE_BAND_HERTZ = 22e3 - 22;
+
   private static final double RIPPLE_SIEMENS = 1e-4;
   private static final double BOOTSTRAP_SIEMENS = 1e-3;
 
@@ -250,6 +253,49 @@ public final class AmplifierLaw extends Law {
     for (int k = 0; k < branches(); k++) {
       outputAlternating(stage, nodes, k);
     }
+  }
+
+  /**
+   * Input noise, the shot noise of the bias current, and the thermal noise of the resistances that
+   * stand inside. What the data sheet gives over 22 Hz to 22 kHz is taken as even over frequency.
+   */
+  @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    AlternatingStage stage = noise.stage();
+    int supply = at(nodes, Terminal.SUPPLY);
+    int ground = at(nodes, Terminal.GROUND);
+    double inputSiemens = 1 / value(stage, INPUT_OHMS);
+    noise.thermal(at(nodes, Terminal.INPUT), ground, inputSiemens);
+    noise.shot(at(nodes, Terminal.INPUT), ground, value(stage, BIAS));
+    if (has(Terminal.RIPPLE)) {
+      noise.thermal(supply, at(nodes, Terminal.RIPPLE), RIPPLE_SIEMENS);
+    }
+    if (has(Terminal.BOOTSTRAP)) {
+      noise.thermal(supply, at(nodes, Terminal.BOOTSTRAP), BOOTSTRAP_SIEMENS);
+    }
+    if (has(Terminal.INVERTING)) {
+      noise.thermal(at(nodes, Terminal.INVERTING), ground, inputSiemens);
+    }
+    if (model.gain().setFromOutside()) {
+      double siemens = 1 / value(stage, FEEDBACK_OHMS);
+      noise.thermal(at(nodes, Terminal.OUTPUT), at(nodes, Terminal.GAIN), siemens);
+    }
+    double density = model.noiseVolts() * model.noiseVolts() / NOISE_BAND_HERTZ;
+    double gain = inputGain(stage, nodes);
+    double off = stage.omega() / (2 * Math.PI) / edgeHertz(stage.point());
+    double real = gain / (1 + off * off);
+    int second = branches() == 2 ? branch(1) : -1;
+    noise.inRows(density, branch(0), real, -off * real, second, -real, off * real);
+  }
+
+  /**
+   * From the input to an output's own row, at low frequency; a bridge's other output has −1 times.
+   */
+  private double inputGain(AlternatingStage stage, int[] nodes) {
+    double on = on(supplyVolts(stage.point()));
+    return model.gain().setFromOutside()
+        ? on * model.gain().openLoopGain()
+        : on / branches() * value(stage, GAIN) * control(stage.point(), nodes);
   }
 
   /** An output takes each half wave of its current from the supply: half of it to first order. */

@@ -2,28 +2,22 @@ package earward.engine.law;
 
 import earward.block.device.DiodeMaterial;
 import earward.block.device.TransistorModel;
-import earward.engine.detection.PortLaw;
-import earward.engine.detection.TransistorLaw;
 
 /**
  * A bipolar transistor by Ebers and Moll (1954), transport form, with Early's factor; terminals
- * COLLECTOR, BASE, EMITTER. One ohm stands between base lead and inner base, whose voltage is an
- * unknown of its own.
+ * COLLECTOR, BASE, EMITTER. The base resistance stands between base lead and inner base, whose
+ * voltage is an unknown of its own.
  */
-final class BipolarLaw extends Law implements Heated, CarrierDriven {
-  private static final double BASE_SIEMENS = 1;
-
+final class BipolarLaw extends Law implements Heated {
   /** Beyond this exponent the law goes on along its tangent. */
   private static final double MOST_EXPONENT = 60;
 
   private final TransistorModel model;
   private final double sign;
-  private final int driven;
 
-  BipolarLaw(Seat seat, TransistorModel model, int driven) {
+  BipolarLaw(Seat seat, TransistorModel model) {
     super(seat);
     this.model = model;
-    this.driven = driven;
     this.sign = model.pnp() ? -1 : 1;
   }
 
@@ -35,57 +29,6 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
   @Override
   public double junctionToAirKelvinPerWatt() {
     return model.junctionToAirKelvinPerWatt();
-  }
-
-  @Override
-  public int ports() {
-    return 2;
-  }
-
-  @Override
-  public int driven() {
-    return driven;
-  }
-
-  /** Where a port leaves the inner base: at the emitter, then at the collector. */
-  private int outer(DirectStage stage, int port) {
-    return nodes(stage)[port == 0 ? 2 : 0];
-  }
-
-  @Override
-  public int anode(DirectStage stage, int port) {
-    return model.pnp() ? outer(stage, port) : branch(0);
-  }
-
-  @Override
-  public int cathode(DirectStage stage, int port) {
-    return model.pnp() ? branch(0) : outer(stage, port);
-  }
-
-  @Override
-  public double seriesOhms(DirectStage stage, int port) {
-    return 0;
-  }
-
-  @Override
-  public PortLaw portLaw(DirectStage stage) {
-    return new TransistorLaw();
-  }
-
-  @Override
-  public void fill(DirectStage stage, PortLaw law) {
-    if (law instanceof TransistorLaw own) {
-      own.set(
-          isOpen(stage) ? 1e-30 : saturation(stage),
-          Temperature.thermalVolts(stage.celsius()),
-          value(stage, 1),
-          model.reverseGain(),
-          model.earlyVolts());
-    }
-  }
-
-  private boolean apart(DirectStage stage) {
-    return driven >= 0 && stage.detecting();
   }
 
   private double saturation(DirectStage stage) {
@@ -114,14 +57,6 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
 
   @Override
   void stampDirect(DirectStage stage, int[] nodes) {
-    if (apart(stage)) {
-      stage.conductance(nodes[1], branch(0), BASE_SIEMENS);
-      for (int port = 0; port < 2; port++) {
-        double amperes = stage.drivenAmperes()[driven + port];
-        stage.current(anode(stage, port), cathode(stage, port), amperes);
-      }
-      return;
-    }
     double thermal = Temperature.thermalVolts(stage.celsius());
     double saturation = saturation(stage);
     double gain = value(stage, 1);
@@ -129,7 +64,7 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
     int base = branch(0);
     double towards = saturation * (exponential(forward(stage, nodes) / thermal) - 1);
     double back = saturation * (exponential(backward(stage, nodes) / thermal) - 1);
-    stage.conductance(nodes[1], base, BASE_SIEMENS);
+    stage.conductance(nodes[1], base, 1 / model.baseOhms());
     stage.current(base, nodes[2], sign * towards / gain);
     stage.current(base, nodes[0], sign * back / model.reverseGain());
     stage.current(nodes[0], nodes[2], sign * (towards - back) * early);
@@ -160,9 +95,6 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
 
   @Override
   public void limit(DirectStage stage, double[] proposal) {
-    if (apart(stage)) {
-      return;
-    }
     int[] nodes = nodes(stage);
     double emitter = nodes[2] < 0 ? 0 : proposal[nodes[2]];
     double thermal = Temperature.thermalVolts(stage.celsius());
@@ -179,10 +111,6 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
   @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
     DirectStage point = stage.point();
-    if (apart(point)) {
-      stage.admittance(nodes[1], branch(0), BASE_SIEMENS, 0);
-      return;
-    }
     double thermal = Temperature.thermalVolts(point.celsius());
     double saturation = saturation(point);
     double early = early(point, nodes);
@@ -190,7 +118,7 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
     double byForward = forwardSlope(saturation, point, nodes, thermal);
     double byBackward = backwardSlope(saturation, point, nodes, thermal);
     double output = amperes(point) * sign / early / model.earlyVolts();
-    stage.admittance(nodes[1], base, BASE_SIEMENS, 0);
+    stage.admittance(nodes[1], base, 1 / model.baseOhms(), 0);
     stage.admittance(base, nodes[2], byForward / value(point, 1), 0);
     stage.admittance(base, nodes[0], byBackward / model.reverseGain(), 0);
     stage.transconductance(nodes[0], nodes[2], base, (byForward - byBackward) * early, 0);
@@ -198,14 +126,22 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
     stage.transconductance(nodes[0], nodes[2], nodes[0], byBackward * early + output, 0);
   }
 
+  /** Shot noise of collector and base current, thermal noise of the base resistance. */
+  @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    DirectStage point = noise.stage().point();
+    double collector = amperes(point);
+    noise.thermal(nodes[1], branch(0), 1 / model.baseOhms());
+    noise.shot(nodes[0], nodes[2], collector);
+    double base = (point.volts(nodes[1]) - point.branch(branch(0))) / model.baseOhms();
+    noise.shot(branch(0), nodes[2], base);
+  }
+
   /** Current from collector to emitter, without the base's. */
   @Override
   public double amperes(DirectStage stage) {
     if (isOpen(stage)) {
       return 0;
-    }
-    if (apart(stage)) {
-      return -sign * stage.drivenAmperes()[driven + 1];
     }
     int[] nodes = nodes(stage);
     double thermal = Temperature.thermalVolts(stage.celsius());

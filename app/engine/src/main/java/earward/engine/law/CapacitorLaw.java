@@ -47,6 +47,14 @@ public final class CapacitorLaw extends Law {
   }
 
   @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    AlternatingStage stage = noise.stage();
+    noise.thermal(nodes[0], nodes[1], value(stage, 2));
+    noise.thermalOfImpedance(
+        nodes[0], nodes[1], value(stage, 1), 1 / (stage.omega() * value(stage, 0)));
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     return isOpen(stage) ? 0 : (stage.volts(node(0)) - stage.volts(node(1))) * value(stage, 2);
   }

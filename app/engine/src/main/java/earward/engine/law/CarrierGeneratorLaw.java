@@ -57,6 +57,16 @@ final class CarrierGeneratorLaw extends FeedLaw {
   }
 
   @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    noise.thermal(nodes[0], nodes[1], 1 / value(noise.stage(), 0));
+  }
+
+  @Override
+  public double sidebandOhms(DirectStage point) {
+    return isOpen(point) ? 0 : value(point, 0);
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     return (stage.volts(node(0)) - stage.volts(node(1))) / value(stage, 0);
   }

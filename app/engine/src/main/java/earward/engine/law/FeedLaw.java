@@ -24,6 +24,12 @@ public abstract class FeedLaw extends Law {
   /** C of a tuned feed, in F, at the carrier in rad/s; NaN for an untuned one. */
   public abstract double tankFarads(DirectStage point, double carrierRadians);
 
+  /**
+   * Resistance whose thermal noise beside the carrier is modulation like any other, in Ω: that of
+   * the source, or Rp of a winding.
+   */
+  public abstract double sidebandOhms(DirectStage point);
+
   /** By how much the peak lies above the carrier as the builder left it, in rad/s. */
   public abstract double detuningRadians(DirectStage point);
 }

@@ -1,21 +1,20 @@
 package earward.engine.law;
 
 import earward.block.device.FieldEffectModel;
-import earward.engine.detection.ChannelLaw;
-import earward.engine.detection.PortLaw;
 
 /**
  * A junction field-effect transistor by the square law (Shockley 1952), below pinch-off too;
  * terminals DRAIN, GATE, SOURCE. No current flows in the gate.
  */
-final class FieldEffectLaw extends Law implements Heated, CarrierDriven {
+final class FieldEffectLaw extends Law implements Heated {
+  /** Share of the transconductance that a saturated channel's noise is of. */
+  private static final double CHANNEL_SHARE = 2 / 3.0;
+
   private final double sign;
-  private final int driven;
   private final double toAirKelvinPerWatt;
 
-  FieldEffectLaw(Seat seat, FieldEffectModel model, int driven) {
+  FieldEffectLaw(Seat seat, FieldEffectModel model) {
     super(seat);
-    this.driven = driven;
     this.sign = model.pChannel() ? -1 : 1;
     this.toAirKelvinPerWatt = model.junctionToAirKelvinPerWatt();
   }
@@ -23,52 +22,6 @@ final class FieldEffectLaw extends Law implements Heated, CarrierDriven {
   @Override
   public double junctionToAirKelvinPerWatt() {
     return toAirKelvinPerWatt;
-  }
-
-  @Override
-  public int ports() {
-    return 2;
-  }
-
-  @Override
-  public int driven() {
-    return driven;
-  }
-
-  /** Where a port leaves the gate: at the source, then at the drain. */
-  private int outer(DirectStage stage, int port) {
-    return nodes(stage)[port == 0 ? 2 : 0];
-  }
-
-  @Override
-  public int anode(DirectStage stage, int port) {
-    return sign > 0 ? nodes(stage)[1] : outer(stage, port);
-  }
-
-  @Override
-  public int cathode(DirectStage stage, int port) {
-    return sign > 0 ? outer(stage, port) : nodes(stage)[1];
-  }
-
-  @Override
-  public double seriesOhms(DirectStage stage, int port) {
-    return 0;
-  }
-
-  @Override
-  public PortLaw portLaw(DirectStage stage) {
-    return new ChannelLaw();
-  }
-
-  @Override
-  public void fill(DirectStage stage, PortLaw law) {
-    if (law instanceof ChannelLaw own) {
-      own.set(isOpen(stage) ? 1e-30 : value(stage, 0), value(stage, 1));
-    }
-  }
-
-  private boolean apart(DirectStage stage) {
-    return driven >= 0 && stage.detecting();
   }
 
   /** Drain current and its slopes for given voltages, all in n-channel sense. */
@@ -98,13 +51,6 @@ final class FieldEffectLaw extends Law implements Heated, CarrierDriven {
 
   @Override
   void stampDirect(DirectStage stage, int[] nodes) {
-    if (apart(stage)) {
-      for (int port = 0; port < 2; port++) {
-        double amperes = stage.drivenAmperes()[driven + port];
-        stage.current(anode(stage, port), cathode(stage, port), amperes);
-      }
-      return;
-    }
     boolean turned = turned(stage, nodes);
     int drain = turned ? nodes[2] : nodes[0];
     int source = turned ? nodes[0] : nodes[2];
@@ -118,9 +64,6 @@ final class FieldEffectLaw extends Law implements Heated, CarrierDriven {
   @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
     DirectStage point = stage.point();
-    if (apart(point)) {
-      return;
-    }
     boolean turned = turned(point, nodes);
     int drain = turned ? nodes[2] : nodes[0];
     int source = turned ? nodes[0] : nodes[2];
@@ -130,13 +73,22 @@ final class FieldEffectLaw extends Law implements Heated, CarrierDriven {
     stage.transconductance(drain, source, source, -channel.byGate() - channel.byDrain(), 0);
   }
 
+  /** Thermal noise of the channel, 4kT·(2/3)·gm at saturation (van der Ziel 1962). */
+  @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    DirectStage point = noise.stage().point();
+    boolean turned = turned(point, nodes);
+    int drain = turned ? nodes[2] : nodes[0];
+    int source = turned ? nodes[0] : nodes[2];
+    Channel channel = channel(point, drain, nodes[1], source);
+    double siemens = Math.max(channel.byDrain(), CHANNEL_SHARE * channel.byGate());
+    noise.thermal(drain, source, siemens);
+  }
+
   @Override
   public double amperes(DirectStage stage) {
     if (isOpen(stage)) {
       return 0;
-    }
-    if (apart(stage)) {
-      return sign * stage.drivenAmperes()[driven];
     }
     int[] nodes = nodes(stage);
     boolean turned = turned(stage, nodes);

@@ -21,6 +21,13 @@ final class InductorLaw extends Law {
   }
 
   @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    AlternatingStage stage = noise.stage();
+    double ohms = Math.max(LEAST_OHMS, value(stage, 1));
+    noise.thermalOfImpedance(nodes[0], nodes[1], ohms, stage.omega() * value(stage, 0));
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     return isOpen(stage)
         ? 0

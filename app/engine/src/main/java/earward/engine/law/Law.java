@@ -64,6 +64,16 @@ public abstract class Law {
     stampAlternating(stage, nodes(stage.point()));
   }
 
+  /** Adds the noise that the part makes at one frequency. */
+  public final void noise(NoiseStage noise) {
+    if (!isOpen(noise.stage().point())) {
+      addNoise(noise, nodes(noise.stage().point()));
+    }
+  }
+
+  /** What the part makes of noise; nothing unless its law says so. */
+  void addNoise(NoiseStage noise, int[] nodes) {}
+
   abstract void stampDirect(DirectStage stage, int[] nodes);
 
   abstract void stampAlternating(AlternatingStage stage, int[] nodes);

@@ -30,22 +30,36 @@ final class LoudspeakerLaw extends Law {
     switch (stage.load()) {
       case RATED -> stage.admittance(nodes[0], nodes[1], 1 / ratedOhms, 0);
       case LEAST -> stage.admittance(nodes[0], nodes[1], 1 / (dcOhms * stage.leastLoadShare()), 0);
-      case AS_IT_IS -> asItIs(stage, nodes, dcOhms);
+      case AS_IT_IS -> stage.impedance(nodes[0], nodes[1], realOhms(stage), imaginaryOhms(stage));
     }
   }
 
-  private void asItIs(AlternatingStage stage, int[] nodes, double dcOhms) {
+  /** Noise of the voice coil and of what damps its movement: that of the real part as a whole. */
+  @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    AlternatingStage stage = noise.stage();
+    noise.thermalOfImpedance(nodes[0], nodes[1], realOhms(stage), imaginaryOhms(stage));
+  }
+
+  private double off(AlternatingStage stage) {
     double hertz = stage.omega() / (2 * Math.PI);
     double resonance = value(stage, RESONANCE_HERTZ);
-    double mechanicalQ = value(stage, MECHANICAL_Q);
-    double motional = dcOhms * mechanicalQ / value(stage, ELECTRICAL_Q);
-    double off = mechanicalQ * (hertz / resonance - resonance / hertz);
-    double norm = 1 + off * off;
-    stage.impedance(
-        nodes[0],
-        nodes[1],
-        dcOhms + motional / norm,
-        stage.omega() * value(stage, VOICE_COIL_HENRIES) - motional * off / norm);
+    return value(stage, MECHANICAL_Q) * (hertz / resonance - resonance / hertz);
+  }
+
+  private double motionalOhms(AlternatingStage stage) {
+    double off = off(stage);
+    double most = value(stage, DC_OHMS) * value(stage, MECHANICAL_Q) / value(stage, ELECTRICAL_Q);
+    return most / (1 + off * off);
+  }
+
+  private double realOhms(AlternatingStage stage) {
+    return value(stage, DC_OHMS) + motionalOhms(stage);
+  }
+
+  private double imaginaryOhms(AlternatingStage stage) {
+    double coil = stage.omega() * value(stage, VOICE_COIL_HENRIES);
+    return coil - motionalOhms(stage) * off(stage);
   }
 
   @Override

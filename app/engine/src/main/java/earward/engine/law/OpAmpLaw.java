@@ -81,6 +81,20 @@ final class OpAmpLaw extends Law {
     stage.add(branch, nodes[1], real, imaginary);
   }
 
+  /** Input noise voltage, and the shot noise of the bias current at each input. */
+  @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    DirectStage point = noise.stage().point();
+    double tanh = Math.tanh(drive(point, nodes));
+    double gain = value(point, 0) * (1 - tanh * tanh);
+    double off = noise.stage().omega() / (2 * Math.PI) * value(point, 0) / value(point, 1);
+    double real = gain / (1 + off * off);
+    double density = model.noiseVoltsPerRootHertz() * model.noiseVoltsPerRootHertz();
+    noise.inRows(density, branch(0), real, -off * real, -1, 0, 0);
+    noise.shot(nodes[0], -1, model.biasAmperes());
+    noise.shot(nodes[1], -1, model.biasAmperes());
+  }
+
   @Override
   public double amperes(DirectStage stage) {
     return isOpen(stage) ? 0 : stage.branch(branch(0));

@@ -17,6 +17,11 @@ final class ResistiveLaw extends Law {
   }
 
   @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    noise.thermal(nodes[0], nodes[1], 1 / value(noise.stage(), 0));
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     return isOpen(stage) ? 0 : (stage.volts(node(0)) - stage.volts(node(1))) / value(stage, 0);
   }

@@ -24,6 +24,11 @@ public final class SourceLaw extends Law {
     stage.admittance(nodes[0], nodes[1], siemens(stage.point()), 0);
   }
 
+  @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    noise.thermal(nodes[0], nodes[1], siemens(noise.stage().point()));
+  }
+
   /** Current that it gives, in A. */
   @Override
   public double amperes(DirectStage stage) {

@@ -49,6 +49,15 @@ final class TransformerLaw extends Law {
     stage.add(magnetising, branch(2), -half, 0);
   }
 
+  @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    AlternatingStage stage = noise.stage();
+    noise.thermalInRow(branch(0), Math.max(InductorLaw.LEAST_OHMS, value(stage, PRIMARY_OHMS)));
+    double half = Math.max(InductorLaw.LEAST_OHMS, value(stage, SECONDARY_OHMS) / 2);
+    noise.thermalInRow(branch(1), half);
+    noise.thermalInRow(branch(2), half);
+  }
+
   private void winding(
       AlternatingStage stage, int branch, int from, int to, double ohms, double turns) {
     stage.branchCurrent(branch, from, to);

@@ -116,6 +116,26 @@ final class TunedFeedLaw extends FeedLaw {
   }
 
   @Override
+  void addNoise(NoiseStage noise, int[] nodes) {
+    AlternatingStage stage = noise.stage();
+    double ohms = Math.max(InductorLaw.LEAST_OHMS, value(stage, WINDING_OHMS));
+    double reactance =
+        stage.omega()
+            * value(stage, PARALLEL_OHMS)
+            / (stage.carrierOmega() * value(stage, QUALITY));
+    double fraction = value(stage, TAP_FRACTION);
+    double below = Math.max(InductorLaw.LEAST_OHMS, ohms * fraction);
+    double above = Math.max(InductorLaw.LEAST_OHMS, ohms * (1 - fraction));
+    noise.thermalOfImpedance(nodes[TOP], nodes[TAP], above, reactance * (1 - fraction));
+    noise.thermalOfImpedance(nodes[TAP], nodes[BOTTOM], below, reactance * fraction);
+  }
+
+  @Override
+  public double sidebandOhms(DirectStage point) {
+    return isOpen(point) ? 0 : value(point, PARALLEL_OHMS);
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     double ohms = Math.max(InductorLaw.LEAST_OHMS, value(stage, WINDING_OHMS));
     return (stage.volts(node(TOP)) - stage.volts(node(BOTTOM))) / ohms;

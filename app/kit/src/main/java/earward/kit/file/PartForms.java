@@ -117,7 +117,8 @@ final class PartForms {
         in.requiredQuantity("highest voltage", Unit.VOLT),
         in.requiredQuantity("highest current", Unit.AMPERE),
         in.quantity("highest junction temperature", Unit.CELSIUS, USUAL_JUNCTION_CELSIUS),
-        in.requiredQuantity("junction to air", Unit.KELVIN_PER_WATT));
+        in.requiredQuantity("junction to air", Unit.KELVIN_PER_WATT),
+        in.quantity("base resistance", Unit.OHM, 1));
   }
 
   private static FieldEffectModel fieldEffect(MembersReader in, String name)

@@ -60,6 +60,7 @@ final class DerivedFigures {
     figures.supplyCurrents();
     figures.batteryLives();
     figures.headroom();
+    figures.signalToNoise();
     return figures.derived;
   }
 
@@ -207,6 +208,23 @@ final class DerivedFigures {
     double clipWatts = get(CircuitBuilder.PATH, Quantity.CLIP_WATTS, FULL_OUTPUT);
     double wanted = assembly.design().conditions().wanted().listeningWatts();
     return rest + (full - rest) * Math.sqrt(Math.min(1, wanted / clipWatts));
+  }
+
+  /** Test tone over noise, both rms, at every place where noise is given. */
+  private void signalToNoise() {
+    for (String place : NoisePlaces.of(assembly)) {
+      for (CaseName caseName : List.of(WEAK, TEST)) {
+        double volts = get(place, Quantity.AUDIO_RMS_VOLTS, caseName);
+        double noise = get(place, Quantity.NOISE_RMS_VOLTS, caseName);
+        double weighted = get(place, Quantity.A_WEIGHTED_NOISE_RMS_VOLTS, caseName);
+        put(place, Quantity.SIGNAL_TO_NOISE_DECIBELS, caseName, 20 * Math.log10(volts / noise));
+        put(
+            place,
+            Quantity.A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
+            caseName,
+            20 * Math.log10(volts / weighted));
+      }
+    }
   }
 
   /**

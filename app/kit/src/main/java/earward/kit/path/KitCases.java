@@ -106,6 +106,7 @@ final class KitCases {
         Slot.DEPTH, conditions.testDepth(),
         Slot.TONE_HERTZ, conditions.toneHertz(),
         Slot.HIGHEST_TONE_HERTZ, conditions.highestToneHertz(),
+        Slot.LOWEST_TONE_HERTZ, conditions.lowestToneHertz(),
         Slot.AMBIENT_CELSIUS, conditions.ambientCelsius());
   }
 

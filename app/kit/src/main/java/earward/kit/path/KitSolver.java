@@ -8,6 +8,7 @@ import earward.engine.CompiledCircuit;
 import earward.engine.Engine;
 import earward.engine.SolveCase;
 import earward.engine.SolveOutcome;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -21,6 +22,11 @@ public final class KitSolver {
   /** What an edit shows at once: the kit at rest, at the test signal and at full output. */
   private static final Set<CaseName> HEADLINE =
       Set.of(CaseName.NO_SIGNAL, CaseName.TEST, CaseName.FULL_OUTPUT);
+
+  /** What an edit does not wait for: searches, and what takes many solves. */
+  private static final Set<Quantity> LATER =
+      EnumSet.of(
+          Quantity.CLEAN_DEPTH, Quantity.NOISE_RMS_VOLTS, Quantity.A_WEIGHTED_NOISE_RMS_VOLTS);
 
   private KitSolver() {}
 
@@ -93,8 +99,8 @@ public final class KitSolver {
 
   /**
    * The kit compiled for the figures that an edit shows at once: all of {@link #compile} at rest,
-   * at the test signal and at full output, but for the largest clean modulation, which is a search.
-   * They are the same figures; the rest is left to a solve that may take longer.
+   * at the test signal and at full output, but for the largest clean modulation, which is a search,
+   * and for noise. They are the same figures; the rest is left to a solve that may take longer.
    *
    * @param assembly a complete one
    * @throws CircuitException with a finding when the circuit makes no sense to the engine
@@ -106,7 +112,7 @@ public final class KitSolver {
     List<FigureName> wanted =
         WantedFigures.of(assembly, new Places(assembly.circuit())).stream()
             .filter(figure -> HEADLINE.contains(figure.caseName()))
-            .filter(figure -> !figure.quantity().equals(Quantity.CLEAN_DEPTH))
+            .filter(figure -> !LATER.contains(figure.quantity()))
             .toList();
     CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases, wanted);
     return new CompiledKit(assembly, circuit, Map.of());

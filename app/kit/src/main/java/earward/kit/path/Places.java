@@ -64,6 +64,8 @@ final class Places {
           CARRIER_RMS_VOLTS,
           SECOND_CARRIER_RMS_VOLTS,
           THIRD_CARRIER_RMS_VOLTS,
+          NOISE_RMS_VOLTS,
+          A_WEIGHTED_NOISE_RMS_VOLTS,
           LOW_EDGE_HERTZ,
           HIGH_EDGE_HERTZ ->
           Kind.NODE;
@@ -92,6 +94,7 @@ final class Places {
           OUTPUT_RMS_VOLTS,
           OUTPUT_WATTS,
           SIGNAL_TO_NOISE_DECIBELS,
+          A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           BATTERY_HOURS,
           SOUND_DECIBELS,
           RAIL_LOOP_MARGIN_DECIBELS ->

@@ -43,6 +43,7 @@ final class WantedFigures {
     assembly.circuit().probes().forEach(figures::atProbe);
     assembly.circuit().seams().forEach(figures::atSeam);
     assembly.circuit().parts().forEach(figures::ofPart);
+    figures.noise(assembly);
     for (PlacedBlock block : assembly.blocks()) {
       for (Check check : block.description().checks()) {
         places.inEngine(block.global(check).figure()).ifPresent(figures.wanted::add);
@@ -76,6 +77,16 @@ final class WantedFigures {
     if (probe.name().equals(CircuitBuilder.PATH)) {
       add(probe.name(), Quantity.LOW_EDGE_HERTZ, List.of(TEST));
       add(probe.name(), Quantity.HIGH_EDGE_HERTZ, List.of(TEST));
+    }
+  }
+
+  /** Noise where it is heard, where it begins, and on the way between. */
+  private void noise(Assembly assembly) {
+    for (String place : NoisePlaces.of(assembly)) {
+      boolean seam = place.startsWith("seam.");
+      List<CaseName> cases = seam ? List.of(TEST) : List.of(NO_SIGNAL, WEAK, TEST);
+      add(place, Quantity.NOISE_RMS_VOLTS, cases);
+      add(place, Quantity.A_WEIGHTED_NOISE_RMS_VOLTS, cases);
     }
   }
 

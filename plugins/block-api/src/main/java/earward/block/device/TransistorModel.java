@@ -15,6 +15,7 @@ package earward.block.device;
  * @param mostAmperes collector current that it bears, above 0
  * @param mostJunctionCelsius highest junction temperature
  * @param junctionToAirKelvinPerWatt thermal resistance in still air, above 0
+ * @param baseOhms resistance between the base lead and the inner base, above 0: it makes noise
  */
 public record TransistorModel(
     String name,
@@ -26,8 +27,12 @@ public record TransistorModel(
     double mostVolts,
     double mostAmperes,
     double mostJunctionCelsius,
-    double junctionToAirKelvinPerWatt)
+    double junctionToAirKelvinPerWatt,
+    double baseOhms)
     implements PartModel {
+  /** What is taken where a base resistance is not stated, in Ω. */
+  private static final double LEAST_BASE_OHMS = 1;
+
   public TransistorModel {
     Require.named(name, "transistor");
     Require.above(0, saturationAmperes, name + ": saturation current (A)");
@@ -38,6 +43,33 @@ public record TransistorModel(
     Require.above(0, mostAmperes, name + ": highest current (A)");
     Require.above(0, mostJunctionCelsius, name + ": highest junction temperature (°C)");
     Require.above(0, junctionToAirKelvinPerWatt, name + ": thermal resistance (K/W)");
+    Require.above(0, baseOhms, name + ": base resistance (Ω)");
+  }
+
+  /** A transistor whose base resistance is not known: 1 Ω, which makes no noise to speak of. */
+  public TransistorModel(
+      String name,
+      boolean pnp,
+      double saturationAmperes,
+      double currentGain,
+      double reverseGain,
+      double earlyVolts,
+      double mostVolts,
+      double mostAmperes,
+      double mostJunctionCelsius,
+      double junctionToAirKelvinPerWatt) {
+    this(
+        name,
+        pnp,
+        saturationAmperes,
+        currentGain,
+        reverseGain,
+        earlyVolts,
+        mostVolts,
+        mostAmperes,
+        mostJunctionCelsius,
+        junctionToAirKelvinPerWatt,
+        LEAST_BASE_OHMS);
   }
 
   @Override

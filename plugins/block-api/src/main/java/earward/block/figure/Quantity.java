@@ -18,6 +18,10 @@ public enum Quantity {
   CARRIER_RMS_VOLTS("carrier-rms-volts", Unit.VOLT),
   SECOND_CARRIER_RMS_VOLTS("second-carrier-rms-volts", Unit.VOLT),
   THIRD_CARRIER_RMS_VOLTS("third-carrier-rms-volts", Unit.VOLT),
+  /** The back end's own noise over the audio band of the conditions, not weighted. */
+  NOISE_RMS_VOLTS("noise-rms-volts", Unit.VOLT),
+  /** The same from 22.4 Hz to 22.4 kHz, weighted by the curve A of IEC 61672-1. */
+  A_WEIGHTED_NOISE_RMS_VOLTS("a-weighted-noise-rms-volts", Unit.VOLT),
   // of a part
   /** Positive from the first terminal to the second; of a transistor from collector to emitter. */
   DC_AMPERES("dc-amperes", Unit.AMPERE),
@@ -62,7 +66,10 @@ public enum Quantity {
   HIGH_EDGE_HERTZ("high-edge-hertz", Unit.HERTZ),
   OUTPUT_RMS_VOLTS("output-rms-volts", Unit.VOLT),
   OUTPUT_WATTS("output-watts", Unit.WATT),
+  /** Test tone over the noise of the audio band, not weighted. */
   SIGNAL_TO_NOISE_DECIBELS("signal-to-noise-decibels", Unit.DECIBEL),
+  /** Test tone over the A-weighted noise. */
+  A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS("a-weighted-signal-to-noise-decibels", Unit.DECIBEL),
   SUPPLY_AMPERES("supply-amperes", Unit.AMPERE),
   BATTERY_HOURS("battery-hours", Unit.HOUR),
   SOUND_DECIBELS("sound-decibels", Unit.DECIBEL),

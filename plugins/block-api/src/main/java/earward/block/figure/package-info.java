@@ -20,6 +20,10 @@
  *   nothing of crossover</td><td>signal, and only where more than 1 µV of tone arrives</td></tr>
  * <tr><td></td><td>low-edge-hertz, high-edge-hertz: of the way from the detector to there</td>
  *   <td>signal; none where nothing makes an edge</td></tr>
+ * <tr><td></td><td>noise-rms-volts (over the audio band of the conditions, not weighted),
+ *   a-weighted-noise-rms-volts (22.4 Hz to 22.4 kHz): thermal noise of all resistances and of the
+ *   feed's sidebands, shot noise of diodes and transistors, input noise of amplifiers; nothing of
+ *   the front end</td><td>all but unpowered</td></tr>
  * <tr><td>any part</td><td>dc-amperes, dissipation-watts: of DC, except as below</td>
  *   <td>all</td></tr>
  * <tr><td>diode that the carrier drives</td><td>carrier-peak-volts, detection-efficiency,
@@ -43,7 +47,8 @@
  * <tr><td></td><td>headroom-decibels: behind the detector, in a kit that ends in an amplifier
  *   IC</td><td>test, strong</td></tr>
  * <tr><td>the whole path, not a block's to check</td><td>output-rms-volts, output-watts,
- *   sound-decibels, signal-to-noise-decibels, rail-loop-margin-decibels</td><td></td></tr>
+ *   sound-decibels, signal-to-noise-decibels and a-weighted-signal-to-noise-decibels (also of the
+ *   detector's exit and of the seams behind it), rail-loop-margin-decibels</td><td></td></tr>
  * </table>
  *
  * <p><b>Signs.</b> dc-amperes is positive from the first terminal that the device lists to the

@@ -52,6 +52,8 @@ final class FigurePlaces {
           CARRIER_RMS_VOLTS,
           SECOND_CARRIER_RMS_VOLTS,
           THIRD_CARRIER_RMS_VOLTS,
+          NOISE_RMS_VOLTS,
+          A_WEIGHTED_NOISE_RMS_VOLTS,
           LOW_EDGE_HERTZ,
           HIGH_EDGE_HERTZ ->
           unless(nodes.contains(place), place, "a node or test point; there are " + nodes);
@@ -94,6 +96,7 @@ final class FigurePlaces {
       case OUTPUT_RMS_VOLTS,
           OUTPUT_WATTS,
           SIGNAL_TO_NOISE_DECIBELS,
+          A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           SOUND_DECIBELS,
           RAIL_LOOP_MARGIN_DECIBELS ->
           Optional.of(

@@ -150,7 +150,7 @@ final class CoverFigures {
     add(rows, "figures.clean-depth", Quantity.CLEAN_DEPTH, CaseName.TEST);
     add(rows, "figures.clipping-depth", Quantity.CLIPPING_DEPTH, CaseName.DEEPEST);
     add(rows, "figures.headroom", Quantity.HEADROOM_DECIBELS, CaseName.TEST);
-    add(rows, "figures.noise", Quantity.SIGNAL_TO_NOISE_DECIBELS, CaseName.TEST);
+    noise(rows);
     add(rows, "figures.current", Quantity.SUPPLY_AMPERES, CaseName.NO_SIGNAL);
     life(rows);
     if (rows.isEmpty()) {
@@ -180,6 +180,20 @@ final class CoverFigures {
               words.text("figures.band"),
               List.of(Amount.of(low, Unit.HERTZ), Amount.of(high, Unit.HERTZ)),
               ""));
+    }
+  }
+
+  private void noise(List<KeyFigure> rows) {
+    OptionalDouble flat = figures.find(PATH, Quantity.SIGNAL_TO_NOISE_DECIBELS, CaseName.TEST);
+    if (flat.isPresent()) {
+      String label =
+          words.text(
+              "figures.noise",
+              "low",
+              words.numbers().text(core().lowestToneHertz(), Unit.HERTZ),
+              "high",
+              words.numbers().text(core().highestToneHertz(), Unit.HERTZ));
+      rows.add(KeyFigure.of(label, Amount.of(flat, Unit.DECIBEL), ""));
     }
   }
 
