@@ -1,6 +1,7 @@
 package earward.feeds;
 
 import static earward.block.device.Terminal.BOTTOM;
+import static earward.block.device.Terminal.TAP;
 import static earward.block.device.Terminal.TOP;
 import static earward.block.wiring.Nodes.GROUND;
 
@@ -15,6 +16,7 @@ import earward.block.setting.Setting;
 import earward.block.setting.Values;
 import earward.block.wiring.Caution;
 import earward.block.wiring.Port.Single;
+import earward.block.wiring.Port.TappedPair;
 import earward.block.wiring.Wiring;
 import java.util.List;
 import java.util.Map;
@@ -25,6 +27,7 @@ import java.util.Map;
  */
 public final class TunedIf implements BlockType {
   private static final String AS_CAN = "as-can";
+  private static final String TAPPED = "centre-tapped";
 
   @Override
   public String id() {
@@ -47,7 +50,8 @@ public final class TunedIf implements BlockType {
         new Setting.Value("turns-ratio", Unit.NUMBER, 0.5, 0.01, 10, Series.ANY),
         new Setting.Value("stage-ohms", Unit.OHM, 100e3, 100, 10e6, Series.ANY),
         new Setting.Value("detuning", Unit.HERTZ, 0, -50e3, 50e3, Series.ANY),
-        new Setting.Value("winding-ohms", Unit.OHM, 2, 0, 1000, Series.ANY));
+        new Setting.Value("winding-ohms", Unit.OHM, 2, 0, 1000, Series.ANY),
+        new Setting.Choice("winding", List.of("plain", TAPPED)));
   }
 
   @Override
@@ -61,20 +65,35 @@ public final class TunedIf implements BlockType {
                 values.amount("stage-ohms"),
                 conditions.carrierHertz())
             : new AtWinding(values.amount("parallel-ohms"), values.amount("quality"));
+    boolean tapped = values.chosen("winding", TAPPED);
     TunedFeed can =
         new TunedFeed(
             at.parallelOhms(),
             at.quality(),
             values.amount("detuning"),
-            1,
+            tapped ? 0.5 : 1,
             values.amount("winding-ohms"));
-    return BlockDescription.of(
-        Wiring.start()
-            .body("can", can, Map.of(TOP, "out", BOTTOM, GROUND))
-            .at("out")
-            .testPoint("winding", "out")
-            .caution("can", Caution.OUTDOOR_AERIAL)
-            .fit("can")
-            .to(new Single("out")));
+    return BlockDescription.of(tapped ? tapped(can) : plain(can));
+  }
+
+  private static Wiring plain(TunedFeed can) {
+    return Wiring.start()
+        .body("can", can, Map.of(TOP, "out", BOTTOM, GROUND))
+        .at("out")
+        .testPoint("winding", "out")
+        .caution("can", Caution.OUTDOOR_AERIAL)
+        .fit("can")
+        .to(new Single("out"));
+  }
+
+  /** The tap is left to the next block, which knows what it is to be joined to. */
+  private static Wiring tapped(TunedFeed can) {
+    return Wiring.start()
+        .body("can", can, Map.of(TOP, "plus", TAP, "tap", BOTTOM, "minus"))
+        .at("plus")
+        .testPoint("winding", "plus")
+        .caution("can", Caution.OUTDOOR_AERIAL)
+        .fit("can")
+        .to(new TappedPair("plus", "tap", "minus"));
   }
 }

@@ -26,4 +26,21 @@ public final class DeEmphasis {
     double second = hertz / SECOND_CORNER_HERTZ;
     return boostDecibels(hertz, NRSC_SECONDS) - 10 * Math.log10(1 + second * second);
   }
+
+  /** Time constant of the second corner of the North American AM curve, s: 1/(2π·8.7 kHz). */
+  public static final double NRSC_SECOND_SECONDS = 1 / (2 * Math.PI * SECOND_CORNER_HERTZ);
+
+  /** Where a single time constant is 3.01 dB down, in hertz. */
+  public static double edgeHertz(double seconds) {
+    return RcEdge.ofTimeConstant(seconds);
+  }
+
+  /**
+   * Where the receiver's inverse of the North American AM curve is 3.01 dB down, in hertz: f² =
+   * 1/(1/fp² − 2/fz²) with its pole fp and its zero fz.
+   */
+  public static double nrscEdgeHertz() {
+    double pole = RcEdge.ofTimeConstant(NRSC_SECONDS);
+    return 1 / Math.sqrt(1 / (pole * pole) - 2 / (SECOND_CORNER_HERTZ * SECOND_CORNER_HERTZ));
+  }
 }

@@ -84,4 +84,12 @@ class EmphasisTablesTest {
           .isCloseTo(row[1], within(HALF_OF_LAST_DIGIT));
     }
   }
+
+  @Test
+  void theReceiversEdgeOfTheNorthAmericanCurveIsWhereTheBoostIsThreeDecibels() {
+    assertThat(DeEmphasis.nrscBoostDecibels(DeEmphasis.nrscEdgeHertz()))
+        .isCloseTo(10 * Math.log10(2), within(1e-9));
+    // 18.294 µs is 8.7 kHz
+    assertThat(DeEmphasis.NRSC_SECOND_SECONDS).isCloseTo(18.294e-6, within(1e-9));
+  }
 }

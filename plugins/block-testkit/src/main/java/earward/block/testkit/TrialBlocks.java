@@ -28,6 +28,7 @@ import earward.block.device.PartKind;
 import earward.block.device.Resistor;
 import earward.block.device.Terminal;
 import earward.block.device.Transformer;
+import earward.block.device.TunedFeed;
 import earward.block.wiring.Nodes;
 import earward.block.wiring.Port;
 import earward.block.wiring.Port.Pair;
@@ -48,7 +49,19 @@ final class TrialBlocks {
     return new FixedBlock("trial." + name, role, BlockDescription.of(wiring));
   }
 
-  static FixedBlock feed() {
+  /** A feed for a detector that is entered by this port. */
+  static FixedBlock feed(Port wanted) {
+    if (wanted instanceof TappedPair) {
+      return block(
+          "feed",
+          Role.FEED,
+          Wiring.start()
+              .body(
+                  "can",
+                  new TunedFeed(12e3, 40, 0, 0.5, 2),
+                  Map.of(TOP, "plus", TAP, "tap", BOTTOM, "minus"))
+              .to(new TappedPair("plus", "tap", "minus")));
+    }
     return block(
         "feed",
         Role.FEED,
@@ -72,6 +85,21 @@ final class TrialBlocks {
       plan.run("couple", film(1e-6), "out").down("r3", new Resistor(47e3), Nodes.GROUND);
     }
     return block("detector", Role.DETECTOR, plan.to(new Single(coupled ? "out" : "filtered")));
+  }
+
+  /** A full-wave detector after a feed with a tap, which it grounds. */
+  static FixedBlock fullWave() {
+    Diode diode = new Diode((DiodeModel) SampleParts.of(PartKind.DIODE).get(0));
+    return block(
+        "detector",
+        Role.DETECTOR,
+        Wiring.from(new TappedPair("plus", Nodes.GROUND, "minus"))
+            .run("d1", diode, "filtered")
+            .at("minus")
+            .run("d2", diode, "filtered")
+            .down("c1", film(1e-9), Nodes.GROUND)
+            .down("r1", new Resistor(12e3), Nodes.GROUND)
+            .to(new Single("filtered")));
   }
 
   private static Capacitor film(double farads) {

@@ -10,6 +10,7 @@ import earward.block.device.AudioAmplifier;
 import earward.block.wiring.Nodes;
 import earward.block.wiring.Port;
 import earward.block.wiring.Port.Single;
+import earward.block.wiring.Port.TappedPair;
 import earward.block.wiring.WiredPart;
 import earward.block.wiring.Wiring;
 import earward.kit.design.BlockEntry;
@@ -56,22 +57,25 @@ final class TrialKit {
     switch (tried.role()) {
       case FEED -> {
         path.add(tried);
-        path.add(TrialBlocks.detector(false));
+        path.add(
+            wiring.exit().filter(TappedPair.class::isInstance).isPresent()
+                ? TrialBlocks.fullWave()
+                : TrialBlocks.detector(false));
         path.add(TrialBlocks.load(new Single("in"), AUDIO_LOAD_OHMS));
       }
       case DETECTOR -> {
-        path.add(TrialBlocks.feed());
+        path.add(TrialBlocks.feed(wiring.entry().orElse(new Single("in"))));
         path.add(tried);
         wiring.exit().ifPresent(this::load);
       }
       case SUPPLY, TAKE_OFF -> {
-        path.add(TrialBlocks.feed());
+        path.add(TrialBlocks.feed(new Single("in")));
         path.add(TrialBlocks.detector(false));
         path.add(TrialBlocks.consumer(offered(wiring)));
         (tried.role() == Role.SUPPLY ? supplies : takeOffs).add(tried);
       }
       case AUDIO_FILTER, VOLUME, PREAMPLIFIER, POWER, LOAD -> {
-        path.add(TrialBlocks.feed());
+        path.add(TrialBlocks.feed(new Single("in")));
         path.add(TrialBlocks.detector(true));
         wiring
             .entry()
