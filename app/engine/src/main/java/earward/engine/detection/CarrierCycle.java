@@ -1,51 +1,68 @@
 package earward.engine.detection;
 
 /**
- * One carrier cycle of N devices at one instant of the audio:
+ * One carrier cycle of the devices' N ports at one instant of the audio:
  *
  * <pre>u(θ) = Re{ T·E·e^jθ − Σ_{k≥1} Z(k·ωc)·i_k·e^jkθ } + v,  i = Id(u) + ωc·dQ(u)/dθ</pre>
  *
- * <p>solved by Newton on equally spaced samples of the cycle. On samples the sum over harmonics is
- * a circular convolution of the currents with the network's impulse response. Gives mean currents
- * J, the fundamental drawn from the feed, and both's slopes to v and E by the implicit function
- * theorem. Source: generalised averaging, Sanders et al. 1991; mean and fundamental of an
- * exponential diode, Clarke and Hess 1971. One a thread; allocates nothing after construction.
+ * <p>solved by Newton on equally spaced samples of the cycle. A device that is cut off adds nothing
+ * to the equations but its residual, so only the columns of samples that conduct are eliminated.
+ * Gives mean currents J, the fundamental drawn from the feed, and both's slopes to v and E by the
+ * implicit function theorem. Source: generalised averaging, Sanders et al. 1991; mean and
+ * fundamental of an exponential diode, Clarke and Hess 1971. One a thread; allocates nothing after
+ * construction.
  */
 final class CarrierCycle {
   private static final int MOST_ITERATIONS = 80;
 
-  final int devices;
+  /** Iterations after which every column is eliminated, whatever it adds. */
+  private static final int PATIENCE = 14;
+
+  /** What a column may add, in volts per volt, and yet be left out of the elimination. */
+  private static final double FAINT = 3e-3;
+
+  private static final double FAINT_CHARGE = 0.05;
+  private static final double NOTHING = 1e-11;
+
+  final int ports;
   final int samples;
   final int harmonics;
   private final int unknowns;
+  private final boolean exact;
+  private final CarrierKernel kernel;
+  private PortLaw[] laws = new PortLaw[0];
 
-  private final double[] cosine;
-  private final double[] sine;
-
-  /** Impulse responses (ohms) to current and to charge, 2·samples long per pair of devices. */
-  private final double[] toCurrent;
-
-  private final double[] toCharge;
+  /** The other port of a port's device, −1 for a device of one port. */
+  private final int[] partner;
 
   private final double[] current;
-  private final double[] conductance;
+
+  /** Slope of a port's current by its own voltage, and of its partner's current by it. */
+  private final double[] own;
+
+  private final double[] across;
   private final double[] charge;
   private final double[] capacitance;
   private final double[] drive;
   private final double[] step;
-  private final double[] sensitivity;
+  private final double[] push;
+  private final double[] changed;
+  private final double[] moved;
+  private final int[] active;
+  private final double[] reduced;
+  private int actives;
   private final DenseSolver solver;
   private boolean charged;
 
-  /** Mean current of each device. */
+  /** Mean current of each port. */
   final double[] mean;
 
-  /** Harmonics k ≥ 1 of each device's current, index k·devices + device. */
+  /** Harmonics k ≥ 1 of each port's current, index k·ports + port. */
   final double[] harmonicReal;
 
   final double[] harmonicImaginary;
 
-  /** Fundamental drawn from the feed, load of the linear network included. */
+  /** Fundamental drawn from the feed by the devices. */
   double drawnReal;
 
   double drawnImaginary;
@@ -56,78 +73,64 @@ final class CarrierCycle {
    */
   final double[] slopes;
 
-  CarrierCycle(int devices, int samples) {
-    this.devices = devices;
+  /**
+   * Room for a cycle.
+   *
+   * @param samples a power of two
+   * @param exact whether the slopes are wanted as results; else they only have to lead Newton on
+   */
+  CarrierCycle(int ports, int samples, boolean exact) {
+    this.ports = ports;
     this.samples = samples;
     this.harmonics = samples / 2 - 1;
-    this.unknowns = devices * samples;
-    cosine = new double[samples];
-    sine = new double[samples];
-    for (int s = 0; s < samples; s++) {
-      cosine[s] = Math.cos(2 * Math.PI * s / samples);
-      sine[s] = Math.sin(2 * Math.PI * s / samples);
-    }
-    toCurrent = new double[devices * devices * 2 * samples];
-    toCharge = new double[devices * devices * 2 * samples];
+    this.unknowns = ports * samples;
+    this.exact = exact;
+    kernel = new CarrierKernel(ports, samples, harmonics);
+    partner = new int[ports];
     current = new double[unknowns];
-    conductance = new double[unknowns];
+    own = new double[unknowns];
+    across = new double[unknowns];
     charge = new double[unknowns];
     capacitance = new double[unknowns];
     drive = new double[unknowns];
     step = new double[unknowns];
-    sensitivity = new double[(devices + 2) * unknowns];
+    push = new double[unknowns];
+    changed = new double[unknowns];
+    moved = new double[unknowns];
+    active = new int[unknowns];
+    reduced = new double[unknowns];
     solver = new DenseSolver(unknowns);
-    mean = new double[devices];
-    harmonicReal = new double[(harmonics + 1) * devices];
-    harmonicImaginary = new double[(harmonics + 1) * devices];
-    slopes = new double[(devices + 2) * (devices + 2)];
+    mean = new double[ports];
+    harmonicReal = new double[(harmonics + 1) * ports];
+    harmonicImaginary = new double[(harmonics + 1) * ports];
+    slopes = new double[(ports + 2) * (ports + 2)];
   }
 
   /** Takes in surroundings whose carrier matrices have changed. */
-  void prepare(CarrierSurroundings around, JunctionLaw[] laws) {
+  void prepare(CarrierSurroundings around, PortLaw[] devices) {
+    laws = devices;
     charged = false;
-    for (JunctionLaw law : laws) {
+    int port = 0;
+    for (PortLaw law : laws) {
       charged |= law.charged();
-    }
-    for (int i = 0; i < devices; i++) {
-      for (int j = 0; j < devices; j++) {
-        prepare(around, i, j);
+      partner[port] = law.ports() == 2 ? port + 1 : -1;
+      if (law.ports() == 2) {
+        partner[port + 1] = port;
       }
+      port += law.ports();
     }
-  }
-
-  private void prepare(CarrierSurroundings around, int i, int j) {
-    double own = i == j ? around.seriesOhms[i] : 0;
-    int base = (i * devices + j) * 2 * samples;
-    for (int q = 0; q < samples; q++) {
-      double ohms = 0;
-      double ohmsPerSecond = 0;
-      for (int k = 1; k <= harmonics; k++) {
-        int entry = around.index(k, i, j);
-        double real = around.carrierRealOhms[entry] + own;
-        double imaginary = around.carrierImaginaryOhms[entry];
-        double c = cosine[(k * q) % samples];
-        double s = sine[(k * q) % samples];
-        ohms += real * c - imaginary * s;
-        ohmsPerSecond += k * around.carrierRadians * (-imaginary * c - real * s);
-      }
-      toCurrent[base + q] = 2 * ohms / samples;
-      toCharge[base + q] = 2 * ohmsPerSecond / samples;
-      toCurrent[base + samples + q] = toCurrent[base + q];
-      toCharge[base + samples + q] = toCharge[base + q];
-    }
+    kernel.prepare(around);
   }
 
   /**
    * Solves one cycle.
    *
    * @param v audio-rate port voltages, from an offset with a stride
-   * @param u junction voltages in and out, from an offset: the start and the solution
+   * @param u port voltages in and out, from an offset: the start and the solution
    * @return whether it converged
    */
   boolean solve(
       CarrierSurroundings around,
-      JunctionLaw[] laws,
       double[] v,
       int offset,
       int stride,
@@ -136,32 +139,24 @@ final class CarrierCycle {
       double[] u,
       int at) {
     setDrive(around, v, offset, stride, feedReal, feedImaginary);
-    double size = Math.hypot(feedReal, feedImaginary);
+    double enough = 1e-10 + 1e-9 * Math.hypot(feedReal, feedImaginary);
     boolean done = false;
     for (int iteration = 0; iteration < MOST_ITERATIONS && !done; iteration++) {
-      evaluate(laws, u, at);
+      evaluate(u, at);
       residual(u, at);
-      assemble();
+      assemble(exact || iteration > PATIENCE);
       if (!solver.factor()) {
         return false;
       }
-      solver.solve(step, 0);
-      double largest = 0;
-      for (int d = 0; d < devices; d++) {
-        for (int s = d * samples; s < (d + 1) * samples; s++) {
-          double from = u[at + s];
-          double to = laws[d].limited(from, from - step[s]);
-          u[at + s] = to;
-          largest = Math.max(largest, Math.abs(to - from));
-        }
-      }
+      reduce(step);
+      double largest = take(u, at);
       if (!(largest < 1e6)) {
         return false;
       }
-      done = largest < 1e-9 + 1e-8 * size;
+      done = largest < enough;
     }
     if (done) {
-      evaluate(laws, u, at);
+      evaluate(u, at);
       results(around);
     }
     return done;
@@ -174,156 +169,273 @@ final class CarrierCycle {
       int stride,
       double feedReal,
       double feedImaginary) {
-    for (int d = 0; d < devices; d++) {
-      double real = around.transferReal[d] * feedReal - around.transferImaginary[d] * feedImaginary;
+    for (int p = 0; p < ports; p++) {
+      double real = around.transferReal[p] * feedReal - around.transferImaginary[p] * feedImaginary;
       double imaginary =
-          around.transferReal[d] * feedImaginary + around.transferImaginary[d] * feedReal;
-      double port = v[offset + d * stride];
+          around.transferReal[p] * feedImaginary + around.transferImaginary[p] * feedReal;
+      double port = v[offset + p * stride];
       for (int s = 0; s < samples; s++) {
-        drive[d * samples + s] = real * cosine[s] - imaginary * sine[s] + port;
+        drive[p * samples + s] = real * kernel.cosine(s) - imaginary * kernel.sine(s) + port;
       }
     }
   }
 
-  private void evaluate(JunctionLaw[] laws, double[] u, int at) {
-    for (int d = 0; d < devices; d++) {
-      JunctionLaw law = laws[d];
-      for (int s = d * samples; s < (d + 1) * samples; s++) {
-        double volts = u[at + s];
-        current[s] = law.current(volts);
-        conductance[s] = law.conductance(volts);
-        if (charged) {
-          charge[s] = law.charge(volts);
-          capacitance[s] = law.capacitance(volts);
-        }
+  private void evaluate(double[] u, int at) {
+    int first = 0;
+    for (PortLaw law : laws) {
+      if (law.ports() == 1) {
+        one(law, u, at, first * samples);
+      } else {
+        two(law, u, at, first * samples);
       }
+      first += law.ports();
+    }
+  }
+
+  private void one(PortLaw law, double[] u, int at, int from) {
+    boolean stores = law.charged();
+    for (int i = from; i < from + samples; i++) {
+      law.currents(u[at + i], 0);
+      current[i] = law.firstAmperes;
+      own[i] = law.firstByFirst;
+      if (stores) {
+        law.charges(u[at + i]);
+        charge[i] = law.coulombs;
+        capacitance[i] = law.farads;
+      }
+    }
+  }
+
+  private void two(PortLaw law, double[] u, int at, int from) {
+    for (int i = from; i < from + samples; i++) {
+      int other = i + samples;
+      law.currents(u[at + i], u[at + other]);
+      current[i] = law.firstAmperes;
+      current[other] = law.secondAmperes;
+      own[i] = law.firstByFirst;
+      own[other] = law.secondBySecond;
+      across[i] = law.secondByFirst;
+      across[other] = law.firstBySecond;
     }
   }
 
   private void residual(double[] u, int at) {
-    for (int i = 0; i < devices; i++) {
-      for (int s = 0; s < samples; s++) {
-        double sum = u[at + i * samples + s] - drive[i * samples + s];
-        for (int j = 0; j < devices; j++) {
-          int kernel = (i * devices + j) * 2 * samples + samples + s;
-          int first = j * samples;
-          for (int r = 0; r < samples; r++) {
-            sum += toCurrent[kernel - r] * current[first + r];
-          }
-          if (charged) {
-            for (int r = 0; r < samples; r++) {
-              sum += toCharge[kernel - r] * charge[first + r];
-            }
-          }
+    for (int i = 0; i < unknowns; i++) {
+      step[i] = u[at + i] - drive[i];
+    }
+    kernel.addCurrents(current, step, 1);
+    if (charged) {
+      kernel.addCharges(charge, step, 1);
+    }
+  }
+
+  /** The matrix of Newton's step, of the columns that add anything. */
+  private void assemble(boolean every) {
+    double faint = every ? NOTHING : FAINT;
+    double faintCharge = every ? NOTHING : FAINT_CHARGE;
+    actives = 0;
+    for (int p = 0; p < ports; p++) {
+      double most = kernel.currentReach(p);
+      double other = partner[p] < 0 ? 0 : kernel.currentReach(partner[p]);
+      for (int i = p * samples; i < (p + 1) * samples; i++) {
+        if (Math.abs(own[i]) * most + Math.abs(across[i]) * other > faint
+            || (charged && capacitance[i] * kernel.chargeReach(p) > faintCharge)) {
+          active[actives++] = i;
         }
-        step[i * samples + s] = sum;
+      }
+    }
+    solver.begin(actives);
+    for (int c = 0; c < actives; c++) {
+      column(c, active[c]);
+    }
+  }
+
+  private void column(int c, int column) {
+    double[] matrix = solver.matrix;
+    int j = column / samples;
+    int r = column - j * samples;
+    int other = partner[j];
+    double direct = own[column];
+    double crossed = other < 0 ? 0 : across[column];
+    double stored = charged ? capacitance[column] : 0;
+    for (int k = 0; k < actives; k++) {
+      int i = active[k] / samples;
+      int s = active[k] - i * samples;
+      double entry = kernel.ohms(i, s, j, r) * direct;
+      if (other >= 0) {
+        entry += kernel.ohms(i, s, other, r) * crossed;
+      }
+      if (stored != 0) {
+        entry += kernel.perCoulomb(i, s, j, r) * stored;
+      }
+      matrix[k * actives + c] = entry;
+    }
+    matrix[c * actives + c] += 1;
+  }
+
+  /**
+   * Replaces a right side by its solution: the active samples first, the others by what they do.
+   */
+  private void reduce(double[] side) {
+    for (int k = 0; k < actives; k++) {
+      reduced[k] = side[active[k]];
+    }
+    solver.solve(reduced, 0);
+    if (actives < unknowns) {
+      spread(reduced);
+      kernel.addCurrents(changed, side, -1);
+      if (charged) {
+        kernel.addCharges(moved, side, -1);
+      }
+    }
+    for (int k = 0; k < actives; k++) {
+      side[active[k]] = reduced[k];
+    }
+  }
+
+  /** What changes of the active voltages change in currents and charges. */
+  private void spread(double[] volts) {
+    java.util.Arrays.fill(changed, 0);
+    java.util.Arrays.fill(moved, 0);
+    for (int k = 0; k < actives; k++) {
+      int i = active[k];
+      int port = i / samples;
+      changed[i] += own[i] * volts[k];
+      moved[i] = charged ? capacitance[i] * volts[k] : 0;
+      if (partner[port] >= 0) {
+        changed[i + (partner[port] - port) * samples] += across[i] * volts[k];
       }
     }
   }
 
-  private void assemble() {
-    solver.begin(unknowns);
-    double[] matrix = solver.matrix;
-    for (int i = 0; i < devices; i++) {
-      for (int s = 0; s < samples; s++) {
-        int row = i * samples + s;
-        for (int j = 0; j < devices; j++) {
-          int kernel = (i * devices + j) * 2 * samples + samples + s;
-          int first = j * samples;
-          for (int r = 0; r < samples; r++) {
-            double entry = toCurrent[kernel - r] * conductance[first + r];
-            if (charged) {
-              entry += toCharge[kernel - r] * capacitance[first + r];
-            }
-            matrix[row * unknowns + first + r] = entry;
-          }
+  /** Takes a step; returns the largest change. */
+  private double take(double[] u, int at) {
+    double largest = 0;
+    int port = 0;
+    for (PortLaw law : laws) {
+      for (int k = 0; k < law.ports(); k++) {
+        for (int i = port * samples; i < (port + 1) * samples; i++) {
+          double from = u[at + i];
+          double to = law.limited(k, from, from - step[i]);
+          u[at + i] = to;
+          largest = Math.max(largest, Math.abs(to - from));
         }
-        matrix[row * unknowns + row] += 1;
+        port++;
       }
     }
+    return largest;
   }
 
   private void results(CarrierSurroundings around) {
-    for (int d = 0; d < devices; d++) {
-      mean[d] = transform(current, charge, d, 0, around.carrierRadians, true);
-      for (int k = 1; k <= harmonics; k++) {
-        harmonicReal[k * devices + d] =
-            transform(current, charge, d, k, around.carrierRadians, true);
-        harmonicImaginary[k * devices + d] =
-            transform(current, charge, d, k, around.carrierRadians, false);
-      }
-    }
-    slopes(around);
     drawnReal = 0;
     drawnImaginary = 0;
-    for (int d = 0; d < devices; d++) {
-      double real = harmonicReal[devices + d];
-      double imaginary = harmonicImaginary[devices + d];
-      drawnReal += around.transferReal[d] * real - around.transferImaginary[d] * imaginary;
-      drawnImaginary += around.transferReal[d] * imaginary + around.transferImaginary[d] * real;
+    for (int p = 0; p < ports; p++) {
+      mean[p] = transform(current, charge, p, 0, 0, true);
+      double real = transform(current, charge, p, 1, around.carrierRadians, true);
+      double imaginary = transform(current, charge, p, 1, around.carrierRadians, false);
+      drawnReal += around.transferReal[p] * real - around.transferImaginary[p] * imaginary;
+      drawnImaginary += around.transferReal[p] * imaginary + around.transferImaginary[p] * real;
     }
+    slopes(around);
+  }
+
+  /** Fills the harmonics of the currents at a solved cycle, up to one of them. */
+  void harmonics(CarrierSurroundings around, double[] u, int at, int most) {
+    evaluate(u, at);
+    for (int k = 1; k <= Math.min(most, harmonics); k++) {
+      for (int p = 0; p < ports; p++) {
+        int entry = k * ports + p;
+        harmonicReal[entry] = transform(current, charge, p, k, around.carrierRadians, true);
+        harmonicImaginary[entry] = transform(current, charge, p, k, around.carrierRadians, false);
+      }
+    }
+  }
+
+  /** Share of the highest harmonic in a solved cycle's current: how well the samples resolve it. */
+  double topShare(double[] u, int at) {
+    evaluate(u, at);
+    double share = 0;
+    for (int p = 0; p < ports; p++) {
+      double top =
+          Math.hypot(
+              transform(current, charge, p, harmonics, 0, true),
+              transform(current, charge, p, harmonics, 0, false));
+      double all = Math.abs(transform(current, charge, p, 0, 0, true));
+      share = Math.max(share, all > 0 ? top / all : 0);
+    }
+    return share;
   }
 
   /** The slopes: one more right-hand side for each of v 0.., E real, E imaginary. */
   private void slopes(CarrierSurroundings around) {
-    int columns = devices + 2;
+    int columns = ports + 2;
     for (int column = 0; column < columns; column++) {
-      int base = column * unknowns;
-      for (int d = 0; d < devices; d++) {
+      for (int p = 0; p < ports; p++) {
         for (int s = 0; s < samples; s++) {
-          sensitivity[base + d * samples + s] = push(around, column, d, s);
+          push[p * samples + s] = push(around, column, p, s);
         }
       }
-      solver.solve(sensitivity, base);
+      reduce(push);
+      answer();
       double real = 0;
       double imaginary = 0;
-      for (int d = 0; d < devices; d++) {
-        for (int s = d * samples; s < (d + 1) * samples; s++) {
-          double volts = sensitivity[base + s];
-          step[s] = conductance[s] * volts;
-          drive[s] = charged ? capacitance[s] * volts : 0;
+      for (int p = 0; p < ports; p++) {
+        slopes[p * columns + column] = transform(changed, moved, p, 0, 0, true);
+        double re = transform(changed, moved, p, 1, around.carrierRadians, true);
+        double im = transform(changed, moved, p, 1, around.carrierRadians, false);
+        real += around.transferReal[p] * re - around.transferImaginary[p] * im;
+        imaginary += around.transferReal[p] * im + around.transferImaginary[p] * re;
+      }
+      slopes[ports * columns + column] = real;
+      slopes[(ports + 1) * columns + column] = imaginary;
+    }
+  }
+
+  /** What the changes of all voltages change in currents and charges. */
+  private void answer() {
+    for (int p = 0; p < ports; p++) {
+      int other = partner[p];
+      for (int s = 0; s < samples; s++) {
+        int i = p * samples + s;
+        changed[i] = own[i] * push[i];
+        if (other >= 0) {
+          changed[i] += across[other * samples + s] * push[other * samples + s];
         }
-        slopes[d * columns + column] = transform(step, drive, d, 0, 0, true);
-        double re = transform(step, drive, d, 1, around.carrierRadians, true);
-        double im = transform(step, drive, d, 1, around.carrierRadians, false);
-        real += around.transferReal[d] * re - around.transferImaginary[d] * im;
-        imaginary += around.transferReal[d] * im + around.transferImaginary[d] * re;
+        moved[i] = charged ? capacitance[i] * push[i] : 0;
       }
-      slopes[devices * columns + column] = real;
-      slopes[(devices + 1) * columns + column] = imaginary;
     }
   }
 
-  private double push(CarrierSurroundings around, int column, int d, int s) {
-    if (column < devices) {
-      return column == d ? 1 : 0;
+  private double push(CarrierSurroundings around, int column, int p, int s) {
+    if (column < ports) {
+      return column == p ? 1 : 0;
     }
-    double real = around.transferReal[d];
-    double imaginary = around.transferImaginary[d];
-    return column == devices
-        ? real * cosine[s] - imaginary * sine[s]
-        : -imaginary * cosine[s] - real * sine[s];
+    double real = around.transferReal[p];
+    double imaginary = around.transferImaginary[p];
+    return column == ports
+        ? real * kernel.cosine(s) - imaginary * kernel.sine(s)
+        : -imaginary * kernel.cosine(s) - real * kernel.sine(s);
   }
 
-  /** Harmonic k of a device's current: of its conduction, and j·k·ωc times that of its charge. */
+  /** Harmonic k of a port's current: of its conduction, and j·k·ωc times that of its charge. */
   private double transform(
-      double[] conduction, double[] stored, int d, int k, double radians, boolean real) {
-    double re = 0;
-    double im = 0;
-    double storedRe = 0;
-    double storedIm = 0;
-    for (int s = 0; s < samples; s++) {
-      double c = cosine[(k * s) % samples];
-      double w = sine[(k * s) % samples];
-      re += conduction[d * samples + s] * c;
-      im -= conduction[d * samples + s] * w;
-      if (charged && k > 0) {
-        storedRe += stored[d * samples + s] * c;
-        storedIm -= stored[d * samples + s] * w;
-      }
+      double[] conduction, double[] stored, int p, int k, double radians, boolean real) {
+    double value = component(conduction, p, k, real);
+    if (charged && k > 0) {
+      double turned = component(stored, p, k, !real);
+      value += (real ? -1 : 1) * k * radians * turned;
     }
-    double scale = (k == 0 ? 1.0 : 2.0) / samples;
-    double value = real ? re - k * radians * storedIm : im + k * radians * storedRe;
-    return scale * value;
+    return (k == 0 ? 1.0 : 2.0) / samples * value;
+  }
+
+  private double component(double[] values, int p, int k, boolean real) {
+    int mask = samples - 1;
+    int from = p * samples;
+    double sum = 0;
+    for (int s = 0; s < samples; s++) {
+      int turn = (k * s) & mask;
+      sum += values[from + s] * (real ? kernel.cosine(turn) : -kernel.sine(turn));
+    }
+    return sum;
   }
 }

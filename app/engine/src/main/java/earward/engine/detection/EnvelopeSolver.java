@@ -18,9 +18,13 @@ public final class EnvelopeSolver {
   private static final int MOST_ITERATIONS = 40;
   private static final int MOST_HALVINGS = 8;
 
+  /** Harmonics of the carrier that are kept where not all are wanted. */
+  public static final int SHOWN = 3;
+
   private final int devices;
   private final int samples;
   private final int blocks;
+  private final boolean exact;
   private final CarrierCycle cycle;
   private final DenseSolver solver;
 
@@ -39,6 +43,7 @@ public final class EnvelopeSolver {
   private boolean keptWarm;
   private int keptSamples;
   private boolean warm;
+  private double gentleVolts;
   private int warmSamples;
 
   /** Mean current of each device at each audio sample, index device·samples + sample. */
@@ -68,12 +73,15 @@ public final class EnvelopeSolver {
    * @param devices N, at least 1
    * @param carrierSamples of a cycle: 32, 64, 128 ...
    * @param audioSamples of an audio period: 32, 64 ...
+   * @param exact whether slopes and all carrier harmonics are wanted as results; else slopes only
+   *     lead Newton on, and the first {@link #SHOWN} harmonics are kept: much quicker
    */
-  public EnvelopeSolver(int devices, int carrierSamples, int audioSamples) {
+  public EnvelopeSolver(int devices, int carrierSamples, int audioSamples, boolean exact) {
     this.devices = devices;
     this.samples = audioSamples;
     this.blocks = devices + 2;
-    cycle = new CarrierCycle(devices, carrierSamples);
+    this.exact = exact;
+    cycle = new CarrierCycle(devices, carrierSamples, exact);
     solver = new DenseSolver(blocks * audioSamples);
     state = new double[blocks * audioSamples];
     trial = new double[blocks * audioSamples];
@@ -161,44 +169,45 @@ public final class EnvelopeSolver {
    */
   public boolean solve(
       CarrierSurroundings around,
-      JunctionLaw[] laws,
+      PortLaw[] laws,
       double peakVolts,
       double depth,
       double toneRadians) {
     cycle.prepare(around, laws);
+    gentleVolts = laws[0].gentleVolts();
     int wanted = depth == 0 ? 1 : samples;
     boolean solved = false;
     if (warm && warmSamples == wanted) {
-      solved = newton(around, laws, peakVolts, depth, toneRadians, wanted);
+      solved = newton(around, peakVolts, depth, toneRadians, wanted);
     }
     if (!solved) {
       solved =
-          coldCarrier(around, laws, peakVolts)
-              && (wanted == 1 || spread(around, laws, peakVolts, depth, toneRadians));
+          coldCarrier(around, peakVolts)
+              && (wanted == 1 || spread(around, peakVolts, depth, toneRadians));
     }
     warm = solved;
     warmSamples = wanted;
     if (solved) {
-      collect(wanted);
+      collect(around, wanted);
     }
     return solved;
   }
 
   /** The carrier alone, walked up from where every diode is nearly a resistor. */
-  private boolean coldCarrier(CarrierSurroundings around, JunctionLaw[] laws, double peakVolts) {
+  private boolean coldCarrier(CarrierSurroundings around, double peakVolts) {
     Arrays.fill(state, 0);
     Arrays.fill(junctions, 0);
     for (int d = 0; d < devices; d++) {
       state[d] = around.openVolts[d];
     }
-    double level = Math.min(peakVolts, laws[0].scaledThermalVolts());
+    double level = Math.min(peakVolts, gentleVolts);
     if (around.tuned) {
       state[devices] = 0.5 * level;
     }
     double growth = 2;
     double reached = 0;
     for (int tries = 0; tries < 60; tries++) {
-      if (newton(around, laws, level, 0, 0, 1)) {
+      if (newton(around, level, 0, 0, 1)) {
         if (level == peakVolts) {
           return true;
         }
@@ -229,11 +238,7 @@ public final class EnvelopeSolver {
 
   /** From the carrier's solution to the modulated one. */
   private boolean spread(
-      CarrierSurroundings around,
-      JunctionLaw[] laws,
-      double peakVolts,
-      double depth,
-      double toneRadians) {
+      CarrierSurroundings around, double peakVolts, double depth, double toneRadians) {
     for (int b = blocks - 1; b >= 0; b--) {
       double value = state[b];
       double open = b < devices ? around.openVolts[b] : 0;
@@ -247,19 +252,15 @@ public final class EnvelopeSolver {
     for (int s = 1; s < samples; s++) {
       System.arraycopy(junctions, 0, junctions, s * row, row);
     }
-    if (newton(around, laws, peakVolts, depth, toneRadians, samples)) {
+    if (newton(around, peakVolts, depth, toneRadians, samples)) {
       return true;
     }
-    return byDepth(around, laws, peakVolts, depth, toneRadians);
+    return byDepth(around, peakVolts, depth, toneRadians);
   }
 
   private boolean byDepth(
-      CarrierSurroundings around,
-      JunctionLaw[] laws,
-      double peakVolts,
-      double depth,
-      double toneRadians) {
-    if (!coldCarrier(around, laws, peakVolts)) {
+      CarrierSurroundings around, double peakVolts, double depth, double toneRadians) {
+    if (!coldCarrier(around, peakVolts)) {
       return false;
     }
     int row = devices * cycle.samples;
@@ -272,7 +273,7 @@ public final class EnvelopeSolver {
     }
     int steps = 12;
     for (int i = 1; i <= steps; i++) {
-      if (!newton(around, laws, peakVolts, depth * i / steps, toneRadians, samples)) {
+      if (!newton(around, peakVolts, depth * i / steps, toneRadians, samples)) {
         return false;
       }
     }
@@ -280,18 +281,13 @@ public final class EnvelopeSolver {
   }
 
   private boolean newton(
-      CarrierSurroundings around,
-      JunctionLaw[] laws,
-      double peakVolts,
-      double depth,
-      double toneRadians,
-      int count) {
+      CarrierSurroundings around, double peakVolts, double depth, double toneRadians, int count) {
     kernels(around, toneRadians, count);
     for (int s = 0; s < count; s++) {
       envelope[s] = peakVolts * (1 + depth * Math.cos(2 * Math.PI * s / count));
     }
     int size = (around.tuned ? blocks : devices) * count;
-    double norm = evaluate(around, laws, state, count);
+    double norm = evaluate(around, state, count);
     double wanted = 1e-9 * peakVolts + 1e-12;
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
       if (!(norm < Double.POSITIVE_INFINITY)) {
@@ -307,7 +303,7 @@ public final class EnvelopeSolver {
       System.arraycopy(residual, 0, trial, 0, size);
       solver.solve(trial, 0);
       double former = norm;
-      norm = advance(around, laws, size, count, former);
+      norm = advance(around, size, count, former);
       if (norm >= former && norm < 30 * wanted) {
         return true; // as near as rounding lets it come
       }
@@ -316,8 +312,7 @@ public final class EnvelopeSolver {
   }
 
   /** Takes the step in {@link #trial}, halved until the residual falls. */
-  private double advance(
-      CarrierSurroundings around, JunctionLaw[] laws, int size, int count, double former) {
+  private double advance(CarrierSurroundings around, int size, int count, double former) {
     System.arraycopy(junctions, 0, savedJunctions, 0, count * devices * cycle.samples);
     double taken = 0;
     double part = 1;
@@ -327,7 +322,7 @@ public final class EnvelopeSolver {
         state[i] -= (part - taken) * trial[i];
       }
       taken = part;
-      norm = evaluate(around, laws, state, count);
+      norm = evaluate(around, state, count);
       if (norm < former) {
         return norm;
       }
@@ -372,14 +367,14 @@ public final class EnvelopeSolver {
   }
 
   /** Solves every cycle and fills the residual; returns its largest entry, in volts. */
-  private double evaluate(CarrierSurroundings around, JunctionLaw[] laws, double[] x, int count) {
+  private double evaluate(CarrierSurroundings around, double[] x, int count) {
     int row = devices * cycle.samples;
     for (int s = 0; s < count; s++) {
       double real = around.tuned ? x[devices * count + s] : envelope[s];
       double imaginary = around.tuned ? x[(devices + 1) * count + s] : 0;
-      if (!cycle.solve(around, laws, x, s, count, real, imaginary, junctions, s * row)) {
+      if (!cycle.solve(around, x, s, count, real, imaginary, junctions, s * row)) {
         Arrays.fill(junctions, s * row, (s + 1) * row, 0);
-        if (!cycle.solve(around, laws, x, s, count, real, imaginary, junctions, s * row)) {
+        if (!cycle.solve(around, x, s, count, real, imaginary, junctions, s * row)) {
           return Double.POSITIVE_INFINITY;
         }
       }
@@ -394,9 +389,6 @@ public final class EnvelopeSolver {
       meanAmperes[d * count + s] = cycle.mean[d];
     }
     System.arraycopy(cycle.slopes, 0, slopes, s * blocks * blocks, blocks * blocks);
-    int width = (cycle.harmonics + 1) * devices;
-    System.arraycopy(cycle.harmonicReal, 0, carrierReal, s * width, width);
-    System.arraycopy(cycle.harmonicImaginary, 0, carrierImaginary, s * width, width);
     feedReal[s] = real;
     feedImaginary[s] = imaginary;
     drawn[2 * s] =
@@ -508,7 +500,14 @@ public final class EnvelopeSolver {
     }
   }
 
-  private void collect(int count) {
+  private void collect(CarrierSurroundings around, int count) {
+    int width = (cycle.harmonics + 1) * devices;
+    int row = devices * cycle.samples;
+    for (int s = 0; s < count; s++) {
+      cycle.harmonics(around, junctions, s * row, exact ? cycle.harmonics : SHOWN);
+      System.arraycopy(cycle.harmonicReal, 0, carrierReal, s * width, width);
+      System.arraycopy(cycle.harmonicImaginary, 0, carrierImaginary, s * width, width);
+    }
     if (count == 1) {
       repeatFirst();
     }

@@ -7,9 +7,9 @@ package earward.engine.detection;
  * <p>Source: Shockley 1949; depletion charge as in any device text, its capacitance continued
  * linearly above Vj/2. One instance a device and solver; {@link #set} changes its figures.
  */
-public final class JunctionLaw {
-  /** Beyond this exponent the law goes on along its tangent, so that nothing overflows. */
-  private static final double MOST_EXPONENT = 80;
+public final class JunctionLaw extends PortLaw {
+  /** Further than this many thermal voltages from breakdown its current is below any rounding. */
+  private static final double FAR = 80;
 
   private double saturationAmperes;
   private double scaledThermalVolts;
@@ -68,7 +68,42 @@ public final class JunctionLaw {
         + leakageSiemens;
   }
 
+  @Override
+  public int ports() {
+    return 1;
+  }
+
+  @Override
+  void currents(double first, double second) {
+    double exponent = first / scaledThermalVolts;
+    double grown = exponential(exponent);
+    double slope = exponent <= MOST_EXPONENT ? grown : Math.exp(MOST_EXPONENT);
+    double beyond = -(first + breakdownVolts) / scaledThermalVolts;
+    firstAmperes = saturationAmperes * (grown - 1) + leakageSiemens * first;
+    if (beyond > -FAR) {
+      firstAmperes -= saturationAmperes * exponential(beyond);
+      slope += slope(beyond);
+    }
+    firstByFirst = saturationAmperes / scaledThermalVolts * slope + leakageSiemens;
+  }
+
+  @Override
+  void charges(double volts) {
+    double here = Math.min(volts, builtInVolts / 2);
+    double left = 1 - here / builtInVolts;
+    double power = gradingExponent == 0.5 ? 1 / Math.sqrt(left) : Math.pow(left, -gradingExponent);
+    farads = junctionFarads * power;
+    coulombs = junctionFarads * builtInVolts / (1 - gradingExponent) * (1 - left * power);
+    if (volts > here) {
+      double over = volts - here;
+      double slope = capacitanceSlopeAtKnee();
+      coulombs += farads * over + slope * over * over / 2;
+      farads += slope * over;
+    }
+  }
+
   /** Whether there is a junction charge at all. */
+  @Override
   public boolean charged() {
     return junctionFarads > 0;
   }
@@ -93,18 +128,9 @@ public final class JunctionLaw {
     return volts <= knee ? farads : farads + capacitanceSlopeAtKnee() * (volts - knee);
   }
 
-  /**
-   * A voltage towards which a Newton step may go: large steps up the exponential are shortened to
-   * the logarithm of what they ask, so that the current does not explode.
-   */
+  /** A voltage towards which a Newton step may go: see {@link PortLaw#shortened}. */
   public double limited(double from, double to) {
-    double knee = scaledThermalVolts * Math.log(scaledThermalVolts / saturationAmperes);
-    double rise = to - from;
-    if (to <= knee || rise <= 2 * scaledThermalVolts) {
-      return to;
-    }
-    double base = Math.max(from, knee);
-    return base + scaledThermalVolts * Math.log1p((to - base) / scaledThermalVolts);
+    return shortened(saturationAmperes, scaledThermalVolts, from, to);
   }
 
   /** Is at this temperature, in A. */
@@ -117,7 +143,13 @@ public final class JunctionLaw {
     return leakageSiemens;
   }
 
-  double scaledThermalVolts() {
+  @Override
+  double limited(int port, double from, double to) {
+    return limited(from, to);
+  }
+
+  @Override
+  double gentleVolts() {
     return scaledThermalVolts;
   }
 
@@ -128,12 +160,6 @@ public final class JunctionLaw {
 
   private double capacitanceSlopeAtKnee() {
     return junctionFarads * gradingExponent / builtInVolts * Math.pow(0.5, -gradingExponent - 1);
-  }
-
-  private static double exponential(double exponent) {
-    return exponent <= MOST_EXPONENT
-        ? Math.exp(exponent)
-        : Math.exp(MOST_EXPONENT) * (1 + exponent - MOST_EXPONENT);
   }
 
   private static double slope(double exponent) {

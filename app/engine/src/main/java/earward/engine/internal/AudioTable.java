@@ -33,7 +33,7 @@ final class AudioTable {
       int column = 0;
       for (Port port : network.ports) {
         solver.rest();
-        solver.push(port.law().anode(point), port.law().cathode(point), 1, 0);
+        solver.push(port.anode(point), port.cathode(point), 1, 0);
         solver.solve();
         store(solver, h, column++);
       }

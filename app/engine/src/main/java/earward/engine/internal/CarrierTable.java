@@ -69,8 +69,8 @@ final class CarrierTable {
     around.loadImaginarySiemens = branch < 0 ? 0 : solver.im[branch];
     for (int i = 0; i < network.ports.length; i++) {
       Port port = network.ports[i];
-      int anode = port.law().anode(point);
-      int cathode = port.law().cathode(point);
+      int anode = port.anode(point);
+      int cathode = port.cathode(point);
       around.transferReal[i] = solver.re(anode) - solver.re(cathode);
       around.transferImaginary[i] = solver.im(anode) - solver.im(cathode);
     }
@@ -81,14 +81,14 @@ final class CarrierTable {
     for (int j = 0; j < network.ports.length; j++) {
       Port port = network.ports[j];
       solver.rest();
-      solver.push(port.law().anode(point), port.law().cathode(point), 1, 0);
+      solver.push(port.anode(point), port.cathode(point), 1, 0);
       solver.solve();
       if (k <= SHOWN) {
         store(solver, k, j + 1);
       }
       for (int i = 0; i < network.ports.length && k <= around.carrierHarmonics(); i++) {
-        int anode = network.ports[i].law().anode(point);
-        int cathode = network.ports[i].law().cathode(point);
+        int anode = network.ports[i].anode(point);
+        int cathode = network.ports[i].cathode(point);
         int entry = around.index(k, i, j);
         around.carrierRealOhms[entry] = solver.re(cathode) - solver.re(anode);
         around.carrierImaginaryOhms[entry] = solver.im(cathode) - solver.im(anode);

@@ -45,8 +45,8 @@ final class ClippingRule {
       return Double.NaN;
     }
     Port of = work.network.ports[port];
-    int anode = of.law().anode(work.stage());
-    int cathode = of.law().cathode(work.stage());
+    int anode = of.anode(work.stage());
+    int cathode = of.cathode(work.stage());
     solver.rest();
     solver.push(anode, cathode, 1, 0);
     solver.solve();

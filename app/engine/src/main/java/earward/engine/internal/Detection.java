@@ -2,8 +2,10 @@ package earward.engine.internal;
 
 import earward.engine.detection.CarrierSurroundings;
 import earward.engine.detection.EnvelopeSolver;
-import earward.engine.detection.JunctionLaw;
+import earward.engine.detection.PortLaw;
+import earward.engine.law.CarrierDriven;
 import earward.engine.law.DirectStage;
+import java.util.Arrays;
 
 /** The carrier-driven devices of one case: their surroundings and both of their solvers. */
 final class Detection {
@@ -22,19 +24,22 @@ final class Detection {
   final EnvelopeSolver modulated;
   final EnvelopeSolver carrierOnly;
   final CarrierSurroundings around;
-  private final JunctionLaw[] junctions;
+  private final PortLaw[] devices;
+  private final CarrierDriven[] parts;
 
   Detection(Network network, DirectStage stage) {
     this.network = network;
     int ports = network.ports.length;
-    modulated = new EnvelopeSolver(ports, CARRIER_SAMPLES, AUDIO_SAMPLES);
-    carrierOnly = new EnvelopeSolver(ports, LONE_CARRIER_SAMPLES, 2);
+    modulated = new EnvelopeSolver(ports, CARRIER_SAMPLES, AUDIO_SAMPLES, false);
+    carrierOnly = new EnvelopeSolver(ports, LONE_CARRIER_SAMPLES, 2, true);
     around =
         new CarrierSurroundings(ports, carrierOnly.carrierHarmonics(), modulated.audioHarmonics());
-    junctions = new JunctionLaw[ports];
-    for (int i = 0; i < ports; i++) {
-      junctions[i] = stage.junction(network.ports[i].law().ordinal());
-    }
+    parts =
+        Arrays.stream(network.ports)
+            .filter(port -> port.which() == 0)
+            .map(Port::law)
+            .toArray(CarrierDriven[]::new);
+    devices = Arrays.stream(parts).map(part -> part.portLaw(stage)).toArray(PortLaw[]::new);
   }
 
   void keep() {
@@ -50,18 +55,21 @@ final class Detection {
   /** Takes over DC: Thévenin's equivalent at each port about the present point. */
   void direct(DirectSolver direct, double[] scratch) {
     DirectStage stage = direct.stage();
+    for (int k = 0; k < parts.length; k++) {
+      parts[k].fill(stage, devices[k]);
+    }
     for (int i = 0; i < network.ports.length; i++) {
-      around.seriesOhms[i] = network.ports[i].law().seriesOhms(stage);
-      int anode = network.ports[i].law().anode(stage);
-      int cathode = network.ports[i].law().cathode(stage);
+      around.seriesOhms[i] = network.ports[i].seriesOhms(stage);
+      int anode = network.ports[i].anode(stage);
+      int cathode = network.ports[i].cathode(stage);
       around.openVolts[i] = stage.volts(anode) - stage.volts(cathode);
     }
     for (int j = 0; j < network.ports.length; j++) {
       Port from = network.ports[j];
-      direct.push(from.law().anode(stage), from.law().cathode(stage), scratch);
+      direct.push(from.anode(stage), from.cathode(stage), scratch);
       for (int i = 0; i < network.ports.length; i++) {
-        int anode = network.ports[i].law().anode(stage);
-        int cathode = network.ports[i].law().cathode(stage);
+        int anode = network.ports[i].anode(stage);
+        int cathode = network.ports[i].cathode(stage);
         double ohms = (cathode < 0 ? 0 : scratch[cathode]) - (anode < 0 ? 0 : scratch[anode]);
         around.audioRealOhms[around.index(0, i, j)] = ohms;
         around.audioImaginaryOhms[around.index(0, i, j)] = 0;
@@ -74,8 +82,8 @@ final class Detection {
   void audio(AudioTable table, DirectStage stage) {
     for (int h = 1; h <= around.audioHarmonics(); h++) {
       for (int i = 0; i < network.ports.length; i++) {
-        int anode = network.ports[i].law().anode(stage);
-        int cathode = network.ports[i].law().cathode(stage);
+        int anode = network.ports[i].anode(stage);
+        int cathode = network.ports[i].cathode(stage);
         for (int j = 0; j < network.ports.length; j++) {
           int entry = around.index(h, i, j);
           around.audioRealOhms[entry] = table.re(h, j, cathode) - table.re(h, j, anode);
@@ -86,11 +94,11 @@ final class Detection {
   }
 
   boolean solveModulated(double peakVolts, double depth, double toneRadians) {
-    return modulated.solve(around, junctions, peakVolts, depth, toneRadians);
+    return modulated.solve(around, devices, peakVolts, depth, toneRadians);
   }
 
   boolean solveCarrier(double peakVolts) {
-    return carrierOnly.solve(around, junctions, peakVolts, 0, 0);
+    return carrierOnly.solve(around, devices, peakVolts, 0, 0);
   }
 
   /**

@@ -69,7 +69,9 @@ final class Domain {
     CarrierSurroundings around = detection.around;
     DirectStage stage = work.stage();
     for (int i = 0; i < work.network.ports.length; i++) {
-      DiodeLaw diode = work.network.ports[i].law();
+      if (!(work.network.ports[i].law() instanceof DiodeLaw diode)) {
+        continue;
+      }
       double reactance = Math.abs(around.carrierImaginaryOhms[around.index(1, i, i)]);
       double direct = around.audioRealOhms[around.index(0, i, i)];
       if (2 * peak * (1 + work.depth()) > diode.model().breakdownVolts()) {

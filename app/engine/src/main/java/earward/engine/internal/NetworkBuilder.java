@@ -1,9 +1,11 @@
 package earward.engine.internal;
 
 import earward.block.device.AudioAmplifier;
+import earward.block.device.BipolarTransistor;
 import earward.block.device.Capacitor;
 import earward.block.device.Device;
 import earward.block.device.Diode;
+import earward.block.device.FieldEffectTransistor;
 import earward.block.device.Pin;
 import earward.block.device.Terminal;
 import earward.engine.Circuit;
@@ -11,12 +13,13 @@ import earward.engine.CircuitPart;
 import earward.engine.Probe;
 import earward.engine.Seam;
 import earward.engine.law.CapacitorLaw;
-import earward.engine.law.DiodeLaw;
+import earward.engine.law.CarrierDriven;
 import earward.engine.law.FeedLaw;
 import earward.engine.law.Law;
 import earward.engine.law.Laws;
 import earward.engine.law.Seat;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -41,7 +44,7 @@ final class NetworkBuilder implements Laws.Surroundings {
   /**
    * A builder.
    *
-   * @param drivenParts the carrier-driven diodes
+   * @param drivenParts the carrier-driven parts
    */
   NetworkBuilder(Circuit circuit, Slots slots, List<String> drivenParts) {
     this.circuit = circuit;
@@ -91,9 +94,11 @@ final class NetworkBuilder implements Laws.Surroundings {
       throw new IllegalStateException("part '" + name + "' got no law");
     }
     laws.add(law);
-    if (law instanceof DiodeLaw diode && diode.driven() >= 0) {
-      ports.add(new Port(name, diode));
-      ports.sort((a, b) -> Integer.compare(a.law().driven(), b.law().driven()));
+    if (law instanceof CarrierDriven part && part.driven() >= 0) {
+      for (int k = 0; k < part.ports(); k++) {
+        ports.add(new Port(name, part, k));
+      }
+      ports.sort(Comparator.comparingInt(port -> port.law().driven() + port.which()));
     }
     if (law instanceof FeedLaw only) {
       feed = only;
@@ -158,7 +163,21 @@ final class NetworkBuilder implements Laws.Surroundings {
 
   @Override
   public int driven(String part) {
-    return drivenParts.indexOf(part);
+    int place = 0;
+    for (String each : drivenParts) {
+      if (each.equals(part)) {
+        return place;
+      }
+      place += portsOf(each);
+    }
+    return -1;
+  }
+
+  private int portsOf(String part) {
+    return circuit.parts().stream()
+            .anyMatch(each -> each.name().equals(part) && each.device() instanceof Diode)
+        ? 1
+        : 2;
   }
 
   @Override
@@ -223,10 +242,14 @@ final class NetworkBuilder implements Laws.Surroundings {
     return feed;
   }
 
-  /** Names of all diodes of a circuit. */
-  static List<String> diodesOf(Circuit circuit) {
+  /** Names of all parts of a circuit that a carrier may drive. */
+  static List<String> drivable(Circuit circuit) {
     return circuit.parts().stream()
-        .filter(part -> part.device() instanceof Diode)
+        .filter(
+            part ->
+                part.device() instanceof Diode
+                    || part.device() instanceof BipolarTransistor
+                    || part.device() instanceof FieldEffectTransistor)
         .map(CircuitPart::name)
         .toList();
   }

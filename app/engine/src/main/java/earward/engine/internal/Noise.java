@@ -2,7 +2,6 @@ package earward.engine.internal;
 
 import earward.block.law.AWeighting;
 import earward.engine.Drive;
-import earward.engine.law.DiodeLaw;
 import earward.engine.law.Law;
 import earward.engine.law.NoiseStage;
 import java.util.Arrays;
@@ -137,18 +136,11 @@ final class Noise {
     return sum.squareVoltsPerHertz();
   }
 
-  /** Shot noise at each junction, thermal noise of each series resistance. */
+  /** Noise of each driven device by its solved mean currents, and of each series resistance. */
   private void ports(CaseWork work, Detection detection) {
     int ports = work.network.ports.length;
     for (int j = 0; j < ports; j++) {
-      DiodeLaw diode = work.network.ports[j].law();
-      double amperes = detection.carrierOnly.audioReal[j];
-      double across =
-          work.stage().volts(diode.anode(work.stage()))
-              - work.stage().volts(diode.cathode(work.stage()))
-              - amperes * detection.around.seriesOhms[j];
-      work.small.junctionColumn(j, columnRe, columnIm);
-      answer(work, columnRe, columnIm, diode.junctionNoise(work.stage(), amperes, across));
+      device(work, detection, j);
       for (int i = 0; i < ports; i++) {
         columnRe[i] = work.small.admittanceRe[i * ports + j];
         columnIm[i] = work.small.admittanceIm[i * ports + j];
@@ -156,6 +148,28 @@ final class Noise {
       double volts = sum.fourKelvinJoules() * detection.around.seriesOhms[j];
       answer(work, columnRe, columnIm, volts);
     }
+  }
+
+  private void device(CaseWork work, Detection detection, int j) {
+    Port port = work.network.ports[j];
+    if (port.which() > 0) {
+      return;
+    }
+    double amperes = detection.carrierOnly.audioReal[j];
+    if (port.law().ports() > 1) {
+      double across = -detection.carrierOnly.audioReal[j + 1];
+      amperes -= across;
+      work.small.junctionColumn(j, 1, columnRe, columnIm);
+      answer(work, columnRe, columnIm, port.law().acrossNoise(work.stage(), across));
+      work.small.junctionColumn(j, 0, columnRe, columnIm);
+    } else {
+      work.small.junctionColumn(j, 0, columnRe, columnIm);
+    }
+    double volts =
+        work.stage().volts(port.anode(work.stage()))
+            - work.stage().volts(port.cathode(work.stage()))
+            - detection.carrierOnly.audioReal[j] * detection.around.seriesOhms[j];
+    answer(work, columnRe, columnIm, port.law().portNoise(work.stage(), amperes, volts));
   }
 
   /** Both sidebands of the feed's own noise fold onto one another: 2 · 4kTR of in-phase drive. */
@@ -172,8 +186,8 @@ final class Noise {
     double real = 0;
     double imaginary = 0;
     for (int i = 0; i < work.network.ports.length; i++) {
-      int anode = work.network.ports[i].law().anode(work.stage());
-      int cathode = work.network.ports[i].law().cathode(work.stage());
+      int anode = work.network.ports[i].anode(work.stage());
+      int cathode = work.network.ports[i].cathode(work.stage());
       double r = sum.answerRe(anode, cathode);
       double m = sum.answerIm(anode, cathode);
       real += r * amperesRe[i] - m * amperesIm[i];

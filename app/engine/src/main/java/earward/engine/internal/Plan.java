@@ -3,16 +3,19 @@ package earward.engine.internal;
 import earward.block.figure.FigureName;
 import earward.engine.Circuit;
 import earward.engine.Drive;
+import earward.engine.Slot;
 import earward.engine.SolveCase;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 
 /** A compiled circuit: network, cases, and how each wanted figure is read. Immutable; shared. */
 public final class Plan {
-  /** Share of the feed's level at a diode above which the carrier drives it. */
+  /** Share of the feed's level at a port above which the carrier drives it. */
   private static final double DRIVEN_SHARE = 0.02;
 
-  /** Carrier at a diode, peak, below which nothing is rectified that a meter could see. */
+  /** Carrier at a port, peak, below which nothing is rectified that a meter could see. */
   private static final double DRIVEN_VOLTS = 1e-3;
 
   final Network network;
@@ -53,36 +56,33 @@ public final class Plan {
   }
 
   /**
-   * Finds by figures which diodes the carrier drives: with none of them conducting, a share of the
-   * feed's carrier stands across each; in any case of a signal it must be worth detecting.
+   * Finds by figures which parts the carrier drives: with none of them conducting, a share of the
+   * feed's carrier stands across a port of each; in some case of a signal it must be worth
+   * detecting.
    */
   private List<String> driven(Circuit circuit, Slots slots) {
-    List<String> diodes = NetworkBuilder.diodesOf(circuit);
-    Network trial = new NetworkBuilder(circuit, slots, diodes).build();
-    if (trial.feed == null || diodes.isEmpty()) {
-      return List.of();
-    }
-    boolean[] found = new boolean[diodes.size()];
-    for (CasePlan each : cases) {
-      if (each.drive == Drive.SIGNAL) {
-        CaseWork work = new CaseWork(trial, each);
-        work.begin(slots.all().stream().mapToDouble(s -> s.nominal()).toArray());
-        mark(work, found);
+    List<String> parts = NetworkBuilder.drivable(circuit);
+    Network trial = new NetworkBuilder(circuit, slots, parts).build();
+    Set<String> found = new HashSet<>();
+    if (trial.feed != null && !parts.isEmpty()) {
+      double[] values = slots.all().stream().mapToDouble(Slot::nominal).toArray();
+      for (CasePlan each : cases) {
+        if (each.drive == Drive.SIGNAL) {
+          CaseWork work = new CaseWork(trial, each);
+          work.begin(values);
+          mark(work, found);
+        }
       }
     }
-    List<String> driven = new ArrayList<>();
-    for (int i = 0; i < found.length; i++) {
-      if (found[i]) {
-        driven.add(diodes.get(i));
-      }
-    }
-    return driven;
+    return parts.stream().filter(found::contains).toList();
   }
 
-  private static void mark(CaseWork work, boolean[] found) {
+  private static void mark(CaseWork work, Set<String> found) {
     double[] shares = work.carrierShares();
     for (int i = 0; i < shares.length; i++) {
-      found[i] |= shares[i] > DRIVEN_SHARE && shares[i] * work.peakVolts() > DRIVEN_VOLTS;
+      if (shares[i] > DRIVEN_SHARE && shares[i] * work.peakVolts() > DRIVEN_VOLTS) {
+        found.add(work.network.ports[i].part());
+      }
     }
   }
 }

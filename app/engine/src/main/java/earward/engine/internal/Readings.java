@@ -5,6 +5,7 @@ import earward.block.figure.Quantity;
 import earward.engine.Probe;
 import earward.engine.Seam;
 import earward.engine.law.AmplifierLaw;
+import earward.engine.law.CarrierDriven;
 import earward.engine.law.DiodeLaw;
 import earward.engine.law.Heated;
 import earward.engine.law.Law;
@@ -140,8 +141,8 @@ final class Readings {
     if (law instanceof AmplifierLaw amplifier) {
       return ofAmplifier(quantity, amplifier);
     }
-    if (law instanceof DiodeLaw diode && diode.driven() >= 0) {
-      return ofDriven(quantity, diode);
+    if (law instanceof CarrierDriven driven && driven.driven() >= 0) {
+      return ofDriven(quantity, driven, law);
     }
     return ofAny(quantity, law);
   }
@@ -173,8 +174,8 @@ final class Readings {
     };
   }
 
-  private Reading ofDriven(Quantity quantity, DiodeLaw diode) {
-    int port = diode.driven();
+  private Reading ofDriven(Quantity quantity, CarrierDriven part, Law law) {
+    int port = part.driven();
     return switch (quantity) {
       case REVERSE_PEAK_VOLTS ->
           work ->
@@ -185,7 +186,7 @@ final class Readings {
           work ->
               work.plan.drive == earward.engine.Drive.SIGNAL
                   ? CarrierLevels.heatWatts(work, port)
-                  : work.solved() ? diode.watts(work.stage()) : Double.NaN;
+                  : work.solved() ? law.watts(work.stage()) : Double.NaN;
       case CARRIER_PEAK_VOLTS -> work -> CarrierLevels.portPeakVolts(work, port);
       case DETECTION_EFFICIENCY -> work -> CarrierLevels.efficiency(work, port);
       case CARRIER_INPUT_OHMS -> work -> CarrierLevels.inputOhms(work, port);
@@ -195,28 +196,28 @@ final class Readings {
       case CLIPPING_DEPTH_WITHOUT_COUPLING ->
           work -> ClippingRule.depth(work, port, ClippingRule.Without.COUPLING);
       case REVERSAL_DEPTH -> work -> work.depths.reversal(port);
-      case CLEAN_DEPTH -> work -> work.depths.clean(endPlus(work, diode), endMinus(work, diode));
-      default -> ofAny(quantity, diode);
+      case CLEAN_DEPTH -> work -> work.depths.clean(endPlus(work, part), endMinus(work, part));
+      default -> ofAny(quantity, law);
     };
   }
 
   /** Distortion is judged at the end of the path, or across the diode where no end is named. */
-  private int endPlus(CaseWork work, DiodeLaw diode) {
+  private int endPlus(CaseWork work, CarrierDriven part) {
     for (int i = 0; i < network.probePlus.length; i++) {
       if (network.circuit.probes().get(i).name().equals("path")) {
         return network.probePlus[i];
       }
     }
-    return diode.cathode(work.stage());
+    return part.cathode(work.stage(), 0);
   }
 
-  private int endMinus(CaseWork work, DiodeLaw diode) {
+  private int endMinus(CaseWork work, CarrierDriven part) {
     for (int i = 0; i < network.probeMinus.length; i++) {
       if (network.circuit.probes().get(i).name().equals("path")) {
         return network.probeMinus[i];
       }
     }
-    return diode.anode(work.stage());
+    return part.anode(work.stage(), 0);
   }
 
   private static Reading ofAmplifier(Quantity quantity, AmplifierLaw amplifier) {

@@ -64,8 +64,8 @@ final class SeamView {
         work.alternating
             .stage()
             .admittance(
-                port.law().anode(work.stage()),
-                port.law().cathode(work.stage()),
+                port.anode(work.stage()),
+                port.cathode(work.stage()),
                 CarrierLevels.admittance(work, detection, i, true),
                 CarrierLevels.admittance(work, detection, i, false));
       }

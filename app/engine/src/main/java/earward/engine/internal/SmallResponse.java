@@ -29,8 +29,8 @@ final class SmallResponse {
     work.alternating.rest();
     for (int j = 0; j < work.network.ports.length; j++) {
       work.alternating.push(
-          work.network.ports[j].law().anode(work.stage()),
-          work.network.ports[j].law().cathode(work.stage()),
+          work.network.ports[j].anode(work.stage()),
+          work.network.ports[j].cathode(work.stage()),
           work.small.drivenRe[j],
           work.small.drivenIm[j]);
     }
@@ -42,11 +42,11 @@ final class SmallResponse {
   static void addPorts(CaseWork work) {
     int ports = work.network.ports.length;
     for (int i = 0; i < ports; i++) {
-      int from = work.network.ports[i].law().anode(work.stage());
-      int to = work.network.ports[i].law().cathode(work.stage());
+      int from = work.network.ports[i].anode(work.stage());
+      int to = work.network.ports[i].cathode(work.stage());
       for (int j = 0; j < ports; j++) {
-        int plus = work.network.ports[j].law().anode(work.stage());
-        int minus = work.network.ports[j].law().cathode(work.stage());
+        int plus = work.network.ports[j].anode(work.stage());
+        int minus = work.network.ports[j].cathode(work.stage());
         double real = work.small.admittanceRe[i * ports + j];
         double imaginary = work.small.admittanceIm[i * ports + j];
         work.alternating.stage().transconductance(from, to, plus, real, imaginary);

@@ -103,11 +103,16 @@ final class SmallSignal {
   /**
    * What one ampere of noise beside a junction drives through all ports that are shorted; after
    * {@link #fill}.
+   *
+   * @param back how much of it comes back through the next port
    */
-  void junctionColumn(int port, double[] intoRe, double[] intoIm) {
+  void junctionColumn(int port, double back, double[] intoRe, double[] intoIm) {
     Arrays.fill(intoRe, 0);
     Arrays.fill(intoIm, 0);
     intoRe[port] = 1;
+    if (back != 0) {
+      intoRe[port + 1] = -back;
+    }
     series.solve(intoRe, intoIm);
   }
 

@@ -2,22 +2,27 @@ package earward.engine.law;
 
 import earward.block.device.DiodeMaterial;
 import earward.block.device.TransistorModel;
+import earward.block.law.ThermalVoltage;
+import earward.engine.detection.PortLaw;
+import earward.engine.detection.TransistorLaw;
 
 /**
  * A bipolar transistor by Ebers and Moll (1954), transport form, with Early's factor; terminals
  * COLLECTOR, BASE, EMITTER. The base resistance stands between base lead and inner base, whose
  * voltage is an unknown of its own.
  */
-final class BipolarLaw extends Law implements Heated {
+final class BipolarLaw extends Law implements Heated, CarrierDriven {
   /** Beyond this exponent the law goes on along its tangent. */
   private static final double MOST_EXPONENT = 60;
 
   private final TransistorModel model;
   private final double sign;
+  private final int driven;
 
-  BipolarLaw(Seat seat, TransistorModel model) {
+  BipolarLaw(Seat seat, TransistorModel model, int driven) {
     super(seat);
     this.model = model;
+    this.driven = driven;
     this.sign = model.pnp() ? -1 : 1;
   }
 
@@ -29,6 +34,57 @@ final class BipolarLaw extends Law implements Heated {
   @Override
   public double junctionToAirKelvinPerWatt() {
     return model.junctionToAirKelvinPerWatt();
+  }
+
+  @Override
+  public int ports() {
+    return 2;
+  }
+
+  @Override
+  public int driven() {
+    return driven;
+  }
+
+  /** Where a port leaves the inner base: at the emitter, then at the collector. */
+  private int outer(DirectStage stage, int port) {
+    return nodes(stage)[port == 0 ? 2 : 0];
+  }
+
+  @Override
+  public int anode(DirectStage stage, int port) {
+    return model.pnp() ? outer(stage, port) : branch(0);
+  }
+
+  @Override
+  public int cathode(DirectStage stage, int port) {
+    return model.pnp() ? branch(0) : outer(stage, port);
+  }
+
+  @Override
+  public double seriesOhms(DirectStage stage, int port) {
+    return 0;
+  }
+
+  @Override
+  public PortLaw portLaw(DirectStage stage) {
+    return new TransistorLaw();
+  }
+
+  @Override
+  public void fill(DirectStage stage, PortLaw law) {
+    if (law instanceof TransistorLaw own) {
+      own.set(
+          isOpen(stage) ? 1e-30 : saturation(stage),
+          Temperature.thermalVolts(stage.celsius()),
+          value(stage, 1),
+          model.reverseGain(),
+          model.earlyVolts());
+    }
+  }
+
+  private boolean apart(DirectStage stage) {
+    return driven >= 0 && stage.detecting();
   }
 
   private double saturation(DirectStage stage) {
@@ -57,6 +113,14 @@ final class BipolarLaw extends Law implements Heated {
 
   @Override
   void stampDirect(DirectStage stage, int[] nodes) {
+    if (apart(stage)) {
+      stage.conductance(nodes[1], branch(0), 1 / model.baseOhms());
+      for (int port = 0; port < 2; port++) {
+        double amperes = stage.drivenAmperes()[driven + port];
+        stage.current(anode(stage, port), cathode(stage, port), amperes);
+      }
+      return;
+    }
     double thermal = Temperature.thermalVolts(stage.celsius());
     double saturation = saturation(stage);
     double gain = value(stage, 1);
@@ -95,6 +159,9 @@ final class BipolarLaw extends Law implements Heated {
 
   @Override
   public void limit(DirectStage stage, double[] proposal) {
+    if (apart(stage)) {
+      return;
+    }
     int[] nodes = nodes(stage);
     double emitter = nodes[2] < 0 ? 0 : proposal[nodes[2]];
     double thermal = Temperature.thermalVolts(stage.celsius());
@@ -111,6 +178,10 @@ final class BipolarLaw extends Law implements Heated {
   @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
     DirectStage point = stage.point();
+    if (apart(point)) {
+      stage.admittance(nodes[1], branch(0), 1 / model.baseOhms(), 0);
+      return;
+    }
     double thermal = Temperature.thermalVolts(point.celsius());
     double saturation = saturation(point);
     double early = early(point, nodes);
@@ -130,11 +201,24 @@ final class BipolarLaw extends Law implements Heated {
   @Override
   void addNoise(NoiseStage noise, int[] nodes) {
     DirectStage point = noise.stage().point();
-    double collector = amperes(point);
     noise.thermal(nodes[1], branch(0), 1 / model.baseOhms());
+    if (apart(point)) {
+      return;
+    }
+    double collector = amperes(point);
     noise.shot(nodes[0], nodes[2], collector);
     double base = (point.volts(nodes[1]) - point.branch(branch(0))) / model.baseOhms();
     noise.shot(branch(0), nodes[2], base);
+  }
+
+  @Override
+  public double acrossNoise(DirectStage stage, double amperes) {
+    return 2 * ThermalVoltage.CHARGE * Math.abs(amperes);
+  }
+
+  @Override
+  public double portNoise(DirectStage stage, double amperes, double volts) {
+    return 2 * ThermalVoltage.CHARGE * Math.abs(amperes);
   }
 
   /** Current from collector to emitter, without the base's. */
@@ -142,6 +226,9 @@ final class BipolarLaw extends Law implements Heated {
   public double amperes(DirectStage stage) {
     if (isOpen(stage)) {
       return 0;
+    }
+    if (apart(stage)) {
+      return -sign * stage.drivenAmperes()[driven + 1];
     }
     int[] nodes = nodes(stage);
     double thermal = Temperature.thermalVolts(stage.celsius());

@@ -3,13 +3,14 @@ package earward.engine.law;
 import earward.block.device.DiodeModel;
 import earward.block.law.ThermalVoltage;
 import earward.engine.detection.JunctionLaw;
+import earward.engine.detection.PortLaw;
 
 /**
  * A diode: series resistance, then the junction, with an unknown for the voltage between them. One
  * that the carrier drives stands as a source of its mean current while the carrier is on, and as
  * nothing at all to audio and carrier: its cycle is solved apart.
  */
-public final class DiodeLaw extends Law {
+public final class DiodeLaw extends Law implements CarrierDriven {
   /** What stands for no series resistance, in Ω. */
   private static final double LEAST_OHMS = 1e-3;
 
@@ -29,7 +30,12 @@ public final class DiodeLaw extends Law {
     return 1;
   }
 
-  /** Place among the carrier-driven devices, −1 for one that is not driven. */
+  @Override
+  public int ports() {
+    return 1;
+  }
+
+  @Override
   public int driven() {
     return driven;
   }
@@ -44,10 +50,29 @@ public final class DiodeLaw extends Law {
     return value(stage, 3);
   }
 
-  /** Place among all diodes. */
-  public int ordinal() {
-    return ordinal;
+  @Override
+  public int anode(DirectStage stage, int port) {
+    return anode(stage);
   }
+
+  @Override
+  public int cathode(DirectStage stage, int port) {
+    return cathode(stage);
+  }
+
+  @Override
+  public double seriesOhms(DirectStage stage, int port) {
+    return seriesOhms(stage);
+  }
+
+  @Override
+  public PortLaw portLaw(DirectStage stage) {
+    return stage.junction(ordinal);
+  }
+
+  /** Nothing: its junction is that of DC, and was prepared with it. */
+  @Override
+  public void fill(DirectStage stage, PortLaw law) {}
 
   /** Node of the anode as fitted. */
   public int anode(DirectStage stage) {
@@ -142,7 +167,7 @@ public final class DiodeLaw extends Law {
     JunctionLaw junction = point.junction(ordinal);
     double volts = point.branch(branch(0)) - point.volts(nodes[1]);
     noise.thermal(nodes[0], branch(0), 1 / seriesOhms(point));
-    noise.current(branch(0), nodes[1], junctionNoise(point, junction.current(volts), volts));
+    noise.current(branch(0), nodes[1], portNoise(point, junction.current(volts), volts));
   }
 
   /**
@@ -153,13 +178,19 @@ public final class DiodeLaw extends Law {
    * @param amperes mean current with the leakage's
    * @param volts mean junction voltage
    */
-  public double junctionNoise(DirectStage stage, double amperes, double volts) {
+  @Override
+  public double portNoise(DirectStage stage, double amperes, double volts) {
     double leakage = stage.junction(ordinal).leakageSiemens();
     double through = Math.abs(amperes - leakage * volts);
     double thermal = Temperature.thermalVolts(stage.celsius());
     double charge = ThermalVoltage.CHARGE;
     return 2 * charge * (through + 2 * stage.junction(ordinal).saturationAmperes())
         + 4 * charge * thermal * leakage;
+  }
+
+  @Override
+  public double acrossNoise(DirectStage stage, double amperes) {
+    return 0;
   }
 
   @Override

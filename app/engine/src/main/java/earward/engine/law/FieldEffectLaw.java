@@ -1,20 +1,25 @@
 package earward.engine.law;
 
 import earward.block.device.FieldEffectModel;
+import earward.block.law.ThermalVoltage;
+import earward.engine.detection.ChannelLaw;
+import earward.engine.detection.PortLaw;
 
 /**
  * A junction field-effect transistor by the square law (Shockley 1952), below pinch-off too;
  * terminals DRAIN, GATE, SOURCE. No current flows in the gate.
  */
-final class FieldEffectLaw extends Law implements Heated {
+final class FieldEffectLaw extends Law implements Heated, CarrierDriven {
   /** Share of the transconductance that a saturated channel's noise is of. */
   private static final double CHANNEL_SHARE = 2 / 3.0;
 
   private final double sign;
+  private final int driven;
   private final double toAirKelvinPerWatt;
 
-  FieldEffectLaw(Seat seat, FieldEffectModel model) {
+  FieldEffectLaw(Seat seat, FieldEffectModel model, int driven) {
     super(seat);
+    this.driven = driven;
     this.sign = model.pChannel() ? -1 : 1;
     this.toAirKelvinPerWatt = model.junctionToAirKelvinPerWatt();
   }
@@ -22,6 +27,52 @@ final class FieldEffectLaw extends Law implements Heated {
   @Override
   public double junctionToAirKelvinPerWatt() {
     return toAirKelvinPerWatt;
+  }
+
+  @Override
+  public int ports() {
+    return 2;
+  }
+
+  @Override
+  public int driven() {
+    return driven;
+  }
+
+  /** Where a port leaves the gate: at the source, then at the drain. */
+  private int outer(DirectStage stage, int port) {
+    return nodes(stage)[port == 0 ? 2 : 0];
+  }
+
+  @Override
+  public int anode(DirectStage stage, int port) {
+    return sign > 0 ? nodes(stage)[1] : outer(stage, port);
+  }
+
+  @Override
+  public int cathode(DirectStage stage, int port) {
+    return sign > 0 ? outer(stage, port) : nodes(stage)[1];
+  }
+
+  @Override
+  public double seriesOhms(DirectStage stage, int port) {
+    return 0;
+  }
+
+  @Override
+  public PortLaw portLaw(DirectStage stage) {
+    return new ChannelLaw();
+  }
+
+  @Override
+  public void fill(DirectStage stage, PortLaw law) {
+    if (law instanceof ChannelLaw own) {
+      own.set(isOpen(stage) ? 1e-30 : value(stage, 0), value(stage, 1));
+    }
+  }
+
+  private boolean apart(DirectStage stage) {
+    return driven >= 0 && stage.detecting();
   }
 
   /** Drain current and its slopes for given voltages, all in n-channel sense. */
@@ -51,6 +102,13 @@ final class FieldEffectLaw extends Law implements Heated {
 
   @Override
   void stampDirect(DirectStage stage, int[] nodes) {
+    if (apart(stage)) {
+      for (int port = 0; port < 2; port++) {
+        double amperes = stage.drivenAmperes()[driven + port];
+        stage.current(anode(stage, port), cathode(stage, port), amperes);
+      }
+      return;
+    }
     boolean turned = turned(stage, nodes);
     int drain = turned ? nodes[2] : nodes[0];
     int source = turned ? nodes[0] : nodes[2];
@@ -64,6 +122,9 @@ final class FieldEffectLaw extends Law implements Heated {
   @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
     DirectStage point = stage.point();
+    if (apart(point)) {
+      return;
+    }
     boolean turned = turned(point, nodes);
     int drain = turned ? nodes[2] : nodes[0];
     int source = turned ? nodes[0] : nodes[2];
@@ -77,6 +138,9 @@ final class FieldEffectLaw extends Law implements Heated {
   @Override
   void addNoise(NoiseStage noise, int[] nodes) {
     DirectStage point = noise.stage().point();
+    if (apart(point)) {
+      return;
+    }
     boolean turned = turned(point, nodes);
     int drain = turned ? nodes[2] : nodes[0];
     int source = turned ? nodes[0] : nodes[2];
@@ -85,10 +149,26 @@ final class FieldEffectLaw extends Law implements Heated {
     noise.thermal(drain, source, siemens);
   }
 
+  /** The same, of the transconductance at the mean current: gm = 2·√(Idss·i)/Vp. */
+  @Override
+  public double acrossNoise(DirectStage stage, double amperes) {
+    double siemens = 2 * Math.sqrt(value(stage, 0) * Math.abs(amperes)) / value(stage, 1);
+    double kelvinJoules = ThermalVoltage.CHARGE * ThermalVoltage.volts(stage.celsius());
+    return 4 * kelvinJoules * CHANNEL_SHARE * siemens;
+  }
+
+  @Override
+  public double portNoise(DirectStage stage, double amperes, double volts) {
+    return 0;
+  }
+
   @Override
   public double amperes(DirectStage stage) {
     if (isOpen(stage)) {
       return 0;
+    }
+    if (apart(stage)) {
+      return sign * stage.drivenAmperes()[driven];
     }
     int[] nodes = nodes(stage);
     boolean turned = turned(stage, nodes);

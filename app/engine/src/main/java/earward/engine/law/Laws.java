@@ -31,7 +31,7 @@ public final class Laws {
     /** Place of the next diode among all diodes. */
     int nextDiode();
 
-    /** Place of a diode among the carrier-driven ones, −1 for one that is not driven. */
+    /** Place of a part's first port among the carrier-driven ones, −1 for one not driven. */
     int driven(String part);
 
     /** Place of the next amplifier among all amplifiers. */
@@ -95,9 +95,9 @@ public final class Laws {
     if (device instanceof Diode diode) {
       return new DiodeLaw(seat, diode.model(), around.nextDiode(), around.driven(seat.name()));
     } else if (device instanceof BipolarTransistor transistor) {
-      return new BipolarLaw(seat, transistor.model());
+      return new BipolarLaw(seat, transistor.model(), around.driven(seat.name()));
     } else if (device instanceof FieldEffectTransistor transistor) {
-      return new FieldEffectLaw(seat, transistor.model());
+      return new FieldEffectLaw(seat, transistor.model(), around.driven(seat.name()));
     } else if (device instanceof OperationalAmplifier opAmp) {
       return new OpAmpLaw(seat, opAmp.model());
     } else if (device instanceof AudioAmplifier amplifier) {

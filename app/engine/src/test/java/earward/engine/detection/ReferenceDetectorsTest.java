@@ -40,7 +40,7 @@ class ReferenceDetectorsTest {
       double rippleVolts,
       double inputWatts) {
     LadderOfTwo ladder = new LadderOfTwo(c1, r1, r2, c2, cc, rl);
-    EnvelopeSolver solver = new EnvelopeSolver(1, 64, 32);
+    EnvelopeSolver solver = new EnvelopeSolver(1, 64, 32, true);
     CarrierSurroundings around =
         ladder.around(solver, feed.equals("tuned"), carrierHertz, toneHertz, sourceOhms, quality);
     around.seriesOhms[0] = seriesOhms;
