@@ -28,7 +28,6 @@ final class CarrierCycle {
   final int samples;
   final int harmonics;
   private final int unknowns;
-  private final boolean exact;
   private final CarrierKernel kernel;
   private PortLaw[] laws = new PortLaw[0];
 
@@ -45,7 +44,7 @@ final class CarrierCycle {
   private final double[] capacitance;
   private final double[] drive;
   private final double[] step;
-  private final double[] push;
+  private final double[] side;
   private final double[] changed;
   private final double[] moved;
   private final int[] active;
@@ -77,14 +76,12 @@ final class CarrierCycle {
    * Room for a cycle.
    *
    * @param samples a power of two
-   * @param exact whether the slopes are wanted as results; else they only have to lead Newton on
    */
-  CarrierCycle(int ports, int samples, boolean exact) {
+  CarrierCycle(int ports, int samples) {
     this.ports = ports;
     this.samples = samples;
     this.harmonics = samples / 2 - 1;
     this.unknowns = ports * samples;
-    this.exact = exact;
     kernel = new CarrierKernel(ports, samples, harmonics);
     partner = new int[ports];
     current = new double[unknowns];
@@ -94,7 +91,7 @@ final class CarrierCycle {
     capacitance = new double[unknowns];
     drive = new double[unknowns];
     step = new double[unknowns];
-    push = new double[unknowns];
+    side = new double[unknowns];
     changed = new double[unknowns];
     moved = new double[unknowns];
     active = new int[unknowns];
@@ -144,12 +141,12 @@ final class CarrierCycle {
     for (int iteration = 0; iteration < MOST_ITERATIONS && !done; iteration++) {
       evaluate(u, at);
       residual(u, at);
-      assemble(exact || iteration > PATIENCE);
+      assemble(iteration > PATIENCE);
       if (!solver.factor()) {
         return false;
       }
       reduce(step);
-      double largest = take(u, at);
+      double largest = take(u, at, step);
       if (!(largest < 1e6)) {
         return false;
       }
@@ -158,8 +155,80 @@ final class CarrierCycle {
     if (done) {
       evaluate(u, at);
       results(around);
+      slopes(around, side, 0, false);
     }
     return done;
+  }
+
+  /**
+   * One step of Newton's method, found but not taken: means, fundamental and slopes as the step
+   * would leave them, to first order. What the step is, and what each of v 0.., E real and E
+   * imaginary adds to it, goes into rows of the caller's, to be taken by {@link #move}.
+   *
+   * @return whether the step exists
+   */
+  boolean linearise(
+      CarrierSurroundings around,
+      double[] v,
+      int offset,
+      int stride,
+      double feedReal,
+      double feedImaginary,
+      double[] u,
+      int at,
+      double[] rows,
+      int row) {
+    setDrive(around, v, offset, stride, feedReal, feedImaginary);
+    evaluate(u, at);
+    residual(u, at);
+    assemble(false);
+    if (!solver.factor()) {
+      return false;
+    }
+    reduce(step);
+    System.arraycopy(step, 0, rows, row, unknowns);
+    answer(step);
+    for (int i = 0; i < unknowns; i++) {
+      current[i] -= changed[i];
+      charge[i] -= moved[i];
+    }
+    results(around);
+    slopes(around, rows, row + unknowns, true);
+    return true;
+  }
+
+  /** How many numbers {@link #linearise} leaves for one sample. */
+  int rowLength() {
+    return (ports + 3) * unknowns;
+  }
+
+  /**
+   * Takes a step that {@link #linearise} left, with the changes of v and E that belong to it; all
+   * steps are downhill, to be subtracted.
+   *
+   * @return the largest change of a voltage
+   */
+  double move(double[] u, int at, double[] rows, int row, double[] changes, int of, int stride) {
+    System.arraycopy(rows, row, step, 0, unknowns);
+    for (int c = 0; c < ports + 2; c++) {
+      double change = of + c * stride < changes.length ? changes[of + c * stride] : 0;
+      int from = row + (c + 1) * unknowns;
+      for (int i = 0; i < unknowns && change != 0; i++) {
+        step[i] += rows[from + i] * change;
+      }
+    }
+    return take(u, at, step);
+  }
+
+  /** Fills the slopes at a solved cycle with every column in place. */
+  boolean exactSlopes(CarrierSurroundings around, double[] u, int at) {
+    evaluate(u, at);
+    assemble(true);
+    if (!solver.factor()) {
+      return false;
+    }
+    slopes(around, side, 0, false);
+    return true;
   }
 
   private void setDrive(
@@ -276,20 +345,20 @@ final class CarrierCycle {
   /**
    * Replaces a right side by its solution: the active samples first, the others by what they do.
    */
-  private void reduce(double[] side) {
+  private void reduce(double[] values) {
     for (int k = 0; k < actives; k++) {
-      reduced[k] = side[active[k]];
+      reduced[k] = values[active[k]];
     }
     solver.solve(reduced, 0);
     if (actives < unknowns) {
       spread(reduced);
-      kernel.addCurrents(changed, side, -1);
+      kernel.addCurrents(changed, values, -1);
       if (charged) {
-        kernel.addCharges(moved, side, -1);
+        kernel.addCharges(moved, values, -1);
       }
     }
     for (int k = 0; k < actives; k++) {
-      side[active[k]] = reduced[k];
+      values[active[k]] = reduced[k];
     }
   }
 
@@ -309,14 +378,14 @@ final class CarrierCycle {
   }
 
   /** Takes a step; returns the largest change. */
-  private double take(double[] u, int at) {
+  private double take(double[] u, int at, double[] by) {
     double largest = 0;
     int port = 0;
     for (PortLaw law : laws) {
       for (int k = 0; k < law.ports(); k++) {
         for (int i = port * samples; i < (port + 1) * samples; i++) {
           double from = u[at + i];
-          double to = law.limited(k, from, from - step[i]);
+          double to = law.limited(k, from, from - by[i]);
           u[at + i] = to;
           largest = Math.max(largest, Math.abs(to - from));
         }
@@ -336,7 +405,6 @@ final class CarrierCycle {
       drawnReal += around.transferReal[p] * real - around.transferImaginary[p] * imaginary;
       drawnImaginary += around.transferReal[p] * imaginary + around.transferImaginary[p] * real;
     }
-    slopes(around);
   }
 
   /** Fills the harmonics of the currents at a solved cycle, up to one of them. */
@@ -366,17 +434,24 @@ final class CarrierCycle {
     return share;
   }
 
-  /** The slopes: one more right-hand side for each of v 0.., E real, E imaginary. */
-  private void slopes(CarrierSurroundings around) {
+  /**
+   * The slopes: one more right-hand side for each of v 0.., E real, E imaginary.
+   *
+   * @param rows takes the answers of all voltages, one after the other if they are kept
+   */
+  private void slopes(CarrierSurroundings around, double[] rows, int first, boolean kept) {
     int columns = ports + 2;
     for (int column = 0; column < columns; column++) {
       for (int p = 0; p < ports; p++) {
         for (int s = 0; s < samples; s++) {
-          push[p * samples + s] = push(around, column, p, s);
+          side[p * samples + s] = push(around, column, p, s);
         }
       }
-      reduce(push);
-      answer();
+      reduce(side);
+      answer(side);
+      if (kept) {
+        System.arraycopy(side, 0, rows, first + column * unknowns, unknowns);
+      }
       double real = 0;
       double imaginary = 0;
       for (int p = 0; p < ports; p++) {
@@ -391,17 +466,17 @@ final class CarrierCycle {
     }
   }
 
-  /** What the changes of all voltages change in currents and charges. */
-  private void answer() {
+  /** What changes of all voltages change in currents and charges. */
+  private void answer(double[] volts) {
     for (int p = 0; p < ports; p++) {
       int other = partner[p];
       for (int s = 0; s < samples; s++) {
         int i = p * samples + s;
-        changed[i] = own[i] * push[i];
+        changed[i] = own[i] * volts[i];
         if (other >= 0) {
-          changed[i] += across[other * samples + s] * push[other * samples + s];
+          changed[i] += across[other * samples + s] * volts[other * samples + s];
         }
-        moved[i] = charged ? capacitance[i] * push[i] : 0;
+        moved[i] = charged ? capacitance[i] * volts[i] : 0;
       }
     }
   }

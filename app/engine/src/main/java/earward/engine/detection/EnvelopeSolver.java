@@ -1,6 +1,7 @@
 package earward.engine.detection;
 
 import java.util.Arrays;
+import org.jspecify.annotations.Nullable;
 
 /**
  * Finds the periodic solution of N carrier-driven devices under one tone of modulation.
@@ -22,28 +23,28 @@ public final class EnvelopeSolver {
   public static final int SHOWN = 3;
 
   private final int devices;
-  private final int samples;
+  final int samples;
   private final int blocks;
   private final boolean exact;
-  private final CarrierCycle cycle;
-  private final DenseSolver solver;
+  final CarrierCycle cycle;
+  final AudioBalance balance;
+  final DenseSolver solver;
 
-  private final double[] state;
+  final double[] state;
+  private final JointNewton joint;
   private final double[] trial;
-  private final double[] residual;
-  private final double[] junctions;
+  final double[] junctions;
   private final double[] savedJunctions;
-  private final double[] slopes;
-  private final double[] audioKernel;
-  private final double[] rateKernel;
-  private final double[] envelope;
-  private final double[] drawn;
+  final double[] slopes;
+  final double[] drawn;
   private final double[] keptState;
   private final double[] keptJunctions;
   private boolean keptWarm;
   private int keptSamples;
   private boolean warm;
   private double gentleVolts;
+  private boolean refined;
+  private @Nullable CarrierSurroundings last;
   private int warmSamples;
 
   /** Mean current of each device at each audio sample, index device·samples + sample. */
@@ -73,27 +74,23 @@ public final class EnvelopeSolver {
    * @param devices N, at least 1
    * @param carrierSamples of a cycle: 32, 64, 128 ...
    * @param audioSamples of an audio period: 32, 64 ...
-   * @param exact whether slopes and all carrier harmonics are wanted as results; else slopes only
-   *     lead Newton on, and the first {@link #SHOWN} harmonics are kept: much quicker
+   * @param exact whether all carrier harmonics are wanted; else the first {@link #SHOWN} are kept
    */
   public EnvelopeSolver(int devices, int carrierSamples, int audioSamples, boolean exact) {
     this.devices = devices;
     this.samples = audioSamples;
     this.blocks = devices + 2;
     this.exact = exact;
-    cycle = new CarrierCycle(devices, carrierSamples, exact);
+    cycle = new CarrierCycle(devices, carrierSamples);
+    balance = new AudioBalance(devices, audioSamples);
     solver = new DenseSolver(blocks * audioSamples);
     state = new double[blocks * audioSamples];
     trial = new double[blocks * audioSamples];
-    residual = new double[blocks * audioSamples];
     junctions = new double[audioSamples * devices * carrierSamples];
     savedJunctions = new double[junctions.length];
     keptState = new double[state.length];
     keptJunctions = new double[junctions.length];
     slopes = new double[audioSamples * blocks * blocks];
-    audioKernel = new double[devices * devices * 2 * audioSamples];
-    rateKernel = new double[2 * audioSamples];
-    envelope = new double[audioSamples];
     drawn = new double[2 * audioSamples];
     meanAmperes = new double[devices * audioSamples];
     audioReal = new double[audioSamples / 2 * devices];
@@ -103,6 +100,7 @@ public final class EnvelopeSolver {
     feedReal = new double[audioSamples];
     feedImaginary = new double[audioSamples];
     reversePeakVolts = new double[devices];
+    joint = new JointNewton(this, blocks * audioSamples);
   }
 
   /**
@@ -110,7 +108,29 @@ public final class EnvelopeSolver {
    * port voltage (columns 0..) or to the held quantity (real, imaginary), at one audio sample.
    */
   public double slope(int sample, int row, int column) {
+    if (!refined) {
+      refine();
+    }
     return slopes[(sample * blocks + row) * blocks + column];
+  }
+
+  private void refine() {
+    CarrierSurroundings around = last;
+    for (int s = 0; s < warmSamples && around != null; s++) {
+      if (cycle.exactSlopes(around, junctions, s * devices * cycle.samples)) {
+        System.arraycopy(cycle.slopes, 0, slopes, s * blocks * blocks, blocks * blocks);
+      }
+    }
+    refined = true;
+  }
+
+  /** Mean over the audio period of the voltage across a port's junction, in V. */
+  public double meanVolts(int port) {
+    double sum = 0;
+    for (int s = 0; s < warmSamples; s++) {
+      sum += state[port * warmSamples + s];
+    }
+    return sum / warmSamples;
   }
 
   /** What the held node gives at one audio sample, in A, real part. */
@@ -127,6 +147,9 @@ public final class EnvelopeSolver {
   public void keep() {
     System.arraycopy(state, 0, keptState, 0, state.length);
     System.arraycopy(junctions, 0, keptJunctions, 0, junctions.length);
+    if (warm && warmSamples > 1 && last != null) {
+      joint.keep(last);
+    }
     keptWarm = warm;
     keptSamples = warmSamples;
   }
@@ -175,10 +198,16 @@ public final class EnvelopeSolver {
       double toneRadians) {
     cycle.prepare(around, laws);
     gentleVolts = laws[0].gentleVolts();
+    last = around;
+    refined = false;
     int wanted = depth == 0 ? 1 : samples;
     boolean solved = false;
     if (warm && warmSamples == wanted) {
-      solved = newton(around, peakVolts, depth, toneRadians, wanted);
+      solved = joint.solve(around, peakVolts, depth, toneRadians, wanted);
+      if (!solved) {
+        joint.undo();
+        solved = newton(around, peakVolts, depth, toneRadians, wanted);
+      }
     }
     if (!solved) {
       solved =
@@ -282,11 +311,8 @@ public final class EnvelopeSolver {
 
   private boolean newton(
       CarrierSurroundings around, double peakVolts, double depth, double toneRadians, int count) {
-    kernels(around, toneRadians, count);
-    for (int s = 0; s < count; s++) {
-      envelope[s] = peakVolts * (1 + depth * Math.cos(2 * Math.PI * s / count));
-    }
-    int size = (around.tuned ? blocks : devices) * count;
+    balance.begin(around, peakVolts, depth, toneRadians, count);
+    int size = balance.size(around);
     double norm = evaluate(around, state, count);
     double wanted = 1e-9 * peakVolts + 1e-12;
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
@@ -296,11 +322,11 @@ public final class EnvelopeSolver {
       if (norm < wanted) {
         return true;
       }
-      assemble(around, count);
+      balance.assemble(around, slopes, solver);
       if (!solver.factor()) {
         return false;
       }
-      System.arraycopy(residual, 0, trial, 0, size);
+      System.arraycopy(balance.residual, 0, trial, 0, size);
       solver.solve(trial, 0);
       double former = norm;
       norm = advance(around, size, count, former);
@@ -332,45 +358,11 @@ public final class EnvelopeSolver {
     return norm;
   }
 
-  private void kernels(CarrierSurroundings around, double toneRadians, int count) {
-    int top = count == 1 ? 0 : count / 2 - 1;
-    for (int q = 0; q < count; q++) {
-      double rate = 0;
-      for (int h = 1; h <= top; h++) {
-        rate -= 2.0 / count * h * toneRadians * Math.sin(2 * Math.PI * h * q / count);
-      }
-      rateKernel[q] = rate;
-      rateKernel[count + q] = rate;
-      for (int i = 0; i < devices; i++) {
-        for (int j = 0; j < devices; j++) {
-          int at = (i * devices + j) * 2 * count;
-          audioKernel[at + q] = audioOhms(around, i, j, q, count, top);
-          audioKernel[at + count + q] = audioKernel[at + q];
-        }
-      }
-    }
-  }
-
-  private static double audioOhms(
-      CarrierSurroundings around, int i, int j, int q, int count, int top) {
-    double own = i == j && q == 0 ? around.seriesOhms[i] : 0;
-    double ohms = around.audioRealOhms[around.index(0, i, j)];
-    for (int h = 1; h <= top; h++) {
-      double angle = 2 * Math.PI * h * q / count;
-      int entry = around.index(h, i, j);
-      ohms +=
-          2
-              * (around.audioRealOhms[entry] * Math.cos(angle)
-                  - around.audioImaginaryOhms[entry] * Math.sin(angle));
-    }
-    return ohms / count + own;
-  }
-
   /** Solves every cycle and fills the residual; returns its largest entry, in volts. */
   private double evaluate(CarrierSurroundings around, double[] x, int count) {
     int row = devices * cycle.samples;
     for (int s = 0; s < count; s++) {
-      double real = around.tuned ? x[devices * count + s] : envelope[s];
+      double real = around.tuned ? x[devices * count + s] : balance.envelope[s];
       double imaginary = around.tuned ? x[(devices + 1) * count + s] : 0;
       if (!cycle.solve(around, x, s, count, real, imaginary, junctions, s * row)) {
         Arrays.fill(junctions, s * row, (s + 1) * row, 0);
@@ -380,11 +372,10 @@ public final class EnvelopeSolver {
       }
       keep(around, s, count, real, imaginary);
     }
-    double largest = audioResidual(around, x, count);
-    return around.tuned ? Math.max(largest, tankResidual(around, x, count)) : largest;
+    return balance.residuals(around, x, meanAmperes, drawn);
   }
 
-  private void keep(CarrierSurroundings around, int s, int count, double real, double imaginary) {
+  void keep(CarrierSurroundings around, int s, int count, double real, double imaginary) {
     for (int d = 0; d < devices; d++) {
       meanAmperes[d * count + s] = cycle.mean[d];
     }
@@ -397,107 +388,6 @@ public final class EnvelopeSolver {
         cycle.drawnImaginary
             + around.loadRealSiemens * imaginary
             + around.loadImaginarySiemens * real;
-  }
-
-  private double audioResidual(CarrierSurroundings around, double[] x, int count) {
-    double largest = 0;
-    for (int i = 0; i < devices; i++) {
-      for (int s = 0; s < count; s++) {
-        double sum = x[i * count + s] - around.openVolts[i];
-        for (int j = 0; j < devices; j++) {
-          int kernel = (i * devices + j) * 2 * count + count + s;
-          for (int r = 0; r < count; r++) {
-            sum += audioKernel[kernel - r] * meanAmperes[j * count + r];
-          }
-        }
-        residual[i * count + s] = sum;
-        largest = Math.max(largest, Math.abs(sum));
-      }
-    }
-    return largest;
-  }
-
-  /** The tuned feed's balance, times Rp so that it stands in volts. */
-  private double tankResidual(CarrierSurroundings around, double[] x, int count) {
-    double largest = 0;
-    double turn = 2 * around.tankFarads * around.detuningRadians;
-    for (int s = 0; s < count; s++) {
-      double rateReal = 0;
-      double rateImaginary = 0;
-      for (int r = 0; r < count; r++) {
-        rateReal += rateKernel[count + s - r] * x[devices * count + r];
-        rateImaginary += rateKernel[count + s - r] * x[(devices + 1) * count + r];
-      }
-      double real = x[devices * count + s];
-      double imaginary = x[(devices + 1) * count + s];
-      double first =
-          real
-              - envelope[s]
-              + around.tankOhms
-                  * (2 * around.tankFarads * rateReal + drawn[2 * s] - turn * imaginary);
-      double second =
-          imaginary
-              + around.tankOhms
-                  * (2 * around.tankFarads * rateImaginary + drawn[2 * s + 1] + turn * real);
-      residual[devices * count + s] = first;
-      residual[(devices + 1) * count + s] = second;
-      largest = Math.max(largest, Math.max(Math.abs(first), Math.abs(second)));
-    }
-    return largest;
-  }
-
-  private void assemble(CarrierSurroundings around, int count) {
-    int used = around.tuned ? blocks : devices;
-    int size = used * count;
-    solver.begin(size);
-    double[] a = solver.matrix;
-    for (int i = 0; i < devices; i++) {
-      for (int s = 0; s < count; s++) {
-        int row = (i * count + s) * size;
-        for (int b = 0; b < used; b++) {
-          for (int r = 0; r < count; r++) {
-            double entry = 0;
-            for (int j = 0; j < devices; j++) {
-              entry +=
-                  audioKernel[(i * devices + j) * 2 * count + count + s - r]
-                      * slopes[(r * blocks + j) * blocks + b];
-            }
-            a[row + b * count + r] = entry;
-          }
-        }
-        a[row + i * count + s] += 1;
-      }
-    }
-    if (around.tuned) {
-      assembleTank(around, count, size);
-    }
-  }
-
-  private void assembleTank(CarrierSurroundings around, int count, int size) {
-    double[] a = solver.matrix;
-    double storing = 2 * around.tankFarads * around.tankOhms;
-    double turn = storing * around.detuningRadians;
-    double ohms = around.tankOhms;
-    int realAt = devices * count;
-    int imaginaryAt = (devices + 1) * count;
-    for (int s = 0; s < count; s++) {
-      int real = (realAt + s) * size;
-      int imaginary = (imaginaryAt + s) * size;
-      Arrays.fill(a, real, real + size, 0);
-      Arrays.fill(a, imaginary, imaginary + size, 0);
-      for (int r = 0; r < count; r++) {
-        a[real + realAt + r] += storing * rateKernel[count + s - r];
-        a[imaginary + imaginaryAt + r] += storing * rateKernel[count + s - r];
-      }
-      for (int b = 0; b < blocks; b++) {
-        a[real + b * count + s] += ohms * slopes[(s * blocks + devices) * blocks + b];
-        a[imaginary + b * count + s] += ohms * slopes[(s * blocks + devices + 1) * blocks + b];
-      }
-      a[real + realAt + s] += 1 + ohms * around.loadRealSiemens;
-      a[real + imaginaryAt + s] += -turn - ohms * around.loadImaginarySiemens;
-      a[imaginary + imaginaryAt + s] += 1 + ohms * around.loadRealSiemens;
-      a[imaginary + realAt + s] += turn + ohms * around.loadImaginarySiemens;
-    }
   }
 
   private void collect(CarrierSurroundings around, int count) {
@@ -513,16 +403,8 @@ public final class EnvelopeSolver {
     }
     for (int h = 0; h < samples / 2; h++) {
       for (int d = 0; d < devices; d++) {
-        double real = 0;
-        double imaginary = 0;
-        for (int s = 0; s < samples; s++) {
-          double angle = 2 * Math.PI * ((h * s) % samples) / samples;
-          real += meanAmperes[d * samples + s] * Math.cos(angle);
-          imaginary -= meanAmperes[d * samples + s] * Math.sin(angle);
-        }
-        double scale = (h == 0 ? 1.0 : 2.0) / samples;
-        audioReal[h * devices + d] = scale * real;
-        audioImaginary[h * devices + d] = scale * imaginary;
+        audioReal[h * devices + d] = balance.harmonic(meanAmperes, d * samples, h, true);
+        audioImaginary[h * devices + d] = balance.harmonic(meanAmperes, d * samples, h, false);
       }
     }
     Arrays.fill(reversePeakVolts, 0);

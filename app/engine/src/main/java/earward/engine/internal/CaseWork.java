@@ -234,9 +234,7 @@ final class CaseWork {
     if (!detection.solveModulated(peakVolts(), depth(), toneRadians())) {
       return fail("the detector's cycle did not settle");
     }
-    for (int j = 0; j < network.ports.length; j++) {
-      stage().drivenAmperes()[j] = detection.modulated.audioReal[j];
-    }
+    detection.means(stage().drivenAmperes());
     return true;
   }
 

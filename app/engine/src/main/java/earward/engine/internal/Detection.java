@@ -5,6 +5,7 @@ import earward.engine.detection.EnvelopeSolver;
 import earward.engine.detection.PortLaw;
 import earward.engine.law.CarrierDriven;
 import earward.engine.law.DirectStage;
+import earward.engine.linear.RealLu;
 import java.util.Arrays;
 
 /** The carrier-driven devices of one case: their surroundings and both of their solvers. */
@@ -20,7 +21,12 @@ final class Detection {
    */
   private static final int LONE_CARRIER_SAMPLES = 64;
 
+  /** Impedance at DC above which a port has no load but what leaks. */
+  private static final double FLOATING_OHMS = 1e9;
+
   private final Network network;
+  private final RealLu conductances;
+  private final double[] means;
   final EnvelopeSolver modulated;
   final EnvelopeSolver carrierOnly;
   final CarrierSurroundings around;
@@ -30,6 +36,8 @@ final class Detection {
   Detection(Network network, DirectStage stage) {
     this.network = network;
     int ports = network.ports.length;
+    conductances = new RealLu(ports);
+    means = new double[ports];
     modulated = new EnvelopeSolver(ports, CARRIER_SAMPLES, AUDIO_SAMPLES, false);
     carrierOnly = new EnvelopeSolver(ports, LONE_CARRIER_SAMPLES, 2, true);
     around =
@@ -75,6 +83,34 @@ final class Detection {
         around.audioImaginaryOhms[around.index(0, i, j)] = 0;
         around.openVolts[i] += ohms * stage.drivenAmperes()[j];
       }
+    }
+  }
+
+  /**
+   * Writes the mean currents. Between floating capacitors a mean is the small difference of large
+   * ones, and the voltage there hangs on it: then the means are taken from the solved voltages,
+   * which are sure, by the conductances at DC.
+   */
+  void means(double[] amperes) {
+    int ports = network.ports.length;
+    double most = 0;
+    for (int i = 0; i < ports; i++) {
+      amperes[i] = modulated.audioReal[i];
+      most = Math.max(most, Math.abs(around.audioRealOhms[around.index(0, i, i)]));
+    }
+    if (most < FLOATING_OHMS) {
+      return;
+    }
+    conductances.clear();
+    for (int i = 0; i < ports; i++) {
+      means[i] = around.openVolts[i] - modulated.meanVolts(i) - around.seriesOhms[i] * amperes[i];
+      for (int j = 0; j < ports; j++) {
+        conductances.add(i, j, around.audioRealOhms[around.index(0, i, j)]);
+      }
+    }
+    if (conductances.factor()) {
+      conductances.solve(means);
+      System.arraycopy(means, 0, amperes, 0, ports);
     }
   }
 
