@@ -2,6 +2,7 @@ package earward.command;
 
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import earward.block.Conditions;
+import earward.block.law.ToneCurve;
 import earward.kit.design.KitConditions;
 
 /** The conditions of a kit, for programs. */
@@ -10,8 +11,10 @@ final class ConditionsJson {
 
   static ObjectNode of(KitConditions conditions) {
     Conditions core = conditions.core();
-    return JsonOut.object()
-        .put("carrierHertz", core.carrierHertz())
+    ToneCurve curve =
+        conditions.wanted().curve().orElseGet(() -> ToneCurve.lowPass(core.highestToneHertz()));
+    ObjectNode node = JsonOut.object();
+    node.put("carrierHertz", core.carrierHertz())
         .put("testToneHertz", core.toneHertz())
         .put("lowestToneHertz", core.lowestToneHertz())
         .put("highestToneHertz", core.highestToneHertz())
@@ -23,6 +26,18 @@ final class ConditionsJson {
         .put("ambientCelsius", core.ambientCelsius())
         .put("highestAmbientCelsius", core.highestAmbientCelsius())
         .put("wantedWatts", core.wantedWatts())
-        .put("frontEndSupply", conditions.frontEndSupply().key());
+        .put("frontEndSupply", conditions.frontEndSupply().key())
+        .put("frontEnd", frontEnd(conditions))
+        .put("curve", curve.kind().key());
+    boolean corner = curve.kind() == ToneCurve.Kind.LOW_PASS;
+    JsonOut.put(node, "curveCornerHertz", corner ? curve.cornerHertz() : Double.NaN);
+    return node.put("listeningMetres", conditions.wanted().listeningMetres());
+  }
+
+  private static String frontEnd(KitConditions conditions) {
+    if (conditions.circuits().isPresent()) {
+      return "tuned-circuits";
+    }
+    return conditions.sidebands().isEmpty() ? "flat" : "points";
   }
 }

@@ -116,6 +116,8 @@ final class FiguresJson {
     put(node, "distortionFractionTest", PATH, Quantity.DISTORTION, TEST);
     put(node, "lowEdgeHertz", PATH, Quantity.LOW_EDGE_HERTZ, TEST);
     put(node, "highEdgeHertz", PATH, Quantity.HIGH_EDGE_HERTZ, TEST);
+    put(node, "responseDeviationDecibels", PATH, Quantity.RESPONSE_DEVIATION_DECIBELS, TEST);
+    put(node, "responseDeviationHertz", PATH, Quantity.RESPONSE_DEVIATION_HERTZ, TEST);
     put(node, "largestCleanDepthFraction", PATH, Quantity.CLEAN_DEPTH, TEST);
     CleanDepthLimit.of(kit.solved())
         .ifPresentOrElse(

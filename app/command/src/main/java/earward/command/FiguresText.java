@@ -13,6 +13,7 @@ import earward.block.figure.Quantity;
 import earward.block.quantity.Unit;
 import earward.engine.CircuitPart;
 import earward.engine.Seam;
+import earward.kit.design.KitConditions;
 import earward.kit.path.Assembly;
 import earward.kit.path.PlacedTestPoint;
 import earward.kit.review.CleanDepthLimit;
@@ -99,11 +100,18 @@ final class FiguresText {
     CaseName listening = new CaseName("listening");
     TextTable table = new TextTable().row("", "");
     table.row("distortion of the test signal", shown(path, Quantity.DISTORTION, TEST));
+    KitConditions conditions = assembly.design().conditions();
+    boolean alone = conditions.sidebands().isEmpty() && conditions.circuits().isEmpty();
     table.row(
-        "band, -3 dB",
+        "band, -3 dB" + (alone ? " (the front end is not given)" : " (with the front end)"),
         shown(path, Quantity.LOW_EDGE_HERTZ, TEST)
             + " to "
             + shown(path, Quantity.HIGH_EDGE_HERTZ, TEST));
+    table.row(
+        "largest deviation from the curve wanted",
+        shown(path, Quantity.RESPONSE_DEVIATION_DECIBELS, TEST)
+            + " at "
+            + shown(path, Quantity.RESPONSE_DEVIATION_HERTZ, TEST));
     table.row(
         "largest clean modulation (3 %)",
         shown(path, Quantity.CLEAN_DEPTH, TEST)

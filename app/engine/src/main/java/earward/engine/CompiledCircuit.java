@@ -65,7 +65,8 @@ public final class CompiledCircuit {
   }
 
   /**
-   * The small-signal audio response from the envelope of the feed, at no load, to a place.
+   * The small-signal audio response from the envelope of the feed, at no load, to a place, with
+   * what the front end leaves of the sidebands.
    *
    * @param values a row of values
    * @param caseName the case whose operating point holds

@@ -38,7 +38,9 @@ final class Readings {
           SECOND_CARRIER_RMS_VOLTS,
           THIRD_CARRIER_RMS_VOLTS,
           LOW_EDGE_HERTZ,
-          HIGH_EDGE_HERTZ ->
+          HIGH_EDGE_HERTZ,
+          RESPONSE_DEVIATION_DECIBELS,
+          RESPONSE_DEVIATION_HERTZ ->
           atNodes(name);
       case ONWARD_OHMS, BACKWARD_OHMS, LOADING_LOSS_DECIBELS -> atSeam(name);
       case HEADROOM_DECIBELS,
@@ -100,6 +102,8 @@ final class Readings {
       case THIRD_CARRIER_RMS_VOLTS -> work -> CarrierLevels.rmsVolts(work, 3, plus, minus);
       case LOW_EDGE_HERTZ -> work -> SmallResponse.edge(work, plus, minus, false);
       case HIGH_EDGE_HERTZ -> work -> SmallResponse.edge(work, plus, minus, true);
+      case RESPONSE_DEVIATION_DECIBELS -> work -> SmallResponse.deviation(work, plus, minus, false);
+      case RESPONSE_DEVIATION_HERTZ -> work -> SmallResponse.deviation(work, plus, minus, true);
       default -> NONE;
     };
   }

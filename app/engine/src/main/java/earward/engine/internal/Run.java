@@ -84,7 +84,7 @@ public final class Run {
     return Finding.of(severity, code, caseName, sentence.formatted(caseName, what));
   }
 
-  /** The small-signal response at a place, per volt of the recovered envelope's drive. */
+  /** The small-signal response at a place, per volt of the envelope before the front end. */
   public Response response(double[] values, CaseName caseName, String place, double[] hertz) {
     List<Response.Point> points = new ArrayList<>();
     for (CaseWork work : works) {
@@ -93,7 +93,7 @@ public final class Run {
         int[] nodes = plan.network.place(place);
         for (double each : hertz) {
           if (work.solved() && SmallResponse.at(work, each)) {
-            double scale = 1 / work.peakVolts();
+            double scale = SmallResponse.frontEnd(work, each) / work.peakVolts();
             points.add(
                 new Response.Point(
                     each,

@@ -1,11 +1,16 @@
 package earward.engine.internal;
 
+import earward.block.law.ToneCurve;
+
 /** The response of all unknowns to a small modulation of the carrier. */
 final class SmallResponse {
   private static final double LOWEST_HERTZ = 5;
   private static final double HIGHEST_HERTZ = 100e3;
   static final int POINTS = 48;
   private static final int HALVINGS = 12;
+
+  /** Frequencies at which a response is held against the curve wanted. */
+  private static final int DEVIATION_POINTS = 24;
 
   private SmallResponse() {}
 
@@ -57,10 +62,40 @@ final class SmallResponse {
 
   private static double magnitude(CaseWork work, double hertz, int plus, int minus) {
     return at(work, hertz)
-        ? Math.hypot(
-            work.alternating.re(plus) - work.alternating.re(minus),
-            work.alternating.im(plus) - work.alternating.im(minus))
+        ? frontEnd(work, hertz)
+            * Math.hypot(
+                work.alternating.re(plus) - work.alternating.re(minus),
+                work.alternating.im(plus) - work.alternating.im(minus))
         : Double.NaN;
+  }
+
+  /** What the front end leaves of the sidebands of a tone. */
+  static double frontEnd(CaseWork work, double hertz) {
+    return work.network.circuit.frontEnd().share(hertz, work.row[work.network.carrierHertz]);
+  }
+
+  /**
+   * Where the response between the lowest and the highest tone leaves the wanted curve most, both
+   * over their values at the test tone: the deviation in dB with its sign, or its frequency in Hz.
+   */
+  static double deviation(CaseWork work, int plus, int minus, boolean where) {
+    double low = work.row[work.network.lowestTone];
+    double high = work.row[work.network.highestTone];
+    double tone = Math.min(high, Math.max(low, work.row[work.network.tone]));
+    ToneCurve curve = work.network.circuit.curve();
+    double reference = 20 * Math.log10(magnitude(work, tone, plus, minus)) - curve.decibels(tone);
+    double step = Math.pow(high / low, 1.0 / (DEVIATION_POINTS - 1));
+    double most = 0;
+    double at = tone;
+    for (int i = 0; i < DEVIATION_POINTS; i++) {
+      double hertz = low * Math.pow(step, i);
+      double here = 20 * Math.log10(magnitude(work, hertz, plus, minus)) - curve.decibels(hertz);
+      if (!(Math.abs(here - reference) <= Math.abs(most))) {
+        most = here - reference;
+        at = hertz;
+      }
+    }
+    return where && !Double.isNaN(most) ? at : most;
   }
 
   /**

@@ -1,8 +1,10 @@
 package earward.kit.file;
 
 import earward.block.Conditions;
+import earward.block.law.ToneCurve;
 import earward.block.quantity.Unit;
 import earward.kit.design.AsWritten;
+import earward.kit.design.FrontEndCircuits;
 import earward.kit.design.FrontEndSupply;
 import earward.kit.design.KitConditions;
 import earward.kit.design.SidebandPoint;
@@ -15,7 +17,11 @@ import java.util.Optional;
 final class ConditionsForm {
   private static final String FRONT_END = "front end powered by";
   private static final String SIDEBANDS = "front end sidebands";
+  private static final String CIRCUITS = "front end tuned circuits";
   private static final String WANTED = "wanted";
+  private static final String CURVE = "curve";
+  private static final String CORNER = "curve corner";
+  private static final String METRES = "listening distance in metres";
 
   private ConditionsForm() {}
 
@@ -25,10 +31,14 @@ final class ConditionsForm {
             FRONT_END, FrontEndSupply.values(), FrontEndSupply::key, FrontEndSupply.NOT_ANSWERED);
     Conditions core = core(in);
     List<SidebandPoint> sidebands = sidebands(in);
+    Optional<MembersReader> inside = in.open(CIRCUITS);
+    Optional<FrontEndCircuits> circuits =
+        inside.isPresent() ? Optional.of(circuits(inside.get())) : Optional.empty();
     Optional<MembersReader> wanted = in.open(WANTED);
-    WantedLimits limits = wanted.isPresent() ? wanted(wanted.get()) : WantedLimits.USUAL;
+    WantedLimits limits =
+        wanted.isPresent() ? wanted(wanted.get(), core.highestToneHertz()) : WantedLimits.USUAL;
     try {
-      return new KitConditions(core, frontEnd, sidebands, limits, in.written());
+      return new KitConditions(core, frontEnd, sidebands, circuits, limits, in.written());
     } catch (IllegalArgumentException e) {
       throw in.impossible(e);
     }
@@ -71,7 +81,35 @@ final class ConditionsForm {
     return points;
   }
 
-  private static WantedLimits wanted(MembersReader in) throws DesignFileException {
+  private static FrontEndCircuits circuits(MembersReader in) throws DesignFileException {
+    double number = in.requiredQuantity("number", Unit.NUMBER);
+    double quality = in.requiredQuantity("quality", Unit.NUMBER);
+    in.noteUnknown();
+    try {
+      if (number != Math.rint(number)) {
+        throw new IllegalArgumentException(
+            "the front end has " + number + " tuned circuits; wanted is a whole number");
+      }
+      return new FrontEndCircuits((int) number, quality);
+    } catch (IllegalArgumentException e) {
+      throw in.impossible(e);
+    }
+  }
+
+  /** The curve that is named; a corner is of a low-pass only, usually the highest tone. */
+  private static Optional<ToneCurve> curve(MembersReader in, double highestToneHertz)
+      throws DesignFileException {
+    double corner = in.quantity(CORNER, Unit.HERTZ, highestToneHertz);
+    if (in.find(CURVE).isEmpty() && in.find(CORNER).isEmpty()) {
+      return Optional.empty();
+    }
+    ToneCurve.Kind kind =
+        in.choice(CURVE, ToneCurve.Kind.values(), ToneCurve.Kind::key, ToneCurve.Kind.LOW_PASS);
+    return Optional.of(new ToneCurve(kind, corner));
+  }
+
+  private static WantedLimits wanted(MembersReader in, double highestToneHertz)
+      throws DesignFileException {
     WantedLimits usual = WantedLimits.USUAL;
     try {
       WantedLimits limits =
@@ -79,7 +117,9 @@ final class ConditionsForm {
               in.quantity("low edge", Unit.HERTZ, usual.lowEdgeHertz()),
               in.quantity("listening level", Unit.WATT, usual.listeningWatts()),
               in.quantity("battery life", Unit.HOUR),
-              in.quantity("distortion", Unit.FRACTION, usual.distortion()));
+              in.quantity("distortion", Unit.FRACTION, usual.distortion()),
+              curve(in, highestToneHertz),
+              in.quantity(METRES, Unit.NUMBER, usual.listeningMetres()));
       in.noteUnknown();
       return limits;
     } catch (IllegalArgumentException e) {
@@ -108,6 +148,7 @@ final class ConditionsForm {
             Math.max(40, core.ambientCelsius()))
         .quantity("wanted output", core.wantedWatts(), Unit.WATT, 0.1)
         .nested(SIDEBANDS, sidebands(conditions))
+        .nested(CIRCUITS, circuits(conditions))
         .nested(WANTED, wanted(conditions));
     return out.done();
   }
@@ -133,6 +174,17 @@ final class ConditionsForm {
         .done();
   }
 
+  private static Json circuits(KitConditions conditions) {
+    MembersWriter out = new MembersWriter(Kept.inner(conditions.written(), CIRCUITS));
+    Optional<FrontEndCircuits> circuits = conditions.circuits();
+    if (circuits.isEmpty()) {
+      return out.skip("number").skip("quality").done();
+    }
+    return out.quantity("number", circuits.get().number(), Unit.NUMBER)
+        .quantity("quality", circuits.get().quality(), Unit.NUMBER)
+        .done();
+  }
+
   private static Json wanted(KitConditions conditions) {
     WantedLimits limits = conditions.wanted();
     WantedLimits usual = WantedLimits.USUAL;
@@ -144,7 +196,16 @@ final class ConditionsForm {
     } else {
       out.skip("battery life");
     }
-    return out.quantity("distortion", limits.distortion(), Unit.FRACTION, usual.distortion())
+    out.quantity("distortion", limits.distortion(), Unit.FRACTION, usual.distortion());
+    if (limits.curve().isPresent()) {
+      ToneCurve curve = limits.curve().get();
+      double highest = conditions.core().highestToneHertz();
+      out.text(CURVE, curve.kind().key(), ToneCurve.Kind.LOW_PASS.key())
+          .quantity(CORNER, curve.cornerHertz(), Unit.HERTZ, highest);
+    } else {
+      out.skip(CURVE).skip(CORNER);
+    }
+    return out.quantity(METRES, limits.listeningMetres(), Unit.NUMBER, usual.listeningMetres())
         .done();
   }
 }

@@ -157,7 +157,7 @@ public final class Assembler {
       findings.addAll(testPoints.findings());
     }
     CircuitBuilder builder = new CircuitBuilder(path, beside, testPoints);
-    Circuit circuit = builder.build();
+    Circuit circuit = builder.build(design.conditions());
     if (path.size() == design.path().size()) {
       findings.addAll(builder.findings());
     }

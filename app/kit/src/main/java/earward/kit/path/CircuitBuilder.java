@@ -7,14 +7,18 @@ import earward.block.check.Finding;
 import earward.block.device.Loudspeaker;
 import earward.block.device.Terminal;
 import earward.block.figure.FigureName;
+import earward.block.law.ToneCurve;
 import earward.block.wiring.Nodes;
 import earward.block.wiring.Port;
 import earward.block.wiring.WiredPart;
 import earward.block.wiring.Wiring;
 import earward.engine.Circuit;
 import earward.engine.CircuitPart;
+import earward.engine.FrontEnd;
 import earward.engine.Probe;
 import earward.engine.Seam;
+import earward.kit.design.FrontEndCircuits;
+import earward.kit.design.KitConditions;
 import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.LinkedHashMap;
@@ -48,7 +52,7 @@ final class CircuitBuilder {
     return findings;
   }
 
-  Circuit build() {
+  Circuit build(KitConditions conditions) {
     List<CircuitPart> parts = new ArrayList<>();
     Stream.concat(path.stream(), beside.stream()).forEach(block -> addParts(block, parts));
     testPoints.nodes().forEach((place, node) -> probe(place, node, Nodes.GROUND));
@@ -60,7 +64,26 @@ final class CircuitBuilder {
     if (!path.isEmpty()) {
       probePath(path.get(path.size() - 1));
     }
-    return new Circuit(parts, seams, List.copyOf(probes.values()));
+    return new Circuit(
+        parts,
+        seams,
+        List.copyOf(probes.values()),
+        frontEnd(conditions),
+        conditions
+            .wanted()
+            .curve()
+            .orElseGet(() -> ToneCurve.lowPass(conditions.core().highestToneHertz())));
+  }
+
+  private static FrontEnd frontEnd(KitConditions conditions) {
+    if (conditions.circuits().isPresent()) {
+      FrontEndCircuits circuits = conditions.circuits().get();
+      return new FrontEnd.TunedCircuits(circuits.number(), circuits.quality());
+    }
+    return new FrontEnd.Points(
+        conditions.sidebands().stream()
+            .map(point -> new FrontEnd.Point(point.offsetHertz(), point.decibels()))
+            .toList());
   }
 
   private static Wiring wiring(PlacedBlock block) {

@@ -127,7 +127,14 @@ final class DerivedFigures {
                     CircuitBuilder.PATH,
                     Quantity.SOUND_DECIBELS,
                     caseName,
-                    model.sensitivityDecibels() + 10 * Math.log10(watts)));
+                    model.sensitivityDecibels()
+                        + 10 * Math.log10(watts)
+                        - 20 * Math.log10(metres())));
+  }
+
+  /** How far people sit from the loudspeaker. */
+  private double metres() {
+    return assembly.design().conditions().wanted().listeningMetres();
   }
 
   private Optional<LoudspeakerModel> loudspeaker() {

@@ -26,7 +26,11 @@ public final class KitSolver {
   /** What an edit does not wait for: searches, and what takes many solves. */
   private static final Set<Quantity> LATER =
       EnumSet.of(
-          Quantity.CLEAN_DEPTH, Quantity.NOISE_RMS_VOLTS, Quantity.A_WEIGHTED_NOISE_RMS_VOLTS);
+          Quantity.CLEAN_DEPTH,
+          Quantity.NOISE_RMS_VOLTS,
+          Quantity.A_WEIGHTED_NOISE_RMS_VOLTS,
+          Quantity.RESPONSE_DEVIATION_DECIBELS,
+          Quantity.RESPONSE_DEVIATION_HERTZ);
 
   private KitSolver() {}
 
@@ -100,7 +104,8 @@ public final class KitSolver {
   /**
    * The kit compiled for the figures that an edit shows at once: all of {@link #compile} at rest,
    * at the test signal and at full output, but for the largest clean modulation, which is a search,
-   * and for noise. They are the same figures; the rest is left to a solve that may take longer.
+   * noise, and the deviation from the curve wanted. They are the same figures; the rest is left to
+   * a solve that may take longer.
    *
    * @param assembly a complete one
    * @throws CircuitException with a finding when the circuit makes no sense to the engine

@@ -67,7 +67,9 @@ final class Places {
           NOISE_RMS_VOLTS,
           A_WEIGHTED_NOISE_RMS_VOLTS,
           LOW_EDGE_HERTZ,
-          HIGH_EDGE_HERTZ ->
+          HIGH_EDGE_HERTZ,
+          RESPONSE_DEVIATION_DECIBELS,
+          RESPONSE_DEVIATION_HERTZ ->
           Kind.NODE;
       case DC_AMPERES,
           DISSIPATION_WATTS,

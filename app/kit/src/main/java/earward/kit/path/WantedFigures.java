@@ -77,6 +77,8 @@ final class WantedFigures {
     if (probe.name().equals(CircuitBuilder.PATH)) {
       add(probe.name(), Quantity.LOW_EDGE_HERTZ, List.of(TEST));
       add(probe.name(), Quantity.HIGH_EDGE_HERTZ, List.of(TEST));
+      add(probe.name(), Quantity.RESPONSE_DEVIATION_DECIBELS, List.of(TEST));
+      add(probe.name(), Quantity.RESPONSE_DEVIATION_HERTZ, List.of(TEST));
     }
   }
 

@@ -43,6 +43,28 @@ class DesignFaultsTest {
         arguments("\"id\": \"detector\"", "\"id\": \"De t\"", "impossible-value", 11, 5, "'De t'"),
         arguments("\"id\": \"detector\",", "", "missing-member", 11, 5, "no member 'id'"),
         arguments("\"type\": \"detector.envelope-diode\",", "", "missing-member", 11, 5, "'type'"),
+        arguments(
+            "\"carrier\"",
+            "\"front end tuned circuits\": { \"number\": 1.5, \"quality\": 60 }, \"carrier\"",
+            "impossible-value",
+            0,
+            0,
+            "1.5 tuned circuits; wanted is a whole number"),
+        arguments(
+            "\"carrier\"",
+            "\"front end tuned circuits\": { \"number\": 2, \"quality\": 60 },"
+                + " \"front end sidebands\": [{ \"offset\": 4000, \"response\": -6 }], \"carrier\"",
+            "impossible-value",
+            0,
+            0,
+            "both by points and by its tuned circuits"),
+        arguments(
+            "\"carrier\"",
+            "\"wanted\": { \"curve\": \"bent\" }, \"carrier\"",
+            "unknown-choice",
+            0,
+            0,
+            "bent"),
         arguments("[\n", "{\n", "broken-json", 0, 0, "the JSON is broken"),
         arguments("\"path\": [", "\"path\": [ 7,", "wrong-form", 10, 13, "no JSON object"),
         arguments("\"BAT46\"", "{ \"material\": \"tin\" }", "missing-member", 0, 0, "saturation"),

@@ -7,6 +7,8 @@ import com.fasterxml.jackson.databind.ObjectMapper;
 import earward.block.device.DiodeMaterial;
 import earward.block.device.DiodeModel;
 import earward.block.device.ToleranceClass;
+import earward.block.law.ToneCurve;
+import earward.kit.design.FrontEndCircuits;
 import earward.kit.design.FrontEndSupply;
 import earward.kit.design.KitDesign;
 import earward.kit.design.SettingEntry;
@@ -40,6 +42,9 @@ class DesignRoundTripTest {
     assertThat(design.conditions().sidebands()).hasSize(2);
     assertThat(design.conditions().sidebands().get(1).offsetHertz()).isEqualTo(4500);
     assertThat(design.conditions().wanted().batteryHours()).hasValue(20);
+    assertThat(design.conditions().wanted().curve().orElseThrow().kind())
+        .isEqualTo(ToneCurve.Kind.SEVENTY_FIVE_MICROSECONDS);
+    assertThat(design.conditions().wanted().listeningMetres()).isEqualTo(2);
     assertThat(design.blocks())
         .extracting(block -> block.id())
         .containsExactly("feed", "detector", "mystery", "battery", "agc");
@@ -52,6 +57,16 @@ class DesignRoundTripTest {
     assertThat(design.references().ofTestPoint("detector.out")).contains("TP3");
     assertThat(design.sheet().paper()).isEqualTo(SheetOptions.Paper.LETTER);
     assertThat(design.bench().instruments().get(0).inputOhms()).isEqualTo(1e6);
+  }
+
+  @Test
+  void aFrontEndGivenByItsTunedCircuitsIsReadAndWrittenBack() throws Exception {
+    String circuits = "\"front end tuned circuits\": { \"number\": 3, \"quality\": \"60\" },";
+    String text = Samples.LEAST.replace("\"carrier\"", circuits + " \"carrier\"");
+    KitDesign design = Designs.read(text, Samples.NAME).design();
+    assertThat(design.conditions().circuits()).contains(new FrontEndCircuits(3, 60));
+    KitDesign again = Designs.read(Designs.text(design), Samples.NAME).design();
+    assertThat(again.conditions().circuits()).contains(new FrontEndCircuits(3, 60));
   }
 
   @Test

@@ -31,7 +31,8 @@ final class Samples {
             { "offset": "1 kHz", "response": "-0.5 dB", "why": "measured" },
             { "offset": "4500", "response": "-6 dB" }
           ],
-          "wanted": { "low edge": "120 Hz", "battery life": "20 h", "smell": "none" }
+          "wanted": { "low edge": "120 Hz", "battery life": "20 h", "smell": "none",
+            "curve": "75-microseconds", "listening distance in metres": 2 }
         },
         "path": [
           {

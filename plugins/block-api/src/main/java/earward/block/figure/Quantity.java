@@ -64,6 +64,10 @@ public enum Quantity {
   // of the path
   LOW_EDGE_HERTZ("low-edge-hertz", Unit.HERTZ),
   HIGH_EDGE_HERTZ("high-edge-hertz", Unit.HERTZ),
+  /** Largest deviation of the response from the curve wanted, within the audio band, with sign. */
+  RESPONSE_DEVIATION_DECIBELS("response-deviation-decibels", Unit.DECIBEL),
+  /** Where that is. */
+  RESPONSE_DEVIATION_HERTZ("response-deviation-hertz", Unit.HERTZ),
   OUTPUT_RMS_VOLTS("output-rms-volts", Unit.VOLT),
   OUTPUT_WATTS("output-watts", Unit.WATT),
   /** Test tone over the noise of the audio band, not weighted. */

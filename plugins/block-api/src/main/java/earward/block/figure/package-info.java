@@ -18,8 +18,11 @@
  * <tr><td></td><td>distortion: of the detector and of a clipping amplifier IC. A transistor, a
  *   field-effect transistor and an op-amp are linear about their rest: they add none, so this says
  *   nothing of crossover</td><td>signal, and only where more than 1 µV of tone arrives</td></tr>
- * <tr><td></td><td>low-edge-hertz, high-edge-hertz: of the way from the detector to there</td>
- *   <td>signal; none where nothing makes an edge</td></tr>
+ * <tr><td></td><td>low-edge-hertz, high-edge-hertz: of the way from the front end's sidebands to
+ *   there</td><td>signal; none where nothing makes an edge</td></tr>
+ * <tr><td></td><td>response-deviation-decibels, response-deviation-hertz: largest deviation from
+ *   the curve wanted, between lowest and highest tone, over that at the test tone</td>
+ *   <td>signal</td></tr>
  * <tr><td></td><td>noise-rms-volts (over the audio band of the conditions, not weighted),
  *   a-weighted-noise-rms-volts (22.4 Hz to 22.4 kHz): thermal noise of all resistances and of the
  *   feed's sidebands, shot noise of diodes and transistors, input noise of amplifiers; nothing of

@@ -55,7 +55,9 @@ final class FigurePlaces {
           NOISE_RMS_VOLTS,
           A_WEIGHTED_NOISE_RMS_VOLTS,
           LOW_EDGE_HERTZ,
-          HIGH_EDGE_HERTZ ->
+          HIGH_EDGE_HERTZ,
+          RESPONSE_DEVIATION_DECIBELS,
+          RESPONSE_DEVIATION_HERTZ ->
           unless(nodes.contains(place), place, "a node or test point; there are " + nodes);
       case DC_AMPERES, DISSIPATION_WATTS -> ofPart(place, Device.class);
       case JUNCTION_CELSIUS ->

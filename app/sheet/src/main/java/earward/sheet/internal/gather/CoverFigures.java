@@ -143,7 +143,7 @@ final class CoverFigures {
     if (onBattery()) {
       add(rows, "figures.clip-low", Quantity.CLIP_WATTS, CaseName.BATTERY_LOW);
     }
-    add(rows, "figures.sound", Quantity.SOUND_DECIBELS, CaseName.FULL_OUTPUT);
+    sound(rows);
     add(rows, "figures.test-output", Quantity.OUTPUT_WATTS, CaseName.TEST);
     add(rows, "figures.distortion", Quantity.DISTORTION, CaseName.TEST);
     band(rows);
@@ -180,6 +180,16 @@ final class CoverFigures {
               words.text("figures.band"),
               List.of(Amount.of(low, Unit.HERTZ), Amount.of(high, Unit.HERTZ)),
               ""));
+    }
+  }
+
+  private void sound(List<KeyFigure> rows) {
+    OptionalDouble level = figures.find(PATH, Quantity.SOUND_DECIBELS, CaseName.FULL_OUTPUT);
+    if (level.isPresent()) {
+      double metres = assembly.design().conditions().wanted().listeningMetres();
+      String label =
+          words.text("figures.sound", "metres", words.numbers().text(metres, Unit.NUMBER));
+      rows.add(KeyFigure.of(label, Amount.of(level, Unit.DECIBEL), ""));
     }
   }
 
