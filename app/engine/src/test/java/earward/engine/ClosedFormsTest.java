@@ -40,16 +40,23 @@ class ClosedFormsTest {
   @ParameterizedTest
   @CsvSource({
     "2e-7, 1.3, 0.01, 0.000277, 167.57",
+    "2e-7, 1.3, 0.05, 0.006748, 157.59",
     "2e-7, 1.3, 0.1, 0.025206, 136.86",
+    "2e-7, 1.3, 0.2, 0.084392, 105.08",
     "2e-7, 1.3, 0.5, 0.328039, 74.376",
     "2e-7, 1.3, 1, 0.787939, 62.953",
     "2e-7, 1.3, 2, 1.749865, 56.982",
     "2e-7, 1.3, 5, 4.701448, 53.129",
     "3e-6, 1.06, 0.05, 0.017726, 11.801",
     "3e-6, 1.06, 0.2, 0.137738, 24.598",
+    "3e-6, 1.06, 1, 0.887916, 42.679",
+    "2.117e-7, 1.016, 0.1, 0.034124, 105.68",
     "2.117e-7, 1.016, 0.5, 0.361330, 67.148",
+    "2.117e-7, 1.016, 1, 0.831094, 59.453",
+    "2.52e-9, 1.752, 0.2, 0.003532, 3010.7",
     "2.52e-9, 1.752, 0.5, 0.123772, 211.39",
-    "2.52e-9, 1.752, 1, 0.541060, 94.535"
+    "2.52e-9, 1.752, 1, 0.541060, 94.535",
+    "2.52e-9, 1.752, 5, 4.409397, 56.952"
   })
   void theExponentialDiodeDetectsAsBesselFunctionsSay(
       double saturation, double n, double peak, double direct, double inputKilohms) {
@@ -65,23 +72,37 @@ class ClosedFormsTest {
   }
 
   @ParameterizedTest
-  @CsvSource({"10, 0.6455", "20, 0.7518", "100, 0.9035"})
+  @CsvSource({
+    "1, 0.2172, 2.7563",
+    "2, 0.3365, 1.7248",
+    "5, 0.5170, 1.0741",
+    "10, 0.6455, 0.8352",
+    "20, 0.7518, 0.7004",
+    "50, 0.8529, 0.6042",
+    "100, 0.9035, 0.5643",
+    "200, 0.9376, 0.5400",
+    "500, 0.9654, 0.5215"
+  })
   void aNearlyStraightDiodeDetectsAsTheConductionAngleSays(
-      double loadOverDiode, double efficiency) {
-    // tan θ − θ = π·Rd/R (Terman; Radiotron Designer's Handbook ch. 27). Driven so hard that the
-    // exponential part is a hundredth of the level.
+      double loadOverDiode, double efficiency, double inputOverLoad) {
+    // tan θ − θ = π·Rd/R (Terman; Radiotron Designer's Handbook ch. 27), computed independently.
+    // Driven so hard that the exponential part is some thousandths of the level; beyond R/Rd = 500
+    // it is not, whatever the level that a detector bears.
     double load = 100e3;
+    double peak = 200;
     double[] figures =
         new TrialCircuit()
             .generator(1e-3, "in")
-            .diode("detector.d1", 1e-6, 1, load / loadOverDiode, "in", "out")
+            .diode("detector.d1", 1e-5, 1, load / loadOverDiode, "in", "out")
             .resistor("detector.r", load, "out", Circuit.GROUND)
             .capacitor("detector.c", 100e-9, "out", Circuit.GROUND)
-            .signal(20, 0, 400)
+            .signal(peak, 0, 400)
             .want("out", Quantity.DC_VOLTS)
+            .want("detector.d1", Quantity.CARRIER_INPUT_OHMS)
             .figures();
     assertThat(ConductionAngle.efficiency(loadOverDiode)).isCloseTo(efficiency, within(1e-4));
-    assertThat(figures[0] / 20).isCloseTo(efficiency, within(0.01));
+    assertThat(figures[0] / peak).isCloseTo(efficiency, within(0.005));
+    assertThat(figures[1] / load).isCloseTo(inputOverLoad, within(0.015 * inputOverLoad));
   }
 
   @Test
