@@ -4,7 +4,7 @@ package earward.block;
  * What the kit must work under and what is wanted of it, as far as a block may need it.
  *
  * @param carrierHertz carrier at the detector
- * @param toneHertz test tone
+ * @param toneHertz test tone, at most the highest one
  * @param highestToneHertz upper end of the audio band
  * @param lowestToneHertz lower end of the audio band
  * @param testDepth modulation depth of the test signal, from 0 to 1
@@ -29,10 +29,28 @@ public record Conditions(
     double ambientCelsius,
     double highestAmbientCelsius,
     double wantedWatts) {
+  /** Far beyond any receiver kit; what is said to be more is a slip of the pen. */
+  private static final double MOST_HERTZ = 1e9;
+
+  private static final double MOST_VOLTS = 1e3;
+  private static final double MOST_WATTS = 1e4;
+
   public Conditions {
     requireOrdered(0, lowestToneHertz, "lowest tone (Hz)");
+    requireAtMost(MOST_HERTZ, carrierHertz, "carrier (Hz)");
+    requireAtMost(MOST_VOLTS, weakPeakVolts, "weak carrier (V peak)");
+    requireAtMost(MOST_VOLTS, testPeakVolts, "test carrier (V peak)");
+    requireAtMost(MOST_VOLTS, strongPeakVolts, "strong carrier (V peak)");
+    requireAtMost(MOST_WATTS, wantedWatts, "output wanted (W)");
     requireOrdered(lowestToneHertz, highestToneHertz, "highest tone (Hz)");
     requireOrdered(0, toneHertz, "test tone (Hz)");
+    if (toneHertz > highestToneHertz) {
+      throw new IllegalArgumentException(
+          "test tone (Hz) is "
+              + toneHertz
+              + "; it must be at most the highest, "
+              + highestToneHertz);
+    }
     requireOrdered(highestToneHertz, carrierHertz, "carrier (Hz)");
     requireShare(testDepth, "test depth");
     requireShare(deepestDepth, "deepest depth");
@@ -46,6 +64,12 @@ public record Conditions(
   private static void requireOrdered(double below, double value, String what) {
     if (!(value > below) || Double.isInfinite(value)) {
       throw new IllegalArgumentException(what + " is " + value + "; it must be above " + below);
+    }
+  }
+
+  private static void requireAtMost(double most, double value, String what) {
+    if (value > most) {
+      throw new IllegalArgumentException(what + " is " + value + "; it must be at most " + most);
     }
   }
 

@@ -6,14 +6,18 @@ import earward.block.device.AmplifierRatings;
 import earward.block.device.ControlPoint;
 import earward.block.device.OutputSwing;
 import earward.block.quantity.Unit;
+import earward.kit.design.QuantityText;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** An audio amplifier IC's data as a JSON object. Gains are given in dB. */
 final class AmplifierForm {
   private static final String COMPENSATION = "compensation";
+  private static final String OPEN_LOOP = "open-loop gain";
+  private static final double MOST_DECIBELS = 160;
   private static final String FEEDBACK = "feedback resistor";
 
   private AmplifierForm() {}
@@ -58,12 +62,27 @@ final class AmplifierForm {
               + " set it");
     }
     return new AmplifierGain(
-        fixed.isPresent() ? ratio(fixed.getAsDouble()) : 1,
+        fixed.isPresent() ? ratio(within(in, "gain", fixed.getAsDouble())) : 1,
         feedback.orElse(Double.POSITIVE_INFINITY),
-        ratio(in.requiredQuantity("open-loop gain", Unit.DECIBEL)),
+        ratio(within(in, OPEN_LOOP, in.requiredQuantity(OPEN_LOOP, Unit.DECIBEL))),
         in.requiredQuantity("bandwidth", Unit.HERTZ),
         compensation(in),
         control(in));
+  }
+
+  private static double within(MembersReader in, String name, double decibels)
+      throws DesignFileException {
+    if (decibels > 0 && decibels <= MOST_DECIBELS) {
+      return decibels;
+    }
+    throw in.fault(
+        "impossible-value",
+        in.find(name).orElseThrow(),
+        name,
+        "is "
+            + QuantityText.format(decibels, Unit.DECIBEL, Locale.ROOT)
+            + "; it must be above 0 dB, at most "
+            + QuantityText.format(MOST_DECIBELS, Unit.DECIBEL, Locale.ROOT));
   }
 
   /** Upper edge times capacitance, from one pair of them. */

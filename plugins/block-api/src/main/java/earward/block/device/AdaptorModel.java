@@ -24,12 +24,13 @@ public record AdaptorModel(
     implements PartModel {
   public AdaptorModel {
     Require.named(name, "adaptor");
-    Require.above(0, ratedVolts, name + ": rated voltage (V)");
-    Require.above(0, ratedAmperes, name + ": rated current (A)");
+    Require.positive(1e3, ratedVolts, name + ": rated voltage (V)");
+    Require.positive(1e3, ratedAmperes, name + ": rated current (A)");
     Require.atLeast(ratedVolts, unloadedVolts, name + ": unloaded voltage (V)");
-    Require.above(0, internalOhms, name + ": internal resistance (Ω)");
-    Require.atLeast(0, rippleVolts, name + ": ripple (V)");
-    Require.above(0, rippleHertz, name + ": ripple frequency (Hz)");
+    Require.atMost(1e3, unloadedVolts, name + ": unloaded voltage (V)");
+    Require.positive(1e6, internalOhms, name + ": internal resistance (Ω)");
+    Require.notNegative(100, rippleVolts, name + ": ripple (V)");
+    Require.positive(1e7, rippleHertz, name + ": ripple frequency (Hz)");
   }
 
   @Override

@@ -24,10 +24,11 @@ public record AmplifierGain(
     double compensationHertzFarad,
     List<ControlPoint> control) {
   public AmplifierGain {
-    Require.above(0, fixedGain, "fixed gain");
+    Require.positive(1e6, fixedGain, "fixed gain");
     Require.above(0, feedbackOhms, "internal feedback resistor (Ω)");
     Require.above(1, openLoopGain, "open-loop gain");
-    Require.above(0, bandwidthHertz, "bandwidth (Hz)");
+    Require.atMost(1e9, openLoopGain, "open-loop gain");
+    Require.positive(1e9, bandwidthHertz, "bandwidth (Hz)");
     Require.atLeast(0, compensationHertzFarad, "bandwidth times capacitance (Hz·F)");
     control = List.copyOf(control);
     for (int i = 1; i < control.size(); i++) {

@@ -44,12 +44,13 @@ public record AmplifierModel(
     implements PartModel {
   public AmplifierModel {
     Require.named(name, "amplifier");
-    Require.atLeast(0, quiescentAmperes, name + ": quiescent current (A)");
+    Require.notNegative(10, quiescentAmperes, name + ": quiescent current (A)");
     Require.within(0, 1, restFraction, name + ": rest voltage as a share of the supply");
-    Require.above(0, inputOhms, name + ": input resistance (Ω)");
-    Require.atLeast(0, biasAmperes, name + ": input bias current (A)");
-    Require.atLeast(0, noiseVolts, name + ": input noise (V)");
-    Require.atLeast(0, rippleRejectionBareDecibels, name + ": ripple rejection (dB)");
+    Require.within(-100, 100, restVolts, name + ": rest voltage beside that share (V)");
+    Require.positive(1e12, inputOhms, name + ": input resistance (Ω)");
+    Require.notNegative(1, biasAmperes, name + ": input bias current (A)");
+    Require.notNegative(1, noiseVolts, name + ": input noise (V)");
+    Require.notNegative(200, rippleRejectionBareDecibels, name + ": ripple rejection (dB)");
     Require.atLeast(
         rippleRejectionBareDecibels, rippleRejectionDecibels, name + ": ripple rejection (dB)");
     pins = List.copyOf(pins);

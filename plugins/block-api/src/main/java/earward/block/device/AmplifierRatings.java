@@ -20,12 +20,14 @@ public record AmplifierRatings(
     double junctionToAirKelvinPerWatt,
     double junctionToCaseKelvinPerWatt) {
   public AmplifierRatings {
-    Require.above(0, leastVolts, "lowest supply (V)");
+    Require.positive(1e3, leastVolts, "lowest supply (V)");
     Require.above(leastVolts, mostVolts, "absolute maximum supply (V)");
-    Require.above(0, leastLoadOhms, "least load (Ω)");
-    Require.above(0, mostPeakAmperes, "highest output current (A)");
+    Require.atMost(1e3, mostVolts, "absolute maximum supply (V)");
+    Require.positive(1e6, leastLoadOhms, "least load (Ω)");
+    Require.positive(1e3, mostPeakAmperes, "highest output current (A)");
     Require.above(25, mostJunctionCelsius, "highest junction temperature (°C)");
-    Require.above(0, junctionToAirKelvinPerWatt, "thermal resistance to air (K/W)");
-    Require.above(0, junctionToCaseKelvinPerWatt, "thermal resistance to case (K/W)");
+    Require.atMost(500, mostJunctionCelsius, "highest junction temperature (°C)");
+    Require.positive(1e4, junctionToAirKelvinPerWatt, "thermal resistance to air (K/W)");
+    Require.positive(1e4, junctionToCaseKelvinPerWatt, "thermal resistance to case (K/W)");
   }
 }

@@ -29,15 +29,17 @@ public record BatteryModel(
     implements PartModel {
   public BatteryModel {
     Require.named(name, "battery");
-    Require.above(0, endVolts, name + ": end voltage (V)");
+    Require.positive(1e3, endVolts, name + ": end voltage (V)");
     Require.above(endVolts, newVolts, name + ": voltage when new (V)");
-    Require.above(0, newOhms, name + ": internal resistance when new (Ω)");
-    Require.above(0, endOhms, name + ": internal resistance at the end (Ω)");
-    Require.above(0, capacityAmpereHours, name + ": capacity (Ah)");
-    Require.above(0, referenceAmperes, name + ": reference current (A)");
+    Require.atMost(1e3, newVolts, name + ": voltage when new (V)");
+    Require.positive(1e6, newOhms, name + ": internal resistance when new (Ω)");
+    Require.positive(1e6, endOhms, name + ": internal resistance at the end (Ω)");
+    Require.positive(1e4, capacityAmpereHours, name + ": capacity (Ah)");
+    Require.positive(1e4, referenceAmperes, name + ": reference current (A)");
     Require.within(0, 0.5, capacityExponent, name + ": capacity exponent");
     Require.atLeast(newVolts, highestVolts, name + ": highest voltage (V)");
-    Require.above(0, mostAmperes, name + ": highest current (A)");
+    Require.atMost(1e3, highestVolts, name + ": highest voltage (V)");
+    Require.positive(1e4, mostAmperes, name + ": highest current (A)");
   }
 
   @Override

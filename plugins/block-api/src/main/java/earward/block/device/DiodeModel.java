@@ -17,7 +17,7 @@ package earward.block.device;
  * @param junctionFarads Cj0, at least 0
  * @param builtInVolts Vj, above 0
  * @param gradingExponent M, from 0 to 0.9
- * @param leakageOhms resistance in parallel, above 0, infinite for none
+ * @param leakageOhms resistance in parallel, at least 1, infinite for none
  * @param breakdownVolts reverse voltage that it bears, above 0
  * @param recoverySeconds reverse recovery time, at least 0
  */
@@ -37,21 +37,26 @@ public record DiodeModel(
     double recoverySeconds)
     implements PartModel {
 
+  /** Far above any diode's; what is said to have more is a slip of the pen. */
+  private static final double MOST_SATURATION_AMPERES = 0.01;
+
   public DiodeModel {
     Require.named(name, "diode");
-    Require.above(0, saturationAmperes, name + ": saturation current (A)");
+    Require.positive(MOST_SATURATION_AMPERES, saturationAmperes, name + ": saturation current (A)");
     Require.within(
         0, saturationAmperes, saturationLeastAmperes, name + ": least saturation current (A)");
     Require.atLeast(
         saturationAmperes, saturationMostAmperes, name + ": most saturation current (A)");
+    Require.atMost(
+        MOST_SATURATION_AMPERES, saturationMostAmperes, name + ": most saturation current (A)");
     Require.within(0.9, 3, emissionCoefficient, name + ": emission coefficient");
-    Require.atLeast(0, seriesOhms, name + ": series resistance (Ω)");
-    Require.atLeast(0, junctionFarads, name + ": junction capacitance (F)");
-    Require.above(0, builtInVolts, name + ": built-in voltage (V)");
+    Require.notNegative(1e6, seriesOhms, name + ": series resistance (Ω)");
+    Require.notNegative(1e-6, junctionFarads, name + ": junction capacitance (F)");
+    Require.positive(5, builtInVolts, name + ": built-in voltage (V)");
     Require.within(0, 0.9, gradingExponent, name + ": grading exponent");
-    Require.above(0, leakageOhms, name + ": leakage resistance (Ω)");
-    Require.above(0, breakdownVolts, name + ": breakdown voltage (V)");
-    Require.atLeast(0, recoverySeconds, name + ": recovery time (s)");
+    Require.atLeast(1, leakageOhms, name + ": leakage resistance (Ω)");
+    Require.positive(1e5, breakdownVolts, name + ": breakdown voltage (V)");
+    Require.notNegative(1e-3, recoverySeconds, name + ": recovery time (s)");
   }
 
   /**

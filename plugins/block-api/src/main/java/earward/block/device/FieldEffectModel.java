@@ -24,11 +24,11 @@ public record FieldEffectModel(
     implements PartModel {
   public FieldEffectModel {
     Require.named(name, "field-effect transistor");
-    Require.above(0, saturatedDrainAmperes, name + ": saturated drain current (A)");
-    Require.above(0, pinchOffVolts, name + ": pinch-off voltage (V)");
-    Require.above(0, mostVolts, name + ": highest voltage (V)");
-    Require.above(0, mostJunctionCelsius, name + ": highest junction temperature (°C)");
-    Require.above(0, junctionToAirKelvinPerWatt, name + ": thermal resistance (K/W)");
+    Require.positive(100, saturatedDrainAmperes, name + ": saturated drain current (A)");
+    Require.positive(100, pinchOffVolts, name + ": pinch-off voltage (V)");
+    Require.positive(1e5, mostVolts, name + ": highest voltage (V)");
+    Require.positive(500, mostJunctionCelsius, name + ": highest junction temperature (°C)");
+    Require.positive(1e4, junctionToAirKelvinPerWatt, name + ": thermal resistance (K/W)");
   }
 
   @Override

@@ -29,15 +29,15 @@ public record LoudspeakerModel(
     implements PartModel {
   public LoudspeakerModel {
     Require.named(name, "loudspeaker");
-    Require.above(0, ratedOhms, name + ": rated impedance (Ω)");
-    Require.above(0, dcOhms, name + ": DC resistance (Ω)");
+    Require.positive(1e5, ratedOhms, name + ": rated impedance (Ω)");
+    Require.positive(1e5, dcOhms, name + ": DC resistance (Ω)");
     Require.within(0, 0.5, dcToleranceFraction, name + ": tolerance of the DC resistance");
-    Require.atLeast(0, voiceCoilHenries, name + ": voice-coil inductance (H)");
-    Require.above(0, resonanceHertz, name + ": resonance (Hz)");
-    Require.above(0, mechanicalQ, name + ": mechanical Q");
-    Require.above(0, electricalQ, name + ": electrical Q");
+    Require.notNegative(1, voiceCoilHenries, name + ": voice-coil inductance (H)");
+    Require.positive(1e5, resonanceHertz, name + ": resonance (Hz)");
+    Require.positive(1e3, mechanicalQ, name + ": mechanical Q");
+    Require.positive(1e3, electricalQ, name + ": electrical Q");
     Require.within(40, 130, sensitivityDecibels, name + ": sensitivity (dB)");
-    Require.above(0, ratedWatts, name + ": rated power (W)");
+    Require.positive(1e4, ratedWatts, name + ": rated power (W)");
   }
 
   @Override

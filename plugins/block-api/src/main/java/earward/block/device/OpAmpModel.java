@@ -33,15 +33,16 @@ public record OpAmpModel(
   public OpAmpModel {
     Require.named(name, "op-amp");
     Require.above(1, openLoopGain, name + ": open-loop gain");
-    Require.above(0, unityGainHertz, name + ": gain-bandwidth product (Hz)");
-    Require.above(0, inputOhms, name + ": input resistance (Ω)");
-    Require.above(0, outputOhms, name + ": output resistance (Ω)");
-    Require.atLeast(0, lostVoltsUp, name + ": lost voltage up (V)");
-    Require.atLeast(0, lostVoltsDown, name + ": lost voltage down (V)");
-    Require.atLeast(0, quiescentAmperes, name + ": quiescent current (A)");
-    Require.atLeast(0, biasAmperes, name + ": bias current (A)");
-    Require.atLeast(0, noiseVoltsPerRootHertz, name + ": input noise");
-    Require.above(0, leastVolts, name + ": lowest supply (V)");
+    Require.atMost(1e9, openLoopGain, name + ": open-loop gain");
+    Require.positive(1e12, unityGainHertz, name + ": gain-bandwidth product (Hz)");
+    Require.positive(1e15, inputOhms, name + ": input resistance (Ω)");
+    Require.positive(1e6, outputOhms, name + ": output resistance (Ω)");
+    Require.notNegative(100, lostVoltsUp, name + ": lost voltage up (V)");
+    Require.notNegative(100, lostVoltsDown, name + ": lost voltage down (V)");
+    Require.notNegative(10, quiescentAmperes, name + ": quiescent current (A)");
+    Require.notNegative(1, biasAmperes, name + ": bias current (A)");
+    Require.notNegative(1, noiseVoltsPerRootHertz, name + ": input noise");
+    Require.positive(1e3, leastVolts, name + ": lowest supply (V)");
     Require.above(leastVolts, mostVolts, name + ": absolute maximum supply (V)");
   }
 

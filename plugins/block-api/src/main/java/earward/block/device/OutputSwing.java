@@ -18,10 +18,10 @@ public record OutputSwing(
     double lostDownOhms,
     double lostWithoutBootstrapVolts) {
   public OutputSwing {
-    Require.atLeast(0, lostUpVolts, "lost voltage up (V)");
-    Require.atLeast(0, lostUpOhms, "lost voltage up per ampere (Ω)");
-    Require.atLeast(0, lostDownVolts, "lost voltage down (V)");
-    Require.atLeast(0, lostDownOhms, "lost voltage down per ampere (Ω)");
-    Require.atLeast(0, lostWithoutBootstrapVolts, "lost voltage without bootstrap (V)");
+    Require.notNegative(100, lostUpVolts, "lost voltage up (V)");
+    Require.notNegative(1e3, lostUpOhms, "lost voltage up per ampere (Ω)");
+    Require.notNegative(100, lostDownVolts, "lost voltage down (V)");
+    Require.notNegative(1e3, lostDownOhms, "lost voltage down per ampere (Ω)");
+    Require.notNegative(100, lostWithoutBootstrapVolts, "lost voltage without bootstrap (V)");
   }
 }

@@ -26,14 +26,14 @@ public record RegulatorModel(
     implements PartModel {
   public RegulatorModel {
     Require.named(name, "regulator");
-    Require.above(0, outputVolts, name + ": output (V)");
-    Require.atLeast(0, dropOutVolts, name + ": drop-out voltage (V)");
-    Require.atLeast(0, quiescentAmperes, name + ": quiescent current (A)");
+    Require.positive(1e3, outputVolts, name + ": output (V)");
+    Require.notNegative(100, dropOutVolts, name + ": drop-out voltage (V)");
+    Require.notNegative(10, quiescentAmperes, name + ": quiescent current (A)");
     Require.above(outputVolts, mostVolts, name + ": highest input (V)");
-    Require.above(0, mostAmperes, name + ": highest current (A)");
-    Require.above(0, outputOhms, name + ": output resistance (Ω)");
+    Require.positive(1e3, mostAmperes, name + ": highest current (A)");
+    Require.positive(1e3, outputOhms, name + ": output resistance (Ω)");
     Require.above(25, mostJunctionCelsius, name + ": highest junction temperature (°C)");
-    Require.above(0, junctionToAirKelvinPerWatt, name + ": thermal resistance (K/W)");
+    Require.positive(1e4, junctionToAirKelvinPerWatt, name + ": thermal resistance (K/W)");
   }
 
   @Override

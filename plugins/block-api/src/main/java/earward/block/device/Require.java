@@ -12,6 +12,24 @@ final class Require {
     }
   }
 
+  /** Above 0 and no more than any part has. */
+  static void positive(double most, double value, String what) {
+    above(0, value, what);
+    atMost(most, value, what);
+  }
+
+  /** At least 0 and no more than any part has. */
+  static void notNegative(double most, double value, String what) {
+    atLeast(0, value, what);
+    atMost(most, value, what);
+  }
+
+  static void atMost(double most, double value, String what) {
+    if (value > most) {
+      throw new IllegalArgumentException(what + " is " + value + "; it must be at most " + most);
+    }
+  }
+
   static void atLeast(double least, double value, String what) {
     if (!(value >= least)) {
       throw new IllegalArgumentException(what + " is " + value + "; it must be at least " + least);

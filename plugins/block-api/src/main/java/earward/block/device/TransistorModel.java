@@ -35,15 +35,15 @@ public record TransistorModel(
 
   public TransistorModel {
     Require.named(name, "transistor");
-    Require.above(0, saturationAmperes, name + ": saturation current (A)");
-    Require.above(0, currentGain, name + ": current gain");
-    Require.above(0, reverseGain, name + ": reverse current gain");
+    Require.positive(0.01, saturationAmperes, name + ": saturation current (A)");
+    Require.positive(1e6, currentGain, name + ": current gain");
+    Require.positive(1e6, reverseGain, name + ": reverse current gain");
     Require.above(0, earlyVolts, name + ": Early voltage (V)");
-    Require.above(0, mostVolts, name + ": highest voltage (V)");
-    Require.above(0, mostAmperes, name + ": highest current (A)");
-    Require.above(0, mostJunctionCelsius, name + ": highest junction temperature (°C)");
-    Require.above(0, junctionToAirKelvinPerWatt, name + ": thermal resistance (K/W)");
-    Require.above(0, baseOhms, name + ": base resistance (Ω)");
+    Require.positive(1e5, mostVolts, name + ": highest voltage (V)");
+    Require.positive(1e3, mostAmperes, name + ": highest current (A)");
+    Require.positive(500, mostJunctionCelsius, name + ": highest junction temperature (°C)");
+    Require.positive(1e4, junctionToAirKelvinPerWatt, name + ": thermal resistance (K/W)");
+    Require.positive(1e5, baseOhms, name + ": base resistance (Ω)");
   }
 
   /** A transistor whose base resistance is not known: 1 Ω, which makes no noise to speak of. */
