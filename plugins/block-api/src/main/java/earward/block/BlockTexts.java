@@ -22,7 +22,9 @@ import java.util.Properties;
  *   <li>{@code part.ID}, {@code test-point.ID}, {@code curve.ID}: of each of these;
  *   <li>{@code check.CODE}: one sentence with {@code {figure}} and {@code {limit}}, into which the
  *       host puts the numbers with their units, then one that says what to do; where it helps, with
- *       {@code {place}}, the id that the block has in the design, for instance {@code volume}.
+ *       {@code {place}}, the id that the block has in the design, for instance {@code volume};
+ *   <li>{@code finding.CODE}: the sentence of a finding that its judgement gives by {@code
+ *       Finding.inWords}, with {@code {place}} where that helps.
  * </ul>
  *
  * <p>Example: {@code volume.two-resistor-pad.check.coupling-edge = The bass ends at {figure}; the

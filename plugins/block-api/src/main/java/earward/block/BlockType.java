@@ -69,7 +69,7 @@ public interface BlockType {
   /**
    * A judgement that no check can put as data; runs once per edit, on the nominal design. Prefer
    * {@link earward.block.check.Check}: only checks are held against every kit of a batch, and only
-   * they have remedies.
+   * they have remedies. What it says are texts of the block, by {@code Finding.inWords}.
    *
    * @param values as in {@link #describe}
    * @param conditions as in {@link #describe}

@@ -69,14 +69,7 @@ final class Reservoir {
     if (ownLoad(values) || !(depth < LEAST_DEPTH)) {
       return List.of();
     }
-    return List.of(
-        Finding.of(
-            Severity.WEIGH,
-            "no-direct-load",
-            "",
-            "Nothing loads the detector for DC: C1 stays charged to the highest peak, and no audio"
-                + " comes out. Give it a load resistor of its own, or put a block after it that"
-                + " leads to ground."));
+    return List.of(Finding.inWords(Severity.WEIGH, "no-direct-load"));
   }
 
   static Curve clippingOverCapacitor(Values values, String diode) {

@@ -84,12 +84,6 @@ public final class Agc implements BlockType {
   @Override
   public List<Finding> judge(
       Values values, Conditions conditions, ToDoubleFunction<String> figure) {
-    return List.of(
-        Finding.of(
-            Severity.NOTE,
-            "agc-open-loop",
-            "",
-            "The AGC loop is left open here: the line is solved for the carrier levels of the"
-                + " conditions, and what the front end does with its voltage is not."));
+    return List.of(Finding.inWords(Severity.NOTE, "agc-open-loop"));
   }
 }

@@ -1,5 +1,6 @@
 package earward.kit.review;
 
+import earward.block.BlockTexts;
 import earward.block.Conditions;
 import earward.block.check.Finding;
 import earward.block.check.Severity;
@@ -9,13 +10,16 @@ import earward.kit.path.PlacedBlock;
 import earward.kit.path.SolvedKit;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /** What the block types themselves say of the nominal kit, once per edit. */
 final class Judgements {
   private final SolvedKit solved;
+  private final Locale language;
 
-  Judgements(SolvedKit solved) {
+  Judgements(SolvedKit solved, Locale language) {
     this.solved = solved;
+    this.language = language;
   }
 
   List<Finding> findings() {
@@ -36,7 +40,7 @@ final class Judgements {
               conditions,
               local -> figures.orNaN(FigureName.parse(local).within(block.id())))
           .stream()
-          .map(finding -> ofBlock(finding, block.id()))
+          .map(finding -> ofBlock(finding, block))
           .toList();
     } catch (RuntimeException | LinkageError | StackOverflowError e) {
       return List.of(
@@ -55,13 +59,23 @@ final class Judgements {
     }
   }
 
-  private static Finding ofBlock(Finding finding, String blockId) {
+  private Finding ofBlock(Finding finding, PlacedBlock block) {
+    String blockId = block.id();
     return new Finding(
         finding.severity(),
         finding.code(),
         finding.subject().isEmpty() ? blockId : blockId + "." + finding.subject(),
-        finding.sentence(),
+        words(finding, block),
         finding.source(),
         finding.measured());
+  }
+
+  /** The block's own text where the finding is said by one. */
+  private String words(Finding finding, PlacedBlock block) {
+    return finding.sentence().equals(Finding.textKey(finding.code()))
+        ? BlockTexts.of(block.type(), language)
+            .get(finding.sentence())
+            .replace("{place}", block.id())
+        : finding.sentence();
   }
 }

@@ -46,7 +46,7 @@ public final class Reviewer {
     all.addAll(solved.findings());
     if (solved.assembly().complete()) {
       all.addAll(new HeldChecks(solved, language).findings());
-      all.addAll(new Judgements(solved).findings());
+      all.addAll(new Judgements(solved, language).findings());
     }
     return new ReviewedKit(
         solved, weightiestFirst(all).stream().map(f -> new ReviewFinding(f, List.of())).toList());

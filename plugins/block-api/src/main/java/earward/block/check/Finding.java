@@ -42,6 +42,19 @@ public record Finding(
     }
   }
 
+  /**
+   * A finding of a block's own judgement, said in the words of the block's text {@code
+   * finding.CODE}.
+   */
+  public static Finding inWords(Severity severity, String code) {
+    return of(severity, code, "", textKey(code));
+  }
+
+  /** The key of the text that says a finding of this code. */
+  public static String textKey(String code) {
+    return "finding." + code;
+  }
+
   /** A finding without a figure. */
   public static Finding of(Severity severity, String code, String subject, String sentence) {
     return new Finding(severity, code, subject, sentence, "", Optional.empty());

@@ -28,6 +28,25 @@ public final class JudgementRule implements BlockRule {
     return faults.all();
   }
 
+  /** The texts by which the block's judgement speaks, whatever the figures. */
+  static Set<String> textKeys(BlockType type, Variation variation) {
+    Set<String> keys = new TreeSet<>();
+    for (double each : FIGURES) {
+      judged(type, variation, each).stream()
+          .filter(finding -> finding.sentence().equals(Finding.textKey(finding.code())))
+          .forEach(finding -> keys.add(finding.sentence()));
+    }
+    return keys;
+  }
+
+  private static List<Finding> judged(BlockType type, Variation variation, double figure) {
+    try {
+      return type.judge(variation.values(), variation.conditions(), name -> figure);
+    } catch (RuntimeException e) {
+      return List.of(); // faults() says so
+    }
+  }
+
   private static void judge(
       BlockType type, Variation variation, double figure, Set<String> asked, Faults faults) {
     try {

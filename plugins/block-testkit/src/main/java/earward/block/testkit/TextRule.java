@@ -3,6 +3,7 @@ package earward.block.testkit;
 import earward.block.BlockDescription;
 import earward.block.BlockTexts;
 import earward.block.BlockType;
+import earward.block.check.Finding;
 import earward.block.setting.Setting;
 import java.io.IOException;
 import java.io.InputStream;
@@ -26,6 +27,10 @@ public final class TextRule implements BlockRule {
   private static final Pattern PLACEHOLDER = Pattern.compile("\\{([^}]*)}");
   private static final Set<String> KNOWN = Set.of("figure", "limit", "place");
   private static final String ENGLISH = "texts.properties";
+
+  /** Of a judgement: which of them there are depends on the figures of a kit. */
+  private static final String JUDGED = Finding.textKey("");
+
   private static final List<String> LANGUAGES = List.of("en", "de", "fr", "es", "nl", "it", "pl");
 
   @Override
@@ -41,6 +46,9 @@ public final class TextRule implements BlockRule {
       if (key.startsWith("check.") && !words.isBlank()) {
         sentence(key, words, faults);
       }
+      faults.addIf(
+          key.startsWith(JUDGED) && !words.isBlank() && !words.endsWith("."),
+          "text " + key + " is no sentence; end it with a full stop");
     }
     for (String language : LANGUAGES) {
       String file = language.equals("en") ? ENGLISH : "texts_" + language + ".properties";
@@ -78,7 +86,7 @@ public final class TextRule implements BlockRule {
         .filter(key -> !english && !found.contains(key))
         .forEach(key -> faults.add(file + " lacks " + key + ", so that would be shown in English"));
     found.stream()
-        .filter(key -> !wanted.contains(key))
+        .filter(key -> !wanted.contains(key) && !key.startsWith(JUDGED))
         .forEach(
             key ->
                 faults.add(file + " has " + key + ", for which the block has no use; remove it"));
@@ -114,6 +122,7 @@ public final class TextRule implements BlockRule {
     }
     for (Variation variation : variations) {
       variation.attempt(type).ifPresent(description -> ofDescription(description, keys));
+      keys.addAll(JudgementRule.textKeys(type, variation));
     }
     return keys;
   }
