@@ -65,6 +65,10 @@ abstract class DesignCommand implements Callable<Integer> {
   }
 
   private DesignReading read() throws CommandFault {
+    if (file().toString().isEmpty()) {
+      throw CommandFault.ofInput(
+          "The name of the kit design is empty; name a file, for instance lantern.earward.");
+    }
     try {
       return Designs.read(file());
     } catch (DesignFileException e) {
@@ -77,7 +81,7 @@ abstract class DesignCommand implements Callable<Integer> {
     Assembly assembly = Assembler.assemble(reading.design(), types, parts);
     if (!assembly.complete()) {
       throw CommandFault.ofInput(
-          stops(assembly.findings()).stream().map(said -> file() + ": " + said).toList());
+          stops(assembly.findings()).stream().map(stop -> placed(stop, reading)).toList());
     }
     SolvedKit solved = KitSolver.solve(assembly);
     ReviewedKit reviewed = Reviewer.review(solved, Reviewer.USUAL_LANGUAGE);
@@ -87,11 +91,16 @@ abstract class DesignCommand implements Callable<Integer> {
     return completed(reviewed, types, parts);
   }
 
-  private static List<String> stops(List<Finding> findings) {
+  private static List<Finding> stops(List<Finding> findings) {
     return findings.stream()
         .filter(finding -> finding.severity() == Severity.STOP)
-        .map(Finding::sentence)
         .distinct()
         .toList();
+  }
+
+  /** The sentence with the file, and the place in it where what it is about stands. */
+  private String placed(Finding finding, DesignReading reading) {
+    String place = reading.placeOf(finding.subject()).map(at -> ", " + at).orElse("");
+    return file() + place + ": " + finding.sentence();
   }
 }

@@ -2,6 +2,7 @@ package earward.command;
 
 import java.io.FileDescriptor;
 import java.io.FileOutputStream;
+import java.io.OutputStream;
 import java.io.PrintStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
@@ -18,18 +19,15 @@ public final class Main {
    * @param arguments the command and its arguments
    */
   public static void main(String[] arguments) {
-    PrintStream results = utf8(FileDescriptor.out);
-    PrintStream messages = utf8(FileDescriptor.err);
-    System.exit(run(arguments, results, messages));
-  }
-
-  private static PrintStream utf8(FileDescriptor descriptor) {
-    return new PrintStream(new FileOutputStream(descriptor), false, StandardCharsets.UTF_8);
+    PrintStream messages =
+        new PrintStream(new FileOutputStream(FileDescriptor.err), false, StandardCharsets.UTF_8);
+    System.exit(run(arguments, new FileOutputStream(FileDescriptor.out), messages));
   }
 
   /** Runs one command; returns its exit code, see {@link Exit}. */
-  static int run(String[] arguments, PrintStream results, PrintStream messages) {
-    PrintWriter out = new PrintWriter(results, false, StandardCharsets.UTF_8);
+  static int run(String[] arguments, OutputStream results, PrintStream messages) {
+    ResultsOutput watched = new ResultsOutput(results);
+    PrintWriter out = new PrintWriter(watched, false, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(messages, true, StandardCharsets.UTF_8);
     CommandLine line = new CommandLine(new EarwardCommand());
     line.setOut(out)
@@ -41,8 +39,8 @@ public final class Main {
     int code = line.execute(arguments);
     out.flush();
     err.flush();
-    if (out.checkError() || results.checkError()) {
-      messages.println("earward: the results cannot be written to standard output; is it full?");
+    if (watched.failure().isPresent()) {
+      messages.println("earward: " + watched.failure().get());
       messages.flush();
       return Math.max(code, Exit.INPUT_AT_FAULT);
     }

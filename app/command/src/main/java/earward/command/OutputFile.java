@@ -33,6 +33,10 @@ final class OutputFile {
    * @param read the file that the command reads
    */
   static OutputFile at(Path target, Path read) throws CommandFault {
+    if (target.toString().isEmpty()) {
+      throw CommandFault.ofInput(
+          "The name of the file to write is empty; name one, for instance lantern.pdf.");
+    }
     if (Files.isDirectory(target)) {
       throw CommandFault.ofInput(target + ": this is a folder; name a file in it to write.");
     }

@@ -12,6 +12,7 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.util.Locale;
+import java.util.Set;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
@@ -36,9 +37,7 @@ final class SheetCommand extends DesignCommand {
     OutputFile file = OutputFile.at(target, file());
     SheetContent content;
     try {
-      Wording wording =
-          Wording.of(
-              program.sheetWordings(), reviewed.solved().assembly().design().sheet().language());
+      Wording wording = wording(reviewed, program.sheetWordings());
       content = Sheets.of(reviewed, wording);
       file.write(out -> SheetWriter.write(content, wording, out));
     } catch (WordingException e) {
@@ -51,6 +50,26 @@ final class SheetCommand extends DesignCommand {
     if (reviewed.doNotBuild()) {
       results().println("DO NOT BUILD: a finding is STOP; 'earward review' says which.");
     }
+  }
+
+  /** The words of the design's language; it is not printed in another one unasked. */
+  private Wording wording(ReviewedKit reviewed, Path folder) throws CommandFault, WordingException {
+    String tag = reviewed.solved().assembly().design().sheet().language();
+    Set<String> atHand = Wording.languages(folder);
+    if (!atHand.contains(Locale.forLanguageTag(tag).getLanguage())) {
+      throw CommandFault.ofInput(
+          file()
+              + ": the sheet's language is '"
+              + tag
+              + "', for which there is no wording; there are "
+              + String.join(", ", atHand)
+              + ": choose one of them, or put "
+              + Locale.forLanguageTag(tag).getLanguage()
+              + ".properties into "
+              + folder
+              + ".");
+    }
+    return Wording.of(folder, tag);
   }
 
   private void keyFigures(SheetContent content) {

@@ -2,6 +2,11 @@ package earward.command;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.io.OutputStream;
+import java.io.PrintStream;
+import java.nio.charset.StandardCharsets;
 import org.junit.jupiter.api.Test;
 
 class MainTest {
@@ -49,6 +54,34 @@ class MainTest {
   @Test
   void aNameThatNoFileCanHaveIsTheCallsFault() {
     assertFault(Ran.earward("figures", "kit\0.earward"), "no name that a file can have");
+  }
+
+  @Test
+  void aReaderThatClosesThePipeIsToldAndAFullDiskToo() {
+    assertThat(unwritten("Broken pipe"))
+        .contains("closed it before their end")
+        .doesNotContain("full");
+    assertThat(unwritten("No space left on device")).contains("No space left on device");
+  }
+
+  private static String unwritten(String reason) {
+    OutputStream broken =
+        new OutputStream() {
+          @Override
+          public void write(int octet) throws IOException {
+            throw new IOException(reason);
+          }
+        };
+    ByteArrayOutputStream messages = new ByteArrayOutputStream();
+    int code =
+        Main.run(
+            new String[] {"--help"},
+            broken,
+            new PrintStream(messages, false, StandardCharsets.UTF_8));
+    assertThat(code).isEqualTo(2);
+    String said = messages.toString(StandardCharsets.UTF_8);
+    assertThat(said).hasLineCount(1).startsWith("earward: ");
+    return said;
   }
 
   private static void assertFault(Ran ran, String... words) {

@@ -1,5 +1,7 @@
 package earward.command;
 
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
 import earward.block.BlockApi;
 import java.io.IOException;
 import java.io.OutputStream;
@@ -32,6 +34,17 @@ final class TestHome {
 
   static Path starterKit(String name) {
     return HOME.resolve("templates/kits/" + name + ".earward");
+  }
+
+  /** An entry of the parts library, as JSON. */
+  static String libraryEntry(String file, String part) throws IOException {
+    Path library = HOME.resolve("templates/parts/" + file + ".json");
+    for (JsonNode entry : new ObjectMapper().readTree(Files.readString(library)).get("parts")) {
+      if (entry.get("name").asText().equals(part)) {
+        return entry.toString().replace("\":", "\": ");
+      }
+    }
+    throw new AssertionError("no part " + part);
   }
 
   private static Path make() {

@@ -20,10 +20,13 @@ final class BlockForm {
 
   private BlockForm() {}
 
-  static List<BlockEntry> readAll(MembersReader design, String list) throws DesignFileException {
+  static List<BlockEntry> readAll(MembersReader design, String list, GivenNames names)
+      throws DesignFileException {
     List<BlockEntry> blocks = new ArrayList<>();
     for (Json item : design.ownItems(list)) {
-      blocks.add(read(MembersReader.of(item, design.source(), "a block of '" + list + "'")));
+      MembersReader block = MembersReader.of(item, design.source(), "a block of '" + list + "'");
+      names.take(block);
+      blocks.add(read(block));
     }
     return blocks;
   }
@@ -35,6 +38,7 @@ final class BlockForm {
     Optional<MembersReader> inner = in.openOwn(SETTINGS);
     if (inner.isPresent()) {
       for (Json.Member member : inner.get().object().members()) {
+        in.source().stands(id + "." + member.name(), member.value().at());
         settings.put(member.name(), setting(in, member));
       }
     }
@@ -44,6 +48,7 @@ final class BlockForm {
       railMembers.get().allScalars().forEach((own, kit) -> rails.put(own, kit.words()));
     }
     in.find("id");
+    in.source().stands(id, in.object().at());
     try {
       return new BlockEntry(
           id, in.requiredText("type"), settings, rails, in.text(JOINS_AT), in.written());

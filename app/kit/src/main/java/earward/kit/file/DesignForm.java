@@ -31,9 +31,10 @@ final class DesignForm {
     Optional<MembersReader> references = in.openOwn("references");
     Optional<MembersReader> sheet = in.openOwn("sheet");
     Optional<MembersReader> bench = in.openOwn("bench");
-    var path = BlockForm.readAll(in, "path");
-    var supplies = BlockForm.readAll(in, "supplies");
-    var takeOffs = BlockForm.readAll(in, TAKE_OFFS);
+    GivenNames names = new GivenNames("block");
+    var path = BlockForm.readAll(in, "path", names);
+    var supplies = BlockForm.readAll(in, "supplies", names);
+    var takeOffs = BlockForm.readAll(in, TAKE_OFFS, names);
     Tolerances shares =
         tolerances.isPresent() ? TolerancesForm.read(tolerances.get()) : Tolerances.USUAL;
     List<AddedTestPoint> points = testPoints(in);
@@ -79,8 +80,10 @@ final class DesignForm {
 
   private static List<AddedTestPoint> testPoints(MembersReader in) throws DesignFileException {
     List<AddedTestPoint> points = new ArrayList<>();
+    GivenNames names = new GivenNames("added test point");
     for (Json item : in.ownItems(TEST_POINTS)) {
       MembersReader point = MembersReader.of(item, in.source(), "an added test point");
+      names.take(point);
       try {
         points.add(
             new AddedTestPoint(

@@ -35,7 +35,7 @@ public final class Designs {
     Json tree = JsonReading.read(text, fileName);
     FileSource source = new FileSource(fileName);
     KitDesign design = DesignForm.read(MembersReader.of(tree, source, "the design"));
-    return new DesignReading(design, source.notes());
+    return new DesignReading(design, source.notes(), source.places());
   }
 
   /** The design's text, as it stands in a file: the same design gives the same text. */

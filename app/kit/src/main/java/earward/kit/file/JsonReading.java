@@ -148,7 +148,13 @@ final class JsonReading {
   }
 
   private static String said(String message) {
-    String first = message.lines().findFirst().orElse("").strip();
+    String first =
+        message
+            .lines()
+            .findFirst()
+            .orElse("")
+            .replaceAll("\\[Source: [^\\]]*line: (\\d+), column: (\\d+)\\]", "line $1, column $2")
+            .strip();
     return "the JSON is broken: " + first + "; correct the file there";
   }
 }

@@ -68,7 +68,7 @@ final class BlockPlacer {
                 entry.id(), setting, Optional.ofNullable(entry.settings().get(setting.id()))));
       } catch (SettingException e) {
         sound = false;
-        findings.add(PathFindings.setting(entry, e.code(), e.sentence()));
+        findings.add(PathFindings.setting(entry, setting.id(), e.code(), e.sentence()));
       }
     }
     for (String named : entry.settings().keySet()) {

@@ -39,7 +39,7 @@ final class PathFindings {
     return Finding.of(
         Severity.NOTE,
         "unknown-setting",
-        entry.id(),
+        entry.id() + "." + settingId,
         "Block '"
             + entry.id()
             + "' names the setting '"
@@ -49,8 +49,8 @@ final class PathFindings {
             + ".");
   }
 
-  static Finding setting(BlockEntry entry, String code, String sentence) {
-    return stop(code, entry.id(), sentence + ".");
+  static Finding setting(BlockEntry entry, String settingId, String code, String sentence) {
+    return stop(code, entry.id() + "." + settingId, sentence + ".");
   }
 
   static Finding refusedSettings(BlockEntry entry, String why) {

@@ -6,6 +6,8 @@ import java.io.InputStreamReader;
 import java.io.Reader;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.DirectoryIteratorException;
+import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Locale;
@@ -23,6 +25,7 @@ import java.util.stream.Stream;
 public final class Wording {
   private static final Pattern PLACEHOLDER = Pattern.compile("\\{([a-z]+)}");
   private static final String ENGLISH = "en";
+  private static final String ENDING = ".properties";
 
   private final Locale locale;
   private final Properties words;
@@ -47,6 +50,30 @@ public final class Wording {
   }
 
   /**
+   * The languages that a sheet can be printed in: those that the program holds, and those of the
+   * files in a folder.
+   *
+   * @param folder where {@code LANGUAGE.properties} may be; it need not exist
+   */
+  public static Set<String> languages(Path folder) {
+    Set<String> languages = new TreeSet<>();
+    for (String language : Locale.getISOLanguages()) {
+      if (Wording.class.getResource(language + ENDING) != null) {
+        languages.add(language);
+      }
+    }
+    try (DirectoryStream<Path> files = Files.newDirectoryStream(folder, "*" + ENDING)) {
+      for (Path file : files) {
+        String name = String.valueOf(file.getFileName());
+        languages.add(name.substring(0, name.length() - ENDING.length()));
+      }
+    } catch (IOException | DirectoryIteratorException e) {
+      return languages; // no folder of a club's own: the program's own languages remain
+    }
+    return languages;
+  }
+
+  /**
    * The wording of a file in a folder, over the one that the program holds.
    *
    * @param folder where {@code LANGUAGE.properties} may be; where it is not, the program's own
@@ -56,7 +83,7 @@ public final class Wording {
    */
   public static Wording of(Path folder, String languageTag) throws WordingException {
     Locale locale = Locale.forLanguageTag(languageTag);
-    Path file = folder.resolve(locale.getLanguage() + ".properties");
+    Path file = folder.resolve(locale.getLanguage() + ENDING);
     Wording own = of(languageTag);
     if (!Files.isRegularFile(file)) {
       return own;
@@ -97,7 +124,7 @@ public final class Wording {
   }
 
   private static boolean load(String language, Properties into) {
-    String name = language + ".properties";
+    String name = language + ENDING;
     try (InputStream in = Wording.class.getResourceAsStream(name)) {
       if (in == null) {
         return false;
