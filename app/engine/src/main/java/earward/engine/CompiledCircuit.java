@@ -4,6 +4,10 @@ import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
 import earward.engine.internal.Plan;
 import earward.engine.internal.Run;
+import earward.engine.internal.WaveformRun;
+import earward.engine.waveform.WaveformListener;
+import earward.engine.waveform.WaveformResult;
+import earward.engine.waveform.WaveformSettings;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -76,5 +80,20 @@ public final class CompiledCircuit {
    */
   public Response response(double[] values, CaseName caseName, String place, double[] hertz) {
     return new Run(plan).response(values, caseName, place, hertz);
+  }
+
+  /**
+   * The full waveform of a case with a signal: the yardstick of its figures, solved at the
+   * carrier's own rate without anything of carrier-averaged detection. It takes seconds.
+   *
+   * @param values a row of values
+   * @param caseName a case that a signal drives
+   * @param settings places to be measured, and how
+   * @param listener is told how it goes on and may end it
+   * @throws IllegalArgumentException when there is no such case or place, or no feed
+   */
+  public WaveformResult fullWaveform(
+      double[] values, CaseName caseName, WaveformSettings settings, WaveformListener listener) {
+    return new WaveformRun(plan, values, caseName).solve(settings, listener);
   }
 }

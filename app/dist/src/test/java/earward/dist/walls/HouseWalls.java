@@ -69,6 +69,13 @@ final class HouseWalls {
             noClasses().that(in("earward.engine")).should().callCodeUnitWhere(READS_CLOCK),
             earward.engine.fixture.ReadsClock.class),
         new Wall(
+            "the full waveform shares no code with carrier-averaged detection",
+            noClasses()
+                .that(in("earward.engine.waveform"))
+                .should()
+                .dependOnClassesThat(in("earward.engine.detection")),
+            earward.engine.waveform.fixture.Averages.class),
+        new Wall(
             "what is drawn or printed keeps its order",
             noClasses()
                 .that(in("earward.drawing", "earward.sheet"))

@@ -17,22 +17,22 @@ import java.util.List;
  * practice, from memory): so an open or shorted capacitor there does what it does in life.
  */
 public final class AmplifierLaw extends Law {
-  private static final int GAIN = 0;
-  private static final int FEEDBACK_OHMS = 1;
-  private static final int QUIESCENT = 2;
-  private static final int REST_FRACTION = 3;
-  private static final int INPUT_OHMS = 4;
-  private static final int BIAS = 5;
+  static final int GAIN = 0;
+  static final int FEEDBACK_OHMS = 1;
+  static final int QUIESCENT = 2;
+  static final int REST_FRACTION = 3;
+  static final int INPUT_OHMS = 4;
+  static final int BIAS = 5;
   private static final int HEAT_SINK = 6;
 
   /** Keeps the equations regular where an output is shorted or an IC stands the wrong way round. */
-  private static final double OUTPUT_OHMS = 1e-3;
+  static final double OUTPUT_OHMS = 1e-3;
 
   /** Band over which data sheets give the input noise: 22 Hz to 22 kHz. */
   private static final double NOISE_BAND_HERTZ = 22e3 - 22;
 
-  private static final double RIPPLE_SIEMENS = 1e-4;
-  private static final double BOOTSTRAP_SIEMENS = 1e-3;
+  static final double RIPPLE_SIEMENS = 1e-4;
+  static final double BOOTSTRAP_SIEMENS = 1e-3;
 
   private final AmplifierModel model;
   private final int ordinal;
@@ -118,7 +118,7 @@ public final class AmplifierLaw extends Law {
     return Math.max(0, restVolts(stage, output) - lost);
   }
 
-  private boolean bootstrapped(DirectStage stage) {
+  boolean bootstrapped(DirectStage stage) {
     if (!has(Terminal.BOOTSTRAP)) {
       return true;
     }
@@ -152,16 +152,16 @@ public final class AmplifierLaw extends Law {
     return Math.max(0, junctionToAir(stage) - toCase);
   }
 
-  private double on(double supplyVolts) {
+  double on(double supplyVolts) {
     return Math.min(1, Math.max(0, 2 * supplyVolts / model.ratings().leastVolts()));
   }
 
-  private int at(int[] nodes, Terminal terminal) {
+  int at(int[] nodes, Terminal terminal) {
     Integer place = places.get(terminal);
     return place == null ? -1 : nodes[place];
   }
 
-  private boolean has(Terminal terminal) {
+  boolean has(Terminal terminal) {
     return places.containsKey(terminal);
   }
 
@@ -357,7 +357,7 @@ public final class AmplifierLaw extends Law {
     stage.add(branch, ground, bare, 0);
   }
 
-  private double edgeHertz(DirectStage point) {
+  double edgeHertz(DirectStage point) {
     double farads = 0;
     for (CapacitorLaw capacitor : compensation) {
       farads += capacitor.farads(point);
@@ -369,7 +369,7 @@ public final class AmplifierLaw extends Law {
   }
 
   /** What the control pin leaves of the gain: 1 where there is none. */
-  private double control(DirectStage point, int[] nodes) {
+  double control(DirectStage point, int[] nodes) {
     List<ControlPoint> curve = model.gain().control();
     if (!has(Terminal.CONTROL) || curve.isEmpty()) {
       return 1;
@@ -391,6 +391,11 @@ public final class AmplifierLaw extends Law {
       below = above;
     }
     return Math.pow(10, decibels / 20);
+  }
+
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    new AmplifierWaveform(this, stage, nodes).stamp();
   }
 
   /** Supply current, in A. */

@@ -237,4 +237,83 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
     double back = exponential(backward(stage, nodes) / thermal);
     return sign * saturation * (towards - back) * early(stage, nodes);
   }
+
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    DirectStage point = stage.point();
+    int base = branch(0);
+    stage.conductance(nodes[1], base, 1 / model.baseOhms());
+    Junctions junctions =
+        new Junctions(
+            saturation(point),
+            Temperature.thermalVolts(point.celsius()),
+            1 / value(point, 1),
+            1 / model.reverseGain(),
+            1 / model.earlyVolts());
+    stage
+        .device(junctions)
+        .control(0, base, sign)
+        .control(0, nodes[2], -sign)
+        .control(1, base, sign)
+        .control(1, nodes[0], -sign)
+        .current(0, base, nodes[2], sign)
+        .current(1, base, nodes[0], sign)
+        .current(2, nodes[0], nodes[2], sign);
+  }
+
+  /**
+   * Both junctions over time. Controls: base over emitter, base over collector. Outputs: currents
+   * base to emitter, base to collector, collector to emitter.
+   */
+  private record Junctions(
+      double saturation, double thermal, double perGain, double perReverse, double perEarly)
+      implements WaveformDevice {
+    @Override
+    public int controls() {
+      return 2;
+    }
+
+    @Override
+    public int outputs() {
+      return 3;
+    }
+
+    @Override
+    public void evaluate(
+        double[] volts, int at, double[] into, int outputAt, double[] slopes, int slopeAt) {
+      double forward = volts[at] / thermal;
+      double backward = volts[at + 1] / thermal;
+      double towards = saturation * (exponential(forward) - 1);
+      double back = saturation * (exponential(backward) - 1);
+      double byForward = saturation / thermal * Math.exp(Math.min(MOST_EXPONENT, forward));
+      double byBackward = saturation / thermal * Math.exp(Math.min(MOST_EXPONENT, backward));
+      double plain = 1 + (volts[at] - volts[at + 1]) * perEarly;
+      double early = Math.max(0.1, plain);
+      double earlySlope = plain > 0.1 ? perEarly : 0;
+      into[outputAt] = towards * perGain;
+      into[outputAt + 1] = back * perReverse;
+      into[outputAt + 2] = (towards - back) * early;
+      slopes[slopeAt] = byForward * perGain;
+      slopes[slopeAt + 1] = 0;
+      slopes[slopeAt + 2] = 0;
+      slopes[slopeAt + 3] = byBackward * perReverse;
+      slopes[slopeAt + 4] = byForward * early + (towards - back) * earlySlope;
+      slopes[slopeAt + 5] = -byBackward * early - (towards - back) * earlySlope;
+    }
+
+    @Override
+    public double limited(int control, double from, double to) {
+      double knee = thermal * Math.log(thermal / saturation);
+      if (to <= knee || to - from <= 2 * thermal) {
+        return to;
+      }
+      double start = Math.max(from, knee);
+      return start + thermal * Math.log1p((to - start) / thermal);
+    }
+
+    @Override
+    public double kneeVolts() {
+      return thermal;
+    }
+  }
 }

@@ -11,6 +11,9 @@ public final class CapacitorLaw extends Law {
   /** Softness of the reverse knee, in V. */
   private static final double KNEE_VOLTS = 0.1;
 
+  /** Within so many softnesses of the knee at DC it counts as reversed over time too. */
+  private static final double REVERSED = -5;
+
   private final boolean polarised;
 
   CapacitorLaw(Seat seat, boolean polarised) {
@@ -52,6 +55,21 @@ public final class CapacitorLaw extends Law {
     noise.thermal(nodes[0], nodes[1], value(stage, 2));
     noise.thermalOfImpedance(
         nodes[0], nodes[1], value(stage, 1), 1 / (stage.omega() * value(stage, 0)));
+  }
+
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    stage.conductance(nodes[0], nodes[1], value(stage, 2));
+    stage.capacitor(nodes[0], nodes[1], value(stage, 0), value(stage, 1));
+    double over = (stage.startVolts(nodes[1], nodes[0]) - REVERSE_VOLTS) / KNEE_VOLTS;
+    if (polarised && over > REVERSED) {
+      stage
+          .kink()
+          .control(0, nodes[1], REVERSE_SIEMENS)
+          .control(0, nodes[0], -REVERSE_SIEMENS)
+          .controlConstant(0, -REVERSE_VOLTS * REVERSE_SIEMENS)
+          .current(0, nodes[1], nodes[0], 1);
+    }
   }
 
   @Override

@@ -67,6 +67,17 @@ final class CarrierGeneratorLaw extends FeedLaw {
   }
 
   @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    double siemens = 1 / value(stage, 0);
+    stage.conductance(nodes[0], nodes[1], siemens);
+    stage.drive(nodes[0], -siemens);
+    stage.drive(nodes[1], siemens);
+    stage.powerOfDrive(siemens);
+    stage.powerOf(nodes[0], -siemens);
+    stage.powerOf(nodes[1], siemens);
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     return (stage.volts(node(0)) - stage.volts(node(1))) / value(stage, 0);
   }

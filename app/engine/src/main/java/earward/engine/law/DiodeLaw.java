@@ -194,6 +194,28 @@ public final class DiodeLaw extends Law implements CarrierDriven {
   }
 
   @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    DirectStage point = stage.point();
+    double emission = value(point, 1);
+    double ratio = Temperature.saturationRatio(model.material(), emission, point.celsius());
+    stage.conductance(nodes[0], branch(0), 1 / seriesOhms(point));
+    stage.conductance(branch(0), nodes[1], value(point, 4));
+    WaveformJunction junction =
+        new WaveformJunction(
+            value(point, 0) * ratio,
+            emission * Temperature.thermalVolts(point.celsius()),
+            value(point, 3),
+            model.builtInVolts(),
+            model.gradingExponent(),
+            model.breakdownVolts());
+    stage
+        .device(junction)
+        .control(0, branch(0), 1)
+        .control(0, nodes[1], -1)
+        .current(0, branch(0), nodes[1], 1);
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     if (apart(stage)) {
       return stage.drivenAmperes()[driven];

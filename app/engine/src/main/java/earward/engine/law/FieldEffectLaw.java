@@ -176,4 +176,56 @@ final class FieldEffectLaw extends Law implements Heated, CarrierDriven {
         channel(stage, turned ? nodes[2] : nodes[0], nodes[1], turned ? nodes[0] : nodes[2]);
     return (turned ? -sign : sign) * channel.amperes();
   }
+
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    stage
+        .device(new Square(value(stage, 0), value(stage, 1)))
+        .control(0, nodes[1], sign)
+        .control(0, nodes[2], -sign)
+        .control(1, nodes[0], sign)
+        .control(1, nodes[2], -sign)
+        .current(0, nodes[0], nodes[2], sign);
+  }
+
+  /** The channel over time. Controls: gate over source, drain over source; output: its current. */
+  private record Square(double saturated, double pinch) implements WaveformDevice {
+    @Override
+    public int controls() {
+      return 2;
+    }
+
+    @Override
+    public int outputs() {
+      return 1;
+    }
+
+    @Override
+    public void evaluate(
+        double[] volts, int at, double[] into, int outputAt, double[] slopes, int slopeAt) {
+      boolean turned = volts[at + 1] < 0;
+      double across = Math.abs(volts[at + 1]) / pinch;
+      double gate = turned ? volts[at] - volts[at + 1] : volts[at];
+      double open = 1 + gate / pinch;
+      double amperes = 0;
+      double byGate = 0;
+      double byDrain = 0;
+      if (open > 0 && across >= open) {
+        amperes = saturated * open * open;
+        byGate = 2 * saturated * open / pinch;
+      } else if (open > 0) {
+        amperes = saturated * across * (2 * open - across);
+        byGate = 2 * saturated * across / pinch;
+        byDrain = 2 * saturated * (open - across) / pinch;
+      }
+      into[outputAt] = turned ? -amperes : amperes;
+      slopes[slopeAt] = turned ? -byGate : byGate;
+      slopes[slopeAt + 1] = turned ? byGate + byDrain : byDrain;
+    }
+
+    @Override
+    public double kneeVolts() {
+      return pinch;
+    }
+  }
 }

@@ -28,6 +28,13 @@ final class InductorLaw extends Law {
   }
 
   @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    double ohms = Math.max(LEAST_OHMS, value(stage, 1));
+    double start = stage.startVolts(nodes[0], nodes[1]) / ohms;
+    stage.inductor(nodes[0], nodes[1], value(stage, 0), ohms, start);
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     return isOpen(stage)
         ? 0

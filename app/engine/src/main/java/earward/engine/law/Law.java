@@ -74,9 +74,29 @@ public abstract class Law {
   /** What the part makes of noise; nothing unless its law says so. */
   void addNoise(NoiseStage noise, int[] nodes) {}
 
+  /** Adds the equations over time, at the carrier's own rate. */
+  public final void waveform(WaveformStage stage) {
+    DirectStage point = stage.point();
+    if (isOpen(point)) {
+      for (int k = 0; k < branches(); k++) {
+        stage.term(branch(k), branch(k), 1);
+      }
+      return;
+    }
+    if (isShort(point)) {
+      int[] nodes = seat.nodes();
+      for (int k = 1; k < nodes.length; k++) {
+        stage.conductance(nodes[k - 1], nodes[k], SHORT_SIEMENS);
+      }
+    }
+    stampWaveform(stage, nodes(point));
+  }
+
   abstract void stampDirect(DirectStage stage, int[] nodes);
 
   abstract void stampAlternating(AlternatingStage stage, int[] nodes);
+
+  abstract void stampWaveform(WaveformStage stage, int[] nodes);
 
   /** DC current through the part in its drawing direction, in A; NaN where it has none. */
   public double amperes(DirectStage stage) {
@@ -120,6 +140,10 @@ public abstract class Law {
   /** Node of a terminal by its place in the device's order, −1 for ground. */
   public final int node(int terminal) {
     return seat.nodes()[terminal];
+  }
+
+  final double value(WaveformStage stage, int parameter) {
+    return value(stage.point(), parameter);
   }
 
   final double value(AlternatingStage stage, int parameter) {

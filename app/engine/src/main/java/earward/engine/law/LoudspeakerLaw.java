@@ -12,6 +12,9 @@ final class LoudspeakerLaw extends Law {
   private static final int MECHANICAL_Q = 3;
   private static final int ELECTRICAL_Q = 4;
 
+  /** What stands for a voice coil without inductance over time, in H. */
+  private static final double LEAST_HENRIES = 1e-9;
+
   private final double ratedOhms;
 
   LoudspeakerLaw(Seat seat, double ratedOhms) {
@@ -60,6 +63,32 @@ final class LoudspeakerLaw extends Law {
   private double imaginaryOhms(AlternatingStage stage) {
     double coil = stage.omega() * value(stage, VOICE_COIL_HENRIES);
     return coil - motionalOhms(stage) * off(stage);
+  }
+
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    double dcOhms = value(stage, DC_OHMS);
+    double resonance = 2 * Math.PI * value(stage, RESONANCE_HERTZ);
+    double mechanicalQ = value(stage, MECHANICAL_Q);
+    double motional = dcOhms * mechanicalQ / value(stage, ELECTRICAL_Q);
+    int between = stage.unknown();
+    double start = stage.startVolts(nodes[0], nodes[1]) / dcOhms;
+    double henries = Math.max(LEAST_HENRIES, value(stage, VOICE_COIL_HENRIES));
+    stage.inductor(nodes[0], between, henries, dcOhms, start);
+    stage.conductance(between, nodes[1], 1 / motional);
+    int charge = stage.state(0);
+    stage.rate(between, charge, 1);
+    stage.rate(nodes[1], charge, -1);
+    double farads = mechanicalQ / (resonance * motional);
+    stage.term(stage.rowOf(charge), between, 1);
+    stage.term(stage.rowOf(charge), nodes[1], -1);
+    stage.stateTerm(stage.rowOf(charge), charge, -1 / farads);
+    int spring = stage.state(start);
+    stage.stateTerm(between, spring, 1);
+    stage.stateTerm(nodes[1], spring, -1);
+    stage.term(stage.rowOf(spring), between, 1);
+    stage.term(stage.rowOf(spring), nodes[1], -1);
+    stage.rate(stage.rowOf(spring), spring, -motional / (mechanicalQ * resonance));
   }
 
   @Override

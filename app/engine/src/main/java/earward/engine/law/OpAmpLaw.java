@@ -96,6 +96,66 @@ final class OpAmpLaw extends Law {
   }
 
   @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    DirectStage point = stage.point();
+    stage.conductance(nodes[0], nodes[1], 1 / model.inputOhms());
+    stage.current(nodes[SUPPLY], nodes[GROUND], on(point, nodes) * value(point, 2));
+    int branch = branch(0);
+    stage.branchCurrent(branch, nodes[GROUND], nodes[2]);
+    stage.kink().control(0, branch, 1).current(0, nodes[SUPPLY], nodes[GROUND], 1);
+    double gain = value(point, 0);
+    double seconds = gain / (2 * Math.PI * value(point, 1));
+    double half = halfSwing(point, nodes);
+    int apart = stage.state(stage.startVolts(nodes[0], nodes[1]));
+    int row = stage.rowOf(apart);
+    stage.rate(row, apart, seconds);
+    stage.stateTerm(row, apart, 1);
+    stage.term(row, nodes[0], -1);
+    stage.term(row, nodes[1], 1);
+    stage.term(branch, nodes[2], 1);
+    stage.term(branch, branch, model.outputOhms());
+    stage.term(branch, nodes[SUPPLY], -0.5);
+    stage.term(branch, nodes[GROUND], -0.5);
+    stage.constant(branch, (model.lostVoltsUp() - model.lostVoltsDown()) / 2);
+    stage
+        .device(new Swing(gain, model.lostVoltsUp() + model.lostVoltsDown(), half))
+        .controlState(0, apart, 1)
+        .control(1, nodes[SUPPLY], 1)
+        .control(1, nodes[GROUND], -1)
+        .output(0, branch, -1);
+  }
+
+  /** The swing about its middle over time. Controls: filtered input, supply. */
+  private record Swing(double gain, double lostVolts, double restHalf) implements WaveformDevice {
+    @Override
+    public int controls() {
+      return 2;
+    }
+
+    @Override
+    public int outputs() {
+      return 1;
+    }
+
+    @Override
+    public void evaluate(
+        double[] volts, int at, double[] into, int outputAt, double[] slopes, int slopeAt) {
+      double plain = (volts[at + 1] - lostVolts) / 2;
+      double half = Math.max(1e-3, plain);
+      double drive = gain * volts[at] / half;
+      double tanh = Math.tanh(drive);
+      into[outputAt] = half * tanh;
+      slopes[slopeAt] = gain * (1 - tanh * tanh);
+      slopes[slopeAt + 1] = plain > 1e-3 ? 0.5 * (tanh - drive * (1 - tanh * tanh)) : 0;
+    }
+
+    @Override
+    public double kneeVolts() {
+      return restHalf / gain;
+    }
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     return isOpen(stage) ? 0 : stage.branch(branch(0));
   }

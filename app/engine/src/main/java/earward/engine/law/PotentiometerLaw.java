@@ -47,6 +47,15 @@ final class PotentiometerLaw extends Law {
   }
 
   @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    double end = Math.max(InductorLaw.LEAST_OHMS, value(stage, 2));
+    double upper = upperOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
+    double lower = lowerOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
+    stage.conductance(nodes[0], nodes[1], 1 / upper);
+    stage.conductance(nodes[1], nodes[2], 1 / lower);
+  }
+
+  @Override
   public double watts(DirectStage stage) {
     if (isOpen(stage)) {
       return 0;

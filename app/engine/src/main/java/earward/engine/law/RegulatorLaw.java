@@ -73,4 +73,47 @@ public final class RegulatorLaw extends Law implements Heated {
     return amperes(stage) * (stage.volts(nodes[0]) - stage.volts(nodes[2]))
         + input * value(stage, 2);
   }
+
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    double on = Math.min(1, Math.max(0, stage.startVolts(nodes[0], nodes[1])));
+    stage.current(nodes[0], nodes[1], on * value(stage, 2));
+    stage
+        .device(new Pass(value(stage, 0), value(stage, 1), model.outputOhms()))
+        .control(0, nodes[0], 1)
+        .control(0, nodes[1], -1)
+        .control(1, nodes[2], 1)
+        .control(1, nodes[1], -1)
+        .current(0, nodes[0], nodes[2], 1);
+  }
+
+  /** The pass element over time. Controls: input, output, both over ground. */
+  private record Pass(double wantedVolts, double dropVolts, double ohms) implements WaveformDevice {
+    @Override
+    public int controls() {
+      return 2;
+    }
+
+    @Override
+    public int outputs() {
+      return 1;
+    }
+
+    @Override
+    public void evaluate(
+        double[] volts, int at, double[] into, int outputAt, double[] slopes, int slopeAt) {
+      double lack = (wantedVolts - volts[at] + dropVolts) / KNEE_VOLTS;
+      double target = wantedVolts - KNEE_VOLTS * Soft.plus(lack);
+      double push = (target - volts[at + 1]) / (ohms * KNEE_AMPERES);
+      double slope = Soft.plusSlope(push) / ohms;
+      into[outputAt] = KNEE_AMPERES * Soft.plus(push);
+      slopes[slopeAt] = slope * Soft.plusSlope(lack);
+      slopes[slopeAt + 1] = -slope;
+    }
+
+    @Override
+    public double kneeVolts() {
+      return ohms * KNEE_AMPERES;
+    }
+  }
 }

@@ -22,6 +22,11 @@ final class ResistiveLaw extends Law {
   }
 
   @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    stage.conductance(nodes[0], nodes[1], 1 / value(stage, 0));
+  }
+
+  @Override
   public double amperes(DirectStage stage) {
     return isOpen(stage) ? 0 : (stage.volts(node(0)) - stage.volts(node(1))) / value(stage, 0);
   }

@@ -29,6 +29,13 @@ public final class SourceLaw extends Law {
     noise.thermal(nodes[0], nodes[1], siemens(noise.stage().point()));
   }
 
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    double siemens = siemens(stage.point());
+    stage.conductance(nodes[0], nodes[1], siemens);
+    stage.current(nodes[1], nodes[0], value(stage, 0) * siemens);
+  }
+
   /** Current that it gives, in A. */
   @Override
   public double amperes(DirectStage stage) {

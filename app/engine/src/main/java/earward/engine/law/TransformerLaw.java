@@ -66,4 +66,29 @@ final class TransformerLaw extends Law {
     stage.add(branch, branch, -Math.max(InductorLaw.LEAST_OHMS, ohms), 0);
     stage.add(branch, branch(3), -turns, 0);
   }
+
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    double half = value(stage, RATIO) / 2;
+    double secondary = value(stage, SECONDARY_OHMS) / 2;
+    winding(stage, branch(0), nodes[0], nodes[1], value(stage, PRIMARY_OHMS), 1);
+    winding(stage, branch(1), nodes[2], nodes[3], secondary, half);
+    winding(stage, branch(2), nodes[3], nodes[4], secondary, half);
+    int magnetising = stage.state(0);
+    stage.stateTerm(branch(3), magnetising, 1);
+    stage.term(branch(3), branch(0), -1);
+    stage.term(branch(3), branch(1), -half);
+    stage.term(branch(3), branch(2), -half);
+    stage.rate(stage.rowOf(magnetising), magnetising, value(stage, PRIMARY_HENRIES));
+    stage.term(stage.rowOf(magnetising), branch(3), -1);
+  }
+
+  private void winding(
+      WaveformStage stage, int branch, int from, int to, double ohms, double turns) {
+    stage.branchCurrent(branch, from, to);
+    stage.term(branch, from, 1);
+    stage.term(branch, to, -1);
+    stage.term(branch, branch, -Math.max(InductorLaw.LEAST_OHMS, ohms));
+    stage.term(branch, branch(3), -turns);
+  }
 }

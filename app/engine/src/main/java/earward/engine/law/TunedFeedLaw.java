@@ -17,6 +17,9 @@ final class TunedFeedLaw extends FeedLaw {
   private static final int TAP_FRACTION = 3;
   private static final int WINDING_OHMS = 4;
 
+  /** Resistance of a large winding resistance over the reactance of what shorts it. */
+  private static final double SHORTING = 20;
+
   TunedFeedLaw(Seat seat) {
     super(seat);
   }
@@ -113,6 +116,65 @@ final class TunedFeedLaw extends FeedLaw {
     double above = Math.max(InductorLaw.LEAST_OHMS, ohms * (1 - fraction));
     stage.impedance(nodes[TOP], nodes[TAP], above, reactance * (1 - fraction));
     stage.impedance(nodes[TAP], nodes[BOTTOM], below, reactance * fraction);
+  }
+
+  /**
+   * C as it is, the core turned for the wanted tuning, and the winding's resistance in series with
+   * L where audio and DC flow. At the carrier its loss belongs to Rp already, so Rp and L are moved
+   * until the circuit is Rp ∥ L ∥ C there; a resistance too large for that is shorted to the
+   * carrier by a capacitor of a twentieth of it in reactance.
+   */
+  @Override
+  void stampWaveform(WaveformStage stage, int[] nodes) {
+    double omega = stage.carrierRadians();
+    double rp = value(stage, PARALLEL_OHMS);
+    double farads = value(stage, QUALITY) / (omega * rp);
+    double reactance = 1 / (omega * farads - 2 * farads * stage.tuningRadians());
+    double ohms = Math.max(InductorLaw.LEAST_OHMS, value(stage, WINDING_OHMS));
+    boolean shorted = ohms * rp > 0.2 * reactance * reactance;
+    double real = shorted ? ohms / (1 + SHORTING * SHORTING) : ohms;
+    double own = shorted ? -SHORTING * real : 0;
+    double whole = (reactance + Math.sqrt(reactance * reactance - 4 * real * real)) / 2;
+    double loss = real / (real * real + whole * whole);
+    stage.conductance(nodes[TOP], nodes[BOTTOM], Math.max(0, 1 / rp - loss));
+    stage.capacitor(nodes[TOP], nodes[BOTTOM], farads, 0);
+    double start = stage.startVolts(nodes[TOP], nodes[BOTTOM]) / ohms;
+    if (shorted) {
+      int between = stage.unknown();
+      stage.conductance(between, nodes[BOTTOM], 1 / ohms);
+      shorting(stage, between, nodes[BOTTOM], SHORTING / (omega * ohms), start * ohms);
+      stage.inductor(nodes[TOP], between, (whole - own) / omega, 0, start);
+    } else {
+      stage.inductor(nodes[TOP], nodes[BOTTOM], whole / omega, ohms, start);
+    }
+    stage.drive(nodes[TOP], -1 / rp);
+    stage.drive(nodes[BOTTOM], 1 / rp);
+    stage.powerOf(nodes[TOP], 1 / rp);
+    stage.powerOf(nodes[BOTTOM], -1 / rp);
+    stage.term(branch(0), branch(0), 1);
+    tap(stage, nodes, ohms);
+  }
+
+  private static void shorting(
+      WaveformStage stage, int a, int b, double farads, double startVolts) {
+    int charge = stage.state(farads * startVolts);
+    stage.rate(a, charge, 1);
+    stage.rate(b, charge, -1);
+    stage.term(stage.rowOf(charge), a, 1);
+    stage.term(stage.rowOf(charge), b, -1);
+    stage.stateTerm(stage.rowOf(charge), charge, -1 / farads);
+  }
+
+  /** An ideal tap, behind what the winding's resistance is to direct current there. */
+  private void tap(WaveformStage stage, int[] nodes, double ohms) {
+    double fraction = value(stage, TAP_FRACTION);
+    stage.term(nodes[TAP], branch(1), -1);
+    stage.term(nodes[TOP], branch(1), fraction);
+    stage.term(nodes[BOTTOM], branch(1), 1 - fraction);
+    stage.term(branch(1), nodes[TAP], 1);
+    stage.term(branch(1), nodes[TOP], -fraction);
+    stage.term(branch(1), nodes[BOTTOM], fraction - 1);
+    stage.term(branch(1), branch(1), ohms * fraction * (1 - fraction));
   }
 
   @Override
