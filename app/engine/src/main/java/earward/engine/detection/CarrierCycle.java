@@ -49,6 +49,10 @@ final class CarrierCycle {
   private final double[] moved;
   private final int[] active;
   private final double[] reduced;
+
+  /** What each active column adds to all rows, column after column. */
+  private final double[] answers;
+
   private int actives;
   private final DenseSolver solver;
   private boolean charged;
@@ -96,6 +100,7 @@ final class CarrierCycle {
     moved = new double[unknowns];
     active = new int[unknowns];
     reduced = new double[unknowns];
+    answers = new double[unknowns * unknowns];
     solver = new DenseSolver(unknowns);
     mean = new double[ports];
     harmonicReal = new double[(harmonics + 1) * ports];
@@ -320,26 +325,22 @@ final class CarrierCycle {
   }
 
   private void column(int c, int column) {
-    double[] matrix = solver.matrix;
     int j = column / samples;
     int r = column - j * samples;
     int other = partner[j];
     double direct = own[column];
     double crossed = other < 0 ? 0 : across[column];
     double stored = charged ? capacitance[column] : 0;
-    for (int k = 0; k < actives; k++) {
-      int i = active[k] / samples;
-      int s = active[k] - i * samples;
-      double entry = kernel.ohms(i, s, j, r) * direct;
+    for (int i = 0; i < ports; i++) {
+      kernel.column(i, j, r, direct, stored, answers, c * unknowns + i * samples, true);
       if (other >= 0) {
-        entry += kernel.ohms(i, s, other, r) * crossed;
+        kernel.column(i, other, r, crossed, 0, answers, c * unknowns + i * samples, false);
       }
-      if (stored != 0) {
-        entry += kernel.perCoulomb(i, s, j, r) * stored;
-      }
-      matrix[k * actives + c] = entry;
     }
-    matrix[c * actives + c] += 1;
+    for (int k = 0; k < actives; k++) {
+      solver.matrix[k * actives + c] = answers[c * unknowns + active[k]];
+    }
+    solver.matrix[c * actives + c] += 1;
   }
 
   /**
@@ -351,29 +352,16 @@ final class CarrierCycle {
     }
     solver.solve(reduced, 0);
     if (actives < unknowns) {
-      spread(reduced);
-      kernel.addCurrents(changed, values, -1);
-      if (charged) {
-        kernel.addCharges(moved, values, -1);
+      for (int k = 0; k < actives; k++) {
+        double volts = reduced[k];
+        int from = k * unknowns;
+        for (int i = 0; i < unknowns; i++) {
+          values[i] -= answers[from + i] * volts;
+        }
       }
     }
     for (int k = 0; k < actives; k++) {
       values[active[k]] = reduced[k];
-    }
-  }
-
-  /** What changes of the active voltages change in currents and charges. */
-  private void spread(double[] volts) {
-    java.util.Arrays.fill(changed, 0);
-    java.util.Arrays.fill(moved, 0);
-    for (int k = 0; k < actives; k++) {
-      int i = active[k];
-      int port = i / samples;
-      changed[i] += own[i] * volts[k];
-      moved[i] = charged ? capacitance[i] * volts[k] : 0;
-      if (partner[port] >= 0) {
-        changed[i + (partner[port] - port) * samples] += across[i] * volts[k];
-      }
     }
   }
 

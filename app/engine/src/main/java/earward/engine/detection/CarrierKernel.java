@@ -92,14 +92,29 @@ final class CarrierKernel {
     return chargeReach[port];
   }
 
-  /** Volts at port i, sample s, by one ampere at port j, sample r. */
-  double ohms(int i, int s, int j, int r) {
-    return toCurrent[(i * ports + j) * 2 * samples + samples + s - r];
-  }
-
-  /** Volts at port i, sample s, by one coulomb at port j, sample r. */
-  double perCoulomb(int i, int s, int j, int r) {
-    return toCharge[(i * ports + j) * 2 * samples + samples + s - r];
+  /**
+   * What all samples of port i answer to a current and a charge at port j, sample r.
+   *
+   * @param into from an offset
+   * @param first whether to write rather than to add
+   */
+  void column(
+      int i, int j, int r, double amperes, double coulombs, double[] into, int to, boolean first) {
+    int from = (i * ports + j) * 2 * samples + samples - r;
+    if (first) {
+      for (int s = 0; s < samples; s++) {
+        into[to + s] = toCurrent[from + s] * amperes;
+      }
+    } else {
+      for (int s = 0; s < samples; s++) {
+        into[to + s] += toCurrent[from + s] * amperes;
+      }
+    }
+    if (coulombs != 0) {
+      for (int s = 0; s < samples; s++) {
+        into[to + s] += toCharge[from + s] * coulombs;
+      }
+    }
   }
 
   /** Adds the answer to currents; what is constant over the cycle has none and is left out. */

@@ -98,4 +98,37 @@ public final class CarrierSurroundings {
   public int index(int harmonic, int row, int column) {
     return (harmonic * devices + row) * devices + column;
   }
+
+  /** Takes over another's impedances, open voltages and detuning. */
+  public void copy(CarrierSurroundings other) {
+    System.arraycopy(other.carrierRealOhms, 0, carrierRealOhms, 0, carrierRealOhms.length);
+    System.arraycopy(
+        other.carrierImaginaryOhms, 0, carrierImaginaryOhms, 0, carrierImaginaryOhms.length);
+    System.arraycopy(other.audioRealOhms, 0, audioRealOhms, 0, audioRealOhms.length);
+    System.arraycopy(other.audioImaginaryOhms, 0, audioImaginaryOhms, 0, audioImaginaryOhms.length);
+    System.arraycopy(other.openVolts, 0, openVolts, 0, openVolts.length);
+    detuningRadians = other.detuningRadians;
+  }
+
+  /**
+   * Whether another's impedances, open voltages and detuning are the same but for a small share.
+   */
+  public boolean near(CarrierSurroundings other, double share) {
+    return detuningRadians == other.detuningRadians
+        && near(carrierRealOhms, other.carrierRealOhms, share)
+        && near(carrierImaginaryOhms, other.carrierImaginaryOhms, share)
+        && near(audioRealOhms, other.audioRealOhms, share)
+        && near(audioImaginaryOhms, other.audioImaginaryOhms, share)
+        && near(openVolts, other.openVolts, share);
+  }
+
+  private static boolean near(double[] one, double[] other, double share) {
+    double largest = 0;
+    double off = 0;
+    for (int i = 0; i < one.length; i++) {
+      largest = Math.max(largest, Math.abs(one[i]));
+      off = Math.max(off, Math.abs(one[i] - other[i]));
+    }
+    return off <= share * largest;
+  }
 }

@@ -39,6 +39,11 @@ final class CaseWork {
   private final double[] scratch;
   private final double[] former;
 
+  /** Mean currents of the nominal kit, from which every solve starts. */
+  private final double[] keptSignal;
+
+  private final double[] keptDriven;
+
   private enum Part {
     TO_DO,
     DONE,
@@ -70,6 +75,8 @@ final class CaseWork {
             : new Detection(network, direct.stage());
     scratch = new double[network.size];
     former = new double[network.size];
+    keptSignal = new double[network.amplifiers.length];
+    keptDriven = new double[network.ports.length];
   }
 
   /** Takes over a row; everything is to be solved anew, from the solution that was kept. */
@@ -91,8 +98,12 @@ final class CaseWork {
   /** Makes the present solution the start of all later ones. */
   void keep() {
     direct.keep();
+    if (point == Part.DONE) {
+      System.arraycopy(stage().signalAmperes(), 0, keptSignal, 0, keptSignal.length);
+      System.arraycopy(stage().drivenAmperes(), 0, keptDriven, 0, keptDriven.length);
+    }
     stage().matrix().freeze();
-    alternating.stage().matrix().freeze();
+    alternating.stage().freeze();
     if (detection != null) {
       detection.keep();
     }
@@ -144,12 +155,24 @@ final class CaseWork {
               plan.drive != Drive.UNPOWERED,
               plan.drive == Drive.SIGNAL && detection != null);
       alternating.stage().carrier(carrierRadians());
-      java.util.Arrays.fill(stage().signalAmperes(), 0);
-      java.util.Arrays.fill(stage().drivenAmperes(), 0);
+      System.arraycopy(keptSignal, 0, stage().signalAmperes(), 0, keptSignal.length);
+      System.arraycopy(keptDriven, 0, stage().drivenAmperes(), 0, keptDriven.length);
       java.util.Arrays.fill(outputs.outWatts, 0);
-      point = solveDrive() ? Part.DONE : Part.FAILED;
+      point = solveDrive() || (warm && solveCold()) ? Part.DONE : Part.FAILED;
     }
     return point == Part.DONE;
+  }
+
+  /** Once more from nothing, where the nominal kit's solution is too far away to start from. */
+  private boolean solveCold() {
+    trouble = "";
+    direct.forget();
+    if (detection != null) {
+      detection.forget();
+    }
+    java.util.Arrays.fill(stage().signalAmperes(), 0);
+    java.util.Arrays.fill(stage().drivenAmperes(), 0);
+    return solveDrive();
   }
 
   private boolean solveDrive() {
@@ -230,6 +253,9 @@ final class CaseWork {
     detection.audio(audioTable, stage());
     if (first && !tune(detection, feed)) {
       return false;
+    }
+    if (!first && detection.unmoved()) {
+      return true; // what it would find is what it found
     }
     if (!detection.solveModulated(peakVolts(), depth(), toneRadians())) {
       return fail("the detector's cycle did not settle");

@@ -24,12 +24,16 @@ final class Detection {
   /** Impedance at DC above which a port has no load but what leaks. */
   private static final double FLOATING_OHMS = 1e9;
 
+  /** Share of its largest entry by which a row of surroundings may differ and yet be the same. */
+  private static final double UNMOVED = 1e-12;
+
   private final Network network;
   private final RealLu conductances;
   private final double[] means;
   final EnvelopeSolver modulated;
   final EnvelopeSolver carrierOnly;
   final CarrierSurroundings around;
+  private final CarrierSurroundings solved;
   private final PortLaw[] devices;
   private final CarrierDriven[] parts;
 
@@ -42,6 +46,8 @@ final class Detection {
     carrierOnly = new EnvelopeSolver(ports, LONE_CARRIER_SAMPLES, 2, true);
     around =
         new CarrierSurroundings(ports, carrierOnly.carrierHarmonics(), modulated.audioHarmonics());
+    solved =
+        new CarrierSurroundings(ports, carrierOnly.carrierHarmonics(), modulated.audioHarmonics());
     parts =
         Arrays.stream(network.ports)
             .filter(port -> port.which() == 0)
@@ -53,6 +59,12 @@ final class Detection {
   void keep() {
     modulated.keep();
     carrierOnly.keep();
+  }
+
+  /** The next solves start from nothing. */
+  void forget() {
+    modulated.forget();
+    carrierOnly.forget();
   }
 
   void recall() {
@@ -129,7 +141,13 @@ final class Detection {
     }
   }
 
+  /** Whether the surroundings are those of the last modulated solve, but for rounding. */
+  boolean unmoved() {
+    return around.near(solved, UNMOVED);
+  }
+
   boolean solveModulated(double peakVolts, double depth, double toneRadians) {
+    solved.copy(around);
     return modulated.solve(around, devices, peakVolts, depth, toneRadians);
   }
 

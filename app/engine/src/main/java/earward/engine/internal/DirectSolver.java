@@ -51,6 +51,11 @@ final class DirectSolver {
     System.arraycopy(kept, 0, stage.solution(), 0, kept.length);
   }
 
+  /** Goes back to nothing. */
+  void forget() {
+    Arrays.fill(stage.solution(), 0);
+  }
+
   /** Where the equations were furthest from being met when the last solve failed. */
   String worst() {
     return network.nameOf(worst);

@@ -10,7 +10,10 @@ import earward.engine.linear.ComplexLu;
 public final class AlternatingStage {
   private final int nodes;
   private final int size;
-  private final ComplexLu matrix;
+  private final ComplexLu audio;
+  private final ComplexLu heldCarrier;
+  private final ComplexLu freeCarrier;
+  private ComplexLu matrix;
   private final DirectStage point;
   private double omega;
   private int carrierHarmonic;
@@ -26,7 +29,10 @@ public final class AlternatingStage {
     this.nodes = nodes;
     this.size = size;
     this.point = point;
-    matrix = new ComplexLu(size);
+    audio = new ComplexLu(size);
+    heldCarrier = new ComplexLu(size);
+    freeCarrier = new ComplexLu(size);
+    matrix = audio;
   }
 
   /** Sets the carrier, in rad/s: the winding of a tuned feed is known by its resonance. */
@@ -48,21 +54,22 @@ public final class AlternatingStage {
 
   /** Begins the carrier itself with the feed at rest behind its own impedance, not held. */
   public void beginFreeCarrier(double radians) {
-    begin(radians, 1, radians);
+    begin(freeCarrier, radians, 1, radians);
     feedFree = true;
   }
 
   /** Begins an audio frequency, in rad/s. */
   public void beginAudio(double radians) {
-    begin(radians, 0, carrierOmega);
+    begin(audio, radians, 0, carrierOmega);
   }
 
   /** Begins a multiple of the carrier, whose own frequency is given in rad/s. */
   public void beginCarrier(int harmonic, double radians) {
-    begin(harmonic * radians, harmonic, radians);
+    begin(heldCarrier, harmonic * radians, harmonic, radians);
   }
 
-  private void begin(double radians, int harmonic, double carrierRadians) {
+  private void begin(ComplexLu system, double radians, int harmonic, double carrierRadians) {
+    matrix = system;
     omega = radians;
     carrierHarmonic = harmonic;
     carrierOmega = carrierRadians;
@@ -118,6 +125,14 @@ public final class AlternatingStage {
     return farads < openBelowFarads || farads > openAboveFarads;
   }
 
+  /** Keeps the orders of elimination from now on: see {@link ComplexLu#freeze}. */
+  public void freeze() {
+    audio.freeze();
+    heldCarrier.freeze();
+    freeCarrier.freeze();
+  }
+
+  /** The system of the frequency that was begun last: each kind has an order of its own. */
   public ComplexLu matrix() {
     return matrix;
   }

@@ -63,9 +63,12 @@ public final class ComplexLu {
     im[at] += imaginary;
   }
 
-  /** Keeps the order of elimination from now on; a system that does not fit is solved densely. */
+  /**
+   * Keeps the order of elimination from now on, as the last matrix wants it; a system that does not
+   * fit is solved densely.
+   */
   public void freeze() {
-    pattern.freeze();
+    pattern.freeze(keptRe, keptIm);
   }
 
   /** How many systems were solved densely. */

@@ -5,7 +5,7 @@ import org.jspecify.annotations.Nullable;
 
 /**
  * Which elements of a system are ever written, and the order of elimination that was found for
- * them. Until {@link #freeze()} a new element means a new order; after it, a system with an element
+ * them. Until {@link #freeze} a new element means a new order; after it, a system with an element
  * outside the pattern is solved densely, so that what a solver was asked before changes nothing.
  */
 final class Pattern {
@@ -36,9 +36,16 @@ final class Pattern {
     strange = false;
   }
 
-  /** Keeps the pattern from now on. */
-  void freeze() {
+  /**
+   * Keeps the pattern from now on, with the order that suits a matrix that stands for all later
+   * ones.
+   */
+  void freeze(double[] real, double[] imaginary) {
     frozen = true;
+    if (order != null) {
+      Elimination better = Elimination.of(size, used, real, imaginary);
+      order = better == null ? order : better;
+    }
   }
 
   /** The order to replay for the present system; null where it must be solved densely. */
@@ -47,8 +54,8 @@ final class Pattern {
       fallBacks++;
       return null;
     }
-    if (strange || order == null) {
-      order = frozen && order == null ? null : Elimination.of(size, used, real, imaginary);
+    if (!frozen && (strange || order == null)) {
+      order = Elimination.of(size, used, real, imaginary);
       strange = false;
     }
     if (order == null) {

@@ -49,9 +49,12 @@ public final class RealLu {
     a[at] += value;
   }
 
-  /** Keeps the order of elimination from now on; a system that does not fit is solved densely. */
+  /**
+   * Keeps the order of elimination from now on, as the last matrix wants it; a system that does not
+   * fit is solved densely.
+   */
   public void freeze() {
-    pattern.freeze();
+    pattern.freeze(kept, zero);
   }
 
   /** How many systems were solved densely. */
