@@ -75,6 +75,7 @@ public final class FieldEffectFollower implements BlockType {
         plan.fit("r1", "r-feed", "c1", "c-feed", "q1")
             .testPoint("out", "out")
             .to(new Single("out")),
+        DetectorChecks.clipping("q1", conditions, true),
         FollowerRest.most(MOST_SHARE * model.saturatedDrainAmperes(), RemedyHint.raise("r1")));
   }
 }

@@ -13,7 +13,7 @@ public enum Quantity {
   DC_VOLTS("dc-volts", Unit.VOLT),
   /** Fundamental of the test tone. */
   AUDIO_RMS_VOLTS("audio-rms-volts", Unit.VOLT),
-  /** Harmonics 2 to 10 over the fundamental: of detector and clipping IC, not of transistors. */
+  /** Harmonics 2 to 10 over the fundamental: of detector and clipping IC, no other transistor. */
   DISTORTION("distortion", Unit.FRACTION),
   CARRIER_RMS_VOLTS("carrier-rms-volts", Unit.VOLT),
   SECOND_CARRIER_RMS_VOLTS("second-carrier-rms-volts", Unit.VOLT),

@@ -15,9 +15,9 @@
  * <tr><td>node, test point, rail</td><td>dc-volts</td><td>all</td></tr>
  * <tr><td></td><td>audio-rms-volts, carrier-rms-volts, second- and third-carrier-rms-volts</td>
  *   <td>signal; 0 in the others</td></tr>
- * <tr><td></td><td>distortion: of the detector and of a clipping amplifier IC. A transistor, a
- *   field-effect transistor and an op-amp are linear about their rest: they add none, so this says
- *   nothing of crossover</td><td>signal, and only where more than 1 µV of tone arrives</td></tr>
+ * <tr><td></td><td>distortion: of the detector and of a clipping amplifier IC. A transistor that
+ *   the carrier does not drive and an op-amp are linear about their rest: they add none, so this
+ *   says nothing of crossover</td><td>signal, and only where more than 1 µV of tone arrives</td></tr>
  * <tr><td></td><td>low-edge-hertz, high-edge-hertz: of the way from the front end's sidebands to
  *   there</td><td>signal; none where nothing makes an edge</td></tr>
  * <tr><td></td><td>response-deviation-decibels, response-deviation-hertz: largest deviation from
@@ -29,7 +29,7 @@
  *   the front end</td><td>all but unpowered</td></tr>
  * <tr><td>any part</td><td>dc-amperes, dissipation-watts: of DC, except as below</td>
  *   <td>all</td></tr>
- * <tr><td>diode that the carrier drives</td><td>carrier-peak-volts, detection-efficiency,
+ * <tr><td>diode or transistor that the carrier drives</td><td>carrier-peak-volts, detection-efficiency,
  *   carrier-input-ohms, the three clipping depths, reversal-depth, clean-depth</td>
  *   <td>signal</td></tr>
  * <tr><td>any diode</td><td>reverse-peak-volts: with the carrier where that drives it, else DC</td>

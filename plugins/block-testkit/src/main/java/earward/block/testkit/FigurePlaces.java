@@ -68,8 +68,8 @@ final class FigurePlaces {
                   Regulator.class,
                   BipolarTransistor.class,
                   FieldEffectTransistor.class));
-      case REVERSE_PEAK_VOLTS,
-          CARRIER_PEAK_VOLTS,
+      case REVERSE_PEAK_VOLTS -> ofPart(place, Diode.class);
+      case CARRIER_PEAK_VOLTS,
           DETECTION_EFFICIENCY,
           CARRIER_INPUT_OHMS,
           CLIPPING_DEPTH,
@@ -77,7 +77,8 @@ final class FigurePlaces {
           CLIPPING_DEPTH_WITHOUT_COUPLING,
           REVERSAL_DEPTH,
           CLEAN_DEPTH ->
-          ofPart(place, Diode.class);
+          ofPart(
+              place, List.of(Diode.class, BipolarTransistor.class, FieldEffectTransistor.class));
       case SURFACE_CELSIUS,
           SUPPLY_VOLTS,
           PEAK_AMPERES,
