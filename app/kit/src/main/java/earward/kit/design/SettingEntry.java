@@ -1,6 +1,7 @@
 package earward.kit.design;
 
 import earward.block.device.PartModel;
+import java.util.List;
 import java.util.Objects;
 
 /** What a design says for one setting of a block; read with the block type's help. */
@@ -27,11 +28,18 @@ public sealed interface SettingEntry {
    *
    * @param model the figures
    * @param json as written, the source of what is written back
+   * @param remarks what is to be said of the figures, each one sentence: how they were fitted
    */
-  record Inline(PartModel model, String json) implements SettingEntry {
+  record Inline(PartModel model, String json, List<String> remarks) implements SettingEntry {
     public Inline {
       Objects.requireNonNull(model);
       Objects.requireNonNull(json);
+      remarks = List.copyOf(remarks);
+    }
+
+    /** A part of which nothing is to be said. */
+    public Inline(PartModel model, String json) {
+      this(model, json, List.of());
     }
   }
 

@@ -4,9 +4,9 @@ import earward.block.device.AmplifierGain;
 import earward.block.device.AmplifierModel;
 import earward.block.device.AmplifierRatings;
 import earward.block.device.ControlPoint;
-import earward.block.device.OutputSwing;
 import earward.block.quantity.Unit;
 import earward.kit.design.QuantityText;
+import earward.kit.parts.SwingFit;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -22,24 +22,29 @@ final class AmplifierForm {
 
   private AmplifierForm() {}
 
-  static AmplifierModel read(MembersReader in, String name) throws DesignFileException {
+  static FittedPart read(MembersReader in, String name) throws DesignFileException {
     double rejection = in.quantity("ripple rejection", Unit.DECIBEL, 0);
-    return new AmplifierModel(
-        name,
-        in.flag("bridge", false),
-        gain(in),
-        swing(in),
-        ratings(in),
-        in.requiredQuantity("quiescent current", Unit.AMPERE),
-        in.quantity("rest share of the supply", Unit.FRACTION, 0.5),
-        in.quantity("rest offset", Unit.VOLT, 0),
-        in.requiredQuantity("input resistance", Unit.OHM),
-        in.quantity("input bias current", Unit.AMPERE, 0),
-        rejection,
-        in.quantity("ripple rejection without capacitor", Unit.DECIBEL, rejection),
-        in.quantity("input noise", Unit.VOLT, 0),
-        in.text("package").orElse(""),
-        PinsForm.read(in));
+    boolean bridge = in.flag("bridge", false);
+    double restOffset = in.quantity("rest offset", Unit.VOLT, 0);
+    Optional<SwingFit> fit = SwingForm.fit(in, bridge);
+    AmplifierModel model =
+        new AmplifierModel(
+            name,
+            bridge,
+            gain(in),
+            SwingForm.read(in, fit, restOffset),
+            ratings(in),
+            in.requiredQuantity("quiescent current", Unit.AMPERE),
+            in.quantity("rest share of the supply", Unit.FRACTION, 0.5),
+            restOffset,
+            in.requiredQuantity("input resistance", Unit.OHM),
+            in.quantity("input bias current", Unit.AMPERE, 0),
+            rejection,
+            in.quantity("ripple rejection without capacitor", Unit.DECIBEL, rejection),
+            in.quantity("input noise", Unit.VOLT, 0),
+            in.text("package").orElse(""),
+            PinsForm.read(in));
+    return new FittedPart(model, fit.map(SwingFit::report));
   }
 
   /** The plain number of a gain in decibels of voltage. */
@@ -106,15 +111,6 @@ final class AmplifierForm {
               point.requiredQuantity("gain", Unit.DECIBEL)));
     }
     return curve;
-  }
-
-  private static OutputSwing swing(MembersReader in) throws DesignFileException {
-    return new OutputSwing(
-        in.requiredQuantity("lost voltage up", Unit.VOLT),
-        in.quantity("lost voltage up per ampere", Unit.OHM, 0),
-        in.requiredQuantity("lost voltage down", Unit.VOLT),
-        in.quantity("lost voltage down per ampere", Unit.OHM, 0),
-        in.quantity("lost voltage without bootstrap", Unit.VOLT, 0));
   }
 
   private static AmplifierRatings ratings(MembersReader in) throws DesignFileException {

@@ -1,10 +1,10 @@
 package earward.kit.file;
 
 import earward.block.device.PartKind;
-import earward.block.device.PartModel;
 import earward.kit.design.AsWritten;
 import earward.kit.design.BlockEntry;
 import earward.kit.design.SettingEntry;
+import earward.kit.parts.FitReport;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.LinkedHashMap;
@@ -58,7 +58,8 @@ final class BlockForm {
   }
 
   /** What an entry of the parts library says beside the part's figures. */
-  private static final List<String> LIBRARY_WORDS = List.of("source", "notes", "package", "points");
+  private static final List<String> LIBRARY_WORDS =
+      List.of("source", "notes", "package", "points", "output powers");
 
   private static SettingEntry setting(MembersReader block, Json.Member member)
       throws DesignFileException {
@@ -71,11 +72,12 @@ final class BlockForm {
       MembersReader part = new MembersReader(object, block.source(), what);
       Optional<PartKind> kind = kind(part, member.name());
       if (kind.isPresent()) {
-        PartModel model = PartForms.read(kind.get(), part, member.name() + " as given");
+        FittedPart read = PartForms.read(kind.get(), part, member.name() + " as given");
         LIBRARY_WORDS.forEach(
             part::find); // of an entry copied from the library: kept, not asked for
         part.noteUnknown();
-        return new SettingEntry.Inline(model, json);
+        return new SettingEntry.Inline(
+            read.model(), json, read.fit().map(FitReport::sentence).stream().toList());
       }
     }
     return new SettingEntry.Unread(json);

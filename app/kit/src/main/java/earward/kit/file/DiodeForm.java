@@ -11,20 +11,27 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.Supplier;
 
 /**
  * A diode's figures as a JSON object: given, or fitted to the typical ones of its {@code points}
- * where no saturation current is given. Points that are limits are held against the figures.
+ * where no saturation current is given, or those of its {@code zero-bias resistance}. Points that
+ * are limits are held against the figures.
  */
 final class DiodeForm {
   private static final String SATURATION = "saturation current";
+  private static final String EMISSION = "emission coefficient";
+  private static final String SERIES = "series resistance";
+  private static final String ZERO_BIAS = "zero-bias resistance";
   private static final String POINTS = "points";
   private static final double CELSIUS = 25;
 
   private DiodeForm() {}
 
-  static DiodeModel read(MembersReader in, String name) throws DesignFileException {
-    Optional<DiodeFit> fit = fit(in);
+  static FittedPart read(MembersReader in, String name) throws DesignFileException {
+    List<DiodePoint> points = points(in);
+    Optional<DiodeFit> fit = fit(in, points);
     double saturation =
         fit.isPresent()
             ? fit.get().saturationAmperes()
@@ -32,44 +39,62 @@ final class DiodeForm {
     DiodeModel model =
         new DiodeModel(
             name,
-            in.choice("material", DiodeMaterial.values(), DiodeForm::key, DiodeMaterial.SILICON),
+            material(in),
             saturation,
             in.quantity("least saturation current", Unit.AMPERE, saturation),
             in.quantity("most saturation current", Unit.AMPERE, saturation),
             fit.isPresent()
                 ? fit.get().emissionCoefficient()
-                : in.requiredQuantity("emission coefficient", Unit.NUMBER),
-            fit.isPresent()
-                ? fit.get().seriesOhms()
-                : in.quantity("series resistance", Unit.OHM, 0),
+                : in.requiredQuantity(EMISSION, Unit.NUMBER),
+            fit.isPresent() ? fit.get().seriesOhms() : in.quantity(SERIES, Unit.OHM, 0),
             in.quantity("junction capacitance", Unit.FARAD, 0),
             in.quantity("built-in voltage", Unit.VOLT, 0.5),
             in.quantity("grading exponent", Unit.NUMBER, 0.5),
             in.quantity("leakage resistance", Unit.OHM, Double.POSITIVE_INFINITY),
             in.quantity("breakdown voltage", Unit.VOLT, 1000),
             in.quantity("recovery time", Unit.SECOND, 0));
-    requireBelowLimits(model, points(in));
-    return model;
+    requireBelowLimits(model, points);
+    return new FittedPart(model, fit.map(DiodeFit::report));
   }
 
-  /** The fit, where the object has points and no saturation current. */
-  static Optional<DiodeFit> fit(MembersReader in) throws DesignFileException {
-    List<DiodePoint> points = points(in);
+  /**
+   * The fit: to the zero-bias resistance, or to the points where no saturation current is given.
+   */
+  private static Optional<DiodeFit> fit(MembersReader in, List<DiodePoint> points)
+      throws DesignFileException {
+    OptionalDouble zeroBias = in.quantity(ZERO_BIAS, Unit.OHM);
+    if (zeroBias.isPresent()) {
+      refuse(in, SATURATION, "is given beside '" + ZERO_BIAS + "'; wanted one of them");
+      double emission = in.quantity(EMISSION, Unit.NUMBER, DiodeFit.usualEmission(material(in)));
+      double series = in.quantity(SERIES, Unit.OHM, 0);
+      return Optional.of(
+          fitted(in, () -> DiodeFit.ofZeroBias(zeroBias.getAsDouble(), emission, series)));
+    }
     if (points.isEmpty() || in.find(SATURATION).isPresent()) {
       return Optional.empty();
     }
-    for (String fitted : List.of("emission coefficient", "series resistance")) {
-      Optional<Json> given = in.find(fitted);
-      if (given.isPresent()) {
-        throw in.fault(
-            "given-and-fitted",
-            given.get(),
-            fitted,
-            "is given while '" + SATURATION + "' is left to the fit; wanted both or none");
-      }
+    String why = "is given while '" + SATURATION + "' is left to the fit; wanted both or none";
+    refuse(in, EMISSION, why);
+    refuse(in, SERIES, why);
+    return Optional.of(fitted(in, () -> DiodeFit.of(points)));
+  }
+
+  private static DiodeMaterial material(MembersReader in) throws DesignFileException {
+    return in.choice("material", DiodeMaterial.values(), DiodeForm::key, DiodeMaterial.SILICON);
+  }
+
+  private static void refuse(MembersReader in, String member, String why)
+      throws DesignFileException {
+    Optional<Json> given = in.find(member);
+    if (given.isPresent()) {
+      throw in.fault("given-and-fitted", given.get(), member, why);
     }
+  }
+
+  private static DiodeFit fitted(MembersReader in, Supplier<DiodeFit> fit)
+      throws DesignFileException {
     try {
-      return Optional.of(DiodeFit.of(points));
+      return fit.get();
     } catch (IllegalArgumentException e) {
       throw in.impossible(e);
     }
@@ -88,23 +113,12 @@ final class DiodeForm {
             new DiodePoint(
                 point.requiredQuantity("voltage", Unit.VOLT),
                 point.requiredQuantity("current", Unit.AMPERE),
-                point.choice("meaning", Meaning.values(), Meaning::key, Meaning.TYPICAL)
-                    == Meaning.TYPICAL));
+                Meaning.typical(point)));
       } catch (IllegalArgumentException e) {
         throw point.impossible(e);
       }
     }
     return points;
-  }
-
-  /** What a data sheet says of a point. */
-  private enum Meaning {
-    TYPICAL,
-    LIMIT;
-
-    String key() {
-      return name().toLowerCase(Locale.ROOT);
-    }
   }
 
   /** A model above its own data sheet's limit is a slip in the entry. */

@@ -4,11 +4,9 @@ import earward.block.device.AmplifierModel;
 import earward.block.device.PartKind;
 import earward.block.device.PartModel;
 import earward.block.device.Pin;
-import earward.kit.parts.DiodeFit;
 import earward.kit.parts.PartEntry;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** One entry of the parts library: a part's figures, and where they are from. */
 final class PartEntryForm {
@@ -20,18 +18,18 @@ final class PartEntryForm {
     MembersReader unnamed = MembersReader.of(item, source, "an entry of 'parts'");
     String name = unnamed.requiredText("name");
     MembersReader in = new MembersReader(unnamed.object(), source, kind.key() + " '" + name + "'");
-    PartModel model = PartForms.read(kind, in, name);
-    Optional<DiodeFit> fit = kind == PartKind.DIODE ? DiodeForm.fit(in) : Optional.empty();
+    FittedPart part = PartForms.read(kind, in, name);
+    PartModel model = part.model();
     String from = in.requiredText("source");
     List<String> notes = notes(in);
-    fit.ifPresent(fitted -> notes.add(fitted.sentence()));
+    part.fit().ifPresent(fit -> notes.add(fit.sentence()));
     String packageName = in.text("package").orElse("");
     List<Pin> pins =
         model instanceof AmplifierModel amplifier ? amplifier.pins() : PinsForm.read(in);
     requireAllKnown(in);
     try {
       return new PartEntry(
-          model, from, from.contains(MEMORY), notes, fit.map(DiodeFit::report), packageName, pins);
+          model, from, from.contains(MEMORY), notes, part.fit(), packageName, pins);
     } catch (IllegalArgumentException e) {
       throw in.impossible(e);
     }

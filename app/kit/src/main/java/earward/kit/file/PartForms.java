@@ -6,7 +6,6 @@ import earward.block.device.FieldEffectModel;
 import earward.block.device.LoudspeakerModel;
 import earward.block.device.OpAmpModel;
 import earward.block.device.PartKind;
-import earward.block.device.PartModel;
 import earward.block.device.RegulatorModel;
 import earward.block.device.TransistorModel;
 import earward.block.quantity.Unit;
@@ -28,7 +27,7 @@ final class PartForms {
    * @throws DesignFileException with one sentence when a figure lacks, cannot be read, or is
    *     impossible
    */
-  static PartModel read(PartKind kind, MembersReader in, String usualName)
+  static FittedPart read(PartKind kind, MembersReader in, String usualName)
       throws DesignFileException {
     String name = in.text("name").orElse(usualName);
     in.find("kind");
@@ -36,13 +35,13 @@ final class PartForms {
       return switch (kind) {
         case DIODE -> DiodeForm.read(in, name);
         case AMPLIFIER -> AmplifierForm.read(in, name);
-        case LOUDSPEAKER -> loudspeaker(in, name);
-        case BATTERY -> battery(in, name);
-        case ADAPTOR -> adaptor(in, name);
-        case REGULATOR -> regulator(in, name);
-        case TRANSISTOR -> transistor(in, name);
-        case FIELD_EFFECT_TRANSISTOR -> fieldEffect(in, name);
-        case OP_AMP -> opAmp(in, name);
+        case LOUDSPEAKER -> FittedPart.given(loudspeaker(in, name));
+        case BATTERY -> FittedPart.given(battery(in, name));
+        case ADAPTOR -> FittedPart.given(adaptor(in, name));
+        case REGULATOR -> FittedPart.given(regulator(in, name));
+        case TRANSISTOR -> FittedPart.given(transistor(in, name));
+        case FIELD_EFFECT_TRANSISTOR -> FittedPart.given(fieldEffect(in, name));
+        case OP_AMP -> FittedPart.given(opAmp(in, name));
       };
     } catch (IllegalArgumentException e) {
       throw in.impossible(e);

@@ -39,8 +39,7 @@ record DiodeCurve(double logSaturation, double emission, double seriesOhms) {
     double[] residuals = new double[points.size()];
     for (int k = 0; k < residuals.length; k++) {
       DiodePoint point = points.get(k);
-      double misfit = logAmperes(point.volts(), thermalVolts) - Math.log(point.amperes());
-      residuals[k] = Math.sqrt(weight(point.amperes())) * misfit;
+      residuals[k] = Math.sqrt(weight(point.amperes())) * misfit(point, thermalVolts);
     }
     return residuals;
   }
@@ -53,14 +52,14 @@ record DiodeCurve(double logSaturation, double emission, double seriesOhms) {
     return sum;
   }
 
+  /** ln(i of this curve at the point's voltage) less ln(i of the point). */
+  double misfit(DiodePoint point, double thermalVolts) {
+    return logAmperes(point.volts(), thermalVolts) - Math.log(point.amperes());
+  }
+
   /** Root mean square of the misfits in ln(i), every point alike. */
   double misfit(List<DiodePoint> points, double thermalVolts) {
-    double sum = 0;
-    for (DiodePoint point : points) {
-      double misfit = logAmperes(point.volts(), thermalVolts) - Math.log(point.amperes());
-      sum += misfit * misfit;
-    }
-    return Math.sqrt(sum / points.size());
+    return Outlier.rms(points, point -> misfit(point, thermalVolts));
   }
 
   /** 1 where detection happens, halved by each decade away from there. */

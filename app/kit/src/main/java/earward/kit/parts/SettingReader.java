@@ -70,6 +70,35 @@ public final class SettingReader {
             : trim.usualTarget());
   }
 
+  /**
+   * What is to be said of a part's figures: how they were fitted, one sentence each.
+   *
+   * @param setting as the block type declares it
+   * @param entry what the design says; empty for the usual value
+   */
+  public List<String> remarks(Setting setting, Optional<SettingEntry> entry) {
+    if (!(setting instanceof Setting.Part part)) {
+      return List.of();
+    }
+    if (entry.isPresent() && entry.get() instanceof SettingEntry.Inline inline) {
+      return inline.remarks();
+    }
+    return library
+        .find(part.kind(), name(part, entry))
+        .flatMap(PartEntry::fit)
+        .map(FitReport::sentence)
+        .stream()
+        .toList();
+  }
+
+  private static String name(Setting.Part part, Optional<SettingEntry> entry) {
+    return entry
+        .filter(SettingEntry.Words.class::isInstance)
+        .map(SettingEntry.Words.class::cast)
+        .map(SettingEntry.Words::words)
+        .orElse(part.usual());
+  }
+
   private static String option(String place, Setting.Choice choice, Optional<String> words)
       throws SettingException {
     String word = words.orElse(choice.options().get(0));
@@ -126,11 +155,7 @@ public final class SettingReader {
       }
       return inline.model();
     }
-    String name =
-        entry
-            .map(SettingEntry.Words.class::cast)
-            .map(SettingEntry.Words::words)
-            .orElse(part.usual());
+    String name = name(part, entry);
     Optional<PartEntry> found = library.find(part.kind(), name);
     if (found.isEmpty()) {
       throw new SettingException("unknown-part", unknown(place, part.kind(), name));

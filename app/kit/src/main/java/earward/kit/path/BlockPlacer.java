@@ -5,13 +5,18 @@ import earward.block.BlockType;
 import earward.block.BlockTypes;
 import earward.block.Conditions;
 import earward.block.check.Finding;
+import earward.block.device.AudioAmplifier;
+import earward.block.device.Diode;
+import earward.block.device.PartModel;
 import earward.block.setting.Setting;
 import earward.block.setting.SettingValue;
 import earward.block.setting.Values;
 import earward.block.wiring.Nodes;
 import earward.block.wiring.Port;
+import earward.block.wiring.WiredPart;
 import earward.block.wiring.Wiring;
 import earward.kit.design.BlockEntry;
+import earward.kit.design.SettingEntry;
 import earward.kit.parts.PartsLibrary;
 import earward.kit.parts.SettingException;
 import earward.kit.parts.SettingReader;
@@ -53,7 +58,34 @@ final class BlockPlacer {
       findings.add(PathFindings.unknownBlock(entry, known));
       return Optional.empty();
     }
-    return values(entry, type.get()).flatMap(values -> described(entry, type.get(), values));
+    Optional<PlacedBlock> placed =
+        values(entry, type.get()).flatMap(values -> described(entry, type.get(), values));
+    placed.ifPresent(this::remark);
+    return placed;
+  }
+
+  /** Says of parts that stand in the block how their figures were fitted. */
+  private void remark(PlacedBlock block) {
+    for (Setting setting : block.type().settings()) {
+      if (setting instanceof Setting.Part part && stands(block, part)) {
+        Optional<SettingEntry> said = Optional.ofNullable(block.entry().settings().get(part.id()));
+        settings
+            .remarks(part, said)
+            .forEach(sentence -> findings.add(PathFindings.fitted(block, part.id(), sentence)));
+      }
+    }
+  }
+
+  /** Whether the block fits a part of these figures: a choice may leave it without use. */
+  private static boolean stands(PlacedBlock block, Setting.Part part) {
+    PartModel model = block.values().part(part.id(), PartModel.class);
+    return block.description().wiring().parts().stream()
+        .map(WiredPart::device)
+        .anyMatch(
+            device ->
+                device instanceof Diode diode && diode.model().equals(model)
+                    || device instanceof AudioAmplifier amplifier
+                        && amplifier.model().equals(model));
   }
 
   private Optional<Values> values(BlockEntry entry, BlockType type) {
@@ -61,11 +93,9 @@ final class BlockPlacer {
     boolean sound = true;
     List<String> known = type.settings().stream().map(Setting::id).toList();
     for (Setting setting : type.settings()) {
+      Optional<SettingEntry> said = Optional.ofNullable(entry.settings().get(setting.id()));
       try {
-        byId.put(
-            setting.id(),
-            settings.read(
-                entry.id(), setting, Optional.ofNullable(entry.settings().get(setting.id()))));
+        byId.put(setting.id(), settings.read(entry.id(), setting, said));
       } catch (SettingException e) {
         sound = false;
         findings.add(PathFindings.setting(entry, setting.id(), e.code(), e.sentence()));

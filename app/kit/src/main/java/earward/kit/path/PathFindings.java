@@ -49,6 +49,11 @@ final class PathFindings {
             + ".");
   }
 
+  /** How the figures of a part were fitted. */
+  static Finding fitted(PlacedBlock block, String settingId, String sentence) {
+    return Finding.of(Severity.NOTE, "fitted-figures", block.id() + "." + settingId, sentence);
+  }
+
   static Finding setting(BlockEntry entry, String settingId, String code, String sentence) {
     return stop(code, entry.id() + "." + settingId, sentence + ".");
   }

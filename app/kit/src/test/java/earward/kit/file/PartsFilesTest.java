@@ -204,6 +204,69 @@ class PartsFilesTest {
     assertThat(entry.notes()).anyMatch(note -> note.contains("extrapolated"));
   }
 
+  private static final String GIVEN =
+      "\"saturation current\": \"1 nA\", \"emission coefficient\": 1";
+
+  @Test
+  void aDiodeGivenByItsZeroBiasResistanceIsThatOfItsMaterial() throws Exception {
+    Files.writeString(
+        folder.resolve("diodes.json"),
+        DIODES.replace(GIVEN, "\"material\": \"germanium\", \"zero-bias resistance\": \"60 kΩ\""));
+    PartEntry entry = PartsFiles.read(folder).find(PartKind.DIODE, "D").orElseThrow();
+    DiodeModel model = (DiodeModel) entry.model();
+    assertThat(model.emissionCoefficient()).isEqualTo(1.2);
+    assertThat(model.saturationAmperes()).isCloseTo(1.2 * THERMAL_VOLTS / 60e3, within(1e-10));
+    assertThat(entry.notes()).anyMatch(note -> note.contains("zero-bias resistance"));
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "'zero-bias resistance': '0 Ω'|impossible-value|must be above 0",
+        "'zero-bias resistance': '9 kΩ', 'saturation current': '1 nA'|given-and-fitted|wanted one",
+        "'points': [{'current': '1 mA', 'voltage': '0.3 V'}]|impossible-value|at least 3",
+        "'points': [{'current': '1 mA', 'voltage': '0.3 V', 'meaning': 'about'}]|unknown-choice|typ",
+        "'points': [{'current': '1 mA'}]|missing-member|no member 'voltage'"
+      })
+  void aFitThatCannotBeIsSaid(String figures, String code, String words) throws Exception {
+    Files.writeString(
+        folder.resolve("diodes.json"), DIODES.replace(GIVEN, figures.replace('\'', '"')));
+    assertThat(fault().finding().code()).isEqualTo(code);
+    assertThat(fault().sentence()).contains("diodes.json, line ").contains(words);
+  }
+
+  /** ST TDA2822M (March 1995), one output: 0.38 W at 6 V and 1 W at 9 V, both into 8 Ω. */
+  @Test
+  void anAmplifierGivenByItsPowersIsFitted() throws Exception {
+    Files.writeString(folder.resolve("a.json"), amplifier(""));
+    PartEntry entry = PartsFiles.read(folder).find(PartKind.AMPLIFIER, "A").orElseThrow();
+    AmplifierModel model = (AmplifierModel) entry.model();
+    double lost = model.swing().lostUpVolts() + model.swing().lostDownVolts();
+    double ohms = model.swing().lostUpOhms() + model.swing().lostDownOhms();
+    assertThat(6 - lost - ohms * 0.272).isCloseTo(2 * 2.17, within(0.02));
+    assertThat(9 - lost - ohms * 0.441).isCloseTo(2 * 3.53, within(0.02));
+    assertThat(entry.fit()).isPresent();
+    Files.writeString(folder.resolve("a.json"), amplifier("\"lost voltage down\": \"1 V\","));
+    assertThat(fault().finding().code()).isEqualTo("given-and-fitted");
+  }
+
+  private static String amplifier(String more) {
+    return """
+    { "schema": 1, "kind": "amplifier", "parts": [ { "name": "A", "source": "ST TDA2822M",
+      %s "gain": "39 dB", "open-loop gain": "70 dB", "bandwidth": "120 kHz",
+      "output powers": [
+        { "supply": "6 V", "load": "8 Ω", "power": "380 mW" },
+        { "supply": "9 V", "load": "8 Ω", "power": "1 W", "distortion": "10 %%" },
+        { "supply": "6 V", "load": "8 Ω", "power": "300 mW", "meaning": "limit" } ],
+      "lowest supply": "1.8 V", "highest supply": "15 V", "least load": "4 Ω",
+      "highest output current": "1 A", "junction to air": "100 K/W", "junction to case": "70 K/W",
+      "quiescent current": "6 mA", "input resistance": "100 kΩ", "package": "DIP-8",
+      "pins": { "1": "output", "2": "supply", "4": "ground", "7": "input" } } ] }
+    """
+        .formatted(more);
+  }
+
   @Test
   void aDiodeAboveItsOwnLimitIsRefused() throws Exception {
     Files.writeString(

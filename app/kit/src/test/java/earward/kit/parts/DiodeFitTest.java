@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.offset;
 import static org.assertj.core.api.Assertions.within;
 
+import earward.block.law.ThermalVoltage;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
@@ -30,8 +31,9 @@ class DiodeFitTest {
     assertThat(fit.report().points()).isEqualTo(4);
     assertThat(fit.report().residualFraction()).isPresent();
     assertThat(fit.report().residualFraction().getAsDouble()).isLessThan(0.03);
-    assertThat(fit.report().lowestAmperes()).isEqualTo(0.01e-3);
-    assertThat(fit.sentence()).contains("4 typical points").contains("extrapolated below");
+    assertThat(fit.sentence())
+        .contains("4 typical points")
+        .contains("extrapolated below the lowest point, 10\u202fµA");
   }
 
   @Test
@@ -91,6 +93,42 @@ class DiodeFitTest {
         .hasMessageContaining("2 typical points at or below 30 mA; a fit wants at least 3");
     assertThatThrownBy(() -> DiodeFit.of(List.of(at(0.1, 1e-6), at(0.2, 1e-5), at(0.3, 0.9e-5))))
         .hasMessageContaining("does not rise");
+  }
+
+  /** A slip of the pen in one of six points of a known curve is found, and only there. */
+  @Test
+  void theOnePointThatStandsAgainstTheOthersIsNamed() {
+    DiodeCurve curve = new DiodeCurve(Math.log(30e-9), 1.08, 30);
+    List<DiodePoint> points = new ArrayList<>();
+    for (double amperes : new double[] {1e-6, 1e-5, 1e-4, 5e-4, 2e-3, 1e-2}) {
+      points.add(at(curve.volts(amperes, ThermalVoltage.volts(25)), amperes));
+    }
+    assertThat(DiodeFit.of(points).report().suspect()).isFalse();
+    DiodePoint good = points.get(2);
+    points.set(2, at(good.volts() + 0.03, good.amperes()));
+    FitReport report = DiodeFit.of(points).report();
+    assertThat(report.suspect()).isTrue();
+    assertThat(report.sentence())
+        .contains("look at the point")
+        .contains("100\u202fµA again")
+        .contains("% below what the others say");
+    assertThat(DiodeFit.of(points.subList(0, 4)).report().suspect())
+        .as("four points do not tell which is wrong")
+        .isFalse();
+  }
+
+  /**
+   * Avago HSMS-285x: 3 µA and 1.06, of which its sheet says about 9 kΩ at no bias, 8.77 kΩ by its
+   * own 8.33e-5·n·T/Is, whose constant is 3.4 % below k/q.
+   */
+  @Test
+  void aDiodeOfItsZeroBiasResistanceIsThatOfItsMaker() {
+    DiodeFit fit = DiodeFit.ofZeroBias(8771, 1.06, 25);
+    assertThat(fit.saturationAmperes()).isCloseTo(3e-6 * 8.617 / 8.33, within(0.01e-6));
+    assertThat(fit.seriesOhms()).isEqualTo(25);
+    assertThat(fit.report().residualFraction()).isEmpty();
+    assertThat(fit.sentence()).contains("zero-bias resistance").contains("extrapolated");
+    assertThatThrownBy(() -> DiodeFit.ofZeroBias(0, 1.06, 0)).hasMessageContaining("above 0");
   }
 
   private static DiodePoint at(double volts, double amperes) {

@@ -77,8 +77,7 @@ final class FigurePlaces {
           CLIPPING_DEPTH_WITHOUT_COUPLING,
           REVERSAL_DEPTH,
           CLEAN_DEPTH ->
-          ofPart(
-              place, List.of(Diode.class, BipolarTransistor.class, FieldEffectTransistor.class));
+          ofPart(place, List.of(Diode.class, BipolarTransistor.class, FieldEffectTransistor.class));
       case SURFACE_CELSIUS,
           SUPPLY_VOLTS,
           PEAK_AMPERES,
