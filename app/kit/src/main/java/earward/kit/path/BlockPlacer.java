@@ -6,6 +6,7 @@ import earward.block.BlockTypes;
 import earward.block.Conditions;
 import earward.block.check.Finding;
 import earward.block.device.AudioAmplifier;
+import earward.block.device.Device;
 import earward.block.device.Diode;
 import earward.block.device.PartModel;
 import earward.block.setting.Setting;
@@ -81,11 +82,14 @@ final class BlockPlacer {
     PartModel model = block.values().part(part.id(), PartModel.class);
     return block.description().wiring().parts().stream()
         .map(WiredPart::device)
-        .anyMatch(
-            device ->
-                device instanceof Diode diode && diode.model().equals(model)
-                    || device instanceof AudioAmplifier amplifier
-                        && amplifier.model().equals(model));
+        .anyMatch(device -> isFitted(device, model));
+  }
+
+  private static boolean isFitted(Device device, PartModel model) {
+    if (device instanceof Diode diode) {
+      return diode.model().equals(model);
+    }
+    return device instanceof AudioAmplifier amplifier && amplifier.model().equals(model);
   }
 
   private Optional<Values> values(BlockEntry entry, BlockType type) {
