@@ -3,6 +3,7 @@ package earward.command;
 import static earward.block.figure.CaseName.BATTERY_LOW;
 import static earward.block.figure.CaseName.DEEPEST;
 import static earward.block.figure.CaseName.FULL_OUTPUT;
+import static earward.block.figure.CaseName.FULL_VOLUME;
 import static earward.block.figure.CaseName.HOTTEST;
 import static earward.block.figure.CaseName.NO_SIGNAL;
 import static earward.block.figure.CaseName.STRONG;
@@ -131,6 +132,13 @@ final class FiguresJson {
     put(node, "clipWattsBatteryLow", PATH, Quantity.CLIP_WATTS, BATTERY_LOW);
     put(node, "tenPercentWattsBatteryLow", PATH, Quantity.TEN_PERCENT_WATTS, BATTERY_LOW);
     noise(node);
+    put(node, "rippleRejectionDecibels", PATH, Quantity.RIPPLE_REJECTION_DECIBELS, TEST);
+    put(node, "humRmsVoltsTest", PATH, Quantity.HUM_RMS_VOLTS, TEST);
+    put(node, "signalToHumDecibels", PATH, Quantity.SIGNAL_TO_HUM_DECIBELS, TEST);
+    put(node, "railLoopMarginDecibels", PATH, Quantity.RAIL_LOOP_MARGIN_DECIBELS, BATTERY_LOW);
+    put(node, "railLoopHertz", PATH, Quantity.RAIL_LOOP_HERTZ, BATTERY_LOW);
+    put(node, "soundDecibelsFullOutput", PATH, Quantity.SOUND_DECIBELS, FULL_OUTPUT);
+    put(node, "soundDecibelsTest", PATH, Quantity.SOUND_DECIBELS, TEST);
     return node;
   }
 
@@ -169,6 +177,7 @@ final class FiguresJson {
         put(battery, "hoursNoSignal", part.name(), Quantity.BATTERY_HOURS, NO_SIGNAL);
         put(battery, "hoursTest", part.name(), Quantity.BATTERY_HOURS, TEST);
         put(battery, "hoursListening", part.name(), Quantity.BATTERY_HOURS, LISTENING);
+        put(battery, "hoursFullVolume", part.name(), Quantity.BATTERY_HOURS, FULL_VOLUME);
         put(battery, "hoursFullOutput", part.name(), Quantity.BATTERY_HOURS, FULL_OUTPUT);
       }
     }

@@ -1,5 +1,6 @@
 package earward.command;
 
+import static earward.block.figure.CaseName.BATTERY_LOW;
 import static earward.block.figure.CaseName.FULL_OUTPUT;
 import static earward.block.figure.CaseName.HOTTEST;
 import static earward.block.figure.CaseName.NO_SIGNAL;
@@ -125,6 +126,16 @@ final class FiguresText {
     table.row(
         "signal to noise (A-weighted)",
         shown(path, Quantity.A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS, TEST));
+    table.row("ripple rejection", shown(path, Quantity.RIPPLE_REJECTION_DECIBELS, TEST));
+    table.row("hum of the adaptor", shown(path, Quantity.HUM_RMS_VOLTS, TEST));
+    table.row(
+        "margin against motor-boating, battery low",
+        shown(path, Quantity.RAIL_LOOP_MARGIN_DECIBELS, BATTERY_LOW)
+            + " at "
+            + shown(path, Quantity.RAIL_LOOP_HERTZ, BATTERY_LOW));
+    table.row(
+        "sound at the listening distance, full output",
+        shown(path, Quantity.SOUND_DECIBELS, FULL_OUTPUT));
     table.row("supply current at rest", shown(path, Quantity.SUPPLY_AMPERES, NO_SIGNAL));
     table.row("supply current, test signal", shown(path, Quantity.SUPPLY_AMPERES, TEST));
     table.row("supply current, full output", shown(path, Quantity.SUPPLY_AMPERES, FULL_OUTPUT));

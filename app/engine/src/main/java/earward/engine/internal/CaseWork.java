@@ -157,7 +157,7 @@ final class CaseWork {
       alternating.stage().carrier(carrierRadians());
       System.arraycopy(keptSignal, 0, stage().signalAmperes(), 0, keptSignal.length);
       System.arraycopy(keptDriven, 0, stage().drivenAmperes(), 0, keptDriven.length);
-      java.util.Arrays.fill(outputs.outWatts, 0);
+      outputs.begin();
       point = solveDrive() || (warm && solveCold()) ? Part.DONE : Part.FAILED;
     }
     return point == Part.DONE;
@@ -202,6 +202,12 @@ final class CaseWork {
       return fail("the circuit has no solution at the tone");
     }
     outputs.measureLoads(alternating, stage());
+    if (plan.drive == Drive.CLIPPING) {
+      alternating.stage().viewLoad(view, 1);
+      boolean rails = outputs.measureRails(alternating, stage(), toneRadians());
+      alternating.stage().viewLoad(LoadView.AS_IT_IS, 1);
+      return rails || fail("the circuit has no solution at harmonics of the tone");
+    }
     return true;
   }
 
@@ -217,6 +223,10 @@ final class CaseWork {
       signal.clear();
       if (detection != null) {
         gather(detection, signal);
+      }
+      if (outputs.nearClipping(signal, stage())
+          && !outputs.measureRails(alternating, stage(), toneRadians())) {
+        return fail("the circuit has no solution at harmonics of the tone");
       }
       outputs.clip(audioTable, signal, stage());
       outputs.measureSignal(signal, stage());

@@ -99,17 +99,10 @@ final class Noise {
 
   /** Adds one frequency's noise over so many hertz, at every place. */
   private boolean at(CaseWork work, double hertz, double bandHertz, boolean inside) {
-    double radians = 2 * Math.PI * hertz;
-    work.alternating.stage().beginAudio(radians);
-    work.alternating.stamp();
-    Detection detection = driven(work) ? work.detection : null;
-    if (detection != null) {
-      work.small.fill(detection.around, detection.carrierOnly, work.peakVolts(), radians);
-      SmallResponse.addPorts(work);
-    }
-    if (!work.alternating.factor()) {
+    if (!SmallResponse.stamped(work, hertz)) {
       return false;
     }
+    Detection detection = driven(work) ? work.detection : null;
     double factor = AWeighting.factor(hertz);
     boolean heard = hertz >= LEAST_HERTZ && hertz <= MOST_HERTZ;
     for (int i = 0; i < plus.length; i++) {

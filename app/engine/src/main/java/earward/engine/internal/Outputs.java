@@ -13,13 +13,23 @@ final class Outputs {
   private static final int SAMPLES = 128;
   private static final double TEN_PERCENT = 0.10;
 
+  /** Share of its limit above which a signal is near to it. */
+  private static final double NEAR = 0.3;
+
+  private static final int MOST_SHAPES = 6;
+
   /** Shares of the clipped sine's range that are tried for the worst heat, then overdrives. */
   private static final int SINES = 20;
 
   private static final double[] OVERDRIVES = {1.15, 1.3, 1.6, 2, 3, 5, 10, 1e3};
 
   private final Network network;
-  private final double tenPercentOverdrive = ClippedSine.overdriveOf(TEN_PERCENT);
+  private final OutputWave wave = new OutputWave();
+  private final RailDips dips;
+
+  /** Whether the wave is what the outputs give, in place of a sine that clips evenly. */
+  private boolean byWave;
+
   private final double[] volts = new double[SAMPLES];
   private final double[] amperes = new double[SAMPLES];
   private final double[] cosine = new double[SAMPLES];
@@ -49,6 +59,7 @@ final class Outputs {
   Outputs(Network network) {
     this.network = network;
     int count = network.amplifiers.length;
+    dips = new RailDips(count);
     outWatts = new double[count];
     clipWatts = new double[count];
     tenPercentWatts = new double[count];
@@ -62,6 +73,46 @@ final class Outputs {
       cosine[s] = Math.cos(2 * Math.PI * s / SAMPLES);
       sine[s] = Math.sin(2 * Math.PI * s / SAMPLES);
     }
+  }
+
+  /** Begins a case: nothing leaves the outputs, no rail dips. */
+  void begin() {
+    Arrays.fill(outWatts, 0);
+    dips.clear();
+    byWave = false;
+  }
+
+  /**
+   * Allows for the dip of each rail at a sine's peaks from now on.
+   *
+   * @return whether the circuit has a solution at the harmonics of the tone
+   */
+  boolean measureRails(AlternatingSolver solver, DirectStage point, double toneRadians) {
+    if (network.amplifiers.length == 0) {
+      return true;
+    }
+    if (!dips.measure(network, solver, point, toneRadians)) {
+      return false;
+    }
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      wave.atClipping(1, amplifier.branches() == 2);
+      dips.follow(amplifier, wave);
+    }
+    return true;
+  }
+
+  /** Whether a signal comes so near to a limit that the dip of the rail may matter. */
+  boolean nearClipping(AudioSignal signal, DirectStage point) {
+    boolean near = false;
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      double ohms = Math.hypot(loadRe[amplifier.ordinal()], loadIm[amplifier.ordinal()]);
+      for (int k = 0; k < amplifier.branches(); k++) {
+        double peak = signal.wave(amplifier.outputNode(point, k), volts, cosine, sine);
+        double up = limited(amplifier, point, k, ohms, true);
+        near |= peak > NEAR * Math.min(up, limited(amplifier, point, k, ohms, false));
+      }
+    }
+    return near && !dips.known();
   }
 
   /** How many outputs all amplifiers have together. */
@@ -141,7 +192,7 @@ final class Outputs {
   }
 
   /** The limit L of one output that allows for its own current: L = swing(L/|Z|). */
-  private static double limited(
+  private double limited(
       AmplifierLaw amplifier, DirectStage point, int k, double ohms, boolean up) {
     double differential = amplifier.branches();
     double none = swing(amplifier, point, k, 0, up);
@@ -149,11 +200,14 @@ final class Outputs {
     return none / (1 + perAmpere / 1e-3 * differential / ohms);
   }
 
-  private static double swing(
+  private double swing(
       AmplifierLaw amplifier, DirectStage point, int k, double peakAmperes, boolean up) {
-    return up
-        ? amplifier.swingUpVolts(point, k, peakAmperes)
-        : amplifier.swingDownVolts(point, k, peakAmperes);
+    int a = amplifier.ordinal();
+    double held =
+        up
+            ? amplifier.swingUpVolts(point, k, peakAmperes)
+            : amplifier.swingDownVolts(point, k, peakAmperes);
+    return Math.max(0, held - peakAmperes * (up ? dips.upOhms(a) : dips.downOhms(a)));
   }
 
   /** What the signal takes from the supply, and what leaves, from the harmonics of the unknowns. */
@@ -189,10 +243,14 @@ final class Outputs {
   boolean atClipping(DirectSolver direct) {
     for (AmplifierLaw amplifier : network.amplifiers) {
       int a = amplifier.ordinal();
-      if (Double.isNaN(settle(direct, amplifier, 1, tenPercentOverdrive))) {
+      if (!atTenPercent(direct, amplifier)) {
         return false;
       }
       tenPercentWatts[a] = loadShare[a] * outWatts[a];
+      wave.atClipping(1, amplifier.branches() == 2);
+      if (dips.known()) {
+        dips.follow(amplifier, wave);
+      }
       double peak = settle(direct, amplifier, 1, 1);
       if (Double.isNaN(peak)) {
         return false;
@@ -202,6 +260,36 @@ final class Outputs {
     }
     measureHeat(direct.stage());
     return true;
+  }
+
+  /** The drive of 10 % distortion, its two limits as supply, sag and dip leave them. */
+  private boolean atTenPercent(DirectSolver direct, AmplifierLaw amplifier) {
+    boolean bridge = amplifier.branches() == 2;
+    double ratio = downOverUp(amplifier, direct.stage(), 0);
+    for (int i = 0; i < MOST_SHAPES; i++) {
+      wave.atDistortion(TEN_PERCENT, ratio, bridge);
+      if (dips.known()) {
+        dips.follow(amplifier, wave);
+      }
+      byWave = true;
+      double peak = settle(direct, amplifier, 1, 1);
+      byWave = false;
+      if (Double.isNaN(peak)) {
+        return false;
+      }
+      double next = downOverUp(amplifier, direct.stage(), peak);
+      if (Math.abs(next - ratio) < 1e-6) {
+        break;
+      }
+      ratio = next;
+    }
+    return true;
+  }
+
+  private double downOverUp(AmplifierLaw amplifier, DirectStage point, double peakAmperes) {
+    double up = swing(amplifier, point, 0, peakAmperes, true);
+    double down = swing(amplifier, point, 0, peakAmperes, false);
+    return up > 0 && down > 0 ? down / up : 1;
   }
 
   /** The drive that heats most, from a small sine to a square wave; leaves the point there. */
@@ -232,7 +320,8 @@ final class Outputs {
 
   /**
    * Finds the output current at which swing and sag agree, by false position between nothing and
-   * what a stiff supply would give. The bypass keeps the rail at its mean over a cycle.
+   * what a stiff supply would give. What the bypass lets the rail dip within a cycle is in the
+   * swing.
    *
    * @param share of the range between rest and clipping
    * @param overdrive drive over clip level; 1 for a sine
@@ -271,8 +360,9 @@ final class Outputs {
       }
     }
     double fraction = loadRe[a] / ohms;
-    outWatts[a] =
-        0.5 * peak * peak * ohms * fraction * ClippedSine.powerRatio(Math.max(1, overdrive));
+    double meanSquare =
+        byWave ? wave.meanSquare : ClippedSine.powerRatio(Math.max(1, overdrive)) / 2;
+    outWatts[a] = meanSquare * peak * peak * ohms * fraction;
     return peak;
   }
 
@@ -286,7 +376,7 @@ final class Outputs {
       double ohms) {
     DirectStage stage = direct.stage();
     stage.signalAmperes()[amplifier.ordinal()] =
-        amplifier.branches() * peak * halfWaveMean(overdrive);
+        peak * (byWave ? wave.drawnMean : amplifier.branches() * halfWaveMean(overdrive));
     if (!direct.solve()) {
       return Double.NaN;
     }
@@ -299,12 +389,15 @@ final class Outputs {
     return (overdrive * (1 - Math.cos(angle)) + Math.PI / 2 - angle) / Math.PI;
   }
 
-  /** Peak across the load at the edge of clipping, in V. */
-  private static double peakVolts(AmplifierLaw amplifier, DirectStage stage, double peak) {
+  /** Peak across the load at the edge of clipping, or of the wave, in V. */
+  private double peakVolts(AmplifierLaw amplifier, DirectStage stage, double peak) {
+    if (byWave) {
+      return wave.peakOverLimit * swing(amplifier, stage, 0, peak, true);
+    }
     double least = Double.POSITIVE_INFINITY;
     for (int k = 0; k < amplifier.branches(); k++) {
-      least = Math.min(least, amplifier.swingUpVolts(stage, k, peak));
-      least = Math.min(least, amplifier.swingDownVolts(stage, k, peak));
+      least = Math.min(least, swing(amplifier, stage, k, peak, true));
+      least = Math.min(least, swing(amplifier, stage, k, peak, false));
     }
     return least * amplifier.branches();
   }

@@ -9,6 +9,7 @@ import earward.engine.law.CarrierDriven;
 import earward.engine.law.DiodeLaw;
 import earward.engine.law.Heated;
 import earward.engine.law.Law;
+import earward.engine.law.SourceLaw;
 import java.util.List;
 
 /** Finds how a figure is read: the one place that knows which quantity exists where. */
@@ -50,7 +51,7 @@ final class Readings {
           A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           BATTERY_HOURS,
           SOUND_DECIBELS,
-          RAIL_LOOP_MARGIN_DECIBELS ->
+          SIGNAL_TO_HUM_DECIBELS ->
           NONE;
       default -> ofPart(quantity, part(name.place()));
     };
@@ -148,7 +149,22 @@ final class Readings {
     if (law instanceof CarrierDriven driven && driven.driven() >= 0) {
       return ofDriven(quantity, driven, law);
     }
+    if (law instanceof SourceLaw source) {
+      return ofSource(quantity, source);
+    }
     return ofAny(quantity, law);
+  }
+
+  private static Reading ofSource(Quantity quantity, SourceLaw source) {
+    return switch (quantity) {
+      case RIPPLE_REJECTION_DECIBELS ->
+          work -> RailView.of(work, source, RailView.Asked.REJECTION_DECIBELS);
+      case HUM_RMS_VOLTS -> work -> RailView.of(work, source, RailView.Asked.HUM_RMS_VOLTS);
+      case RAIL_LOOP_MARGIN_DECIBELS ->
+          work -> RailView.of(work, source, RailView.Asked.MARGIN_DECIBELS);
+      case RAIL_LOOP_HERTZ -> work -> RailView.of(work, source, RailView.Asked.MARGIN_HERTZ);
+      default -> ofAny(quantity, source);
+    };
   }
 
   private static Reading ofAny(Quantity quantity, Law law) {

@@ -1,6 +1,7 @@
 package earward.engine.internal;
 
 import earward.block.law.ToneCurve;
+import earward.engine.Drive;
 
 /** The response of all unknowns to a small modulation of the carrier. */
 final class SmallResponse {
@@ -41,6 +42,27 @@ final class SmallResponse {
     }
     work.alternating.solve();
     return true;
+  }
+
+  /**
+   * Stamps and factors the whole circuit for small audio at one frequency, the carrier-driven
+   * devices of a signal case included.
+   */
+  static boolean stamped(CaseWork work, double hertz) {
+    double radians = 2 * Math.PI * hertz;
+    Detection detection = work.plan.drive == Drive.SIGNAL ? work.detection : null;
+    if (detection != null) {
+      if (!work.carrierSolved()) {
+        return false;
+      }
+      work.small.fill(detection.around, detection.carrierOnly, work.peakVolts(), radians);
+    }
+    work.alternating.stage().beginAudio(radians);
+    work.alternating.stamp();
+    if (detection != null) {
+      addPorts(work);
+    }
+    return work.alternating.factor();
   }
 
   /** Adds the small-signal admittances between the ports to the stamped circuit. */

@@ -98,6 +98,26 @@ public final class AmplifierLaw extends Law {
     return stage.volts(at(nodes, Terminal.SUPPLY)) - stage.volts(at(nodes, Terminal.GROUND));
   }
 
+  /** Node of SUPPLY as fitted. */
+  public int supplyNode(DirectStage stage) {
+    return at(nodes(stage), Terminal.SUPPLY);
+  }
+
+  /** Node of GROUND as fitted. */
+  public int groundNode(DirectStage stage) {
+    return at(nodes(stage), Terminal.GROUND);
+  }
+
+  /** Node whose voltage the outputs' rest is a share of: RIPPLE where the type has it. */
+  public int restNode(DirectStage stage) {
+    return at(nodes(stage), has(Terminal.RIPPLE) ? Terminal.RIPPLE : Terminal.SUPPLY);
+  }
+
+  /** That share. */
+  public double restShare(DirectStage stage) {
+    return value(stage, REST_FRACTION);
+  }
+
   /** DC voltage of an output over GROUND, in V. */
   public double restVolts(DirectStage stage, int output) {
     return stage.volts(outputNode(stage, output)) - stage.volts(at(nodes(stage), Terminal.GROUND));

@@ -1,6 +1,7 @@
 package earward.engine.law;
 
 import earward.block.device.Adaptor;
+import earward.block.device.AdaptorModel;
 import earward.block.device.AudioAmplifier;
 import earward.block.device.Battery;
 import earward.block.device.BipolarTransistor;
@@ -24,6 +25,9 @@ import java.util.List;
 
 /** The one place where a device kind gets its law. */
 public final class Laws {
+  /** Where ripple rejection is given for a source that has none of its own: twice the mains. */
+  private static final double HUM_HERTZ = 100;
+
   private Laws() {}
 
   /** What a law needs to know beside its seat. */
@@ -83,8 +87,12 @@ public final class Laws {
       return new TunedFeedLaw(seat);
     } else if (device instanceof Transformer) {
       return new TransformerLaw(seat);
-    } else if (device instanceof Battery || device instanceof Adaptor) {
-      return new SourceLaw(seat);
+    } else if (device instanceof Battery) {
+      return new SourceLaw(seat, HUM_HERTZ, 0, 0);
+    } else if (device instanceof Adaptor adaptor) {
+      AdaptorModel model = adaptor.model();
+      double at = model.regulated() ? 0 : model.ratedAmperes();
+      return new SourceLaw(seat, model.rippleHertz(), model.rippleVolts(), at);
     } else if (device instanceof Regulator regulator) {
       return new RegulatorLaw(seat, regulator.model());
     }

@@ -4,8 +4,51 @@ package earward.engine.law;
 public final class SourceLaw extends Law {
   private static final double LEAST_OHMS = 1e-6;
 
-  SourceLaw(Seat seat) {
+  private final double rippleHertz;
+  private final double ripplePeakToPeakVolts;
+  private final double rippleAtAmperes;
+
+  /**
+   * The law.
+   *
+   * @param rippleHertz frequency of the ripple; of a battery, that at which it is asked for
+   * @param ripplePeakToPeakVolts ripple, 0 for a battery
+   * @param rippleAtAmperes current for which that holds; 0 where the ripple is the same at all
+   */
+  SourceLaw(Seat seat, double rippleHertz, double ripplePeakToPeakVolts, double rippleAtAmperes) {
     super(seat);
+    this.rippleHertz = rippleHertz;
+    this.ripplePeakToPeakVolts = ripplePeakToPeakVolts;
+    this.rippleAtAmperes = rippleAtAmperes;
+  }
+
+  /** Frequency of its ripple, in Hz. */
+  public double rippleHertz() {
+    return rippleHertz;
+  }
+
+  /**
+   * Fundamental of its ripple as an e.m.f., rms in V: that of a sawtooth, peak to peak over π√2,
+   * which grows with the current where nothing regulates.
+   */
+  public double rippleRmsVolts(DirectStage stage) {
+    double share = rippleAtAmperes > 0 ? Math.max(0, amperes(stage)) / rippleAtAmperes : 1;
+    return share * ripplePeakToPeakVolts / (Math.PI * Math.sqrt(2));
+  }
+
+  /** Internal resistance, in Ω. */
+  public double internalOhms(DirectStage stage) {
+    return Math.max(LEAST_OHMS, value(stage, 1));
+  }
+
+  /** Node of the plus terminal as fitted. */
+  public int plus(DirectStage stage) {
+    return nodes(stage)[0];
+  }
+
+  /** Node of the minus terminal as fitted. */
+  public int minus(DirectStage stage) {
+    return nodes(stage)[1];
   }
 
   private double siemens(DirectStage stage) {

@@ -61,6 +61,7 @@ final class DerivedFigures {
     figures.batteryLives();
     figures.headroom();
     figures.signalToNoise();
+    figures.rails();
     return figures.derived;
   }
 
@@ -160,7 +161,8 @@ final class DerivedFigures {
   }
 
   private void supplyCurrents() {
-    for (CaseName caseName : List.of(NO_SIGNAL, TEST, STRONG, FULL_OUTPUT, BATTERY_LOW, HOTTEST)) {
+    for (CaseName caseName : 
+        List.of(NO_SIGNAL, TEST, STRONG, FULL_VOLUME, FULL_OUTPUT, BATTERY_LOW, HOTTEST)) {
       double whole = 0;
       boolean any = false;
       for (PlacedBlock block : assembly.beside()) {
@@ -183,7 +185,7 @@ final class DerivedFigures {
   }
 
   private void batteryLives() {
-    for (CaseName caseName : List.of(NO_SIGNAL, TEST, FULL_OUTPUT, LISTENING)) {
+    for (CaseName caseName : List.of(NO_SIGNAL, TEST, FULL_VOLUME, FULL_OUTPUT, LISTENING)) {
       double least = Double.NaN;
       for (CircuitPart part : parts()) {
         if (part.device() instanceof Battery battery) {
@@ -215,6 +217,38 @@ final class DerivedFigures {
     double clipWatts = get(CircuitBuilder.PATH, Quantity.CLIP_WATTS, FULL_OUTPUT);
     double wanted = assembly.design().conditions().wanted().listeningWatts();
     return rest + (full - rest) * Math.sqrt(Math.min(1, wanted / clipWatts));
+  }
+
+  /** The worst of all sources of supply: least rejection, least margin; hum by power. */
+  private void rails() {
+    double rejection = Double.NaN;
+    double margin = Double.NaN;
+    double hertz = Double.NaN;
+    double hum = 0;
+    for (CircuitPart part : parts()) {
+      if (part.device() instanceof Battery || part.device() instanceof Adaptor) {
+        double here = get(part.name(), Quantity.RIPPLE_REJECTION_DECIBELS, TEST);
+        rejection = Double.isNaN(here) || here > rejection ? rejection : here;
+        double volts = get(part.name(), Quantity.HUM_RMS_VOLTS, TEST);
+        hum += Double.isNaN(volts) ? 0 : volts * volts;
+        double loop = get(part.name(), Quantity.RAIL_LOOP_MARGIN_DECIBELS, BATTERY_LOW);
+        if (!Double.isNaN(loop) && !(loop > margin)) {
+          margin = loop;
+          hertz = get(part.name(), Quantity.RAIL_LOOP_HERTZ, BATTERY_LOW);
+        }
+      }
+    }
+    put(CircuitBuilder.PATH, Quantity.RIPPLE_REJECTION_DECIBELS, TEST, rejection);
+    put(CircuitBuilder.PATH, Quantity.RAIL_LOOP_MARGIN_DECIBELS, BATTERY_LOW, margin);
+    put(CircuitBuilder.PATH, Quantity.RAIL_LOOP_HERTZ, BATTERY_LOW, hertz);
+    double humVolts = hum > 0 ? Math.sqrt(hum) : Double.NaN;
+    put(CircuitBuilder.PATH, Quantity.HUM_RMS_VOLTS, TEST, humVolts);
+    double volts = get(CircuitBuilder.PATH, Quantity.AUDIO_RMS_VOLTS, TEST);
+    put(
+        CircuitBuilder.PATH,
+        Quantity.SIGNAL_TO_HUM_DECIBELS,
+        TEST,
+        20 * Math.log10(volts / humVolts));
   }
 
   /** Test tone over noise, both rms, at every place where noise is given. */

@@ -29,6 +29,8 @@ public final class KitSolver {
           Quantity.CLEAN_DEPTH,
           Quantity.NOISE_RMS_VOLTS,
           Quantity.A_WEIGHTED_NOISE_RMS_VOLTS,
+          Quantity.RIPPLE_REJECTION_DECIBELS,
+          Quantity.HUM_RMS_VOLTS,
           Quantity.RESPONSE_DEVIATION_DECIBELS,
           Quantity.RESPONSE_DEVIATION_HERTZ);
 
@@ -104,7 +106,7 @@ public final class KitSolver {
   /**
    * The kit compiled for the figures that an edit shows at once: all of {@link #compile} at rest,
    * at the test signal and at full output, but for the largest clean modulation, which is a search,
-   * noise, and the deviation from the curve wanted. They are the same figures; the rest is left to
+   * noise, hum, and the deviation from the curve wanted. They are the same figures; the rest is left to
    * a solve that may take longer.
    *
    * @param assembly a complete one

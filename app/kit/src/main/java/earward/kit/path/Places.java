@@ -89,6 +89,10 @@ final class Places {
           CLIP_WATTS,
           TEN_PERCENT_WATTS,
           SUPPLY_AMPERES,
+          RIPPLE_REJECTION_DECIBELS,
+          HUM_RMS_VOLTS,
+          RAIL_LOOP_MARGIN_DECIBELS,
+          RAIL_LOOP_HERTZ,
           OVERLOAD_DECIBELS ->
           Kind.PART;
       case ONWARD_OHMS, BACKWARD_OHMS, LOADING_LOSS_DECIBELS -> Kind.SEAM;
@@ -99,7 +103,7 @@ final class Places {
           A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           BATTERY_HOURS,
           SOUND_DECIBELS,
-          RAIL_LOOP_MARGIN_DECIBELS ->
+          SIGNAL_TO_HUM_DECIBELS ->
           Kind.DERIVED;
     };
   }

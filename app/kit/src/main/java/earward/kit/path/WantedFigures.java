@@ -110,7 +110,11 @@ final class WantedFigures {
       add(
           part.name(),
           Quantity.SUPPLY_AMPERES,
-          List.of(NO_SIGNAL, TEST, STRONG, FULL_OUTPUT, BATTERY_LOW, HOTTEST));
+          List.of(NO_SIGNAL, TEST, STRONG, FULL_VOLUME, FULL_OUTPUT, BATTERY_LOW, HOTTEST));
+      add(part.name(), Quantity.RIPPLE_REJECTION_DECIBELS, List.of(TEST));
+      add(part.name(), Quantity.HUM_RMS_VOLTS, List.of(TEST));
+      add(part.name(), Quantity.RAIL_LOOP_MARGIN_DECIBELS, List.of(BATTERY_LOW));
+      add(part.name(), Quantity.RAIL_LOOP_HERTZ, List.of(BATTERY_LOW));
     }
   }
 

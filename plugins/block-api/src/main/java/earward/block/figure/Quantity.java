@@ -56,6 +56,12 @@ public enum Quantity {
   CLIP_WATTS("clip-watts", Unit.WATT),
   /** What an amplifier IC gives the load at 10 % distortion. */
   TEN_PERCENT_WATTS("ten-percent-watts", Unit.WATT),
+  /** Ripple on the rail of a battery or adaptor over what of it reaches the path's end. */
+  RIPPLE_REJECTION_DECIBELS("ripple-rejection-decibels", Unit.DECIBEL),
+  /** Fundamental of an adaptor's ripple at the path's end. */
+  HUM_RMS_VOLTS("hum-rms-volts", Unit.VOLT),
+  /** Frequency at which the loop through the rail is nearest to sustaining itself. */
+  RAIL_LOOP_HERTZ("rail-loop-hertz", Unit.HERTZ),
   // of a seam
   ONWARD_OHMS("onward-ohms", Unit.OHM),
   BACKWARD_OHMS("backward-ohms", Unit.OHM),
@@ -74,6 +80,8 @@ public enum Quantity {
   SIGNAL_TO_NOISE_DECIBELS("signal-to-noise-decibels", Unit.DECIBEL),
   /** Test tone over the A-weighted noise. */
   A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS("a-weighted-signal-to-noise-decibels", Unit.DECIBEL),
+  /** Test tone over hum. */
+  SIGNAL_TO_HUM_DECIBELS("signal-to-hum-decibels", Unit.DECIBEL),
   SUPPLY_AMPERES("supply-amperes", Unit.AMPERE),
   BATTERY_HOURS("battery-hours", Unit.HOUR),
   SOUND_DECIBELS("sound-decibels", Unit.DECIBEL),
@@ -81,7 +89,10 @@ public enum Quantity {
    * How much more the strongest signal drives an amplifier than its input bears; below 0 is well.
    */
   OVERLOAD_DECIBELS("overload-decibels", Unit.DECIBEL),
-  /** Margin of the loop through the supply rail against motor-boating. */
+  /**
+   * Margin of the loop through the supply against motor-boating: how many times the internal
+   * resistance might be until it sustains itself; infinite where it never would.
+   */
   RAIL_LOOP_MARGIN_DECIBELS("rail-loop-margin-decibels", Unit.DECIBEL);
 
   private final String key;

@@ -42,16 +42,21 @@
  * <tr><td>regulator, bipolar or field-effect transistor</td><td>junction-celsius</td>
  *   <td>all</td></tr>
  * <tr><td>battery, adaptor</td><td>supply-amperes</td><td>all</td></tr>
- * <tr><td>battery</td><td>battery-hours</td><td>no-signal, test, full-output</td></tr>
+ * <tr><td></td><td>ripple-rejection-decibels (at the adaptor's ripple, 100 Hz for a battery),
+ *   hum-rms-volts: at the path's end</td><td>all but unpowered</td></tr>
+ * <tr><td></td><td>rail-loop-margin-decibels, rail-loop-hertz (none where the margin is
+ *   infinite)</td><td>all but unpowered</td></tr>
+ * <tr><td>battery</td><td>battery-hours</td><td>no-signal, test, full-volume,
+ *   full-output</td></tr>
  * <tr><td>empty, in a block with a battery or adaptor</td><td>supply-amperes: the sum</td>
- *   <td>no-signal, test, strong, full-output, battery-low, hottest</td></tr>
+ *   <td>no-signal, test, strong, full-volume, full-output, battery-low, hottest</td></tr>
  * <tr><td>empty, in a block with an entry: its seam</td><td>onward-ohms, backward-ohms,
  *   loading-loss-decibels</td><td>all</td></tr>
  * <tr><td></td><td>headroom-decibels: behind the detector, in a kit that ends in an amplifier
  *   IC</td><td>test, strong</td></tr>
  * <tr><td>the whole path, not a block's to check</td><td>output-rms-volts, output-watts,
  *   sound-decibels, signal-to-noise-decibels and a-weighted-signal-to-noise-decibels (also of the
- *   detector's exit and of the seams behind it), rail-loop-margin-decibels</td><td></td></tr>
+ *   detector's exit and of the seams behind it), signal-to-hum-decibels</td><td></td></tr>
  * </table>
  *
  * <p><b>Signs.</b> dc-amperes is positive from the first terminal that the device lists to the

@@ -89,6 +89,11 @@ final class FigurePlaces {
           place.isEmpty() && hasSource()
               ? Optional.empty()
               : ofPart(place, List.of(Battery.class, Adaptor.class));
+      case RIPPLE_REJECTION_DECIBELS,
+          HUM_RMS_VOLTS,
+          RAIL_LOOP_MARGIN_DECIBELS,
+          RAIL_LOOP_HERTZ ->
+          ofPart(place, List.of(Battery.class, Adaptor.class));
       case BATTERY_HOURS -> ofPart(place, Battery.class);
       case ONWARD_OHMS, BACKWARD_OHMS, LOADING_LOSS_DECIBELS, HEADROOM_DECIBELS ->
           unless(
@@ -100,7 +105,7 @@ final class FigurePlaces {
           SIGNAL_TO_NOISE_DECIBELS,
           A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           SOUND_DECIBELS,
-          RAIL_LOOP_MARGIN_DECIBELS ->
+          SIGNAL_TO_HUM_DECIBELS ->
           Optional.of(
               "at '" + place + "'; it is of the whole path, which is not a block's to check");
     };

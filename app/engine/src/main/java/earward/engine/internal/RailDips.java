@@ -1,0 +1,129 @@
+package earward.engine.internal;
+
+import earward.engine.law.AmplifierLaw;
+import earward.engine.law.DirectStage;
+import java.util.Arrays;
+
+/**
+ * By how much the rail of each amplifier dips, beyond its mean over the cycle, when the output is
+ * at its peak: the impedance of the whole supply with its bypass at the harmonics of the tone,
+ * times the harmonics of what the output draws. Mutable, for one thread.
+ */
+final class RailDips {
+  private static final int HARMONICS = 8;
+
+  /** Nearness to the highest value at which a wave is at its limit. */
+  private static final double AT_LIMIT = 0.999;
+
+  private final double[] railRe;
+  private final double[] railIm;
+  private final double[] restRe;
+  private final double[] restIm;
+
+  /** Loss of the upper limit, in V for one ampere of peak current. */
+  private final double[] up;
+
+  /** Loss of the lower limit. */
+  private final double[] down;
+
+  private boolean known;
+
+  RailDips(int amplifiers) {
+    railRe = new double[amplifiers * (HARMONICS + 1)];
+    railIm = new double[railRe.length];
+    restRe = new double[railRe.length];
+    restIm = new double[railRe.length];
+    up = new double[amplifiers];
+    down = new double[amplifiers];
+  }
+
+  /** Until they are measured, rails stay at their mean. */
+  void clear() {
+    known = false;
+    Arrays.fill(up, 0);
+    Arrays.fill(down, 0);
+  }
+
+  boolean known() {
+    return known;
+  }
+
+  double upOhms(int amplifier) {
+    return up[amplifier];
+  }
+
+  double downOhms(int amplifier) {
+    return down[amplifier];
+  }
+
+  /** Impedances of all rails at the harmonics of the tone. */
+  boolean measure(
+      Network network, AlternatingSolver solver, DirectStage point, double toneRadians) {
+    for (int h = 1; h <= HARMONICS; h++) {
+      if (!solver.audio(h * toneRadians)) {
+        return false;
+      }
+      for (AmplifierLaw amplifier : network.amplifiers) {
+        int at = amplifier.ordinal() * (HARMONICS + 1) + h;
+        int supply = amplifier.supplyNode(point);
+        int ground = amplifier.groundNode(point);
+        int reference = amplifier.restNode(point);
+        double share = amplifier.restShare(point);
+        solver.rest();
+        solver.push(supply, ground, 1, 0);
+        solver.solve();
+        railRe[at] = solver.re(ground) - solver.re(supply);
+        railIm[at] = solver.im(ground) - solver.im(supply);
+        restRe[at] = share * (solver.re(ground) - solver.re(reference));
+        restIm[at] = share * (solver.im(ground) - solver.im(reference));
+      }
+    }
+    known = true;
+    return true;
+  }
+
+  /** Takes over a wave: from now on the limits allow for what it makes of the rail. */
+  void follow(AmplifierLaw amplifier, OutputWave wave) {
+    int a = amplifier.ordinal();
+    double highest = 0;
+    double lowest = 0;
+    for (double volts : wave.volts) {
+      lowest = Math.min(lowest, volts);
+      highest = Math.max(highest, volts);
+    }
+    double most = Double.NEGATIVE_INFINITY;
+    double least = 0;
+    for (int s = 0; s < OutputWave.SAMPLES; s++) {
+      if (wave.volts[s] >= AT_LIMIT * highest) {
+        most = Math.max(most, dip(a, wave.drawn, s, true));
+      }
+      if (wave.volts[s] <= AT_LIMIT * lowest) {
+        least = Math.max(least, dip(a, wave.drawn, s, false));
+      }
+    }
+    up[a] = Math.max(0, most);
+    down[a] = least;
+  }
+
+  /** The dip at one sample: of rail less rest, or of rest. */
+  private double dip(int a, double[] drawn, int sample, boolean ofUpper) {
+    double sum = 0;
+    for (int h = 1; h <= HARMONICS; h++) {
+      int at = a * (HARMONICS + 1) + h;
+      double zr = ofUpper ? railRe[at] - restRe[at] : restRe[at];
+      double zi = ofUpper ? railIm[at] - restIm[at] : restIm[at];
+      double real = 0;
+      double imaginary = 0;
+      for (int s = 0; s < drawn.length; s++) {
+        double angle = 2 * Math.PI * ((h * s) % drawn.length) / drawn.length;
+        real += 2.0 / drawn.length * drawn[s] * Math.cos(angle);
+        imaginary -= 2.0 / drawn.length * drawn[s] * Math.sin(angle);
+      }
+      double turn = 2 * Math.PI * ((h * sample) % drawn.length) / drawn.length;
+      double r = zr * real - zi * imaginary;
+      double m = zr * imaginary + zi * real;
+      sum += r * Math.cos(turn) - m * Math.sin(turn);
+    }
+    return sum;
+  }
+}
