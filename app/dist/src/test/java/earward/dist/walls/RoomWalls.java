@@ -22,6 +22,7 @@ final class RoomWalls {
     "earward.detectors",
     "earward.filters",
     "earward.volume",
+    "earward.preamplifiers",
     "earward.power",
     "earward.supplies",
     "earward.takeoffs",

@@ -1,0 +1,5 @@
+/** Preamplifiers. */
+@NullMarked
+package earward.preamplifiers;
+
+import org.jspecify.annotations.NullMarked;
