@@ -14,6 +14,8 @@ final class AudioTable {
   private final int size;
   private final double[] re;
   private final double[] im;
+  private final double[] lastRe;
+  private final double[] lastIm;
 
   AudioTable(Network network, int harmonics) {
     this.network = network;
@@ -22,10 +24,21 @@ final class AudioTable {
     columns = network.ports.length + Outputs.count(network);
     re = new double[(harmonics + 1) * columns * size];
     im = new double[re.length];
+    lastRe = new double[size * size];
+    lastIm = new double[size * size];
   }
 
-  /** Fills harmonics 1 and up about the DC point of the stage. */
-  boolean fill(AlternatingSolver solver, DirectStage point, double toneRadians) {
+  /**
+   * Fills harmonics 1 and up about the DC point of the stage.
+   *
+   * @param solver factored at the tone
+   * @param again whether only a circuit that differs from that of the last time needs to be solved
+   */
+  boolean fill(AlternatingSolver solver, DirectStage point, double toneRadians, boolean again) {
+    boolean repeated = solver.stage().matrix().repeats(lastRe, lastIm);
+    if (again && repeated) {
+      return true;
+    }
     for (int h = 1; h <= harmonics; h++) {
       if (!solver.audio(h * toneRadians)) {
         return false;

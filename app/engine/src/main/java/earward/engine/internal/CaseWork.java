@@ -216,7 +216,7 @@ final class CaseWork {
     for (int pass = 0; pass < MOST_PASSES; pass++) {
       System.arraycopy(stage().solution(), 0, former, 0, former.length);
       if (!loads(LoadView.AS_IT_IS)
-          || !audioTable.fill(alternating, stage(), toneRadians())
+          || !audioTable.fill(alternating, stage(), toneRadians(), pass > 0)
           || !detect(pass == 0)) {
         return trouble.isEmpty() ? fail("the circuit has no solution at the tone") : false;
       }

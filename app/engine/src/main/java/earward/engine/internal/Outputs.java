@@ -10,6 +10,11 @@ import java.util.Arrays;
  * and the worst heat whatever drives them. Mutable, for one thread.
  */
 final class Outputs {
+  /** How near swing and sag must come where the figure counts, and where a scan looks for it. */
+  private static final double EXACT = 1e-9;
+
+  private static final double ROUGH = 1e-4;
+
   private static final int SAMPLES = 128;
   private static final double TEN_PERCENT = 0.10;
 
@@ -251,7 +256,7 @@ final class Outputs {
       if (dips.known()) {
         dips.follow(amplifier, wave);
       }
-      double peak = settle(direct, amplifier, 1, 1);
+      double peak = settle(direct, amplifier, 1, 1, EXACT);
       if (Double.isNaN(peak)) {
         return false;
       }
@@ -272,7 +277,7 @@ final class Outputs {
         dips.follow(amplifier, wave);
       }
       byWave = true;
-      double peak = settle(direct, amplifier, 1, 1);
+      double peak = settle(direct, amplifier, 1, 1, EXACT);
       byWave = false;
       if (Double.isNaN(peak)) {
         return false;
@@ -301,7 +306,7 @@ final class Outputs {
       for (int i = 0; i <= SINES + OVERDRIVES.length; i++) {
         double s = i <= SINES ? i / (double) SINES : 1;
         double o = i <= SINES ? 1 : OVERDRIVES[i - SINES - 1];
-        if (Double.isNaN(settle(direct, amplifier, s, o))) {
+        if (Double.isNaN(settle(direct, amplifier, s, o, ROUGH))) {
           return false;
         }
         double heat = amplifier.watts(direct.stage()) - outWatts[amplifier.ordinal()];
@@ -311,7 +316,7 @@ final class Outputs {
           overdrive = o;
         }
       }
-      double unused = settle(direct, amplifier, share, overdrive);
+      double unused = settle(direct, amplifier, share, overdrive, EXACT);
       assert !Double.isNaN(unused);
     }
     measureHeat(direct.stage());
@@ -325,10 +330,11 @@ final class Outputs {
    *
    * @param share of the range between rest and clipping
    * @param overdrive drive over clip level; 1 for a sine
+   * @param exact how near swing and sag must come, as a share
    * @return peak current in A, NaN where DC has no solution
    */
   private double settle(
-      DirectSolver direct, AmplifierLaw amplifier, double share, double overdrive) {
+      DirectSolver direct, AmplifierLaw amplifier, double share, double overdrive, double exact) {
     int a = amplifier.ordinal();
     double ohms = Math.hypot(loadRe[a], loadIm[a]);
     double low = 0;
@@ -340,13 +346,13 @@ final class Outputs {
     double high = share * peakVolts(amplifier, direct.stage(), 0) / ohms;
     double excessHigh = excess(direct, amplifier, high, share, overdrive, ohms);
     double peak = high;
-    for (int i = 0; i < 40 && high - low > 1e-9 * high; i++) {
+    for (int i = 0; i < 40 && high - low > exact * high; i++) {
       if (Double.isNaN(excessHigh)) {
         return Double.NaN;
       }
       peak = low + (high - low) * excessLow / (excessLow - excessHigh);
       double here = excess(direct, amplifier, peak, share, overdrive, ohms);
-      if (Math.abs(here) < 1e-9 * (1 + excessLow)) {
+      if (Math.abs(here) < exact * (1 + excessLow)) {
         break;
       }
       if (here > 0) {

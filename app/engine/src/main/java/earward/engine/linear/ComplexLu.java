@@ -1,16 +1,20 @@
 package earward.engine.linear;
 
-import java.util.Arrays;
 import org.jspecify.annotations.Nullable;
 
 /**
  * A complex linear system. Its order of elimination is found once and replayed (Markowitz 1957);
- * each solution's residual is looked at, and where it is not that of rounding the system is solved
- * anew, densely, with partial pivoting by magnitude.
+ * each solution's residual is looked at, and where one refinement does not make it that of rounding
+ * the system is solved anew, densely, with partial pivoting by magnitude.
  *
  * <p>Mutable, for one thread; allocates nothing once its pattern is known.
  */
 public final class ComplexLu {
+  /** Relative difference of elements that are the same but for rounding, and what counts as 0. */
+  private static final double SAME = 1e-12;
+
+  private static final double SMALL = 1e-15;
+
   private final int size;
   private final double[] re;
   private final double[] im;
@@ -28,6 +32,7 @@ public final class ComplexLu {
   private final DenseComplexLu dense;
   private final Pattern pattern;
   private @Nullable Elimination replayed;
+  private int tried;
 
   public ComplexLu(int size) {
     this.size = size;
@@ -63,12 +68,9 @@ public final class ComplexLu {
     im[at] += imaginary;
   }
 
-  /**
-   * Keeps the order of elimination from now on, as the last matrix wants it; a system that does not
-   * fit is solved densely.
-   */
+  /** Keeps the orders of elimination from now on: a system that none suits is solved densely. */
   public void freeze() {
-    pattern.freeze(keptRe, keptIm);
+    pattern.freeze();
   }
 
   /** How many systems were solved densely. */
@@ -82,23 +84,29 @@ public final class ComplexLu {
    * @return whether a pivot other than 0 was found in every column
    */
   public boolean factor() {
-    Elimination order = pattern.order(re, im);
-    if (order == null) {
-      System.arraycopy(re, 0, keptRe, 0, re.length);
-      System.arraycopy(im, 0, keptIm, 0, im.length);
-      replayed = null;
-      return dense.factor();
+    System.arraycopy(re, 0, keptRe, 0, re.length);
+    System.arraycopy(im, 0, keptIm, 0, im.length);
+    tried = 0;
+    return factorFrom();
+  }
+
+  /** Replays the first order that suits, from the one to be tried next. */
+  private boolean factorFrom() {
+    for (boolean clean = tried == 0; ; clean = false, tried++) {
+      Elimination order = pattern.order(tried, keptRe, keptIm);
+      if (!clean) {
+        System.arraycopy(keptRe, 0, re, 0, re.length);
+        System.arraycopy(keptIm, 0, im, 0, im.length);
+      }
+      replayed = order;
+      if (order == null) {
+        pattern.fellBack();
+        return dense.factor();
+      }
+      if (replay(order)) {
+        return true;
+      }
     }
-    if (replayed != order) {
-      Arrays.fill(keptRe, 0);
-      Arrays.fill(keptIm, 0);
-    }
-    for (int at : order.entries) {
-      keptRe[at] = re[at];
-      keptIm[at] = im[at];
-    }
-    replayed = order;
-    return replay(order) || startDensely();
   }
 
   private boolean replay(Elimination order) {
@@ -132,13 +140,19 @@ public final class ComplexLu {
     return true;
   }
 
-  /** Starts again from the kept matrix. */
-  private boolean startDensely() {
-    pattern.fellBack();
-    System.arraycopy(keptRe, 0, re, 0, re.length);
-    System.arraycopy(keptIm, 0, im, 0, im.length);
-    replayed = null;
-    return dense.factor();
+  /**
+   * Whether the matrix that was factored last is, but for rounding, the one in the rows of the
+   * caller, which takes it over.
+   */
+  public boolean repeats(double[] rowsRe, double[] rowsIm) {
+    double off = 0;
+    for (int at = 0; at < keptRe.length; at++) {
+      double here = Math.abs(keptRe[at] - rowsRe[at]) + Math.abs(keptIm[at] - rowsIm[at]);
+      off = Math.max(off, here / (SMALL + Math.abs(keptRe[at]) + Math.abs(keptIm[at])));
+    }
+    System.arraycopy(keptRe, 0, rowsRe, 0, keptRe.length);
+    System.arraycopy(keptIm, 0, rowsIm, 0, keptIm.length);
+    return off <= SAME;
   }
 
   /** Replaces the right side by the solution. */
@@ -152,25 +166,43 @@ public final class ComplexLu {
   }
 
   private void solve(double[] valuesRe, double[] valuesIm, boolean transposed) {
-    Elimination order = replayed;
-    if (order == null) {
-      solveDensely(valuesRe, valuesIm, transposed);
-      return;
+    if (replayed != null) {
+      System.arraycopy(valuesRe, 0, sideRe, 0, size);
+      System.arraycopy(valuesIm, 0, sideIm, 0, size);
     }
-    System.arraycopy(valuesRe, 0, sideRe, 0, size);
-    System.arraycopy(valuesIm, 0, sideIm, 0, size);
+    for (Elimination order = replayed; order != null; order = replayed) {
+      replay(order, valuesRe, valuesIm, transposed);
+      if (good(order, valuesRe, valuesIm, transposed)
+          || refined(order, valuesRe, valuesIm, transposed)) {
+        return;
+      }
+      System.arraycopy(sideRe, 0, valuesRe, 0, size);
+      System.arraycopy(sideIm, 0, valuesIm, 0, size);
+      tried++;
+      if (!factorFrom()) {
+        return;
+      }
+    }
+    solveDensely(valuesRe, valuesIm, transposed);
+  }
+
+  private void replay(Elimination order, double[] valuesRe, double[] valuesIm, boolean transposed) {
     if (transposed) {
       substituteTransposed(order, valuesRe, valuesIm);
     } else {
       substitute(order, valuesRe, valuesIm);
     }
-    if (!good(order, valuesRe, valuesIm, transposed)) {
-      System.arraycopy(sideRe, 0, valuesRe, 0, size);
-      System.arraycopy(sideIm, 0, valuesIm, 0, size);
-      if (startDensely()) {
-        solveDensely(valuesRe, valuesIm, transposed);
-      }
+  }
+
+  /** One step of iterative refinement: the residual's own solution is added. */
+  private boolean refined(
+      Elimination order, double[] valuesRe, double[] valuesIm, boolean transposed) {
+    replay(order, offRe, offIm, transposed);
+    for (int i = 0; i < size; i++) {
+      valuesRe[i] += offRe[i];
+      valuesIm[i] += offIm[i];
     }
+    return good(order, valuesRe, valuesIm, transposed);
   }
 
   private void solveDensely(double[] valuesRe, double[] valuesIm, boolean transposed) {

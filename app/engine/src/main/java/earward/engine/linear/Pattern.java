@@ -1,17 +1,23 @@
 package earward.engine.linear;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 
 /**
- * Which elements of a system are ever written, and the order of elimination that was found for
- * them. Until {@link #freeze} a new element means a new order; after it, a system with an element
- * outside the pattern is solved densely, so that what a solver was asked before changes nothing.
+ * Which elements of a system are ever written, and the orders of elimination that were found for
+ * them. One order does for all systems of a kind but where a pivot happens to vanish; then another
+ * is found beside it. Until {@link #freeze} a new element means new orders; after it, a system with
+ * an element outside the pattern, or one that no order suits, is solved densely, so that what a
+ * solver was asked before changes nothing.
  */
 final class Pattern {
+  private static final int MOST_ORDERS = 6;
+
   private final int size;
   private final boolean[] used;
-  private @Nullable Elimination order;
+  private final List<Elimination> orders = new ArrayList<>();
   private boolean strange;
   private boolean frozen;
   private int fallBacks;
@@ -27,6 +33,7 @@ final class Pattern {
       strange = true;
       if (!frozen) {
         used[at] = true;
+        orders.clear();
       }
     }
   }
@@ -36,35 +43,32 @@ final class Pattern {
     strange = false;
   }
 
-  /**
-   * Keeps the pattern from now on, with the order that suits a matrix that stands for all later
-   * ones.
-   */
-  void freeze(double[] real, double[] imaginary) {
+  /** Keeps pattern and orders from now on. */
+  void freeze() {
     frozen = true;
-    if (order != null) {
-      Elimination better = Elimination.of(size, used, real, imaginary);
-      order = better == null ? order : better;
-    }
   }
 
-  /** The order to replay for the present system; null where it must be solved densely. */
-  @Nullable Elimination order(double[] real, double[] imaginary) {
-    if (strange && frozen) {
-      fallBacks++;
+  /**
+   * The n-th order to try for the present system, found for it where that is still allowed.
+   *
+   * @return null where there is none: the system must be solved densely
+   */
+  @Nullable Elimination order(int n, double[] real, double[] imaginary) {
+    if (frozen && strange) {
       return null;
     }
-    if (!frozen && (strange || order == null)) {
-      order = Elimination.of(size, used, real, imaginary);
-      strange = false;
+    if (n < orders.size()) {
+      return orders.get(n);
     }
-    if (order == null) {
-      fallBacks++;
+    Elimination found =
+        frozen || n >= MOST_ORDERS ? null : Elimination.of(size, used, real, imaginary);
+    if (found != null) {
+      orders.add(found);
     }
-    return order;
+    return found;
   }
 
-  /** Counts a system whose replayed solution was not good enough. */
+  /** Counts a system that is solved densely. */
   void fellBack() {
     fallBacks++;
   }

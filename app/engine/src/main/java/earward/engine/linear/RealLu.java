@@ -1,12 +1,11 @@
 package earward.engine.linear;
 
-import java.util.Arrays;
 import org.jspecify.annotations.Nullable;
 
 /**
  * A real linear system. Its order of elimination is found once and replayed (Markowitz 1957); each
- * solution's residual is looked at, and where it is not that of rounding the system is solved anew,
- * densely, with partial pivoting by magnitude.
+ * solution's residual is looked at, and where one refinement does not make it that of rounding the
+ * system is solved anew, densely, with partial pivoting by magnitude.
  *
  * <p>Mutable, for one thread; allocates nothing once its pattern is known. Fill the matrix, {@link
  * #factor()}, then solve as often as wanted; a second {@link #factor()} needs a fresh matrix.
@@ -22,8 +21,10 @@ public final class RealLu {
   private final int[] pivots;
   private final double[] unknown;
   private final double[] side;
+  private final double[] off;
   private final Pattern pattern;
   private @Nullable Elimination replayed;
+  private int tried;
 
   public RealLu(int size) {
     this.size = size;
@@ -33,6 +34,7 @@ public final class RealLu {
     pivots = new int[size];
     unknown = new double[size];
     side = new double[size];
+    off = new double[size];
     pattern = new Pattern(size);
   }
 
@@ -49,12 +51,9 @@ public final class RealLu {
     a[at] += value;
   }
 
-  /**
-   * Keeps the order of elimination from now on, as the last matrix wants it; a system that does not
-   * fit is solved densely.
-   */
+  /** Keeps the orders of elimination from now on: a system that none suits is solved densely. */
   public void freeze() {
-    pattern.freeze(kept, zero);
+    pattern.freeze();
   }
 
   /** How many systems were solved densely. */
@@ -68,20 +67,27 @@ public final class RealLu {
    * @return whether a pivot other than 0 was found in every column
    */
   public boolean factor() {
-    Elimination order = pattern.order(a, zero);
-    if (order == null) {
-      System.arraycopy(a, 0, kept, 0, a.length);
-      replayed = null;
-      return factorDensely();
+    System.arraycopy(a, 0, kept, 0, a.length);
+    tried = 0;
+    return factorFrom();
+  }
+
+  /** Replays the first order that suits, from the one to be tried next. */
+  private boolean factorFrom() {
+    for (boolean clean = tried == 0; ; clean = false, tried++) {
+      Elimination order = pattern.order(tried, kept, zero);
+      if (!clean) {
+        System.arraycopy(kept, 0, a, 0, a.length);
+      }
+      replayed = order;
+      if (order == null) {
+        pattern.fellBack();
+        return factorDensely();
+      }
+      if (replay(order)) {
+        return true;
+      }
     }
-    if (replayed != order) {
-      Arrays.fill(kept, 0);
-    }
-    for (int at : order.entries) {
-      kept[at] = a[at];
-    }
-    replayed = order;
-    return replay(order) || dense();
   }
 
   private boolean replay(Elimination order) {
@@ -105,14 +111,6 @@ public final class RealLu {
       }
     }
     return true;
-  }
-
-  /** Starts again from the kept matrix, densely. */
-  private boolean dense() {
-    pattern.fellBack();
-    System.arraycopy(kept, 0, a, 0, a.length);
-    replayed = null;
-    return factorDensely();
   }
 
   private boolean factorDensely() {
@@ -164,19 +162,21 @@ public final class RealLu {
 
   /** Replaces the right side by the solution. */
   public void solve(double[] values) {
-    Elimination order = replayed;
-    if (order == null) {
-      solveDensely(values);
-      return;
+    if (replayed != null) {
+      System.arraycopy(values, 0, side, 0, size);
     }
-    System.arraycopy(values, 0, side, 0, size);
-    substitute(order, values);
-    if (!good(order, values)) {
+    for (Elimination order = replayed; order != null; order = replayed) {
+      substitute(order, values);
+      if (good(order, values) || refined(order, values)) {
+        return;
+      }
       System.arraycopy(side, 0, values, 0, size);
-      if (dense()) {
-        solveDensely(values);
+      tried++;
+      if (!factorFrom()) {
+        return;
       }
     }
+    solveDensely(values);
   }
 
   private void substitute(Elimination order, double[] values) {
@@ -200,10 +200,23 @@ public final class RealLu {
     System.arraycopy(unknown, 0, values, 0, size);
   }
 
+  /** One step of iterative refinement: the residual's own solution is added. */
+  private boolean refined(Elimination order, double[] values) {
+    for (int i = 0; i < size; i++) {
+      off[i] = -off[i];
+    }
+    substitute(order, off);
+    for (int i = 0; i < size; i++) {
+      values[i] += off[i];
+    }
+    return good(order, values);
+  }
+
   /** Whether every equation is met but for rounding. */
   private boolean good(Elimination order, double[] values) {
     int[] entries = order.entries;
     int at = 0;
+    boolean good = true;
     for (int row = 0; row < size; row++) {
       double sum = -side[row];
       double scale = Math.abs(sum);
@@ -213,11 +226,10 @@ public final class RealLu {
         sum += term;
         scale += Math.abs(term);
       }
-      if (!(Math.abs(sum) <= GOOD * scale)) {
-        return false;
-      }
+      off[row] = sum;
+      good &= Math.abs(sum) <= GOOD * scale;
     }
-    return true;
+    return good;
   }
 
   private void solveDensely(double[] values) {

@@ -91,7 +91,7 @@ class SparseSystemsTest {
   @Test
   void aPivotThatVanishesFallsBackToPivotingByMagnitude() {
     RealLu lu = new RealLu(2);
-    for (double corner : new double[] {5, 1e-30}) {
+    for (double corner : new double[] {5, 0}) {
       lu.clear();
       lu.add(0, 0, corner);
       lu.add(0, 1, 1);
