@@ -407,19 +407,47 @@ final class CarrierCycle {
     }
   }
 
-  /** Share of the highest harmonic in a solved cycle's current: how well the samples resolve it. */
-  double topShare(double[] u, int at) {
+  /**
+   * The largest difference of a port's mean current between the samples of a solved cycle and the
+   * points half-way between them, in A. The voltages hold no harmonic that the samples do not
+   * resolve, so that they are known between them too.
+   */
+  double aliasing(double[] u, int at) {
     evaluate(u, at);
-    double share = 0;
     for (int p = 0; p < ports; p++) {
-      double top =
-          Math.hypot(
-              transform(current, charge, p, harmonics, 0, true),
-              transform(current, charge, p, harmonics, 0, false));
-      double all = Math.abs(transform(current, charge, p, 0, 0, true));
-      share = Math.max(share, all > 0 ? top / all : 0);
+      mean[p] = component(current, p, 0, true) / samples;
+      between(u, at, p);
     }
-    return share;
+    evaluate(step, 0);
+    double largest = 0;
+    for (int p = 0; p < ports; p++) {
+      double half = component(current, p, 0, true) / samples;
+      largest = Math.max(largest, Math.abs(half - mean[p]) / 2);
+    }
+    return largest;
+  }
+
+  /** A port's voltages half-way between the samples, into {@link #step}. */
+  private void between(double[] u, int at, int p) {
+    int mask = samples - 1;
+    int from = p * samples;
+    double half = Math.PI / samples;
+    java.util.Arrays.fill(step, from, from + samples, 0);
+    for (int k = 0; k <= harmonics; k++) {
+      double re = 0;
+      double im = 0;
+      for (int s = 0; s < samples; s++) {
+        re += u[at + from + s] * kernel.cosine((k * s) & mask);
+        im -= u[at + from + s] * kernel.sine((k * s) & mask);
+      }
+      double scale = (k == 0 ? 1.0 : 2.0) / samples;
+      double turnedRe = scale * (re * Math.cos(k * half) - im * Math.sin(k * half));
+      double turnedIm = scale * (re * Math.sin(k * half) + im * Math.cos(k * half));
+      for (int s = 0; s < samples; s++) {
+        step[from + s] +=
+            turnedRe * kernel.cosine((k * s) & mask) - turnedIm * kernel.sine((k * s) & mask);
+      }
+    }
   }
 
   /**

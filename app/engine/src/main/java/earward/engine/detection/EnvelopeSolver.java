@@ -124,6 +124,34 @@ public final class EnvelopeSolver {
     refined = true;
   }
 
+  /**
+   * Largest share, over the audio period, by which a mean current differs between the samples of a
+   * cycle and as many between them: what finer samples of the carrier would change.
+   */
+  public double aliasing() {
+    double off = 0;
+    double most = 0;
+    for (int s = 0; s < warmSamples; s += Math.max(1, warmSamples / 8)) {
+      off = Math.max(off, cycle.aliasing(junctions, s * devices * cycle.samples));
+    }
+    for (double amperes : meanAmperes) {
+      most = Math.max(most, Math.abs(amperes));
+    }
+    return most > 0 ? off / most : 0;
+  }
+
+  /** Largest share of the highest harmonic of the tone in the fundamental of a mean current. */
+  public double topHarmonic() {
+    int top = audioHarmonics() * devices;
+    double share = 0;
+    for (int d = 0; d < devices; d++) {
+      double fundamental = Math.hypot(audioReal[devices + d], audioImaginary[devices + d]);
+      double highest = Math.hypot(audioReal[top + d], audioImaginary[top + d]);
+      share = Math.max(share, fundamental > 0 ? highest / fundamental : 0);
+    }
+    return share;
+  }
+
   /** Mean over the audio period of the voltage across a port's junction, in V. */
   public double meanVolts(int port) {
     double sum = 0;

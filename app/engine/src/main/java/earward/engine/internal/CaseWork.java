@@ -14,8 +14,14 @@ import org.jspecify.annotations.Nullable;
 final class CaseWork {
   private static final int MOST_PASSES = 8;
 
+  /** Rounds of peaking, and the change of tuning over the carrier below which it has settled. */
+  private static final int MOST_ROUNDS = 5;
+
+  private static final double SETTLED_CORE = 1e-6;
+
   final Network network;
   final CasePlan plan;
+  private final Fineness fineness;
   final double[] row;
   final DirectSolver direct;
   final AlternatingSolver alternating;
@@ -36,6 +42,9 @@ final class CaseWork {
   /** Room for a response over frequency. */
   final double[] magnitudes = new double[SmallResponse.POINTS];
 
+  /** Room for the clipping rule: currents of all ports for one ampere in one. */
+  final double[] portRatios;
+
   private final double[] scratch;
   private final double[] former;
 
@@ -55,13 +64,14 @@ final class CaseWork {
   private boolean warm;
   private String trouble = "";
 
-  CaseWork(Network network, CasePlan plan) {
+  CaseWork(Network network, CasePlan plan, Fineness fineness) {
+    this.fineness = fineness;
     this.network = network;
     this.plan = plan;
     row = new double[network.slots.all().size()];
     direct = new DirectSolver(network);
     alternating = new AlternatingSolver(network, direct.stage());
-    int harmonics = Detection.AUDIO_SAMPLES / 2 - 1;
+    int harmonics = fineness.audioHarmonics();
     audioTable = new AudioTable(network, harmonics);
     carrierTable = new CarrierTable(network);
     signal = new AudioSignal(harmonics, network.size);
@@ -72,7 +82,8 @@ final class CaseWork {
     detection =
         network.ports.length == 0 || network.feed == null
             ? null
-            : new Detection(network, direct.stage());
+            : new Detection(network, direct.stage(), fineness);
+    portRatios = new double[network.ports.length];
     scratch = new double[network.size];
     former = new double[network.size];
     keptSignal = new double[network.amplifiers.length];
@@ -108,6 +119,17 @@ final class CaseWork {
       detection.keep();
     }
     warm = true;
+  }
+
+  /** The fineness that the solved case needs. */
+  Fineness wantedFineness() {
+    return detection == null || plan.drive != Drive.SIGNAL || point != Part.DONE
+        ? fineness
+        : fineness.wanted(detection.modulated.aliasing(), detection.modulated.topHarmonic());
+  }
+
+  Fineness fineness() {
+    return fineness;
   }
 
   /** What did not converge, empty where all went well. */
@@ -274,18 +296,30 @@ final class CaseWork {
     return true;
   }
 
-  /** Carrier impedances, and the winding peaked at this case's carrier. */
+  /**
+   * Carrier impedances, and the winding peaked at this case's carrier. Its core is turned for that,
+   * which moves its impedance at the carrier's multiples a little; once or twice more settles it.
+   */
   private boolean tune(Detection parts, FeedLaw feed) {
-    if (!carrierTable.fill(alternating, stage(), feed, carrierRadians(), parts.around)) {
-      return fail("the circuit has no solution at the carrier");
-    }
-    parts.around.detuningRadians = 0;
-    if (feed.tuned()) {
+    CarrierSurroundings around = parts.around;
+    for (int round = 0; round < MOST_ROUNDS; round++) {
+      double turned = feed.tuned() ? around.detuningRadians : 0;
+      alternating.stage().turnCore(turned);
+      if (!carrierTable.fill(alternating, stage(), feed, carrierRadians(), around)) {
+        return fail("the circuit has no solution at the carrier");
+      }
+      if (!feed.tuned()) {
+        around.detuningRadians = 0;
+        return true;
+      }
       double shift = parts.peak(peakVolts());
       if (Double.isNaN(shift)) {
         return fail("the detector did not settle while its winding was peaked");
       }
-      parts.around.detuningRadians = shift - feed.detuningRadians(stage());
+      around.detuningRadians = shift - feed.detuningRadians(stage());
+      if (Math.abs(around.detuningRadians - turned) < SETTLED_CORE * carrierRadians()) {
+        return true;
+      }
     }
     return true;
   }

@@ -28,7 +28,12 @@ final class ClippingRule {
       return Double.NaN;
     }
     CarrierSurroundings around = detection.around;
-    double directOhms = around.audioRealOhms[around.index(0, port, port)];
+    double[] ratio = work.portRatios;
+    partners(work, detection, port, ratio);
+    double directOhms = 0;
+    for (int j = 0; j < ratio.length; j++) {
+      directOhms += ratio[j] * around.audioRealOhms[around.index(0, port, j)];
+    }
     work.small.fill(around, detection.carrierOnly, work.peakVolts(), 0);
     int own = port * work.network.ports.length + port;
     double sourceOhms = Math.max(0, 1 / work.small.admittanceRe[own]);
@@ -48,12 +53,28 @@ final class ClippingRule {
     int anode = of.anode(work.stage());
     int cathode = of.cathode(work.stage());
     solver.rest();
-    solver.push(anode, cathode, 1, 0);
+    for (int j = 0; j < ratio.length; j++) {
+      Port with = work.network.ports[j];
+      solver.push(with.anode(work.stage()), with.cathode(work.stage()), ratio[j], 0);
+    }
     solver.solve();
     return ClippingDepth.ofLoad(
         solver.re(cathode) - solver.re(anode),
         solver.im(cathode) - solver.im(anode),
         directOhms,
         sourceOhms);
+  }
+
+  /**
+   * What flows in the ports of the same part with one ampere in one of them: a transistor's emitter
+   * current comes from its collector, and only its base current from the base.
+   */
+  private static void partners(CaseWork work, Detection detection, int port, double[] ratio) {
+    Port own = work.network.ports[port];
+    double amperes = detection.carrierOnly.audioReal[port];
+    for (int j = 0; j < ratio.length; j++) {
+      boolean same = work.network.ports[j].part().equals(own.part());
+      ratio[j] = j == port ? 1 : same ? detection.carrierOnly.audioReal[j] / amperes : 0;
+    }
   }
 }

@@ -10,11 +10,6 @@ import java.util.Arrays;
 
 /** The carrier-driven devices of one case: their surroundings and both of their solvers. */
 final class Detection {
-  /** Samples of a carrier cycle and of an audio period: 32 suffice, 16 do not (PHYSICS.md 3). */
-  static final int CARRIER_SAMPLES = 32;
-
-  static final int AUDIO_SAMPLES = 32;
-
   /**
    * Samples where the carrier alone is solved: cheap, and pulses as narrow as those of 150 thermal
    * voltages are still met by two samples.
@@ -37,13 +32,16 @@ final class Detection {
   private final PortLaw[] devices;
   private final CarrierDriven[] parts;
 
-  Detection(Network network, DirectStage stage) {
+  Detection(Network network, DirectStage stage, Fineness fineness) {
     this.network = network;
     int ports = network.ports.length;
     conductances = new RealLu(ports);
     means = new double[ports];
-    modulated = new EnvelopeSolver(ports, CARRIER_SAMPLES, AUDIO_SAMPLES, false);
-    carrierOnly = new EnvelopeSolver(ports, LONE_CARRIER_SAMPLES, 2, true);
+    modulated =
+        new EnvelopeSolver(ports, fineness.carrierSamples(), fineness.audioSamples(), false);
+    carrierOnly =
+        new EnvelopeSolver(
+            ports, Math.max(LONE_CARRIER_SAMPLES, fineness.carrierSamples()), 2, true);
     around =
         new CarrierSurroundings(ports, carrierOnly.carrierHarmonics(), modulated.audioHarmonics());
     solved =

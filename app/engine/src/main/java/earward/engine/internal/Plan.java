@@ -68,7 +68,7 @@ public final class Plan {
       double[] values = slots.all().stream().mapToDouble(Slot::nominal).toArray();
       for (CasePlan each : cases) {
         if (each.drive == Drive.SIGNAL) {
-          CaseWork work = new CaseWork(trial, each);
+          CaseWork work = new CaseWork(trial, each, Fineness.USUAL);
           work.begin(values);
           mark(work, found);
         }

@@ -27,13 +27,18 @@ public final class Run {
     nominal = plan.slots().all().stream().mapToDouble(Slot::nominal).toArray();
     nominalFigures = new double[plan.readings.length];
     works =
-        plan.cases.stream().map(each -> new CaseWork(plan.network, each)).toArray(CaseWork[]::new);
+        plan.cases.stream()
+            .map(each -> new CaseWork(plan.network, each, Fineness.USUAL))
+            .toArray(CaseWork[]::new);
   }
 
   /** Solves a row; every solve starts from the nominal kit's solution, which is solved once. */
   public SolveOutcome solve(double[] values, double[] figures) {
     if (nominalOutcome == null) {
       nominalOutcome = read(nominal, nominalFigures);
+      while (refine()) {
+        nominalOutcome = read(nominal, nominalFigures);
+      }
       for (CaseWork work : works) {
         if (work.trouble().isEmpty()) {
           work.keep();
@@ -45,6 +50,19 @@ public final class Run {
       return nominalOutcome;
     }
     return read(values, figures);
+  }
+
+  /** Puts finer cases in the place of those whose solution asks for it; whether there was one. */
+  private boolean refine() {
+    boolean any = false;
+    for (int i = 0; i < works.length; i++) {
+      Fineness wanted = works[i].wantedFineness();
+      if (!wanted.equals(works[i].fineness())) {
+        works[i] = new CaseWork(plan.network, works[i].plan, wanted);
+        any = true;
+      }
+    }
+    return any;
   }
 
   private SolveOutcome read(double[] values, double[] figures) {

@@ -19,6 +19,7 @@ public final class AlternatingStage {
   private int carrierHarmonic;
   private double carrierOmega;
   private boolean feedFree;
+  private double turnedRadians;
   private LoadView load = LoadView.AS_IT_IS;
   private double leastLoadShare = 1;
   private double openBelowFarads;
@@ -38,6 +39,16 @@ public final class AlternatingStage {
   /** Sets the carrier, in rad/s: the winding of a tuned feed is known by its resonance. */
   public void carrier(double radians) {
     carrierOmega = radians;
+  }
+
+  /** Sets how far the core of a tuned winding is turned from resonance: ωc − ω0, in rad/s. */
+  public void turnCore(double radians) {
+    turnedRadians = radians;
+  }
+
+  /** How far the core of a tuned winding is turned: ωc − ω0, in rad/s. */
+  public double turnedRadians() {
+    return turnedRadians;
   }
 
   /** How loudspeakers appear from now on; for the least load with the share of Re that is left. */

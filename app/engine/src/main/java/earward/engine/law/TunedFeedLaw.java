@@ -96,11 +96,16 @@ final class TunedFeedLaw extends FeedLaw {
     }
   }
 
-  /** The voltage that the circuit's own impedance takes from the current that it gives. */
+  /**
+   * The voltage that the circuit's own impedance takes from the current that it gives. C stays, L
+   * is turned by the core: 1/(ωc·L) = ωc·C − 2C·(ωc − ω0).
+   */
   private void tank(AlternatingStage stage) {
     double conductance = 1 / value(stage, PARALLEL_OHMS);
     double harmonic = stage.carrierHarmonic();
-    double susceptance = conductance * value(stage, QUALITY) * (harmonic - 1 / harmonic);
+    double reactive = conductance * value(stage, QUALITY);
+    double turned = 2 * reactive * stage.turnedRadians() / stage.carrierOmega();
+    double susceptance = reactive * (harmonic - 1 / harmonic) + turned / harmonic;
     double norm = conductance * conductance + susceptance * susceptance;
     stage.add(branch(0), branch(0), conductance / norm, -susceptance / norm);
   }

@@ -76,7 +76,7 @@ class AdjointTest {
             CaseName.TEST, Drive.SIGNAL, Map.of(Slot.CARRIER_PEAK_VOLTS, 1.0, Slot.DEPTH, 0.3));
     FigureName any = new FigureName("collector", Quantity.DC_VOLTS, CaseName.TEST);
     Plan plan = new Plan(circuit(), List.of(test), List.of(any));
-    CaseWork work = new CaseWork(plan.network, plan.cases.get(0));
+    CaseWork work = new CaseWork(plan.network, plan.cases.get(0), Fineness.USUAL);
     work.begin(plan.slots().all().stream().mapToDouble(Slot::nominal).toArray());
     assertThat(work.solved() && work.carrierSolved()).isTrue();
     int output = plan.network.node("collector");
