@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import earward.block.figure.Quantity;
+import earward.block.law.ClippingDepth;
 import earward.block.law.ExponentialDetector;
 import earward.block.law.ThermalVoltage;
 import org.junit.jupiter.api.Test;
@@ -53,5 +54,33 @@ class DoublerTest {
   @Test
   void aDoublersOutputTendsToTwiceThePeak() {
     assertThat(doubler(8, 10).want("out", Quantity.DC_VOLTS).figure()).isBetween(14.5, 16.0);
+  }
+
+  /**
+   * The pump capacitor discharges through the load as C1 does, so that the diode to ground lets go
+   * first: where the rule says so, and where the solved current reverses.
+   */
+  @ParameterizedTest
+  @CsvSource({"1e-9, 1e-10", "1e-9, 4.7e-10", "1e-10, 4.7e-10"})
+  void aDoublersFirstDiodeLetsGoWhereTheRuleSays(double pumpFarads, double farads) {
+    TrialCircuit circuit =
+        new TrialCircuit()
+            .generator(100, "in")
+            .capacitor("detector.pump", pumpFarads, "in", "pump");
+    diode(circuit, "detector.d1", Circuit.GROUND, "pump");
+    diode(circuit, "detector.d2", "pump", "out");
+    double[] figures =
+        circuit
+            .resistor("detector.r", LOAD, "out", Circuit.GROUND)
+            .capacitor("detector.c", farads, "out", Circuit.GROUND)
+            .signal(3, 0.3, 4.5e3)
+            .want("detector.d1", Quantity.CLIPPING_DEPTH)
+            .want("detector.d1", Quantity.REVERSAL_DEPTH)
+            .want("detector.d2", Quantity.CLIPPING_DEPTH)
+            .figures();
+    assertThat(figures[0]).isCloseTo(figures[1], within(0.05 * figures[1]));
+    assertThat(figures[2]).isGreaterThan(figures[0]);
+    // Both capacitors side by side would be the strict diagonal rule's worst case.
+    assertThat(figures[0]).isGreaterThan(ClippingDepth.diagonal(LOAD, pumpFarads + farads, 4.5e3));
   }
 }

@@ -23,21 +23,26 @@ final class DetectorChecks {
   private DetectorChecks() {}
 
   /**
-   * The checks of every diode in the list; where the envelope is followed is checked at the last.
+   * The checks of every diode in the list.
    *
-   * @param diodes in the order in which the carrier meets them
+   * @param less where to turn first against clipping, beside C1 and R1
    */
   static List<Check> of(
-      List<String> diodes, DiodeModel model, Conditions conditions, boolean ownLoad) {
+      List<String> diodes,
+      DiodeModel model,
+      Conditions conditions,
+      boolean ownLoad,
+      RemedyHint... less) {
     List<Check> checks = new ArrayList<>();
-    checks.add(clipping(diodes.get(diodes.size() - 1), conditions, ownLoad));
+    diodes.forEach(diode -> checks.add(clipping(diode, conditions, ownLoad, less)));
     diodes.forEach(diode -> checks.add(drive(diode, model, conditions, ownLoad)));
     diodes.forEach(diode -> checks.add(reverse(diode, model)));
     return checks;
   }
 
-  static Check clipping(String diode, Conditions conditions, boolean ownLoad) {
-    List<RemedyHint> lessClipping = new ArrayList<>(List.of(RemedyHint.lower("c1")));
+  static Check clipping(String diode, Conditions conditions, boolean ownLoad, RemedyHint... less) {
+    List<RemedyHint> lessClipping = new ArrayList<>(List.of(less));
+    lessClipping.add(RemedyHint.lower("c1"));
     if (ownLoad) {
       lessClipping.add(RemedyHint.lower("r1"));
     }

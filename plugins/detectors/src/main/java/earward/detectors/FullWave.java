@@ -64,7 +64,7 @@ public final class FullWave implements BlockType {
     Reservoir.hang(plan, values);
     return new BlockDescription(
         plan.fit("d1", "d2", "c1").testPoint("out", "out").to(new Single("out")),
-        DetectorChecks.of(List.of("d2", "d1"), model, conditions, Reservoir.ownLoad(values)),
+        DetectorChecks.of(List.of("d1", "d2"), model, conditions, Reservoir.ownLoad(values)),
         List.of(Reservoir.clippingOverCapacitor(values, "d1")));
   }
 

@@ -88,6 +88,7 @@ public final class TransistorFollower implements BlockType {
             .testPoint("base", "base")
             .testPoint("out", "out")
             .to(new Single("out")),
+        DetectorChecks.clipping("q1", conditions, true),
         FollowerRest.least(LEAST_AMPERES, RemedyHint.lower("r-upper")),
         FollowerRest.most(MOST_AMPERES, RemedyHint.raise("r-upper")));
   }

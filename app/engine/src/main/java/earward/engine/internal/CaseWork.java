@@ -36,6 +36,7 @@ final class CaseWork {
 
   final Outputs outputs;
   final SmallSignal small;
+  final ClippingRule clipping;
   final Noise noise;
   final @Nullable Detection detection;
 
@@ -43,7 +44,6 @@ final class CaseWork {
   final double[] magnitudes = new double[SmallResponse.POINTS];
 
   /** Room for the clipping rule: currents of all ports for one ampere in one. */
-  final double[] portRatios;
 
   private final double[] scratch;
   private final double[] former;
@@ -78,12 +78,12 @@ final class CaseWork {
     trial = new AudioSignal(harmonics, network.size);
     outputs = new Outputs(network);
     small = new SmallSignal(network.ports.length);
+    clipping = new ClippingRule(this);
     noise = new Noise(plan, network, alternating);
     detection =
         network.ports.length == 0 || network.feed == null
             ? null
             : new Detection(network, direct.stage(), fineness);
-    portRatios = new double[network.ports.length];
     scratch = new double[network.size];
     former = new double[network.size];
     keptSignal = new double[network.amplifiers.length];

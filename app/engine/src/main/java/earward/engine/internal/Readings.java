@@ -210,11 +210,11 @@ final class Readings {
       case CARRIER_PEAK_VOLTS -> work -> CarrierLevels.portPeakVolts(work, port);
       case DETECTION_EFFICIENCY -> work -> CarrierLevels.efficiency(work, port);
       case CARRIER_INPUT_OHMS -> work -> CarrierLevels.inputOhms(work, port);
-      case CLIPPING_DEPTH -> work -> ClippingRule.depth(work, port, ClippingRule.Without.NOTHING);
+      case CLIPPING_DEPTH -> work -> work.clipping.depth(port, ClippingRule.Without.NOTHING);
       case CLIPPING_DEPTH_WITHOUT_CAPACITOR ->
-          work -> ClippingRule.depth(work, port, ClippingRule.Without.CAPACITOR);
+          work -> work.clipping.depth(port, ClippingRule.Without.CAPACITOR);
       case CLIPPING_DEPTH_WITHOUT_COUPLING ->
-          work -> ClippingRule.depth(work, port, ClippingRule.Without.COUPLING);
+          work -> work.clipping.depth(port, ClippingRule.Without.COUPLING);
       case REVERSAL_DEPTH -> work -> work.depths.reversal(port);
       case CLEAN_DEPTH -> work -> work.depths.clean(endPlus(work, part), endMinus(work, part));
       default -> ofAny(quantity, law);
