@@ -161,7 +161,7 @@ final class DerivedFigures {
   }
 
   private void supplyCurrents() {
-    for (CaseName caseName : 
+    for (CaseName caseName :
         List.of(NO_SIGNAL, TEST, STRONG, FULL_VOLUME, FULL_OUTPUT, BATTERY_LOW, HOTTEST)) {
       double whole = 0;
       boolean any = false;

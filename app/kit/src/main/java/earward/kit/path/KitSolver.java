@@ -106,8 +106,8 @@ public final class KitSolver {
   /**
    * The kit compiled for the figures that an edit shows at once: all of {@link #compile} at rest,
    * at the test signal and at full output, but for the largest clean modulation, which is a search,
-   * noise, hum, and the deviation from the curve wanted. They are the same figures; the rest is left to
-   * a solve that may take longer.
+   * noise, hum, and the deviation from the curve wanted. They are the same figures; the rest is
+   * left to a solve that may take longer.
    *
    * @param assembly a complete one
    * @throws CircuitException with a finding when the circuit makes no sense to the engine
