@@ -43,8 +43,6 @@ final class CaseWork {
   /** Room for a response over frequency. */
   final double[] magnitudes = new double[SmallResponse.POINTS];
 
-  /** Room for the clipping rule: currents of all ports for one ampere in one. */
-
   private final double[] scratch;
   private final double[] former;
 
