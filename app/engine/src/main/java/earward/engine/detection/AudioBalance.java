@@ -136,11 +136,14 @@ final class AudioBalance {
    * @param x the unknowns
    * @param amperes mean currents, index port·count + sample
    * @param drawn from the held node at each sample, real and imaginary in turn
+   * @param stored charge on what hangs on the held node, likewise: as the envelope moves, its
+   *     fundamental takes a current beside jωc·Q
    * @return the largest, in volts
    */
-  double residuals(CarrierSurroundings around, double[] x, double[] amperes, double[] drawn) {
+  double residuals(
+      CarrierSurroundings around, double[] x, double[] amperes, double[] drawn, double[] stored) {
     double largest = audio(around, x, amperes);
-    return around.tuned ? Math.max(largest, tank(around, x, drawn)) : largest;
+    return around.tuned ? Math.max(largest, tank(around, x, drawn, stored)) : largest;
   }
 
   private double audio(CarrierSurroundings around, double[] x, double[] amperes) {
@@ -174,27 +177,24 @@ final class AudioBalance {
   }
 
   /** The tuned feed's balance, times Rp so that it stands in volts. */
-  private double tank(CarrierSurroundings around, double[] x, double[] drawn) {
+  private double tank(CarrierSurroundings around, double[] x, double[] drawn, double[] stored) {
     double largest = 0;
-    double turn = 2 * around.tankFarads * around.detuningRadians;
+    double farads = 2 * around.tankFarads;
+    double turn = farads * around.detuningRadians;
     for (int s = 0; s < count; s++) {
       double rateReal = 0;
       double rateImaginary = 0;
       for (int r = 0; r < count; r++) {
-        rateReal += rateKernel[count + s - r] * x[devices * count + r];
-        rateImaginary += rateKernel[count + s - r] * x[(devices + 1) * count + r];
+        double rate = rateKernel[count + s - r];
+        rateReal += rate * (farads * x[devices * count + r] + stored[2 * r]);
+        rateImaginary += rate * (farads * x[(devices + 1) * count + r] + stored[2 * r + 1]);
       }
       double real = x[devices * count + s];
       double imaginary = x[(devices + 1) * count + s];
       double first =
-          real
-              - envelope[s]
-              + around.tankOhms
-                  * (2 * around.tankFarads * rateReal + drawn[2 * s] - turn * imaginary);
+          real - envelope[s] + around.tankOhms * (rateReal + drawn[2 * s] - turn * imaginary);
       double second =
-          imaginary
-              + around.tankOhms
-                  * (2 * around.tankFarads * rateImaginary + drawn[2 * s + 1] + turn * real);
+          imaginary + around.tankOhms * (rateImaginary + drawn[2 * s + 1] + turn * real);
       residual[devices * count + s] = first;
       residual[(devices + 1) * count + s] = second;
       largest = Math.max(largest, Math.max(Math.abs(first), Math.abs(second)));

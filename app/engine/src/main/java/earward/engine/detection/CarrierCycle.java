@@ -70,6 +70,11 @@ final class CarrierCycle {
 
   double drawnImaginary;
 
+  /** Fundamental of the devices' charges as the feed sees it, in C. */
+  double storedReal;
+
+  double storedImaginary;
+
   /**
    * Slopes of (mean 0.., drawn real, drawn imaginary) to (v 0.., E real, E imaginary), row after
    * row with N + 2 columns.
@@ -386,7 +391,15 @@ final class CarrierCycle {
   private void results(CarrierSurroundings around) {
     drawnReal = 0;
     drawnImaginary = 0;
+    storedReal = 0;
+    storedImaginary = 0;
     for (int p = 0; p < ports; p++) {
+      if (charged) {
+        double re = 2.0 / samples * component(charge, p, 1, true);
+        double im = 2.0 / samples * component(charge, p, 1, false);
+        storedReal += around.transferReal[p] * re - around.transferImaginary[p] * im;
+        storedImaginary += around.transferReal[p] * im + around.transferImaginary[p] * re;
+      }
       mean[p] = transform(current, charge, p, 0, 0, true);
       double real = transform(current, charge, p, 1, around.carrierRadians, true);
       double imaginary = transform(current, charge, p, 1, around.carrierRadians, false);

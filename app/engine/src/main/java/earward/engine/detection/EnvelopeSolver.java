@@ -37,6 +37,7 @@ public final class EnvelopeSolver {
   private final double[] savedJunctions;
   final double[] slopes;
   final double[] drawn;
+  final double[] stored;
   private final double[] keptState;
   private final double[] keptJunctions;
   private boolean keptWarm;
@@ -92,6 +93,7 @@ public final class EnvelopeSolver {
     keptJunctions = new double[junctions.length];
     slopes = new double[audioSamples * blocks * blocks];
     drawn = new double[2 * audioSamples];
+    stored = new double[2 * audioSamples];
     meanAmperes = new double[devices * audioSamples];
     audioReal = new double[audioSamples / 2 * devices];
     audioImaginary = new double[audioSamples / 2 * devices];
@@ -241,6 +243,10 @@ public final class EnvelopeSolver {
       solved =
           coldCarrier(around, peakVolts)
               && (wanted == 1 || spread(around, peakVolts, depth, toneRadians));
+      if (solved && !joint.solve(around, peakVolts, depth, toneRadians, wanted)) {
+        joint.undo(); // near enough as it is
+        solved = newton(around, peakVolts, depth, toneRadians, wanted);
+      }
     }
     warm = solved;
     warmSamples = wanted;
@@ -400,7 +406,7 @@ public final class EnvelopeSolver {
       }
       keep(around, s, count, real, imaginary);
     }
-    return balance.residuals(around, x, meanAmperes, drawn);
+    return balance.residuals(around, x, meanAmperes, drawn, stored);
   }
 
   void keep(CarrierSurroundings around, int s, int count, double real, double imaginary) {
@@ -410,6 +416,9 @@ public final class EnvelopeSolver {
     System.arraycopy(cycle.slopes, 0, slopes, s * blocks * blocks, blocks * blocks);
     feedReal[s] = real;
     feedImaginary[s] = imaginary;
+    double hanging = Math.max(0, around.loadImaginarySiemens) / around.carrierRadians;
+    stored[2 * s] = cycle.storedReal + hanging * real;
+    stored[2 * s + 1] = cycle.storedImaginary + hanging * imaginary;
     drawn[2 * s] =
         cycle.drawnReal + around.loadRealSiemens * real - around.loadImaginarySiemens * imaginary;
     drawn[2 * s + 1] =

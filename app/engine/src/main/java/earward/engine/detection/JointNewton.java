@@ -63,7 +63,7 @@ final class JointNewton {
     System.arraycopy(owner.junctions, 0, savedJunctions, 0, savedJunctions.length);
     owner.balance.begin(around, peakVolts, depth, toneRadians, count);
     int size = owner.balance.size(around);
-    double enough = 1e-10 * peakVolts + 1e-13;
+    double enough = 1e-11 * peakVolts + 1e-13;
     DenseSolver matrix = size == keptSize ? kept : fresh;
     boolean made = matrix == kept;
     double former = Double.POSITIVE_INFINITY;
@@ -72,7 +72,9 @@ final class JointNewton {
       if (!linearise(around, count)) {
         return false;
       }
-      double off = owner.balance.residuals(around, owner.state, owner.meanAmperes, owner.drawn);
+      double off =
+          owner.balance.residuals(
+              around, owner.state, owner.meanAmperes, owner.drawn, owner.stored);
       if (!(off < 1e9)) {
         return false;
       }

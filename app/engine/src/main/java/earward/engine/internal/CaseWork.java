@@ -12,7 +12,7 @@ import org.jspecify.annotations.Nullable;
  * Holds all that it needs, allocated once; for one thread.
  */
 final class CaseWork {
-  private static final int MOST_PASSES = 8;
+  private static final int MOST_PASSES = 12;
 
   /** Rounds of peaking, and the change of tuning over the carrier below which it has settled. */
   private static final int MOST_ROUNDS = 5;
@@ -264,7 +264,7 @@ final class CaseWork {
   private boolean settled() {
     double[] now = stage().solution();
     for (int i = 0; i < network.nodes; i++) {
-      if (Math.abs(now[i] - former[i]) > 1e-10 + 1e-9 * Math.abs(now[i])) {
+      if (Math.abs(now[i] - former[i]) > 1e-12 + 1e-11 * Math.abs(now[i])) {
         return false;
       }
     }
