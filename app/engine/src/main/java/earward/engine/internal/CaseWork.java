@@ -15,9 +15,9 @@ final class CaseWork {
   private static final int MOST_PASSES = 12;
 
   /** Rounds of peaking, and the change of tuning over the carrier below which it has settled. */
-  private static final int MOST_ROUNDS = 5;
+  private static final int MOST_ROUNDS = 8;
 
-  private static final double SETTLED_CORE = 1e-6;
+  private static final double SETTLED_CORE = 1e-9;
 
   final Network network;
   final CasePlan plan;

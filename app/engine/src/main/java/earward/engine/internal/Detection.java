@@ -162,7 +162,7 @@ final class Detection {
    */
   double peak(double peakVolts) {
     double shift = 0;
-    for (int round = 0; round < 8; round++) {
+    for (int round = 0; round < 14; round++) {
       around.detuningRadians = shift;
       if (!solveCarrier(peakVolts)) {
         return Double.NaN;
@@ -173,7 +173,7 @@ final class Detection {
       double drawnImaginary = carrierOnly.drawnImaginary(0);
       double reactive = drawnImaginary * real - drawnReal * imaginary;
       double next = -reactive / (2 * around.tankFarads * (real * real + imaginary * imaginary));
-      boolean settled = Math.abs(next - shift) < 1e-7 / (around.tankFarads * around.tankOhms);
+      boolean settled = Math.abs(next - shift) < 1e-9 / (around.tankFarads * around.tankOhms);
       shift = next;
       if (settled) {
         break;
