@@ -26,6 +26,10 @@ public class PerturbedKits {
   @Param("hayloft")
   public String name = "hayloft";
 
+  /** Whether all figures are solved, or those of a batch. */
+  @Param({"false", "true"})
+  public boolean all;
+
   private final double[][] rows = new double[KITS][];
   private StarterKit kit;
   private Solver solver;
@@ -36,7 +40,9 @@ public class PerturbedKits {
   @Setup
   public void compile() {
     kit = StarterKit.open(name);
-    CompiledCircuit circuit = KitSolver.compile(kit.assembled()).circuit();
+    CompiledCircuit circuit =
+        (all ? KitSolver.compile(kit.assembled()) : KitSolver.compileBatch(kit.assembled()))
+            .circuit();
     SplittableRandom random = new SplittableRandom(SEED);
     for (int i = 0; i < KITS; i++) {
       rows[i] = perturbed(circuit, random);

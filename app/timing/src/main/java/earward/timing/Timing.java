@@ -36,7 +36,10 @@ public final class Timing {
     bars.add(new WarmBar("all plug-ins loaded", 0.25, "PluginLoading.allPlugins"));
     bars.add(new WarmBar("blocks described and joined", 0.016, "AfterAnEdit.assembled"));
     bars.add(new WarmBar("the headline after an edited value", 0.016, "EditedValue.headline"));
-    bars.add(new ThousandKits("hayloft"));
+    for (String kit : StarterKit.NAMES) {
+      bars.add(new ThousandKits(kit, false));
+    }
+    bars.add(new ThousandKits("hayloft", true));
     return bars;
   }
 

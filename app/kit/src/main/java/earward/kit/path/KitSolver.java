@@ -34,6 +34,19 @@ public final class KitSolver {
           Quantity.RESPONSE_DEVIATION_DECIBELS,
           Quantity.RESPONSE_DEVIATION_HERTZ);
 
+  /** What is solved for each kit of a batch. */
+  private static final Set<CaseName> BATCH =
+      Set.of(CaseName.NO_SIGNAL, CaseName.TEST, CaseName.FULL_OUTPUT, CaseName.HOTTEST);
+
+  private static final Set<Quantity> BATCH_FIGURES =
+      Set.of(
+          Quantity.DC_VOLTS,
+          Quantity.AUDIO_RMS_VOLTS,
+          Quantity.DISTORTION,
+          Quantity.SUPPLY_AMPERES,
+          Quantity.DISSIPATION_WATTS,
+          Quantity.JUNCTION_CELSIUS);
+
   private KitSolver() {}
 
   /**
@@ -120,6 +133,26 @@ public final class KitSolver {
         WantedFigures.of(assembly, new Places(assembly.circuit())).stream()
             .filter(figure -> HEADLINE.contains(figure.caseName()))
             .filter(figure -> !LATER.contains(figure.quantity()))
+            .toList();
+    CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases, wanted);
+    return new CompiledKit(assembly, circuit, Map.of());
+  }
+
+  /**
+   * The kit compiled for what is asked of each kit of a batch: readings at all test points at rest
+   * and with the test signal, the test distortion, supply currents and heat.
+   *
+   * @param assembly a complete one
+   * @throws CircuitException with a finding when the circuit makes no sense to the engine
+   */
+  public static CompiledKit compileBatch(Assembly assembly) {
+    List<SolveCase> cases =
+        new KitCases(assembly)
+            .all(Map.of()).stream().filter(one -> BATCH.contains(one.name())).toList();
+    List<FigureName> wanted =
+        WantedFigures.of(assembly, new Places(assembly.circuit())).stream()
+            .filter(figure -> BATCH.contains(figure.caseName()))
+            .filter(figure -> BATCH_FIGURES.contains(figure.quantity()))
             .toList();
     CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases, wanted);
     return new CompiledKit(assembly, circuit, Map.of());
