@@ -89,10 +89,7 @@ final class FigurePlaces {
           place.isEmpty() && hasSource()
               ? Optional.empty()
               : ofPart(place, List.of(Battery.class, Adaptor.class));
-      case RIPPLE_REJECTION_DECIBELS,
-          HUM_RMS_VOLTS,
-          RAIL_LOOP_MARGIN_DECIBELS,
-          RAIL_LOOP_HERTZ ->
+      case RIPPLE_REJECTION_DECIBELS, HUM_RMS_VOLTS, RAIL_LOOP_MARGIN_DECIBELS, RAIL_LOOP_HERTZ ->
           ofPart(place, List.of(Battery.class, Adaptor.class));
       case BATTERY_HOURS -> ofPart(place, Battery.class);
       case ONWARD_OHMS, BACKWARD_OHMS, LOADING_LOSS_DECIBELS, HEADROOM_DECIBELS ->
