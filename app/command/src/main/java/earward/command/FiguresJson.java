@@ -9,6 +9,7 @@ import static earward.block.figure.CaseName.NO_SIGNAL;
 import static earward.block.figure.CaseName.STRONG;
 import static earward.block.figure.CaseName.TEST;
 import static earward.block.figure.CaseName.WEAK;
+import static earward.block.figure.CaseName.WORST_TURN;
 
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
@@ -48,6 +49,7 @@ final class FiguresJson {
     root.set("conditions", ConditionsJson.of(json.assembly.design().conditions()));
     root.set("testPoints", json.testPoints());
     root.set("seams", json.seams());
+    root.set("detectors", json.detectors());
     root.set("path", json.path());
     root.set("supply", json.supply());
     root.set("heatedParts", json.heatedParts());
@@ -79,8 +81,45 @@ final class FiguresJson {
       put(node, "audioRmsVoltsTest", place, Quantity.AUDIO_RMS_VOLTS, TEST);
       put(node, "distortionFractionTest", place, Quantity.DISTORTION, TEST);
       put(node, "carrierRmsVoltsTest", place, Quantity.CARRIER_RMS_VOLTS, TEST);
+      put(node, "secondHarmonicFractionTest", place, Quantity.SECOND_HARMONIC, TEST);
+      put(node, "thirdHarmonicFractionTest", place, Quantity.THIRD_HARMONIC, TEST);
+      put(node, "secondCarrierRmsVoltsTest", place, Quantity.SECOND_CARRIER_RMS_VOLTS, TEST);
+      put(node, "thirdCarrierRmsVoltsTest", place, Quantity.THIRD_CARRIER_RMS_VOLTS, TEST);
     }
     return points;
+  }
+
+  /** The diodes that the carrier drives. */
+  private ArrayNode detectors() {
+    ArrayNode detectors = JsonOut.object().arrayNode();
+    for (CircuitPart part : assembly.circuit().parts()) {
+      String place = part.name();
+      if (kit.figures().find(place, Quantity.CARRIER_PEAK_VOLTS, TEST).isPresent()) {
+        ObjectNode node =
+            detectors.addObject().put("place", place).put("reference", names.reference(place));
+        put(node, "carrierPeakVoltsTest", place, Quantity.CARRIER_PEAK_VOLTS, TEST);
+        put(node, "carrierPeakVoltsWeak", place, Quantity.CARRIER_PEAK_VOLTS, WEAK);
+        put(node, "efficiencyFractionTest", place, Quantity.DETECTION_EFFICIENCY, TEST);
+        put(node, "inputOhmsTest", place, Quantity.CARRIER_INPUT_OHMS, TEST);
+        put(node, "clippingDepthFractionTest", place, Quantity.CLIPPING_DEPTH, TEST);
+        put(
+            node,
+            "clippingDepthFractionWithoutCapacitorTest",
+            place,
+            Quantity.CLIPPING_DEPTH_WITHOUT_CAPACITOR,
+            TEST);
+        put(
+            node,
+            "clippingDepthFractionWithoutCouplingTest",
+            place,
+            Quantity.CLIPPING_DEPTH_WITHOUT_COUPLING,
+            TEST);
+        put(node, "reversalDepthFractionTest", place, Quantity.REVERSAL_DEPTH, TEST);
+        put(node, "cleanDepthFractionTest", place, Quantity.CLEAN_DEPTH, TEST);
+        put(node, "reversePeakVoltsDeepest", place, Quantity.REVERSE_PEAK_VOLTS, DEEPEST);
+      }
+    }
+    return detectors;
   }
 
   private ArrayNode seams() {
@@ -120,10 +159,7 @@ final class FiguresJson {
     put(node, "responseDeviationDecibels", PATH, Quantity.RESPONSE_DEVIATION_DECIBELS, TEST);
     put(node, "responseDeviationHertz", PATH, Quantity.RESPONSE_DEVIATION_HERTZ, TEST);
     put(node, "largestCleanDepthFraction", PATH, Quantity.CLEAN_DEPTH, TEST);
-    CleanDepthLimit.of(kit.solved())
-        .ifPresentOrElse(
-            limit -> node.put("largestCleanDepthCause", limit.key()),
-            () -> node.putNull("largestCleanDepthCause"));
+    cause(node, "largestCleanDepthCause", TEST);
     put(node, "clippingDepthFractionDeepest", PATH, Quantity.CLIPPING_DEPTH, DEEPEST);
     put(node, "outputRmsVoltsTest", PATH, Quantity.OUTPUT_RMS_VOLTS, TEST);
     put(node, "outputWattsTest", PATH, Quantity.OUTPUT_WATTS, TEST);
@@ -131,6 +167,7 @@ final class FiguresJson {
     put(node, "tenPercentWatts", PATH, Quantity.TEN_PERCENT_WATTS, FULL_OUTPUT);
     put(node, "clipWattsBatteryLow", PATH, Quantity.CLIP_WATTS, BATTERY_LOW);
     put(node, "tenPercentWattsBatteryLow", PATH, Quantity.TEN_PERCENT_WATTS, BATTERY_LOW);
+    depths(node);
     noise(node);
     put(node, "rippleRejectionDecibels", PATH, Quantity.RIPPLE_REJECTION_DECIBELS, TEST);
     put(node, "humRmsVoltsTest", PATH, Quantity.HUM_RMS_VOLTS, TEST);
@@ -140,6 +177,39 @@ final class FiguresJson {
     put(node, "soundDecibelsFullOutput", PATH, Quantity.SOUND_DECIBELS, FULL_OUTPUT);
     put(node, "soundDecibelsTest", PATH, Quantity.SOUND_DECIBELS, TEST);
     return node;
+  }
+
+  private void cause(ObjectNode node, String key, CaseName caseName) {
+    CleanDepthLimit.of(kit.solved(), caseName)
+        .ifPresentOrElse(limit -> node.put(key, limit.key()), () -> node.putNull(key));
+  }
+
+  /** The closed rule beside the solved depths, and the worst of the knobs' turn. */
+  private void depths(ObjectNode node) {
+    put(node, "powerStageDepthFraction", PATH, Quantity.POWER_STAGE_DEPTH, TEST);
+    put(node, "reversalDepthFraction", PATH, Quantity.REVERSAL_DEPTH, TEST);
+    put(node, "clippingDepthFractionTest", PATH, Quantity.CLIPPING_DEPTH, TEST);
+    put(node, "largestCleanDepthFractionWorstTurn", PATH, Quantity.CLEAN_DEPTH, WORST_TURN);
+    boolean turned =
+        kit.figures().all().keySet().stream()
+            .anyMatch(
+                name ->
+                    name.quantity() == Quantity.KNOB_POSITION
+                        && name.caseName().equals(WORST_TURN));
+    cause(node, "largestCleanDepthCauseWorstTurn", turned ? WORST_TURN : TEST);
+    put(node, "reversalDepthFractionWorstTurn", PATH, Quantity.REVERSAL_DEPTH, WORST_TURN);
+    ArrayNode knobs = node.putArray("worstTurnKnobs");
+    for (CircuitPart part : assembly.circuit().parts()) {
+      kit.figures()
+          .find(part.name(), Quantity.KNOB_POSITION, WORST_TURN)
+          .ifPresent(
+              position ->
+                  knobs
+                      .addObject()
+                      .put("place", part.name())
+                      .put("reference", names.reference(part.name()))
+                      .put("positionFraction", position));
+    }
   }
 
   private void noise(ObjectNode node) {

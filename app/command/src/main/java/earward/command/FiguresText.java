@@ -6,6 +6,7 @@ import static earward.block.figure.CaseName.HOTTEST;
 import static earward.block.figure.CaseName.NO_SIGNAL;
 import static earward.block.figure.CaseName.STRONG;
 import static earward.block.figure.CaseName.TEST;
+import static earward.block.figure.CaseName.WORST_TURN;
 
 import earward.block.Conditions;
 import earward.block.figure.CaseName;
@@ -117,6 +118,14 @@ final class FiguresText {
         "largest clean modulation (3 %)",
         shown(path, Quantity.CLEAN_DEPTH, TEST)
             + CleanDepthLimit.of(kit.solved()).map(limit -> ", by " + limit.key()).orElse(""));
+    table.row(
+        "the same at the worst of the knobs' turn",
+        shown(path, Quantity.CLEAN_DEPTH, WORST_TURN)
+            + CleanDepthLimit.of(kit.solved(), WORST_TURN)
+                .map(limit -> ", by " + limit.key())
+                .orElse(""));
+    table.row("clipping rule, closed", shown(path, Quantity.CLIPPING_DEPTH, TEST));
+    table.row("diode current reverses at", shown(path, Quantity.REVERSAL_DEPTH, TEST));
     table.row("output at the edge of clipping", shown(path, Quantity.CLIP_WATTS, FULL_OUTPUT));
     table.row("output at 10 %", shown(path, Quantity.TEN_PERCENT_WATTS, FULL_OUTPUT));
     table.row("output of the test signal", shown(path, Quantity.OUTPUT_WATTS, TEST));

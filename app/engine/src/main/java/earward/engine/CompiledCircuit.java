@@ -69,6 +69,20 @@ public final class CompiledCircuit {
   }
 
   /**
+   * The figures of one case, of those that were asked for, while one of its values moves. Each row
+   * starts from the nominal solution, so that their order changes nothing.
+   *
+   * @param values a row of values
+   * @param caseName the case
+   * @param slot what moves, over whatever the case itself says of it
+   * @param at the values that it takes
+   * @throws IllegalArgumentException when there is no such case or slot
+   */
+  public SweptFigures sweep(double[] values, CaseName caseName, String slot, double[] at) {
+    return new Run(plan).sweep(values, caseName, slot, at, figures);
+  }
+
+  /**
    * The small-signal audio response from the envelope of the feed, at no load, to a place, with
    * what the front end leaves of the sidebands.
    *

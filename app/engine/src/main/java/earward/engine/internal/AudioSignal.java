@@ -59,6 +59,12 @@ final class AudioSignal {
     return fundamental > LEAST_VOLTS ? Math.sqrt(sum) / fundamental : Double.NaN;
   }
 
+  /** One harmonic over the fundamental; NaN below a microvolt. */
+  double share(int harmonic, int plus, int minus) {
+    double fundamental = peak(1, plus, minus);
+    return fundamental > LEAST_VOLTS ? peak(harmonic, plus, minus) / fundamental : Double.NaN;
+  }
+
   /** Writes the wave of an unknown; returns the largest magnitude. */
   double wave(int unknown, double[] into, double[] cosine, double[] sine) {
     int samples = into.length;

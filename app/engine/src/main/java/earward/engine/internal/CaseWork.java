@@ -104,6 +104,11 @@ final class CaseWork {
     }
   }
 
+  /** Puts one value in place of what row and case say; right after {@link #begin}. */
+  void set(int slot, double value) {
+    row[slot] = value;
+  }
+
   /** Makes the present solution the start of all later ones. */
   void keep() {
     direct.keep();
@@ -207,10 +212,12 @@ final class CaseWork {
       case SIGNAL -> signal();
       case CLIPPING ->
           loads(LoadView.RATED)
-              && (outputs.atClipping(direct) || fail("no DC solution at the edge of clipping"));
+              && (outputs.atClipping(direct)
+                  || fail("no DC solution at the edge of clipping; worst at " + direct.worst()));
       case ANY_DRIVE ->
           loads(LoadView.LEAST)
-              && (outputs.atWorstHeat(direct) || fail("no DC solution at the worst drive"));
+              && (outputs.atWorstHeat(direct)
+                  || fail("no DC solution at the worst drive; worst at " + direct.worst()));
     };
   }
 
@@ -288,7 +295,7 @@ final class CaseWork {
       return true; // what it would find is what it found
     }
     if (!detection.solveModulated(peakVolts(), depth(), toneRadians())) {
-      return fail("the detector's cycle did not settle");
+      return fail("the cycle did not settle at " + network.drivenNames());
     }
     detection.means(stage().drivenAmperes());
     return true;
@@ -312,7 +319,7 @@ final class CaseWork {
       }
       double shift = parts.peak(peakVolts());
       if (Double.isNaN(shift)) {
-        return fail("the detector did not settle while its winding was peaked");
+        return fail(network.drivenNames() + " did not settle while the winding was peaked");
       }
       around.detuningRadians = shift - feed.detuningRadians(stage());
       if (Math.abs(around.detuningRadians - turned) < SETTLED_CORE * carrierRadians()) {
@@ -350,7 +357,7 @@ final class CaseWork {
       return false;
     }
     return detection.solveCarrier(peakVolts())
-        || fail("the detector did not settle on the bare carrier");
+        || fail(network.drivenNames() + " did not settle on the bare carrier");
   }
 
   /**

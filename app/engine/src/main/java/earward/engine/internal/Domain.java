@@ -41,13 +41,17 @@ final class Domain {
     double tone = work.row[work.network.tone];
     double peak = work.peakVolts();
     if (carrier / tone < LEAST_CARRIER_OVER_TONE || HARMONICS * tone > SHARE_OF_CARRIER * carrier) {
-      return say("the carrier is %.3g times the tone; wanted is at least 40", carrier / tone);
+      return say(
+          feed.seat().name(),
+          "the carrier is %.3g times the tone; wanted is at least 40",
+          carrier / tone);
     }
     if (peak < LEAST_PEAK_VOLTS || peak > MOST_PEAK_VOLTS) {
-      return say("the carrier's peak is %.3g V; wanted is 5 mV to 10 V", peak);
+      return say(feed.seat().name(), "the carrier's peak is %.3g V; wanted is 5 mV to 10 V", peak);
     }
     if (work.depth() > DepthSearch.MOST) {
-      return say("the depth is %.3g %%; wanted is at most 95 %%", 100 * work.depth());
+      return say(
+          feed.seat().name(), "the depth is %.3g %%; wanted is at most 95 %%", 100 * work.depth());
     }
     String tuned = feed.tuned() ? ofTuned(work, feed, carrier) : "";
     return tuned.isEmpty() ? ofDiodes(work, detection, carrier, peak) : tuned;
@@ -58,10 +62,13 @@ final class Domain {
     double quality = feed.tankFarads(work.stage(), radians) * radians * feed.tankOhms(work.stage());
     double detuning = Math.abs(feed.detuningRadians(work.stage())) / (2 * Math.PI);
     if (quality < LEAST_QUALITY) {
-      return say("the winding's Q is %.3g; wanted is at least 5", quality);
+      return say(feed.seat().name(), "the winding's Q is %.3g; wanted is at least 5", quality);
     }
     return detuning > carrier / quality / 2
-        ? say("the winding is detuned by %.3g Hz, more than half its bandwidth", detuning)
+        ? say(
+            feed.seat().name(),
+            "the winding is detuned by %.3g Hz, more than half its bandwidth",
+            detuning)
         : "";
   }
 
@@ -75,21 +82,25 @@ final class Domain {
       double reactance = Math.abs(around.carrierImaginaryOhms[around.index(1, i, i)]);
       double direct = around.audioRealOhms[around.index(0, i, i)];
       if (2 * peak * (1 + work.depth()) > diode.model().breakdownVolts()) {
-        return say("the diode breaks down at %.3g V", diode.model().breakdownVolts());
+        return say(
+            diode.seat().name(), "the diode breaks down at %.3g V", diode.model().breakdownVolts());
       }
       if (carrier * diode.model().recoverySeconds() > MOST_RECOVERY) {
         return say(
+            diode.seat().name(),
             "the diode recovers in %.3g of a carrier cycle",
             carrier * diode.model().recoverySeconds());
       }
       if (direct < LEAST_CYCLES * 2 * Math.PI * reactance) {
         return say(
+            diode.seat().name(),
             "the load's time constant is %.3g carrier cycles; wanted are at least 2",
             direct / (2 * Math.PI * reactance));
       }
       double junction = diode.junctionFarads(stage) * 2 * Math.PI * carrier * reactance;
       if (junction > MOST_JUNCTION_SHARE) {
         return say(
+            diode.seat().name(),
             "the diode's capacitance is %.3g of the reservoir's; wanted is at most a tenth",
             junction);
       }
@@ -97,7 +108,7 @@ final class Domain {
     return "";
   }
 
-  private static String say(String sentence, double number) {
-    return String.format(Locale.ROOT, sentence, number);
+  private static String say(String place, String sentence, double number) {
+    return "at '" + place + "' " + String.format(Locale.ROOT, sentence, number);
   }
 }

@@ -26,6 +26,16 @@ record Fineness(int carrierSamples, int audioSamples) {
     return audioSamples / 2 - 1;
   }
 
+  /** Whether nothing of weight stands beyond the samples of a cycle. */
+  static boolean cycleIsMet(double aliasing) {
+    return aliasing <= MOST_ALIASING;
+  }
+
+  /** Whether nothing of weight stands beyond the samples of an audio period. */
+  static boolean periodIsMet(double topHarmonic) {
+    return topHarmonic <= MOST_TOP_HARMONIC;
+  }
+
   /** What a solved case needs; itself where it is fine enough or nothing finer is to be had. */
   Fineness wanted(double aliasing, double topHarmonic) {
     boolean carrier = aliasing > MOST_ALIASING && carrierSamples < MOST_CARRIER_SAMPLES;

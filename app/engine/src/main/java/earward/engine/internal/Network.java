@@ -10,9 +10,11 @@ import earward.engine.Slot;
 import earward.engine.law.AmplifierLaw;
 import earward.engine.law.FeedLaw;
 import earward.engine.law.Law;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 
@@ -159,6 +161,14 @@ public final class Network {
       }
     }
     return new int[] {node(place), -1};
+  }
+
+  /** The carrier-driven parts, for messages. */
+  String drivenNames() {
+    return Arrays.stream(ports)
+        .map(port -> "'" + port.part() + "'")
+        .distinct()
+        .collect(Collectors.joining(", "));
   }
 
   /** Which part or node an unknown belongs to, for messages. */

@@ -35,6 +35,8 @@ final class Readings {
       case DC_VOLTS,
           AUDIO_RMS_VOLTS,
           DISTORTION,
+          SECOND_HARMONIC,
+          THIRD_HARMONIC,
           CARRIER_RMS_VOLTS,
           SECOND_CARRIER_RMS_VOLTS,
           THIRD_CARRIER_RMS_VOLTS,
@@ -51,7 +53,9 @@ final class Readings {
           A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           BATTERY_HOURS,
           SOUND_DECIBELS,
-          SIGNAL_TO_HUM_DECIBELS ->
+          SIGNAL_TO_HUM_DECIBELS,
+          POWER_STAGE_DEPTH,
+          KNOB_POSITION ->
           NONE;
       default -> ofPart(quantity, part(name.place()));
     };
@@ -98,6 +102,9 @@ final class Readings {
       case AUDIO_RMS_VOLTS ->
           work -> work.solved() ? work.signal.peak(1, plus, minus) / Math.sqrt(2) : Double.NaN;
       case DISTORTION -> work -> work.solved() ? work.signal.distortion(plus, minus) : Double.NaN;
+      case SECOND_HARMONIC ->
+          work -> work.solved() ? work.signal.share(2, plus, minus) : Double.NaN;
+      case THIRD_HARMONIC -> work -> work.solved() ? work.signal.share(3, plus, minus) : Double.NaN;
       case CARRIER_RMS_VOLTS -> work -> CarrierLevels.rmsVolts(work, 1, plus, minus);
       case SECOND_CARRIER_RMS_VOLTS -> work -> CarrierLevels.rmsVolts(work, 2, plus, minus);
       case THIRD_CARRIER_RMS_VOLTS -> work -> CarrierLevels.rmsVolts(work, 3, plus, minus);

@@ -9,6 +9,8 @@ import static earward.block.figure.CaseName.NO_SIGNAL;
 import static earward.block.figure.CaseName.STRONG;
 import static earward.block.figure.CaseName.TEST;
 import static earward.block.figure.CaseName.WEAK;
+import static earward.block.figure.CaseName.WORST_TURN;
+import static earward.block.figure.Quantity.CLIPPING_DEPTH;
 
 import earward.block.Role;
 import earward.block.device.Adaptor;
@@ -79,21 +81,43 @@ final class DerivedFigures {
     return assembly.circuit().parts();
   }
 
-  /** The path lets go where the first of its diodes does. */
+  /** The path lets go where the first of its diodes does, or its power stage. */
   private void leastDepths() {
-    least(Quantity.CLIPPING_DEPTH, DEEPEST);
-    least(Quantity.CLEAN_DEPTH, TEST);
+    put(CircuitBuilder.PATH, CLIPPING_DEPTH, DEEPEST, least(CLIPPING_DEPTH, DEEPEST));
+    double depth = assembly.design().conditions().core().testDepth();
+    boolean turned = !Double.isNaN(least(Quantity.CLEAN_DEPTH, WORST_TURN));
+    for (CaseName caseName : List.of(TEST, WORST_TURN)) {
+      CaseName solvedIn = turned ? caseName : TEST;
+      double power = Double.NaN;
+      for (CircuitPart part : parts()) {
+        if (part.device() instanceof AudioAmplifier) {
+          double overload = get(part.name(), Quantity.OVERLOAD_DECIBELS, solvedIn);
+          power = lesser(power, PowerStageDepth.of(depth, overload));
+        }
+      }
+      double detector = least(Quantity.CLEAN_DEPTH, solvedIn);
+      double clean = Double.isNaN(detector) ? Double.NaN : lesser(detector, power);
+      put(CircuitBuilder.PATH, Quantity.POWER_STAGE_DEPTH, caseName, power);
+      put(CircuitBuilder.PATH, Quantity.CLEAN_DEPTH, caseName, clean);
+      double reversal = least(Quantity.REVERSAL_DEPTH, solvedIn);
+      put(CircuitBuilder.PATH, Quantity.REVERSAL_DEPTH, caseName, reversal);
+      double rule = least(CLIPPING_DEPTH, solvedIn);
+      put(CircuitBuilder.PATH, CLIPPING_DEPTH, caseName, rule);
+    }
   }
 
-  private void least(Quantity quantity, CaseName caseName) {
+  private double least(Quantity quantity, CaseName caseName) {
     double least = Double.NaN;
     for (CircuitPart part : parts()) {
       if (part.device() instanceof Diode) {
-        double depth = get(part.name(), quantity, caseName);
-        least = Double.isNaN(least) ? depth : Math.min(least, Double.isNaN(depth) ? least : depth);
+        least = lesser(least, get(part.name(), quantity, caseName));
       }
     }
-    put(CircuitBuilder.PATH, quantity, caseName, least);
+    return least;
+  }
+
+  private static double lesser(double one, double other) {
+    return Double.isNaN(one) ? other : Double.isNaN(other) ? one : Math.min(one, other);
   }
 
   private void output() {

@@ -37,13 +37,32 @@ final class KitCases {
    * All cases.
    *
    * @param deepestPosition where the knobs stand at the deepest modulation, by slot
+   * @param worstPosition where they stand at the worst of their turn; empty: there is none
    */
-  List<SolveCase> all(Map<String, Double> deepestPosition) {
+  List<SolveCase> all(Map<String, Double> deepestPosition, Map<String, Double> worstPosition) {
     List<SolveCase> cases = new ArrayList<>();
     for (CaseName name : CaseName.ALL) {
       cases.add(named(name, deepestPosition));
     }
+    if (!worstPosition.isEmpty()) {
+      cases.add(new SolveCase(CaseName.WORST_TURN, Drive.SIGNAL, with(test(), worstPosition)));
+    }
     return cases;
+  }
+
+  /** The test signal at each knob position of the scan, in its order. */
+  List<SolveCase> testOverTheTurn() {
+    List<SolveCase> cases = new ArrayList<>();
+    for (Map<String, Double> position : knobs.scan()) {
+      CaseName name = new CaseName("test-turn-" + cases.size());
+      cases.add(new SolveCase(name, Drive.SIGNAL, with(test(), position)));
+    }
+    return cases;
+  }
+
+  /** Slots of the knobs. */
+  List<String> knobSlots() {
+    return knobs.slots();
   }
 
   /** The deepest modulation at each knob position of the scan, in its order. */

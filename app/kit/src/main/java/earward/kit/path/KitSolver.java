@@ -16,9 +16,6 @@ import java.util.Set;
 
 /** Solves an assembled kit in all its cases. */
 public final class KitSolver {
-  /** Difference in depth over the turn below which no position counts as the worst. */
-  private static final double LEAST_SPREAD = 1e-3;
-
   /** What an edit shows at once: the kit at rest, at the test signal and at full output. */
   private static final Set<CaseName> HEADLINE =
       Set.of(CaseName.NO_SIGNAL, CaseName.TEST, CaseName.FULL_OUTPUT);
@@ -27,6 +24,7 @@ public final class KitSolver {
   private static final Set<Quantity> LATER =
       EnumSet.of(
           Quantity.CLEAN_DEPTH,
+          Quantity.REVERSAL_DEPTH,
           Quantity.NOISE_RMS_VOLTS,
           Quantity.A_WEIGHTED_NOISE_RMS_VOLTS,
           Quantity.RIPPLE_REJECTION_DECIBELS,
@@ -76,17 +74,19 @@ public final class KitSolver {
 
   /**
    * The kit compiled once for many solves. The deepest modulation is solved where the knobs are at
-   * their worst: the turn of each is scanned and the least clipping depth kept.
+   * their worst, and so is the largest clean modulation: the turn of each is scanned.
    *
    * @param assembly a complete one
    * @throws CircuitException with a finding when the circuit makes no sense to the engine
    */
   public static CompiledKit compile(Assembly assembly) {
     KitCases cases = new KitCases(assembly);
-    List<FigureName> wanted = WantedFigures.of(assembly, new Places(assembly.circuit()));
-    Map<String, Double> worst = worstPosition(assembly, cases);
-    CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases.all(worst), wanted);
-    return new CompiledKit(assembly, circuit, worst);
+    Map<String, Double> deepest = TurnScan.deepest(assembly, cases);
+    Map<String, Double> worst = TurnScan.test(assembly, cases);
+    List<FigureName> wanted =
+        WantedFigures.of(assembly, new Places(assembly.circuit()), !worst.isEmpty());
+    CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases.all(deepest, worst), wanted);
+    return new CompiledKit(assembly, circuit, deepest, worst);
   }
 
   /**
@@ -103,8 +103,13 @@ public final class KitSolver {
     try {
       KitCases cases = new KitCases(assembly);
       boolean deepest = name.caseName().equals(CaseName.DEEPEST);
+      boolean worst = name.caseName().equals(CaseName.WORST_TURN);
       List<SolveCase> only =
-          cases.all(deepest ? worstPosition(assembly, cases) : Map.of()).stream()
+          cases
+              .all(
+                  deepest ? TurnScan.deepest(assembly, cases) : Map.of(),
+                  worst ? TurnScan.test(assembly, cases) : Map.of())
+              .stream()
               .filter(each -> each.name().equals(name.caseName()))
               .toList();
       CompiledCircuit circuit = Engine.compile(assembly.circuit(), only, List.of(asked.get()));
@@ -118,9 +123,9 @@ public final class KitSolver {
 
   /**
    * The kit compiled for the figures that an edit shows at once: all of {@link #compile} at rest,
-   * at the test signal and at full output, but for the largest clean modulation, which is a search,
-   * noise, hum, and the deviation from the curve wanted. They are the same figures; the rest is
-   * left to a solve that may take longer.
+   * at the test signal and at full output, but for depths that are a search, noise, hum, and the
+   * deviation from the curve wanted. They are the same figures; the rest is left to a solve that
+   * may take longer.
    *
    * @param assembly a complete one
    * @throws CircuitException with a finding when the circuit makes no sense to the engine
@@ -128,14 +133,14 @@ public final class KitSolver {
   public static CompiledKit compileHeadline(Assembly assembly) {
     List<SolveCase> cases =
         new KitCases(assembly)
-            .all(Map.of()).stream().filter(one -> HEADLINE.contains(one.name())).toList();
+            .all(Map.of(), Map.of()).stream().filter(one -> HEADLINE.contains(one.name())).toList();
     List<FigureName> wanted =
-        WantedFigures.of(assembly, new Places(assembly.circuit())).stream()
+        WantedFigures.of(assembly, new Places(assembly.circuit()), false).stream()
             .filter(figure -> HEADLINE.contains(figure.caseName()))
             .filter(figure -> !LATER.contains(figure.quantity()))
             .toList();
     CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases, wanted);
-    return new CompiledKit(assembly, circuit, Map.of());
+    return new CompiledKit(assembly, circuit, Map.of(), Map.of());
   }
 
   /**
@@ -148,37 +153,13 @@ public final class KitSolver {
   public static CompiledKit compileBatch(Assembly assembly) {
     List<SolveCase> cases =
         new KitCases(assembly)
-            .all(Map.of()).stream().filter(one -> BATCH.contains(one.name())).toList();
+            .all(Map.of(), Map.of()).stream().filter(one -> BATCH.contains(one.name())).toList();
     List<FigureName> wanted =
-        WantedFigures.of(assembly, new Places(assembly.circuit())).stream()
+        WantedFigures.of(assembly, new Places(assembly.circuit()), false).stream()
             .filter(figure -> BATCH.contains(figure.caseName()))
             .filter(figure -> BATCH_FIGURES.contains(figure.quantity()))
             .toList();
     CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases, wanted);
-    return new CompiledKit(assembly, circuit, Map.of());
-  }
-
-  private static Map<String, Double> worstPosition(Assembly assembly, KitCases cases) {
-    List<SolveCase> turn = cases.deepestOverTheTurn();
-    List<CaseName> names = turn.stream().map(SolveCase::name).toList();
-    List<FigureName> depths = WantedFigures.ofScan(assembly, names);
-    if (turn.isEmpty() || depths.isEmpty()) {
-      return Map.of();
-    }
-    CompiledCircuit compiled = Engine.compile(assembly.circuit(), turn, depths);
-    double[] row = new double[depths.size()];
-    var unused = compiled.newSolver().solve(compiled.nominalValues(), row);
-    int worst = -1;
-    double most = 0;
-    for (int i = 0; i < row.length; i++) {
-      most = Math.max(most, Double.isNaN(row[i]) ? 0 : row[i]);
-      if (!Double.isNaN(row[i]) && (worst < 0 || row[i] < row[worst])) {
-        worst = i;
-      }
-    }
-    if (worst < 0 || most - row[worst] < LEAST_SPREAD) {
-      return Map.of();
-    }
-    return cases.scan().get(names.indexOf(depths.get(worst).caseName()));
+    return new CompiledKit(assembly, circuit, Map.of(), Map.of());
   }
 }

@@ -24,6 +24,11 @@ final class Knobs {
     }
   }
 
+  /** Slot of each. */
+  List<String> slots() {
+    return List.copyOf(slots);
+  }
+
   /** Every knob at its upper stop. */
   Map<String, Double> allFull() {
     Map<String, Double> full = new LinkedHashMap<>();

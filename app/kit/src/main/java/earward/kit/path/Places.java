@@ -61,6 +61,8 @@ final class Places {
       case DC_VOLTS,
           AUDIO_RMS_VOLTS,
           DISTORTION,
+          SECOND_HARMONIC,
+          THIRD_HARMONIC,
           CARRIER_RMS_VOLTS,
           SECOND_CARRIER_RMS_VOLTS,
           THIRD_CARRIER_RMS_VOLTS,
@@ -103,7 +105,9 @@ final class Places {
           A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           BATTERY_HOURS,
           SOUND_DECIBELS,
-          SIGNAL_TO_HUM_DECIBELS ->
+          SIGNAL_TO_HUM_DECIBELS,
+          POWER_STAGE_DEPTH,
+          KNOB_POSITION ->
           Kind.DERIVED;
     };
   }

@@ -10,6 +10,7 @@ import static earward.block.figure.CaseName.NO_SIGNAL;
 import static earward.block.figure.CaseName.STRONG;
 import static earward.block.figure.CaseName.TEST;
 import static earward.block.figure.CaseName.WEAK;
+import static earward.block.figure.CaseName.WORST_TURN;
 
 import earward.block.check.Check;
 import earward.block.device.Adaptor;
@@ -23,7 +24,6 @@ import earward.block.figure.Quantity;
 import earward.engine.CircuitPart;
 import earward.engine.Probe;
 import earward.engine.Seam;
-import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -36,10 +36,15 @@ final class WantedFigures {
 
   private final Set<FigureName> wanted = new LinkedHashSet<>();
 
-  private WantedFigures() {}
+  /** The cases in which the depths of a detector are searched. */
+  private final List<CaseName> depths;
 
-  static List<FigureName> of(Assembly assembly, Places places) {
-    WantedFigures figures = new WantedFigures();
+  private WantedFigures(boolean worstTurn) {
+    depths = worstTurn ? List.of(TEST, WORST_TURN) : List.of(TEST);
+  }
+
+  static List<FigureName> of(Assembly assembly, Places places, boolean worstTurn) {
+    WantedFigures figures = new WantedFigures(worstTurn);
     assembly.circuit().probes().forEach(figures::atProbe);
     assembly.circuit().seams().forEach(figures::atSeam);
     assembly.circuit().parts().forEach(figures::ofPart);
@@ -52,17 +57,6 @@ final class WantedFigures {
     return List.copyOf(figures.wanted);
   }
 
-  /** What the clipping rule says, for each diode in each case of a scan. */
-  static List<FigureName> ofScan(Assembly assembly, List<CaseName> cases) {
-    List<FigureName> names = new ArrayList<>();
-    for (CircuitPart part : assembly.circuit().parts()) {
-      if (part.device() instanceof Diode) {
-        cases.forEach(c -> names.add(new FigureName(part.name(), Quantity.CLIPPING_DEPTH, c)));
-      }
-    }
-    return names;
-  }
-
   private void add(String place, Quantity quantity, List<CaseName> cases) {
     cases.forEach(caseName -> wanted.add(new FigureName(place, quantity, caseName)));
   }
@@ -71,6 +65,8 @@ final class WantedFigures {
     add(probe.name(), Quantity.DC_VOLTS, POWERED);
     add(probe.name(), Quantity.AUDIO_RMS_VOLTS, SIGNALS);
     add(probe.name(), Quantity.DISTORTION, SIGNALS);
+    add(probe.name(), Quantity.SECOND_HARMONIC, List.of(TEST));
+    add(probe.name(), Quantity.THIRD_HARMONIC, List.of(TEST));
     add(probe.name(), Quantity.CARRIER_RMS_VOLTS, List.of(TEST, STRONG));
     add(probe.name(), Quantity.SECOND_CARRIER_RMS_VOLTS, List.of(TEST));
     add(probe.name(), Quantity.THIRD_CARRIER_RMS_VOLTS, List.of(TEST));
@@ -122,7 +118,13 @@ final class WantedFigures {
     add(name, Quantity.CLIPPING_DEPTH, List.of(TEST, DEEPEST));
     add(name, Quantity.CLIPPING_DEPTH_WITHOUT_CAPACITOR, List.of(TEST, DEEPEST));
     add(name, Quantity.CLIPPING_DEPTH_WITHOUT_COUPLING, List.of(TEST, DEEPEST));
-    add(name, Quantity.CLEAN_DEPTH, List.of(TEST));
+    for (CaseName caseName : depths) {
+      add(name, Quantity.CLEAN_DEPTH, List.of(caseName));
+      add(name, Quantity.REVERSAL_DEPTH, List.of(caseName));
+      add(name, Quantity.CLIPPING_DEPTH, List.of(caseName));
+      add(name, Quantity.CLIPPING_DEPTH_WITHOUT_CAPACITOR, List.of(caseName));
+      add(name, Quantity.CLIPPING_DEPTH_WITHOUT_COUPLING, List.of(caseName));
+    }
     add(name, Quantity.REVERSE_PEAK_VOLTS, List.of(DEEPEST));
     add(name, Quantity.CARRIER_PEAK_VOLTS, List.of(WEAK, TEST, STRONG));
     add(name, Quantity.DETECTION_EFFICIENCY, List.of(TEST));
@@ -138,6 +140,7 @@ final class WantedFigures {
         List.of(NO_SIGNAL, TEST, FULL_OUTPUT, BATTERY_LOW, HIGHEST_SUPPLY));
     add(name, Quantity.PEAK_AMPERES, List.of(FULL_OUTPUT));
     add(name, Quantity.OVERLOAD_DECIBELS, List.of(STRONG));
+    add(name, Quantity.OVERLOAD_DECIBELS, depths);
     ofHeated(name);
   }
 

@@ -51,6 +51,12 @@ public record CaseName(String text) {
    */
   public static final CaseName HOTTEST = new CaseName("hottest");
 
+  /**
+   * The test signal with the volume control where its modulation may be least deep; only in a kit
+   * with a knob that makes a difference. Asked for by the kit itself, not by a block's checks.
+   */
+  public static final CaseName WORST_TURN = new CaseName("worst-turn");
+
   /** All that every design is solved in, in the order in which they are shown. */
   public static final List<CaseName> ALL =
       List.of(

@@ -15,6 +15,10 @@ public enum Quantity {
   AUDIO_RMS_VOLTS("audio-rms-volts", Unit.VOLT),
   /** Harmonics 2 to 10 over the fundamental: of detector and clipping IC, no other transistor. */
   DISTORTION("distortion", Unit.FRACTION),
+  /** Second harmonic of the test tone over its fundamental. */
+  SECOND_HARMONIC("second-harmonic", Unit.FRACTION),
+  /** Third harmonic of the test tone over its fundamental. */
+  THIRD_HARMONIC("third-harmonic", Unit.FRACTION),
   CARRIER_RMS_VOLTS("carrier-rms-volts", Unit.VOLT),
   SECOND_CARRIER_RMS_VOLTS("second-carrier-rms-volts", Unit.VOLT),
   THIRD_CARRIER_RMS_VOLTS("third-carrier-rms-volts", Unit.VOLT),
@@ -46,8 +50,12 @@ public enum Quantity {
   CLIPPING_DEPTH_WITHOUT_COUPLING("clipping-depth-without-coupling", Unit.FRACTION),
   /** Depth at which a diode's mean current first reverses, solved. */
   REVERSAL_DEPTH("reversal-depth", Unit.FRACTION),
-  /** Depth of 3 % distortion, solved. */
+  /** Depth of 3 % distortion, solved; of the path the lesser of detector and power stage. */
   CLEAN_DEPTH("clean-depth", Unit.FRACTION),
+  /** Depth at which the power stage clips so far that it distorts by 3 %. */
+  POWER_STAGE_DEPTH("power-stage-depth", Unit.FRACTION),
+  /** Where a knob stands, as a share of its turn. */
+  KNOB_POSITION("knob-position", Unit.FRACTION),
   /** Supply voltage across an amplifier IC, rails at the case's state. */
   SUPPLY_VOLTS("supply-volts", Unit.VOLT),
   /** Of the output of an amplifier IC. */

@@ -15,9 +15,10 @@
  * <tr><td>node, test point, rail</td><td>dc-volts</td><td>all</td></tr>
  * <tr><td></td><td>audio-rms-volts, carrier-rms-volts, second- and third-carrier-rms-volts</td>
  *   <td>signal; 0 in the others</td></tr>
- * <tr><td></td><td>distortion: of the detector and of a clipping amplifier IC. A transistor that
- *   the carrier does not drive and an op-amp are linear about their rest: they add none, so this
- *   says nothing of crossover</td><td>signal, and only where more than 1 µV of tone arrives</td></tr>
+ * <tr><td></td><td>distortion, second-harmonic, third-harmonic: of the detector and of a clipping
+ *   amplifier IC. A transistor that the carrier does not drive and an op-amp are linear about their
+ *   rest: they add none, so this says nothing of crossover</td><td>signal, and only where more than
+ *   1 µV of tone arrives</td></tr>
  * <tr><td></td><td>low-edge-hertz, high-edge-hertz: of the way from the front end's sidebands to
  *   there</td><td>signal; none where nothing makes an edge</td></tr>
  * <tr><td></td><td>response-deviation-decibels, response-deviation-hertz: largest deviation from
@@ -54,7 +55,9 @@
  *   loading-loss-decibels</td><td>all</td></tr>
  * <tr><td></td><td>headroom-decibels: behind the detector, in a kit that ends in an amplifier
  *   IC</td><td>test, strong</td></tr>
- * <tr><td>the whole path, not a block's to check</td><td>output-rms-volts, output-watts,
+ * <tr><td>potentiometer that a listener turns</td><td>knob-position, where it is at its
+ *   worst</td><td>deepest, worst-turn; not a block's to check</td></tr>
+ * <tr><td>the whole path, not a block's to check</td><td>power-stage-depth, output-rms-volts, output-watts,
  *   sound-decibels, signal-to-noise-decibels and a-weighted-signal-to-noise-decibels (also of the
  *   detector's exit and of the seams behind it), signal-to-hum-decibels</td><td></td></tr>
  * </table>

@@ -49,6 +49,8 @@ final class FigurePlaces {
       case DC_VOLTS,
           AUDIO_RMS_VOLTS,
           DISTORTION,
+          SECOND_HARMONIC,
+          THIRD_HARMONIC,
           CARRIER_RMS_VOLTS,
           SECOND_CARRIER_RMS_VOLTS,
           THIRD_CARRIER_RMS_VOLTS,
@@ -102,7 +104,9 @@ final class FigurePlaces {
           SIGNAL_TO_NOISE_DECIBELS,
           A_WEIGHTED_SIGNAL_TO_NOISE_DECIBELS,
           SOUND_DECIBELS,
-          SIGNAL_TO_HUM_DECIBELS ->
+          SIGNAL_TO_HUM_DECIBELS,
+          POWER_STAGE_DEPTH,
+          KNOB_POSITION ->
           Optional.of(
               "at '" + place + "'; it is of the whole path, which is not a block's to check");
     };

@@ -148,9 +148,12 @@ final class CoverFigures {
     add(rows, "figures.distortion", Quantity.DISTORTION, CaseName.TEST);
     band(rows);
     add(rows, "figures.clean-depth", Quantity.CLEAN_DEPTH, CaseName.TEST);
+    worstTurn(rows);
     add(rows, "figures.clipping-depth", Quantity.CLIPPING_DEPTH, CaseName.DEEPEST);
     add(rows, "figures.headroom", Quantity.HEADROOM_DECIBELS, CaseName.TEST);
     noise(rows);
+    add(rows, "figures.hum", Quantity.SIGNAL_TO_HUM_DECIBELS, CaseName.TEST);
+    loop(rows);
     add(rows, "figures.current", Quantity.SUPPLY_AMPERES, CaseName.NO_SIGNAL);
     life(rows);
     if (rows.isEmpty()) {
@@ -180,6 +183,28 @@ final class CoverFigures {
               words.text("figures.band"),
               List.of(Amount.of(low, Unit.HERTZ), Amount.of(high, Unit.HERTZ)),
               ""));
+    }
+  }
+
+  /** Only where the turn of a knob makes a difference. */
+  private void worstTurn(List<KeyFigure> rows) {
+    boolean turned =
+        figures.all().keySet().stream()
+            .anyMatch(
+                name ->
+                    name.quantity() == Quantity.KNOB_POSITION
+                        && name.caseName().equals(CaseName.WORST_TURN));
+    if (turned) {
+      add(rows, "figures.clean-depth-turn", Quantity.CLEAN_DEPTH, CaseName.WORST_TURN);
+    }
+  }
+
+  /** Only where the loop through the supply could sustain itself at all. */
+  private void loop(List<KeyFigure> rows) {
+    OptionalDouble margin =
+        figures.find(PATH, Quantity.RAIL_LOOP_MARGIN_DECIBELS, CaseName.BATTERY_LOW);
+    if (margin.isPresent() && Double.isFinite(margin.getAsDouble())) {
+      rows.add(amount("figures.rail-loop", margin.getAsDouble(), Unit.DECIBEL));
     }
   }
 
