@@ -41,6 +41,8 @@ final class OpAmpLaw extends Law {
   void stampDirect(DirectStage stage, int[] nodes) {
     stage.conductance(nodes[0], nodes[1], 1 / model.inputOhms());
     double on = on(stage, nodes);
+    stage.current(nodes[0], nodes[GROUND], on * model.biasAmperes());
+    stage.current(nodes[1], nodes[GROUND], on * model.biasAmperes());
     stage.current(nodes[SUPPLY], nodes[GROUND], on * value(stage, 2));
     if (on > 0 && on < 1) {
       double slope = value(stage, 2) * 2 / model.leastVolts();

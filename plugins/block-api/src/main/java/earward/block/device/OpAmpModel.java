@@ -11,7 +11,7 @@ package earward.block.device;
  * @param lostVoltsUp how near the output comes to the supply, at least 0
  * @param lostVoltsDown how near it comes to ground, at least 0
  * @param quiescentAmperes supply current at rest, at least 0
- * @param biasAmperes input bias current, at least 0
+ * @param biasAmperes current that each input takes, at least 0
  * @param noiseVoltsPerRootHertz input noise density, at least 0
  * @param leastVolts lowest supply
  * @param mostVolts absolute maximum supply
