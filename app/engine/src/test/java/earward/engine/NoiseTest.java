@@ -189,4 +189,43 @@ class NoiseTest {
     double rest = detectorNoise(2e-3, Drive.NO_SIGNAL, 50);
     assertThat(detectorNoise(2e-3, Drive.SIGNAL, 50)).isCloseTo(rest, within(rest * 5e-3));
   }
+
+  @Test
+  void theNoiseOfTheSourceBesideTheCarrierIsDetected() {
+    // At 3 V the diode follows the envelope, and the pulses through a source of 2 kΩ are damped by
+    // it: what is left is thermal noise, mostly of the source in phase with the carrier, 2·4kTR of
+    // envelope (Rice 1945); 2q times the mean current alone would make four times that.
+    double more = detectorNoise(3, Drive.SIGNAL, 2000);
+    double detected = Math.sqrt(2 * 4 * BOLTZMANN * 298.15 * 2000 * 4900);
+    assertThat(more / detected).isBetween(0.5, 2.0);
+  }
+
+  @Test
+  void withoutSourceResistanceTheShotNoiseIsThatOfTheMeanCurrent() {
+    // 2q(J + 2Is) into the port's own conductance (van der Ziel), nothing damping the pulses.
+    double[] figures =
+        new TrialCircuit()
+            .generator(1e-3, "in")
+            .diode("detector.d1", 1e-7, 1, 1e-3, "in", "out")
+            .resistor("detector.r", 22e3, "out", Circuit.GROUND)
+            .capacitor("detector.c", 1e-9, "out", Circuit.GROUND)
+            .solved(
+                CaseName.TEST,
+                Drive.SIGNAL,
+                Map.of(
+                    Slot.CARRIER_PEAK_VOLTS, 0.05,
+                    Slot.DEPTH, 0.3,
+                    Slot.LOWEST_TONE_HERTZ, 50.0,
+                    Slot.HIGHEST_TONE_HERTZ, 150.0))
+            .want("out", Quantity.NOISE_RMS_VOLTS)
+            .want("out", Quantity.DC_VOLTS)
+            .figures();
+    double vt = BOLTZMANN * 298.15 / CHARGE;
+    double mean = figures[1] / 22e3;
+    // a small drive: J + Is grows with the mean, and its slope to the port's voltage is (J + Is)/Vt
+    double siemens = (mean + 1e-7) / vt + 1 / 22e3;
+    double square =
+        (2 * CHARGE * (mean + 2e-7) + 4 * BOLTZMANN * 298.15 / 22e3) / siemens / siemens * 100;
+    assertThat(figures[0]).isCloseTo(Math.sqrt(square), within(0.02 * Math.sqrt(square)));
+  }
 }

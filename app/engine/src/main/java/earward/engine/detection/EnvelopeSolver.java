@@ -154,6 +154,16 @@ public final class EnvelopeSolver {
     return share;
   }
 
+  /** Samples of a carrier cycle. */
+  public int carrierSamples() {
+    return cycle.samples;
+  }
+
+  /** Voltage across a port's junction at a sample of the first audio sample's cycle, in V. */
+  public double junctionVolts(int port, int carrierSample) {
+    return junctions[port * cycle.samples + carrierSample];
+  }
+
   /** Mean over the audio period of the voltage across a port's junction, in V. */
   public double meanVolts(int port) {
     double sum = 0;

@@ -9,8 +9,7 @@ import org.jspecify.annotations.Nullable;
 
 /**
  * The back end's own noise at the places of one case, by one adjoint solve for each place and
- * frequency. Detector diodes make shot noise by their solved mean current; what the feed's own
- * resistance makes beside the carrier, in phase with it, is detected as modulation is.
+ * frequency.
  *
  * <p>Integrated over the logarithm of frequency by Gauss and Legendre's four points in panels of
  * half a decade at most. Mutable, for one thread; makes no garbage.
@@ -29,8 +28,7 @@ final class Noise {
   private final int[] minus;
   private final double[] flat;
   private final double[] weighted;
-  private final double[] columnRe;
-  private final double[] columnIm;
+  private final PortNoise driven;
   private final NoiseStage sum;
   private boolean done;
 
@@ -40,14 +38,14 @@ final class Noise {
     minus = plan.noiseMinus();
     flat = new double[plus.length];
     weighted = new double[plus.length];
-    columnRe = new double[network.ports.length];
-    columnIm = new double[network.ports.length];
+    driven = new PortNoise(network.ports.length);
     sum = new NoiseStage(solver.stage());
   }
 
   /** Everything is to be worked out anew. */
   void clear() {
     done = false;
+    driven.clear();
   }
 
   /** Noise between the nodes of a place, rms in V; NaN where the case has no solution. */
@@ -123,69 +121,8 @@ final class Noise {
       law.noise(sum);
     }
     if (detection != null) {
-      ports(work, detection);
-      feed(work);
+      driven.add(work, detection, sum);
     }
     return sum.squareVoltsPerHertz();
-  }
-
-  /** Noise of each driven device by its solved mean currents, and of each series resistance. */
-  private void ports(CaseWork work, Detection detection) {
-    int ports = work.network.ports.length;
-    for (int j = 0; j < ports; j++) {
-      device(work, detection, j);
-      for (int i = 0; i < ports; i++) {
-        columnRe[i] = work.small.admittanceRe[i * ports + j];
-        columnIm[i] = work.small.admittanceIm[i * ports + j];
-      }
-      double volts = sum.fourKelvinJoules() * detection.around.seriesOhms[j];
-      answer(work, columnRe, columnIm, volts);
-    }
-  }
-
-  private void device(CaseWork work, Detection detection, int j) {
-    Port port = work.network.ports[j];
-    if (port.which() > 0) {
-      return;
-    }
-    double amperes = detection.carrierOnly.audioReal[j];
-    if (port.law().ports() > 1) {
-      double across = -detection.carrierOnly.audioReal[j + 1];
-      amperes -= across;
-      work.small.junctionColumn(j, 1, columnRe, columnIm);
-      answer(work, columnRe, columnIm, port.law().acrossNoise(work.stage(), across));
-      work.small.junctionColumn(j, 0, columnRe, columnIm);
-    } else {
-      work.small.junctionColumn(j, 0, columnRe, columnIm);
-    }
-    double volts =
-        work.stage().volts(port.anode(work.stage()))
-            - work.stage().volts(port.cathode(work.stage()))
-            - detection.carrierOnly.audioReal[j] * detection.around.seriesOhms[j];
-    answer(work, columnRe, columnIm, port.law().portNoise(work.stage(), amperes, volts));
-  }
-
-  /** Both sidebands of the feed's own noise fold onto one another: 2 · 4kTR of in-phase drive. */
-  private void feed(CaseWork work) {
-    if (work.network.feed != null) {
-      double ohms = work.network.feed.sidebandOhms(work.stage());
-      double depth = 2 * sum.fourKelvinJoules() * ohms / (work.peakVolts() * work.peakVolts());
-      answer(work, work.small.drivenRe, work.small.drivenIm, depth);
-    }
-  }
-
-  /** Adds a noise that drives currents through all ports at once. */
-  private void answer(CaseWork work, double[] amperesRe, double[] amperesIm, double density) {
-    double real = 0;
-    double imaginary = 0;
-    for (int i = 0; i < work.network.ports.length; i++) {
-      int anode = work.network.ports[i].anode(work.stage());
-      int cathode = work.network.ports[i].cathode(work.stage());
-      double r = sum.answerRe(anode, cathode);
-      double m = sum.answerIm(anode, cathode);
-      real += r * amperesRe[i] - m * amperesIm[i];
-      imaginary += r * amperesIm[i] + m * amperesRe[i];
-    }
-    sum.known(density, real, imaginary);
   }
 }

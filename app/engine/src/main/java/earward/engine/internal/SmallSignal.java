@@ -16,6 +16,11 @@ final class SmallSignal {
   final double[] admittanceIm;
   final double[] drivenRe;
   final double[] drivenIm;
+
+  /** Currents in shorted ports for one ampere drawn from a tuned feed: real, then imaginary. */
+  final double[] drawnRe;
+
+  final double[] drawnIm;
   private final double[] heldRe;
   private final double[] heldIm;
   private final ComplexLu series;
@@ -28,8 +33,10 @@ final class SmallSignal {
     admittanceIm = new double[ports * ports];
     drivenRe = new double[ports];
     drivenIm = new double[ports];
-    heldRe = new double[2 * (ports + 1)];
-    heldIm = new double[2 * (ports + 1)];
+    drawnRe = new double[2 * ports];
+    drawnIm = new double[2 * ports];
+    heldRe = new double[2 * (ports + 3)];
+    heldIm = new double[2 * (ports + 3)];
     series = new ComplexLu(ports);
     columnRe = new double[ports];
     columnIm = new double[ports];
@@ -45,27 +52,33 @@ final class SmallSignal {
   void fill(CarrierSurroundings around, EnvelopeSolver solved, double peakVolts, double radians) {
     held(around, solved, peakVolts, radians);
     for (int i = 0; i < ports; i++) {
-      for (int j = 0; j <= ports; j++) {
+      for (int j = 0; j < ports + 3; j++) {
         double real = j < ports ? solved.slope(0, i, j) : 0;
         double imaginary = 0;
         for (int e = 0; e < 2; e++) {
           double slope = solved.slope(0, i, ports + e);
-          real += slope * heldRe[e * (ports + 1) + j];
-          imaginary += slope * heldIm[e * (ports + 1) + j];
+          real += slope * heldRe[e * (ports + 3) + j];
+          imaginary += slope * heldIm[e * (ports + 3) + j];
         }
         if (j < ports) {
           admittanceRe[i * ports + j] = real;
           admittanceIm[i * ports + j] = imaginary;
-        } else {
+        } else if (j == ports) {
           drivenRe[i] = real;
           drivenIm[i] = imaginary;
+        } else {
+          drawnRe[(j - ports - 1) * ports + i] = real;
+          drawnIm[(j - ports - 1) * ports + i] = imaginary;
         }
       }
     }
     addSeries(around);
   }
 
-  /** How the held quantity (real, imaginary) answers to each port voltage and to the drive. */
+  /**
+   * How the held quantity (real, imaginary) answers to each port voltage, to the drive and to what
+   * is drawn from it.
+   */
   private void held(
       CarrierSurroundings around, EnvelopeSolver solved, double peakVolts, double radians) {
     Arrays.fill(heldRe, 0);
@@ -86,17 +99,21 @@ final class SmallSignal {
     double detRe = a * d - rate * rate - b * c;
     double detIm = rate * (a + d);
     double norm = detRe * detRe + detIm * detIm;
-    for (int j = 0; j <= ports; j++) {
-      double first = j < ports ? -ohms * solved.slope(0, ports, j) : peakVolts;
+    for (int j = 0; j < ports + 3; j++) {
+      double first = j < ports ? -ohms * solved.slope(0, ports, j) : 0;
       double second = j < ports ? -ohms * solved.slope(0, ports + 1, j) : 0;
+      if (j >= ports) {
+        first = j == ports ? peakVolts : j == ports + 1 ? -ohms : 0;
+        second = j == ports + 2 ? -ohms : 0;
+      }
       double topRe = d * first - b * second;
       double topIm = rate * first;
       double lowRe = a * second - c * first;
       double lowIm = rate * second;
       heldRe[j] = (topRe * detRe + topIm * detIm) / norm;
       heldIm[j] = (topIm * detRe - topRe * detIm) / norm;
-      heldRe[ports + 1 + j] = (lowRe * detRe + lowIm * detIm) / norm;
-      heldIm[ports + 1 + j] = (lowIm * detRe - lowRe * detIm) / norm;
+      heldRe[ports + 3 + j] = (lowRe * detRe + lowIm * detIm) / norm;
+      heldIm[ports + 3 + j] = (lowIm * detRe - lowRe * detIm) / norm;
     }
   }
 
