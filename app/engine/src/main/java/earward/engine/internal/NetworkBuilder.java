@@ -7,6 +7,7 @@ import earward.block.device.Device;
 import earward.block.device.Diode;
 import earward.block.device.FieldEffectTransistor;
 import earward.block.device.Pin;
+import earward.block.device.Potentiometer;
 import earward.block.device.Terminal;
 import earward.engine.Circuit;
 import earward.engine.CircuitPart;
@@ -143,6 +144,9 @@ final class NetworkBuilder implements Laws.Surroundings {
    */
   private static Terminal opposite(Device device, Terminal terminal) {
     List<Terminal> terminals = device.terminals();
+    if (device instanceof Potentiometer) {
+      return exchanged(terminal);
+    }
     if (!(device instanceof AudioAmplifier)) {
       return terminals.get(terminals.size() - 1 - terminals.indexOf(terminal));
     }
@@ -154,6 +158,14 @@ final class NetworkBuilder implements Laws.Surroundings {
     int across = (own - 1 + places / 2) % places + 1;
     Optional<Pin> there = pins.stream().filter(p -> p.number() == across).findFirst();
     return there.map(Pin::terminal).orElse(terminal);
+  }
+
+  /** The outer ends of a track change places; wiper and tap stay. */
+  private static Terminal exchanged(Terminal terminal) {
+    if (terminal == Terminal.TOP) {
+      return Terminal.BOTTOM;
+    }
+    return terminal == Terminal.BOTTOM ? Terminal.TOP : terminal;
   }
 
   @Override

@@ -77,8 +77,8 @@ public final class Laws {
       return new CapacitorLaw(seat, capacitor.dielectric().polarised());
     } else if (device instanceof Inductor) {
       return new InductorLaw(seat);
-    } else if (device instanceof Potentiometer) {
-      return new PotentiometerLaw(seat);
+    } else if (device instanceof Potentiometer potentiometer) {
+      return new PotentiometerLaw(seat, potentiometer.tapped());
     } else if (device instanceof Loudspeaker loudspeaker) {
       return new LoudspeakerLaw(seat, loudspeaker.model().ratedOhms());
     } else if (device instanceof CarrierGenerator) {

@@ -2,57 +2,111 @@ package earward.engine.law;
 
 import earward.block.device.Taper;
 
-/** A track with a wiper; terminals TOP, WIPER, BOTTOM. */
+/**
+ * A track with a wiper and perhaps a tap; terminals TOP, WIPER, BOTTOM, TAP. Which of wiper and tap
+ * is the upper one is a matter of values: all pairs of ends that may be neighbours are stamped,
+ * some with nothing between them.
+ */
 final class PotentiometerLaw extends Law {
-  PotentiometerLaw(Seat seat) {
+  private static final int TRACK_OHMS = 0;
+  private static final int AT_HALF = 1;
+  private static final int END_OHMS = 2;
+  private static final int POSITION = 3;
+  private static final int TAP_FRACTION = 4;
+
+  /** Ends of the pieces of track; the first two are all there is without a tap. */
+  private static final int[][] PIECES = {{0, 1}, {1, 2}, {0, 3}, {3, 2}, {1, 3}};
+
+  private final boolean tapped;
+  private final int pieces;
+
+  PotentiometerLaw(Seat seat, boolean tapped) {
     super(seat);
+    this.tapped = tapped;
+    pieces = tapped ? PIECES.length : 2;
   }
 
-  private double upperOhms(double track, double atHalf, double end, double position) {
-    double below = Taper.fractionBelowWiper(Math.min(1, Math.max(0, position)), atHalf);
-    return Math.max(end, track * (1 - below));
+  /** Conductance of a piece, in S; 0 for one that lies apart. */
+  private static double siemens(
+      int piece, double track, double end, double below, double tapBelow, boolean tapped) {
+    boolean wiperAbove = !tapped || below >= tapBelow;
+    double share =
+        switch (piece) {
+          case 0 -> wiperAbove ? 1 - below : Double.NaN;
+          case 1 -> tapped && wiperAbove ? Double.NaN : below;
+          case 2 -> wiperAbove ? Double.NaN : 1 - tapBelow;
+          case 3 -> wiperAbove ? tapBelow : Double.NaN;
+          default -> Math.abs(below - tapBelow);
+        };
+    return Double.isNaN(share) ? 0 : 1 / Math.max(end, track * share);
   }
 
-  private double lowerOhms(double track, double atHalf, double end, double position) {
-    double below = Taper.fractionBelowWiper(Math.min(1, Math.max(0, position)), atHalf);
-    return Math.max(end, track * below);
+  private double siemens(int piece, DirectStage stage) {
+    double tap = tapped ? value(stage, TAP_FRACTION) : 0;
+    return siemens(
+        piece,
+        value(stage, TRACK_OHMS),
+        Math.max(InductorLaw.LEAST_OHMS, value(stage, END_OHMS)),
+        below(value(stage, POSITION), value(stage, AT_HALF)),
+        tap,
+        tapped);
+  }
+
+  private double siemens(int piece, AlternatingStage stage) {
+    double tap = tapped ? value(stage, TAP_FRACTION) : 0;
+    return siemens(
+        piece,
+        value(stage, TRACK_OHMS),
+        Math.max(InductorLaw.LEAST_OHMS, value(stage, END_OHMS)),
+        below(value(stage, POSITION), value(stage, AT_HALF)),
+        tap,
+        tapped);
+  }
+
+  private double siemens(int piece, WaveformStage stage) {
+    double tap = tapped ? value(stage, TAP_FRACTION) : 0;
+    return siemens(
+        piece,
+        value(stage, TRACK_OHMS),
+        Math.max(InductorLaw.LEAST_OHMS, value(stage, END_OHMS)),
+        below(value(stage, POSITION), value(stage, AT_HALF)),
+        tap,
+        tapped);
+  }
+
+  private static double below(double position, double atHalf) {
+    return Taper.fractionBelowWiper(Math.min(1, Math.max(0, position)), atHalf);
   }
 
   @Override
   void stampDirect(DirectStage stage, int[] nodes) {
-    double end = Math.max(InductorLaw.LEAST_OHMS, value(stage, 2));
-    double upper = upperOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    double lower = lowerOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    stage.conductance(nodes[0], nodes[1], 1 / upper);
-    stage.conductance(nodes[1], nodes[2], 1 / lower);
+    for (int k = 0; k < pieces; k++) {
+      stage.conductance(nodes[PIECES[k][0]], nodes[PIECES[k][1]], siemens(k, stage));
+    }
   }
 
   @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
-    double end = Math.max(InductorLaw.LEAST_OHMS, value(stage, 2));
-    double upper = upperOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    double lower = lowerOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    stage.admittance(nodes[0], nodes[1], 1 / upper, 0);
-    stage.admittance(nodes[1], nodes[2], 1 / lower, 0);
+    for (int k = 0; k < pieces; k++) {
+      stage.admittance(nodes[PIECES[k][0]], nodes[PIECES[k][1]], siemens(k, stage), 0);
+    }
   }
 
   @Override
   void addNoise(NoiseStage noise, int[] nodes) {
-    AlternatingStage stage = noise.stage();
-    double end = Math.max(InductorLaw.LEAST_OHMS, value(stage, 2));
-    double upper = upperOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    double lower = lowerOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    noise.thermal(nodes[0], nodes[1], 1 / upper);
-    noise.thermal(nodes[1], nodes[2], 1 / lower);
+    for (int k = 0; k < pieces; k++) {
+      double siemens = siemens(k, noise.stage());
+      if (siemens > 0) {
+        noise.thermal(nodes[PIECES[k][0]], nodes[PIECES[k][1]], siemens);
+      }
+    }
   }
 
   @Override
   void stampWaveform(WaveformStage stage, int[] nodes) {
-    double end = Math.max(InductorLaw.LEAST_OHMS, value(stage, 2));
-    double upper = upperOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    double lower = lowerOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    stage.conductance(nodes[0], nodes[1], 1 / upper);
-    stage.conductance(nodes[1], nodes[2], 1 / lower);
+    for (int k = 0; k < pieces; k++) {
+      stage.conductance(nodes[PIECES[k][0]], nodes[PIECES[k][1]], siemens(k, stage));
+    }
   }
 
   @Override
@@ -60,11 +114,11 @@ final class PotentiometerLaw extends Law {
     if (isOpen(stage)) {
       return 0;
     }
-    double end = Math.max(InductorLaw.LEAST_OHMS, value(stage, 2));
-    double upper = upperOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    double lower = lowerOhms(value(stage, 0), value(stage, 1), end, value(stage, 3));
-    double above = stage.volts(node(0)) - stage.volts(node(1));
-    double below = stage.volts(node(1)) - stage.volts(node(2));
-    return above * above / upper + below * below / lower;
+    double watts = 0;
+    for (int k = 0; k < pieces; k++) {
+      double volts = stage.volts(node(PIECES[k][0])) - stage.volts(node(PIECES[k][1]));
+      watts += volts * volts * siemens(k, stage);
+    }
+    return watts;
   }
 }

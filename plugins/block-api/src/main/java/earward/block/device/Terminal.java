@@ -14,7 +14,7 @@ public enum Terminal {
   TOP,
   /** Slider of a potentiometer. */
   WIPER,
-  /** Tap of a winding. */
+  /** Tap of a winding or of a track. */
   TAP,
   /** Lower end of a track or a winding. */
   BOTTOM,

@@ -4,9 +4,13 @@ import earward.block.device.Potentiometer;
 import earward.block.device.Terminal;
 import earward.drawing.internal.element.Box;
 import earward.drawing.internal.element.Stroke.Style;
+import java.util.ArrayList;
 import java.util.List;
 
-/** The potentiometer, upright: TOP at (0, 0), BOTTOM ten cells below, the wiper at the side. */
+/**
+ * The potentiometer, upright: TOP at (0, 0), BOTTOM ten cells below, the wiper at the side, a tap
+ * at the other.
+ */
 final class Tracks {
   static final int WIPER_DOWN_CELLS = 6;
   static final int LENGTH_CELLS = 10;
@@ -27,24 +31,33 @@ final class Tracks {
     } else {
       pen.lead(out, middle, sign * 8, middle).arrow(out, middle, sign * 3.8, middle, 5.5);
     }
+    if (device.tapped()) {
+      pen.lead(-out, middle, -sign * 3.5, middle);
+    }
     Box body =
         wiperLeft
             ? new Box(-9.3, middle - 10, 3.5, middle + 10)
             : new Box(-3.5, middle - 10, 9.3, middle + 10);
-    Form bare =
-        new Form(
-            pen.strokes(),
-            body,
+    List<Lead> leads =
+        new ArrayList<>(
             List.of(
                 new Lead(Terminal.TOP.name(), 0, 0, Side.UP),
-                new Lead(
-                    Terminal.WIPER.name(),
-                    wiperLeft ? -WIPER_OUT_CELLS : WIPER_OUT_CELLS,
-                    WIPER_DOWN_CELLS,
-                    wiperLeft ? Side.LEFT : Side.RIGHT),
-                new Lead(Terminal.BOTTOM.name(), 0, LENGTH_CELLS, Side.DOWN)),
-            List.of());
+                side(Terminal.WIPER, wiperLeft),
+                new Lead(Terminal.BOTTOM.name(), 0, LENGTH_CELLS, Side.DOWN)));
+    if (device.tapped()) {
+      leads.add(side(Terminal.TAP, !wiperLeft));
+    }
+    Form bare = new Form(pen.strokes(), body, leads, List.of());
+    boolean under = !wiperLeft || device.tapped();
     return bare.with(
-        lettering.beside(label, wiperLeft ? 7 : 12.5, middle + (wiperLeft ? 0 : 13.5), ""));
+        lettering.beside(label, wiperLeft ? 7 : 12.5, middle + (under ? 13.5 : 0), ""));
+  }
+
+  private static Lead side(Terminal terminal, boolean left) {
+    return new Lead(
+        terminal.name(),
+        left ? -WIPER_OUT_CELLS : WIPER_OUT_CELLS,
+        WIPER_DOWN_CELLS,
+        left ? Side.LEFT : Side.RIGHT);
   }
 }

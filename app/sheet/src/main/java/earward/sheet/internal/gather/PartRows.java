@@ -85,15 +85,8 @@ final class PartRows {
           to(block, part, Terminal.B));
     } else if (device instanceof Diode) {
       return words.text("fit.diode", "cathode", to(block, part, Terminal.CATHODE));
-    } else if (device instanceof Potentiometer) {
-      return words.text(
-          "fit.potentiometer",
-          "top",
-          to(block, part, Terminal.TOP),
-          "wiper",
-          to(block, part, Terminal.WIPER),
-          "bottom",
-          to(block, part, Terminal.BOTTOM));
+    } else if (device instanceof Potentiometer track) {
+      return track(block, part, track.tapped());
     } else if (device instanceof Battery || device instanceof Adaptor) {
       return words.text(
           "fit.supply",
@@ -117,6 +110,24 @@ final class PartRows {
               words.numbers().text(amplifier.heatSinkKelvinPerWatt(), Unit.KELVIN_PER_WATT));
     }
     return "";
+  }
+
+  private String track(PlacedBlock block, WiredPart part, boolean tapped) {
+    String top = to(block, part, Terminal.TOP);
+    String wiper = to(block, part, Terminal.WIPER);
+    String bottom = to(block, part, Terminal.BOTTOM);
+    return tapped
+        ? words.text(
+            "fit.tapped-potentiometer",
+            "top",
+            top,
+            "wiper",
+            wiper,
+            "bottom",
+            bottom,
+            "tap",
+            to(block, part, Terminal.TAP))
+        : words.text("fit.potentiometer", "top", top, "wiper", wiper, "bottom", bottom);
   }
 
   private String to(PlacedBlock block, WiredPart part, Terminal terminal) {
