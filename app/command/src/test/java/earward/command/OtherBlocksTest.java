@@ -84,4 +84,15 @@ class OtherBlocksTest {
     ReviewedKit kit = solved(design);
     assertThat(figure(kit, "phones.jack", Quantity.AUDIO_RMS_VOLTS)).isGreaterThan(1e-3);
   }
+
+  @Test
+  void theLoudnessControlStandsForTheVolumeControl() {
+    KitDesign design =
+        hayloft()
+            .withSetting("detector", "load", "resistor")
+            .withoutBlock("volume")
+            .addBlock(DETECTOR + 2, BlockEntry.of("volume", "volume.loudness"));
+    ReviewedKit kit = solved(design);
+    assertThat(figure(kit, "volume.wiper", Quantity.AUDIO_RMS_VOLTS)).isGreaterThan(1e-3);
+  }
 }
