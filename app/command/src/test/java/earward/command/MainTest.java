@@ -23,10 +23,11 @@ class MainTest {
     Ran ran = Ran.earward("--help");
     assertThat(ran.code()).isZero();
     assertThat(ran.results())
-        .contains("sheet", "figures", "review", "blocks", "desktop", "Exit code: 0");
+        .contains("sheet", "figures", "review", "prove", "blocks", "desktop", "Exit code: 0");
     assertThat(ran.results()).doesNotContain("picocli", "${");
     assertThat(ran.messages()).isEmpty();
-    for (String command : new String[] {"sheet", "figures", "review", "blocks", "desktop"}) {
+    for (String command :
+        new String[] {"sheet", "figures", "review", "prove", "blocks", "desktop"}) {
       Ran help = Ran.earward(command, "--help");
       assertThat(help.code()).isZero();
       assertThat(help.results()).startsWith("Usage: earward " + command);

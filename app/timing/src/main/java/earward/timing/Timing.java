@@ -9,21 +9,25 @@ import org.openjdk.jmh.Main;
 
 /**
  * Starts the timings. {@code bars [--quick]} holds times against their bars and ends with 1 where
- * one was missed; anything else goes to JMH.
+ * one was missed; {@code accuracy [--from N] [--count N] [--seed S]} holds random designs against
+ * their full waveform; anything else goes to JMH.
  */
 public final class Timing {
   private Timing() {}
 
   /**
-   * Runs the bars, or the benchmarks that the arguments name.
+   * Runs the bars, the accuracy run, or the benchmarks that the arguments name.
    *
-   * @param arguments {@code bars [--quick]}, or JMH's own
+   * @param arguments {@code bars [--quick]}, {@code accuracy ...}, or JMH's own
    * @throws IOException where the results cannot be written
    */
   public static void main(String[] arguments) throws IOException {
     if (arguments.length > 0 && arguments[0].equals("bars")) {
       boolean quick = arguments.length > 1 && arguments[1].equals("--quick");
       System.exit(Bars.run(bars(), quick, System.out));
+    }
+    if (arguments.length > 0 && arguments[0].equals("accuracy")) {
+      System.exit(AccuracyCall.run(arguments, System.out, System.err));
     }
     Main.main(arguments);
   }
@@ -40,6 +44,9 @@ public final class Timing {
       bars.add(new ThousandKits(kit, false));
     }
     bars.add(new ThousandKits("hayloft", true));
+    for (String kit : StarterKit.NAMES) {
+      bars.add(new WaveformSteps(kit));
+    }
     return bars;
   }
 

@@ -11,10 +11,10 @@ import java.util.Arrays;
 final class Alignment {
   private static final int STEPS = 64;
   private static final int IDLE_CYCLES = 150;
-  private static final int ROUNDS = 12;
+  private static final int ROUNDS = 20;
 
   /** Share of its bandwidth to which the winding is peaked. */
-  private static final double PEAKED = 1e-6;
+  private static final double PEAKED = 1e-4;
 
   private final Stamping stamping;
   private final WaveformTask task;

@@ -11,8 +11,8 @@ final class Stepper {
   private static final int MOST_ITERATIONS = 100;
   private static final int MOST_SWITCHES = 24;
 
-  /** A Newton step of so much of a knee is the last: what is left is its square. */
-  private static final double SMALL_STEP = 1e-4;
+  /** A Newton step of so much of a knee is the last: what is left is half its square. */
+  private static final double SMALL_STEP = 1e-3;
 
   final StepTables tables;
   final WaveformCircuit circuit;
@@ -179,7 +179,7 @@ final class Stepper {
         return false;
       }
       if (take(side)) {
-        evaluate();
+        lastStep(side);
         return true;
       }
     }
@@ -202,6 +202,31 @@ final class Stepper {
       }
     }
     return small;
+  }
+
+  /** Outputs and charges at the end of a last step, along their tangents. */
+  private void lastStep(double[] step) {
+    for (int stage = 0; stage < 2; stage++) {
+      int c = stage * perStage;
+      int o = stage * outputs;
+      int slope = stage * slopesPerStage;
+      for (WaveformDevice device : circuit.devices) {
+        for (int a = 0; a < device.outputs(); a++) {
+          for (int b = 0; b < device.controls(); b++) {
+            w[o + a] += slopes[slope++] * step[c + b];
+          }
+        }
+        if (charged && device.charged()) {
+          double moved = farads[o] * step[c];
+          int own = o - stage * outputs;
+          charge[o] += moved;
+          w[own] += StepTables.INVERSE[stage] * moved / tables.seconds;
+          w[outputs + own] += StepTables.INVERSE[2 + stage] * moved / tables.seconds;
+        }
+        c += device.controls();
+        o += device.outputs();
+      }
+    }
   }
 
   private void evaluate() {
