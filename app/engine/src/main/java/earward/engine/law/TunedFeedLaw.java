@@ -17,8 +17,11 @@ final class TunedFeedLaw extends FeedLaw {
   private static final int TAP_FRACTION = 3;
   private static final int WINDING_OHMS = 4;
 
+  /** Share of all loss at the carrier that the winding's resistance may be without a short. */
+  private static final double MOST_LOSS = 0.6;
+
   /** Resistance of a large winding resistance over the reactance of what shorts it. */
-  private static final double SHORTING = 20;
+  private static final double SHORTING = 60;
 
   TunedFeedLaw(Seat seat) {
     super(seat);
@@ -127,7 +130,7 @@ final class TunedFeedLaw extends FeedLaw {
    * C as it is, the core turned for the wanted tuning, and the winding's resistance in series with
    * L where audio and DC flow. At the carrier its loss belongs to Rp already, so Rp and L are moved
    * until the circuit is Rp ∥ L ∥ C there; a resistance too large for that is shorted to the
-   * carrier by a capacitor of a twentieth of it in reactance.
+   * carrier by a capacitor of a sixtieth of it in reactance.
    */
   @Override
   void stampWaveform(WaveformStage stage, int[] nodes) {
@@ -136,7 +139,7 @@ final class TunedFeedLaw extends FeedLaw {
     double farads = value(stage, QUALITY) / (omega * rp);
     double reactance = 1 / (omega * farads - 2 * farads * stage.tuningRadians());
     double ohms = Math.max(InductorLaw.LEAST_OHMS, value(stage, WINDING_OHMS));
-    boolean shorted = ohms * rp > 0.2 * reactance * reactance;
+    boolean shorted = ohms * rp > MOST_LOSS * reactance * reactance;
     double real = shorted ? ohms / (1 + SHORTING * SHORTING) : ohms;
     double own = shorted ? -SHORTING * real : 0;
     double whole = (reactance + Math.sqrt(reactance * reactance - 4 * real * real)) / 2;
