@@ -129,4 +129,19 @@ class RailTest {
             .figure();
     assertThat(margin).isEqualTo(Double.POSITIVE_INFINITY);
   }
+
+  @Test
+  void aBridgeLetsThroughWhatItsDataSheetSays() {
+    // The trial amplifier rejects its supply by 100 dB, from rail to load as data sheets give it.
+    double rejection =
+        adaptor(new TrialCircuit(), true)
+            .idealAmplifier(true, 5e-3, "in", "rail")
+            .resistor("in.r", 1e3, "in", Circuit.GROUND)
+            .resistor("load.r", 16, "plus", "minus")
+            .probe("path", "plus", "minus")
+            .solved(CaseName.TEST, Drive.NO_SIGNAL, Map.of())
+            .want("supply.adaptor", Quantity.RIPPLE_REJECTION_DECIBELS)
+            .figure();
+    assertThat(rejection).isCloseTo(100, within(0.1));
+  }
 }

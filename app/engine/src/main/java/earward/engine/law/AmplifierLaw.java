@@ -349,7 +349,9 @@ public final class AmplifierLaw extends Law {
         has(Terminal.INVERTING) ? at(nodes, Terminal.INVERTING) : at(nodes, Terminal.GROUND);
     stage.add(branch, from, -real, -imaginary);
     stage.add(branch, against, real, imaginary);
-    ripple(stage, nodes, branch, on);
+    // what appears across a bridge's load, half of it at either end; what moves both ends is not
+    // heard
+    ripple(stage, nodes, branch, on * sign * share);
   }
 
   private void feedback(AlternatingStage stage, int[] nodes, int branch, double on) {
