@@ -26,7 +26,7 @@ final class CoverSection {
         new SideBySide(
             new KeyFigureList(words.text("cover.conditions"), content.conditions(), words),
             new KeyFigureList(words.text("cover.figures"), content.keyFigures(), words),
-            18));
+            14));
     pieces.add(
         new FillIn(
             List.of(
@@ -44,12 +44,13 @@ final class CoverSection {
       return pieces;
     }
     pieces.add(new Heading(words.text("section.cautions"), false));
+    // first, where it cannot be left alone on the next page
+    pieces.add(Paragraph.note(words.text("cautions.defer")));
     for (int i = 0; i < cautions.size(); i += 2) {
       Piece right =
           i + 1 < cautions.size() ? new CautionPiece(cautions.get(i + 1), words) : new Gap(0);
-      pieces.add(new SideBySide(new CautionPiece(cautions.get(i), words), right, i == 0 ? 0 : 8));
+      pieces.add(new SideBySide(new CautionPiece(cautions.get(i), words), right, i == 0 ? 4 : 6));
     }
-    pieces.add(Paragraph.note(words.text("cautions.defer")));
     return pieces;
   }
 

@@ -12,7 +12,7 @@ import java.util.List;
  * @param labels from the left
  */
 record FillIn(List<String> labels) implements Piece {
-  private static final float HEIGHT = 30;
+  private static final float HEIGHT = 28;
   private static final float GUTTER = 14;
 
   FillIn {
@@ -26,7 +26,7 @@ record FillIn(List<String> labels) implements Piece {
 
   @Override
   public float spaceAbove() {
-    return 8;
+    return 4;
   }
 
   @Override
