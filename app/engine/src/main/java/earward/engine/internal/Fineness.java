@@ -18,6 +18,9 @@ record Fineness(int carrierSamples, int audioSamples) {
   /** Share of the fundamental that may stand in the highest harmonic of the tone. */
   private static final double MOST_TOP_HARMONIC = 2e-3;
 
+  /** The same share above which it is said: hard clipping has corners that no sampling resolves. */
+  private static final double TOLD_TOP_HARMONIC = 0.02;
+
   private static final int MOST_CARRIER_SAMPLES = 128;
   private static final int MOST_AUDIO_SAMPLES = 64;
 
@@ -33,7 +36,7 @@ record Fineness(int carrierSamples, int audioSamples) {
 
   /** Whether nothing of weight stands beyond the samples of an audio period. */
   static boolean periodIsMet(double topHarmonic) {
-    return topHarmonic <= MOST_TOP_HARMONIC;
+    return topHarmonic <= TOLD_TOP_HARMONIC;
   }
 
   /** What a solved case needs; itself where it is fine enough or nothing finer is to be had. */
