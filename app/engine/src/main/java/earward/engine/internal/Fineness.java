@@ -18,7 +18,13 @@ record Fineness(int carrierSamples, int audioSamples) {
   /** Share of the fundamental that may stand in the highest harmonic of the tone. */
   private static final double MOST_TOP_HARMONIC = 2e-3;
 
-  /** The same share above which it is said: hard clipping has corners that no sampling resolves. */
+  /** The same share above which it is said: what detection is proven to. */
+  private static final double TOLD_ALIASING = 1e-3;
+
+  /**
+   * The highest harmonic's share above which it is said: hard clipping has corners that no sampling
+   * resolves.
+   */
   private static final double TOLD_TOP_HARMONIC = 0.02;
 
   private static final int MOST_CARRIER_SAMPLES = 128;
@@ -31,7 +37,7 @@ record Fineness(int carrierSamples, int audioSamples) {
 
   /** Whether nothing of weight stands beyond the samples of a cycle. */
   static boolean cycleIsMet(double aliasing) {
-    return aliasing <= MOST_ALIASING;
+    return aliasing <= TOLD_ALIASING;
   }
 
   /** Whether nothing of weight stands beyond the samples of an audio period. */
