@@ -26,7 +26,7 @@ final class CoverSection {
         new SideBySide(
             new KeyFigureList(words.text("cover.conditions"), content.conditions(), words),
             new KeyFigureList(words.text("cover.figures"), content.keyFigures(), words),
-            14));
+            10));
     pieces.add(
         new FillIn(
             List.of(
@@ -49,7 +49,7 @@ final class CoverSection {
     for (int i = 0; i < cautions.size(); i += 2) {
       Piece right =
           i + 1 < cautions.size() ? new CautionPiece(cautions.get(i + 1), words) : new Gap(0);
-      pieces.add(new SideBySide(new CautionPiece(cautions.get(i), words), right, i == 0 ? 4 : 6));
+      pieces.add(new SideBySide(new CautionPiece(cautions.get(i), words), right, 3));
     }
     return pieces;
   }

@@ -12,7 +12,7 @@ import java.util.List;
  * @param labels from the left
  */
 record FillIn(List<String> labels) implements Piece {
-  private static final float HEIGHT = 28;
+  private static final float HEIGHT = 25;
   private static final float GUTTER = 14;
 
   FillIn {
