@@ -25,11 +25,11 @@ import org.junit.jupiter.params.provider.MethodSource;
  * control and AGC on one side; amplifier, loudspeaker and supply on the other.
  */
 class CoupledBlocksTest {
-  /** What a reading must move by to have moved; solves of one row agree to 1e-15. */
-  private static final double MOVED = 1e-9;
+  /** What a reading must move by to have moved; solves from another start agree to a few in 1e9. */
+  private static final double MOVED = 1e-8;
 
   /** What counts as not moved at all. */
-  private static final double STILL = 1e-12;
+  private static final double STILL = 5e-9;
 
   private static final Set<String> DETECTOR_SIDE =
       Set.of("feed", "detector", "filter", "volume", "agc");

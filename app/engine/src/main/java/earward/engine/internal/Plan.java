@@ -1,11 +1,13 @@
 package earward.engine.internal;
 
 import earward.block.figure.FigureName;
+import earward.block.figure.Quantity;
 import earward.engine.Circuit;
 import earward.engine.Drive;
 import earward.engine.Slot;
 import earward.engine.SolveCase;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
@@ -18,10 +20,20 @@ public final class Plan {
   /** Carrier at a port, peak, below which nothing is rectified that a meter could see. */
   private static final double DRIVEN_VOLTS = 1e-3;
 
+  /** Figures that the unmodulated carrier suffices for. */
+  private static final Set<Quantity> CARRIER_ALONE =
+      EnumSet.of(
+          Quantity.CLIPPING_DEPTH,
+          Quantity.CLIPPING_DEPTH_WITHOUT_CAPACITOR,
+          Quantity.CLIPPING_DEPTH_WITHOUT_COUPLING);
+
   final Network network;
   final List<CasePlan> cases = new ArrayList<>();
   final int[] caseOf;
   final Reading[] readings;
+
+  /** Of each case: whether a figure wants the whole state, not only the bare carrier's. */
+  private final boolean[] whole;
 
   /**
    * Compiles.
@@ -35,10 +47,17 @@ public final class Plan {
     Readings all = new Readings(network);
     caseOf = new int[wanted.size()];
     readings = new Reading[wanted.size()];
+    whole = new boolean[cases.size()];
     for (int i = 0; i < readings.length; i++) {
       caseOf[i] = caseIndex(wanted.get(i));
       readings[i] = all.of(wanted.get(i), cases.get(caseOf[i]));
+      whole[caseOf[i]] |= !CARRIER_ALONE.contains(wanted.get(i).quantity());
     }
+  }
+
+  /** Whether a figure of a case wants its whole state. */
+  boolean wantsWhole(int index) {
+    return whole[index];
   }
 
   private int caseIndex(FigureName name) {
@@ -67,7 +86,7 @@ public final class Plan {
     if (trial.feed != null && !parts.isEmpty()) {
       double[] values = slots.all().stream().mapToDouble(Slot::nominal).toArray();
       for (CasePlan each : cases) {
-        if (each.drive == Drive.SIGNAL) {
+        if (each.drive == Drive.SIGNAL && found.size() < parts.size()) {
           CaseWork work = new CaseWork(trial, each, Fineness.USUAL);
           work.begin(values);
           mark(work, found);

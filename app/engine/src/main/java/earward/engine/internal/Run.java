@@ -11,6 +11,7 @@ import earward.engine.SweptFigures;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 
 /** All cases of a plan, ready to be solved again and again by one thread. */
@@ -43,10 +44,7 @@ public final class Run {
   /** Solves a row; every solve starts from the nominal kit's solution, which is solved once. */
   public SolveOutcome solve(double[] values, double[] figures) {
     if (nominalOutcome == null) {
-      nominalOutcome = read(nominal, nominalFigures);
-      while (refine()) {
-        nominalOutcome = read(nominal, nominalFigures);
-      }
+      nominalOutcome = readNominal();
       nominalOutcome = withCutOff(nominalOutcome);
       for (CaseWork work : works) {
         if (work.trouble().isEmpty()) {
@@ -61,17 +59,36 @@ public final class Run {
     return read(values, figures);
   }
 
-  /** Puts finer cases in the place of those whose solution asks for it; whether there was one. */
-  private boolean refine() {
-    boolean any = false;
-    for (int i = 0; i < works.length; i++) {
-      Fineness wanted = works[i].wantedFineness();
-      if (!wanted.equals(works[i].fineness())) {
-        works[i] = new CaseWork(plan.network, works[i].plan, wanted);
-        any = true;
+  /**
+   * The nominal kit, its cases side by side on all cores: each has all that it needs to itself, and
+   * somebody waits for it. Kits of a batch have a thread each as it is.
+   */
+  private SolveOutcome readNominal() {
+    IntStream.range(0, works.length).parallel().forEach(this::readNominal);
+    return outcome();
+  }
+
+  /** One case of the nominal kit, sampled as finely as its solution asks for before it is read. */
+  private void readNominal(int at) {
+    works[at].begin(nominal);
+    while (plan.wantsWhole(at) && works[at].solved() && refine(at)) {
+      works[at].begin(nominal);
+    }
+    for (int i = 0; i < nominalFigures.length; i++) {
+      if (plan.caseOf[i] == at) {
+        nominalFigures[i] = plan.readings[i].of(works[at]);
       }
     }
-    return any;
+  }
+
+  /** Puts a finer case in place of one whose solution asks for it. */
+  private boolean refine(int at) {
+    Fineness wanted = works[at].wantedFineness();
+    if (wanted.equals(works[at].fineness())) {
+      return false;
+    }
+    works[at] = new CaseWork(plan.network, works[at].plan, wanted);
+    return true;
   }
 
   private SolveOutcome read(double[] values, double[] figures) {
@@ -81,16 +98,20 @@ public final class Run {
     for (int i = 0; i < figures.length; i++) {
       figures[i] = plan.readings[i].of(works[plan.caseOf[i]]);
     }
+    return outcome();
+  }
+
+  private SolveOutcome outcome() {
     boolean well = true;
     boolean inside = true;
     for (CaseWork work : works) {
       well &= work.trouble().isEmpty();
       inside &= !work.done() || Domain.left(work).isEmpty();
     }
-    return well && inside ? WELL : outcome(well);
+    return well && inside ? WELL : outcomeOf(well);
   }
 
-  private SolveOutcome outcome(boolean well) {
+  private SolveOutcome outcomeOf(boolean well) {
     List<Finding> findings = new ArrayList<>();
     for (CaseWork work : works) {
       String name = work.plan.name.text();
