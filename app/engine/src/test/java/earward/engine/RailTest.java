@@ -144,4 +144,56 @@ class RailTest {
             .figure();
     assertThat(rejection).isCloseTo(100, within(0.1));
   }
+
+  /** A detector into an output stage whose battery has ten ohms and no capacitor beside it. */
+  private static TrialCircuit playing(boolean bridge) {
+    TrialCircuit circuit =
+        new TrialCircuit()
+            .generator(50, "in")
+            .diode("detector.d1", 1e-7, 1.05, 10, "in", "a")
+            .capacitor("detector.c", 1e-9, "a", Circuit.GROUND)
+            .resistor("detector.r", 22e3, "a", Circuit.GROUND)
+            .capacitor("pad.c", 1e-6, "a", "b")
+            .resistor("pad.r", 200e3, "b", "c")
+            .resistor("pad.r2", 50e3, "c", Circuit.GROUND)
+            .battery(9, 10, "rail")
+            .idealAmplifier(bridge, 5e-3, "c", "rail")
+            .probe("supply.rail", "rail", Circuit.GROUND)
+            .signal(3, 0.1, 400);
+    return bridge
+        ? circuit.resistor("load.r", 16, "plus", "minus")
+        : circuit
+            .capacitor("power.c", 1e-2, "plus", "out")
+            .resistor("load.r", 16, "out", Circuit.GROUND);
+  }
+
+  @Test
+  void theRailOfOneOutputCarriesTheHarmonicsOfHalfWaves() {
+    // Fourier series of a half-wave rectified sine (any handbook): 1/2 at the tone, 2/(3π),
+    // 2/(15π),
+    // 2/(35π) ... at its even multiples.
+    double[] figures =
+        playing(false)
+            .want("supply.rail", Quantity.SECOND_HARMONIC)
+            .want("supply.rail", Quantity.DISTORTION)
+            .figures();
+    double sum = 0;
+    for (int h = 2; h <= 10; h += 2) {
+      sum += Math.pow(4 / (Math.PI * (h * h - 1)), 2);
+    }
+    assertThat(figures[0]).isCloseTo(4 / (3 * Math.PI), within(2e-3));
+    assertThat(figures[1]).isCloseTo(Math.sqrt(sum), within(2e-3));
+  }
+
+  @Test
+  void theRailOfABridgeCarriesTwiceTheToneOnly() {
+    // Full-wave rectified: each half wave is one output's.
+    double[] figures =
+        playing(true)
+            .want("supply.rail", Quantity.SECOND_HARMONIC)
+            .want("supply.rail", Quantity.AUDIO_RMS_VOLTS)
+            .figures();
+    assertThat(figures[1]).isLessThan(1e-3);
+    assertThat(figures[0]).isGreaterThan(10);
+  }
 }

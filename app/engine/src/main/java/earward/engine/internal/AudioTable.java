@@ -4,8 +4,9 @@ import earward.engine.law.AmplifierLaw;
 import earward.engine.law.DirectStage;
 
 /**
- * How all unknowns answer to one ampere through each port, and to one volt at each amplifier
- * output, at each harmonic of the tone. Column order: ports, then outputs.
+ * How all unknowns answer to one ampere through each port, to one volt at each amplifier output,
+ * and to one ampere from each amplifier's SUPPLY to its GROUND, at each harmonic of the tone.
+ * Column order: ports, outputs, supplies.
  */
 final class AudioTable {
   final int harmonics;
@@ -21,7 +22,7 @@ final class AudioTable {
     this.network = network;
     this.harmonics = harmonics;
     size = network.size;
-    columns = network.ports.length + Outputs.count(network);
+    columns = network.ports.length + Outputs.count(network) + network.amplifiers.length;
     re = new double[(harmonics + 1) * columns * size];
     im = new double[re.length];
     lastRe = new double[size * size];
@@ -58,6 +59,12 @@ final class AudioTable {
           normalise(solver, amplifier.outputNode(point, k));
           store(solver, h, column++);
         }
+      }
+      for (AmplifierLaw amplifier : network.amplifiers) {
+        solver.rest();
+        solver.push(amplifier.supplyNode(point), amplifier.groundNode(point), 1, 0);
+        solver.solve();
+        store(solver, h, column++);
       }
     }
     return true;

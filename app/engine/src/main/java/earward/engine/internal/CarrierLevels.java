@@ -20,6 +20,9 @@ final class CarrierLevels {
     if (detection == null) {
       return harmonic == 1 ? undetected(work, work.network.feed, plus, minus) : 0;
     }
+    if (!work.answersAtCarrier()) {
+      return Double.NaN;
+    }
     EnvelopeSolver solved = detection.modulated;
     int ports = work.network.ports.length;
     int width = (solved.carrierHarmonics() + 1) * ports;

@@ -59,6 +59,7 @@ final class CaseWork {
 
   private Part point = Part.TO_DO;
   private Part carrier = Part.TO_DO;
+  private Part answers = Part.TO_DO;
   private boolean warm;
   private String trouble = "";
 
@@ -93,6 +94,7 @@ final class CaseWork {
     plan.apply(values, row);
     point = Part.TO_DO;
     carrier = Part.TO_DO;
+    answers = Part.TO_DO;
     trouble = "";
     signal.clear();
     noise.clear();
@@ -327,6 +329,24 @@ final class CaseWork {
       }
     }
     return true;
+  }
+
+  /**
+   * Answers to the carrier about the point as it stands at the end: the signal's sag of the rail
+   * has moved gains since the table was filled for detection, whose own surroundings stay as they
+   * are.
+   */
+  boolean answersAtCarrier() {
+    if (answers == Part.TO_DO) {
+      FeedLaw feed = network.feed;
+      boolean filled =
+          detection != null
+              && feed != null
+              && solved()
+              && carrierTable.fill(alternating, stage(), feed, carrierRadians(), detection.spare());
+      answers = filled ? Part.DONE : Part.FAILED;
+    }
+    return answers == Part.DONE;
   }
 
   /** Adds what the ports' mean currents make in all unknowns. */

@@ -29,6 +29,7 @@ final class Detection {
   final EnvelopeSolver carrierOnly;
   final CarrierSurroundings around;
   private final CarrierSurroundings solved;
+  private final CarrierSurroundings spare;
   private final PortLaw[] devices;
   private final CarrierDriven[] parts;
 
@@ -46,6 +47,7 @@ final class Detection {
         new CarrierSurroundings(ports, carrierOnly.carrierHarmonics(), modulated.audioHarmonics());
     solved =
         new CarrierSurroundings(ports, carrierOnly.carrierHarmonics(), modulated.audioHarmonics());
+    spare = new CarrierSurroundings(ports, CarrierTable.SHOWN, 1);
     parts =
         Arrays.stream(network.ports)
             .filter(port -> port.which() == 0)
@@ -142,6 +144,11 @@ final class Detection {
   /** Whether the surroundings are those of the last modulated solve, but for rounding. */
   boolean unmoved() {
     return around.near(solved, UNMOVED);
+  }
+
+  /** Surroundings that nothing is solved in; they take what is filled on the way. */
+  CarrierSurroundings spare() {
+    return spare;
   }
 
   boolean solveModulated(double peakVolts, double depth, double toneRadians) {

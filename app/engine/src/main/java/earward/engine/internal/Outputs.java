@@ -31,6 +31,7 @@ final class Outputs {
   private final Network network;
   private final OutputWave wave = new OutputWave();
   private final RailDips dips;
+  private final HalfWaves halfWaves;
 
   /** Whether the wave is what the outputs give, in place of a sine that clips evenly. */
   private boolean byWave;
@@ -65,6 +66,7 @@ final class Outputs {
     this.network = network;
     int count = network.amplifiers.length;
     dips = new RailDips(count);
+    halfWaves = new HalfWaves(network, cosine, sine);
     outWatts = new double[count];
     clipWatts = new double[count];
     tenPercentWatts = new double[count];
@@ -162,7 +164,8 @@ final class Outputs {
   }
 
   /**
-   * Clips a signal at each output and adds what clipping does to the unknowns' harmonics.
+   * Clips a signal at each output and adds what clipping does to the unknowns' harmonics, and what
+   * the half waves that the outputs take do to their rails.
    *
    * @param signal harmonics of all unknowns, changed in place
    */
@@ -188,6 +191,7 @@ final class Outputs {
       overloadDecibels[a] = 20 * Math.log10(wanted / limit);
       column += amplifier.branches();
     }
+    halfWaves.add(table, column, signal);
   }
 
   private void clipWave(double up, double down) {

@@ -66,7 +66,7 @@ final class AmplifierWaveform {
         stage.term(deviation, filtered, -fixedGain(k));
       }
       if (!stage.quiet()) {
-        ripple(deviation, outside);
+        ripple(deviation, outside, k);
       }
       output(k, deviation);
     }
@@ -175,9 +175,13 @@ final class AmplifierWaveform {
     stage.constant(row, factor * on * law.model().restVolts());
   }
 
-  private void ripple(int deviation, boolean outside) {
+  /** As it is heard: across a bridge's load, half of it at either end. */
+  private void ripple(int deviation, boolean outside, int k) {
+    double share = law.model().bridge() ? 0.5 : 1;
     double scale =
-        outside ? on * law.model().gain().openLoopGain() / law.model().gain().fixedGain() : on;
+        outside
+            ? on * law.model().gain().openLoopGain() / law.model().gain().fixedGain()
+            : on * share * (k == 0 ? 1 : -1);
     double held = scale * Math.pow(10, -law.model().rippleRejectionDecibels() / 20);
     double bare = scale * Math.pow(10, -law.model().rippleRejectionBareDecibels() / 20);
     boolean has = law.has(Terminal.RIPPLE);
