@@ -180,7 +180,7 @@ final class AudioBalance {
   private double tank(CarrierSurroundings around, double[] x, double[] drawn, double[] stored) {
     double largest = 0;
     double farads = 2 * around.tankFarads;
-    double turn = farads * around.detuningRadians;
+    double turn = around.peaking ? 0 : farads * around.detuningRadians;
     for (int s = 0; s < count; s++) {
       double rateReal = 0;
       double rateImaginary = 0;
@@ -194,7 +194,9 @@ final class AudioBalance {
       double first =
           real - envelope[s] + around.tankOhms * (rateReal + drawn[2 * s] - turn * imaginary);
       double second =
-          imaginary + around.tankOhms * (rateImaginary + drawn[2 * s + 1] + turn * real);
+          around.peaking
+              ? imaginary
+              : imaginary + around.tankOhms * (rateImaginary + drawn[2 * s + 1] + turn * real);
       residual[devices * count + s] = first;
       residual[(devices + 1) * count + s] = second;
       largest = Math.max(largest, Math.max(Math.abs(first), Math.abs(second)));
@@ -243,7 +245,7 @@ final class AudioBalance {
       CarrierSurroundings around, double[] slopes, DenseSolver solver, int size) {
     double[] a = solver.matrix;
     double storing = 2 * around.tankFarads * around.tankOhms;
-    double turn = storing * around.detuningRadians;
+    double turn = around.peaking ? 0 : storing * around.detuningRadians;
     double ohms = around.tankOhms;
     int realAt = devices * count;
     int imaginaryAt = (devices + 1) * count;
@@ -254,14 +256,22 @@ final class AudioBalance {
       Arrays.fill(a, imaginary, imaginary + size, 0);
       for (int r = 0; r < count; r++) {
         a[real + realAt + r] += storing * rateKernel[count + s - r];
-        a[imaginary + imaginaryAt + r] += storing * rateKernel[count + s - r];
       }
       for (int b = 0; b < blocks; b++) {
         a[real + b * count + s] += ohms * slopes[(s * blocks + devices) * blocks + b];
-        a[imaginary + b * count + s] += ohms * slopes[(s * blocks + devices + 1) * blocks + b];
       }
       a[real + realAt + s] += 1 + ohms * around.loadRealSiemens;
       a[real + imaginaryAt + s] += -turn - ohms * around.loadImaginarySiemens;
+      if (around.peaking) {
+        a[imaginary + imaginaryAt + s] = 1;
+        continue;
+      }
+      for (int r = 0; r < count; r++) {
+        a[imaginary + imaginaryAt + r] += storing * rateKernel[count + s - r];
+      }
+      for (int b = 0; b < blocks; b++) {
+        a[imaginary + b * count + s] += ohms * slopes[(s * blocks + devices + 1) * blocks + b];
+      }
       a[imaginary + imaginaryAt + s] += 1 + ohms * around.loadRealSiemens;
       a[imaginary + realAt + s] += turn + ohms * around.loadImaginarySiemens;
     }

@@ -49,6 +49,12 @@ public final class CarrierSurroundings {
   /** Tuned feed: ωc − ω0, in radians a second. */
   public double detuningRadians;
 
+  /**
+   * Tuned feed: whether its core is turned until the winding is in phase with what drives it. Then
+   * {@link #detuningRadians} is not looked at: it follows from the solution.
+   */
+  public boolean peaking;
+
   /** Admittance at fc that the linear network presents to the held node, in siemens. */
   public double loadRealSiemens;
 

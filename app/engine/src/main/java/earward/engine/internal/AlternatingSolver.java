@@ -3,6 +3,7 @@ package earward.engine.internal;
 import earward.engine.law.AlternatingStage;
 import earward.engine.law.DirectStage;
 import earward.engine.law.Law;
+import earward.engine.linear.HarmonicLu;
 import java.util.Arrays;
 
 /** The linear circuit at one frequency: stamped, factored, then solved for any right-hand side. */
@@ -25,9 +26,18 @@ final class AlternatingSolver {
 
   /** Stamps everything; a frequency must have begun. */
   void stamp() {
-    for (Law law : network.laws) {
+    stamp(network.laws);
+    frame();
+  }
+
+  private void stamp(Law[] laws) {
+    for (Law law : laws) {
       law.alternating(stage);
     }
+  }
+
+  /** Stamps meters and seams. */
+  private void frame() {
     for (int i = 0; i < network.probePlus.length; i++) {
       double siemens = stage.value(network.probeMeter[i]);
       stage.admittance(network.probePlus[i], network.probeMinus[i], siemens, 0);
@@ -38,6 +48,23 @@ final class AlternatingSolver {
       stage.add(branch, network.seamBefore[i], 1, 0);
       stage.add(branch, network.seamAfter[i], -1, 0);
     }
+  }
+
+  /**
+   * Stamps the circuit into several systems at once, at the multiples of the tone or of the carrier
+   * from the first on.
+   */
+  void stamp(HarmonicLu systems, double radians, boolean carrier) {
+    stage.beginSeveral(systems);
+    stamp(network.steadyLaws);
+    frame();
+    systems.spread();
+    double carrierRadians = carrier ? radians : stage.carrierOmega();
+    for (int h = 1; h <= systems.count(); h++) {
+      stage.beginSystem(h - 1, h * radians, carrier ? h : 0, carrierRadians);
+      stamp(network.swingingLaws);
+    }
+    stage.endSeveral();
   }
 
   /** Factors what was stamped. */

@@ -17,6 +17,7 @@ final class AudioTable {
   private final double[] im;
   private final double[] lastRe;
   private final double[] lastIm;
+  private final HarmonicSolver several;
 
   AudioTable(Network network, int harmonics) {
     this.network = network;
@@ -27,6 +28,7 @@ final class AudioTable {
     im = new double[re.length];
     lastRe = new double[size * size];
     lastIm = new double[size * size];
+    several = new HarmonicSolver(size, harmonics);
   }
 
   /**
@@ -37,9 +39,69 @@ final class AudioTable {
    */
   boolean fill(AlternatingSolver solver, DirectStage point, double toneRadians, boolean again) {
     boolean repeated = solver.stage().matrix().repeats(lastRe, lastIm);
-    if (again && repeated) {
-      return true;
+    return (again && repeated)
+        || fillAtOnce(solver, point, toneRadians)
+        || fillOneByOne(solver, point, toneRadians);
+  }
+
+  /** Keeps the order of elimination from now on. */
+  void freeze() {
+    several.freeze();
+  }
+
+  private boolean fillAtOnce(AlternatingSolver solver, DirectStage point, double toneRadians) {
+    if (!several.factor(solver, toneRadians, false)) {
+      return false;
     }
+    int column = 0;
+    for (Port port : network.ports) {
+      several.rest();
+      several.push(port.anode(point), port.cathode(point), 1);
+      if (!several.solve()) {
+        return false;
+      }
+      store(column++, -1);
+    }
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      for (int k = 0; k < amplifier.branches(); k++) {
+        several.rest();
+        several.side(amplifier.outputBranch(k), 1);
+        if (!several.solve()) {
+          return false;
+        }
+        store(column++, amplifier.outputNode(point, k));
+      }
+    }
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      several.rest();
+      several.push(amplifier.supplyNode(point), amplifier.groundNode(point), 1);
+      if (!several.solve()) {
+        return false;
+      }
+      store(column++, -1);
+    }
+    return true;
+  }
+
+  /** Stores a column, at a node (none: −1) scaled to one volt there. */
+  private void store(int column, int node) {
+    for (int h = 1; h <= harmonics; h++) {
+      double real = node < 0 ? 1 : several.re(node, h);
+      double imaginary = node < 0 ? 0 : several.im(node, h);
+      double norm = real * real + imaginary * imaginary;
+      double byRe = norm == 0 ? 1 : real / norm;
+      double byIm = norm == 0 ? 0 : -imaginary / norm;
+      int at = (h * columns + column) * size;
+      for (int i = 0; i < size; i++) {
+        double r = several.re[i][h - 1];
+        double m = several.im[i][h - 1];
+        re[at + i] = r * byRe - m * byIm;
+        im[at + i] = m * byRe + r * byIm;
+      }
+    }
+  }
+
+  private boolean fillOneByOne(AlternatingSolver solver, DirectStage point, double toneRadians) {
     for (int h = 1; h <= harmonics; h++) {
       if (!solver.audio(h * toneRadians)) {
         return false;

@@ -12,6 +12,7 @@ final class CasePlan {
   final Drive drive;
   private final int[] slots;
   private final double[] values;
+  private boolean tenPercent;
   private final List<int[]> noise = new ArrayList<>();
 
   CasePlan(SolveCase from, Slots all) {
@@ -23,6 +24,16 @@ final class CasePlan {
             .sorted(java.util.Map.Entry.comparingByKey())
             .mapToDouble(java.util.Map.Entry::getValue)
             .toArray();
+  }
+
+  /** Notes that the power at 10 % distortion is wanted; only while the plan is made. */
+  void addTenPercent() {
+    tenPercent = true;
+  }
+
+  /** Whether the power at 10 % distortion is wanted. */
+  boolean tenPercent() {
+    return tenPercent;
   }
 
   /** Adds a place where noise is wanted; only while the plan is made. */

@@ -72,7 +72,6 @@ final class CaseWork {
     alternating = new AlternatingSolver(network, direct.stage());
     int harmonics = fineness.audioHarmonics();
     audioTable = new AudioTable(network, harmonics);
-    carrierTable = new CarrierTable(network);
     signal = new AudioSignal(harmonics, network.size);
     trial = new AudioSignal(harmonics, network.size);
     outputs = new Outputs(network);
@@ -83,6 +82,8 @@ final class CaseWork {
         network.ports.length == 0 || network.feed == null
             ? null
             : new Detection(network, direct.stage(), fineness);
+    carrierTable =
+        new CarrierTable(network, detection == null ? 1 : detection.around.carrierHarmonics());
     scratch = new double[network.size];
     former = new double[network.size];
     keptSignal = new double[network.amplifiers.length];
@@ -120,6 +121,9 @@ final class CaseWork {
     }
     stage().matrix().freeze();
     alternating.stage().freeze();
+    audioTable.freeze();
+    carrierTable.freeze();
+    outputs.freeze();
     if (detection != null) {
       detection.keep();
     }
@@ -214,7 +218,7 @@ final class CaseWork {
       case SIGNAL -> signal();
       case CLIPPING ->
           loads(LoadView.RATED)
-              && (outputs.atClipping(direct)
+              && (outputs.atClipping(direct, plan.tenPercent())
                   || fail("no DC solution at the edge of clipping; worst at " + direct.worst()));
       case ANY_DRIVE ->
           loads(LoadView.LEAST)
@@ -309,26 +313,23 @@ final class CaseWork {
    */
   private boolean tune(Detection parts, FeedLaw feed) {
     CarrierSurroundings around = parts.around;
-    for (int round = 0; round < MOST_ROUNDS; round++) {
-      double turned = feed.tuned() ? around.detuningRadians : 0;
-      alternating.stage().turnCore(turned);
-      if (!carrierTable.fill(alternating, stage(), feed, carrierRadians(), around)) {
-        return fail("the circuit has no solution at the carrier");
-      }
-      if (!feed.tuned()) {
-        around.detuningRadians = 0;
-        return true;
-      }
+    double turned = feed.tuned() ? around.detuningRadians : 0;
+    alternating.stage().turnCore(turned);
+    boolean filled = carrierTable.fill(alternating, stage(), feed, carrierRadians(), around);
+    for (int round = 0; filled && feed.tuned() && round < MOST_ROUNDS; round++) {
       double shift = parts.peak(peakVolts());
       if (Double.isNaN(shift)) {
         return fail(network.drivenNames() + " did not settle while the winding was peaked");
       }
       around.detuningRadians = shift - feed.detuningRadians(stage());
       if (Math.abs(around.detuningRadians - turned) < SETTLED_CORE * carrierRadians()) {
-        return true;
+        break;
       }
+      turned = around.detuningRadians;
+      alternating.stage().turnCore(turned);
+      filled = carrierTable.turn(alternating, stage(), feed, carrierRadians(), around);
     }
-    return true;
+    return filled || fail("the circuit has no solution at the carrier");
   }
 
   /**

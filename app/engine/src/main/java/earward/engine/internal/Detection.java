@@ -30,6 +30,7 @@ final class Detection {
   final CarrierSurroundings around;
   private final CarrierSurroundings solved;
   private final CarrierSurroundings spare;
+  private double keptDetuning;
   private final PortLaw[] devices;
   private final CarrierDriven[] parts;
 
@@ -57,17 +58,20 @@ final class Detection {
   }
 
   void keep() {
+    keptDetuning = around.detuningRadians;
     modulated.keep();
     carrierOnly.keep();
   }
 
   /** The next solves start from nothing. */
   void forget() {
+    around.detuningRadians = 0;
     modulated.forget();
     carrierOnly.forget();
   }
 
   void recall() {
+    around.detuningRadians = keptDetuning;
     modulated.recall();
     carrierOnly.recall();
   }
@@ -161,31 +165,17 @@ final class Detection {
   }
 
   /**
-   * Tunes as a builder does, for most detector DC: shifts the winding's resonance until it is in
-   * phase with what drives it, the devices and their capacitances in place. A few rounds of the
-   * unmodulated carrier suffice, since the shift is small against the bandwidth.
+   * Tunes as a builder does, for most detector DC: turns the winding's core until it is in phase
+   * with what drives it, the devices and their capacitances in place.
    *
    * @return ωc − ω0 at the peak, in rad/s; NaN where nothing converged
    */
   double peak(double peakVolts) {
-    double shift = 0;
-    for (int round = 0; round < 14; round++) {
-      around.detuningRadians = shift;
-      if (!solveCarrier(peakVolts)) {
-        return Double.NaN;
-      }
-      double real = carrierOnly.feedReal[0];
-      double imaginary = carrierOnly.feedImaginary[0];
-      double drawnReal = carrierOnly.drawnReal(0);
-      double drawnImaginary = carrierOnly.drawnImaginary(0);
-      double reactive = drawnImaginary * real - drawnReal * imaginary;
-      double next = -reactive / (2 * around.tankFarads * (real * real + imaginary * imaginary));
-      boolean settled = Math.abs(next - shift) < 1e-9 / (around.tankFarads * around.tankOhms);
-      shift = next;
-      if (settled) {
-        break;
-      }
-    }
-    return shift;
+    around.peaking = true;
+    boolean solved = solveCarrier(peakVolts);
+    around.peaking = false;
+    return solved
+        ? -carrierOnly.drawnImaginary(0) / (2 * around.tankFarads * carrierOnly.feedReal[0])
+        : Double.NaN;
   }
 }

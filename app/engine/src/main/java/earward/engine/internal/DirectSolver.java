@@ -14,6 +14,10 @@ final class DirectSolver {
   private static final int MOST_ITERATIONS = 60;
   private static final double SURE = 1e-11;
   private static final double GOOD = 1e-8;
+
+  /** Share that one step leaves of a residual where the matrix has not changed by it. */
+  private static final double SAME = 1e-10;
+
   private static final double LEAST_AMPERES = 1e-13;
 
   private final Network network;
@@ -97,9 +101,16 @@ final class DirectSolver {
   }
 
   private boolean newton() {
-    double[] x = stage.solution();
+    double former = Double.POSITIVE_INFINITY;
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
-      stamp();
+      // where one step met the equations by so much, the factors are those of the point as well
+      if (iteration > 0) {
+        double off = residual();
+        if (off <= SURE && off <= SAME * former) {
+          return true;
+        }
+      }
+      stamp(true);
       double off = off();
       if (!stage.matrix().factor()) {
         return false;
@@ -107,25 +118,60 @@ final class DirectSolver {
       if (off <= SURE || (iteration > 25 && off <= GOOD)) {
         return true;
       }
-      System.arraycopy(stage.residual(), 0, step, 0, step.length);
-      stage.matrix().solve(step);
-      for (int i = 0; i < x.length; i++) {
-        step[i] = x[i] - step[i];
-        if (!Double.isFinite(step[i])) {
-          worst = i;
-          return false;
-        }
+      former = off;
+      if (Double.isNaN(correct())) {
+        return false;
       }
-      for (Law law : network.laws) {
-        law.limit(stage, step);
-      }
-      System.arraycopy(step, 0, x, 0, x.length);
     }
     return false;
   }
 
-  private void stamp() {
-    stage.begin();
+  /** How far the equations are from being met at the present point; the factors stay. */
+  double residual() {
+    stamp(false);
+    return off();
+  }
+
+  /** Whether a residual is that of rounding. */
+  static boolean sure(double residual) {
+    return residual <= SURE;
+  }
+
+  /** Makes the factors anew at the present point. */
+  boolean factor() {
+    stamp(true);
+    return stage.matrix().factor();
+  }
+
+  /**
+   * Takes the step that the present residual and factors ask for.
+   *
+   * @return the largest change of an unknown; NaN where there is no such step
+   */
+  double correct() {
+    double[] x = stage.solution();
+    System.arraycopy(stage.residual(), 0, step, 0, step.length);
+    stage.matrix().solve(step);
+    for (int i = 0; i < x.length; i++) {
+      step[i] = x[i] - step[i];
+      if (!Double.isFinite(step[i])) {
+        worst = i;
+        return Double.NaN;
+      }
+    }
+    for (Law law : network.laws) {
+      law.limit(stage, step);
+    }
+    double largest = 0;
+    for (int i = 0; i < x.length; i++) {
+      largest = Math.max(largest, Math.abs(step[i] - x[i]));
+      x[i] = step[i];
+    }
+    return largest;
+  }
+
+  private void stamp(boolean withSlopes) {
+    stage.begin(withSlopes);
     for (Law law : network.laws) {
       law.direct(stage);
     }

@@ -32,6 +32,11 @@ public final class Network {
   final int nodes;
   final int size;
   final Law[] laws;
+
+  /** Those whose part of the alternating equations is the same at all frequencies, and others. */
+  final Law[] steadyLaws;
+
+  final Law[] swingingLaws;
   final Map<String, Law> lawOf = new HashMap<>();
   final Port[] ports;
   final AmplifierLaw[] amplifiers;
@@ -67,6 +72,8 @@ public final class Network {
     nodes = nodeOf.size();
     size = from.size();
     laws = from.laws().toArray(Law[]::new);
+    steadyLaws = from.laws().stream().filter(Law::steady).toArray(Law[]::new);
+    swingingLaws = from.laws().stream().filter(law -> !law.steady()).toArray(Law[]::new);
     from.laws().forEach(law -> lawOf.put(law.seat().name(), law));
     ports = from.ports().toArray(Port[]::new);
     diodes = from.diodes();

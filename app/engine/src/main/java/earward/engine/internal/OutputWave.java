@@ -26,8 +26,17 @@ final class OutputWave {
   /** Highest value of the load's voltage over the upper limit of one output. */
   double peakOverLimit;
 
+  private final double[] cosine = new double[SAMPLES];
+
+  /** The last wave: drive, limits and kind; NaN before the first. */
+  private double lastOverUp = Double.NaN;
+
+  private double lastDownOverUp;
+  private boolean lastBridge;
+
   OutputWave() {
     for (int s = 0; s < SAMPLES; s++) {
+      cosine[s] = Math.cos(2 * Math.PI * s / SAMPLES);
       sine[s] = Math.sin(2 * Math.PI * s / SAMPLES);
     }
   }
@@ -59,6 +68,12 @@ final class OutputWave {
    * @param downOverUp lower limit over the upper one
    */
   private void drive(double overUp, double downOverUp, boolean bridge) {
+    if (overUp == lastOverUp && downOverUp == lastDownOverUp && bridge == lastBridge) {
+      return;
+    }
+    lastOverUp = overUp;
+    lastDownOverUp = downOverUp;
+    lastBridge = bridge;
     double mean = 0;
     for (int s = 0; s < SAMPLES; s++) {
       double one = clipped(overUp * sine[s], downOverUp);
@@ -80,6 +95,30 @@ final class OutputWave {
       drawnMean += drawn[s] / SAMPLES;
       meanSquare += volts[s] * volts[s] / SAMPLES;
     }
+  }
+
+  /** Harmonics of what is drawn, peak, complex, from the first on. */
+  void drawnHarmonics(int most, double[] re, double[] im) {
+    for (int h = 1; h <= most; h++) {
+      double real = 0;
+      double imaginary = 0;
+      for (int s = 0; s < SAMPLES; s++) {
+        real += drawn[s] * cosine(h * s);
+        imaginary -= drawn[s] * sine(h * s);
+      }
+      re[h] = 2.0 / SAMPLES * real;
+      im[h] = 2.0 / SAMPLES * imaginary;
+    }
+  }
+
+  /** Cosine of a sample's angle, of any turn. */
+  double cosine(int sample) {
+    return cosine[sample & (SAMPLES - 1)];
+  }
+
+  /** Sine of a sample's angle, of any turn. */
+  double sine(int sample) {
+    return sine[sample & (SAMPLES - 1)];
   }
 
   private static double clipped(double drive, double downOverUp) {

@@ -32,6 +32,7 @@ final class Outputs {
   private final OutputWave wave = new OutputWave();
   private final RailDips dips;
   private final HalfWaves halfWaves;
+  private final PeakSearch search;
 
   /** Whether the wave is what the outputs give, in place of a sine that clips evenly. */
   private boolean byWave;
@@ -65,7 +66,8 @@ final class Outputs {
   Outputs(Network network) {
     this.network = network;
     int count = network.amplifiers.length;
-    dips = new RailDips(count);
+    dips = new RailDips(count, network.size);
+    search = new PeakSearch(network.size);
     halfWaves = new HalfWaves(network, cosine, sine);
     outWatts = new double[count];
     clipWatts = new double[count];
@@ -80,6 +82,11 @@ final class Outputs {
       cosine[s] = Math.cos(2 * Math.PI * s / SAMPLES);
       sine[s] = Math.sin(2 * Math.PI * s / SAMPLES);
     }
+  }
+
+  /** Keeps the orders of elimination from now on. */
+  void freeze() {
+    dips.freeze();
   }
 
   /** Begins a case: nothing leaves the outputs, no rail dips. */
@@ -248,14 +255,17 @@ final class Outputs {
     }
   }
 
-  /** A sine at the edge of clipping, with its sag; and the power at 10 % distortion. */
-  boolean atClipping(DirectSolver direct) {
+  /**
+   * A sine at the edge of clipping, with its sag; and the power at 10 % distortion where it is
+   * wanted.
+   */
+  boolean atClipping(DirectSolver direct, boolean tenPercent) {
     for (AmplifierLaw amplifier : network.amplifiers) {
       int a = amplifier.ordinal();
-      if (!atTenPercent(direct, amplifier)) {
+      if (tenPercent && !atTenPercent(direct, amplifier)) {
         return false;
       }
-      tenPercentWatts[a] = loadShare[a] * outWatts[a];
+      tenPercentWatts[a] = tenPercent ? loadShare[a] * outWatts[a] : Double.NaN;
       wave.atClipping(1, amplifier.branches() == 2);
       if (dips.known()) {
         dips.follow(amplifier, wave);
@@ -328,9 +338,8 @@ final class Outputs {
   }
 
   /**
-   * Finds the output current at which swing and sag agree, by false position between nothing and
-   * what a stiff supply would give. What the bypass lets the rail dip within a cycle is in the
-   * swing.
+   * Finds the output current at which swing and sag agree. What the bypass lets the rail dip within
+   * a cycle is in the swing.
    *
    * @param share of the range between rest and clipping
    * @param overdrive drive over clip level; 1 for a sine
@@ -341,10 +350,29 @@ final class Outputs {
       DirectSolver direct, AmplifierLaw amplifier, double share, double overdrive, double exact) {
     int a = amplifier.ordinal();
     double ohms = Math.hypot(loadRe[a], loadIm[a]);
+    double drawnMean = byWave ? wave.drawnMean : amplifier.branches() * halfWaveMean(overdrive);
+    double peak =
+        Double.isInfinite(ohms)
+            ? Double.NaN
+            : search.find(
+                direct, this, amplifier, share, drawnMean, ohms, exact == ROUGH ? ROUGH : 0);
+    if (Double.isNaN(peak)) {
+      peak = settleSlowly(direct, amplifier, share, overdrive, exact);
+    }
+    double meanSquare =
+        byWave ? wave.meanSquare : ClippedSine.powerRatio(Math.max(1, overdrive)) / 2;
+    outWatts[a] = Double.isInfinite(ohms) ? 0 : meanSquare * peak * peak * loadRe[a];
+    return peak;
+  }
+
+  /** By false position between nothing and what a stiff supply would give, DC solved each time. */
+  private double settleSlowly(
+      DirectSolver direct, AmplifierLaw amplifier, double share, double overdrive, double exact) {
+    int a = amplifier.ordinal();
+    double ohms = Math.hypot(loadRe[a], loadIm[a]);
     double low = 0;
     double excessLow = excess(direct, amplifier, 0, share, overdrive, ohms);
     if (Double.isNaN(excessLow) || Double.isInfinite(ohms)) {
-      outWatts[a] = 0;
       return excessLow;
     }
     double high = share * peakVolts(amplifier, direct.stage(), 0) / ohms;
@@ -369,10 +397,6 @@ final class Outputs {
         excessLow /= 2;
       }
     }
-    double fraction = loadRe[a] / ohms;
-    double meanSquare =
-        byWave ? wave.meanSquare : ClippedSine.powerRatio(Math.max(1, overdrive)) / 2;
-    outWatts[a] = meanSquare * peak * peak * ohms * fraction;
     return peak;
   }
 
@@ -400,7 +424,7 @@ final class Outputs {
   }
 
   /** Peak across the load at the edge of clipping, or of the wave, in V. */
-  private double peakVolts(AmplifierLaw amplifier, DirectStage stage, double peak) {
+  double peakVolts(AmplifierLaw amplifier, DirectStage stage, double peak) {
     if (byWave) {
       return wave.peakOverLimit * swing(amplifier, stage, 0, peak, true);
     }

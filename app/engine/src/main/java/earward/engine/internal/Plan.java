@@ -51,6 +51,9 @@ public final class Plan {
     for (int i = 0; i < readings.length; i++) {
       caseOf[i] = caseIndex(wanted.get(i));
       readings[i] = all.of(wanted.get(i), cases.get(caseOf[i]));
+      if (wanted.get(i).quantity() == Quantity.TEN_PERCENT_WATTS) {
+        cases.get(caseOf[i]).addTenPercent();
+      }
       whole[caseOf[i]] |= !CARRIER_ALONE.contains(wanted.get(i).quantity());
     }
   }

@@ -26,9 +26,13 @@ final class RailDips {
   /** Loss of the lower limit. */
   private final double[] down;
 
+  private final double[] drawnRe = new double[HARMONICS + 1];
+  private final double[] drawnIm = new double[HARMONICS + 1];
   private boolean known;
+  private final HarmonicSolver several;
 
-  RailDips(int amplifiers) {
+  RailDips(int amplifiers, int size) {
+    several = new HarmonicSolver(size, HARMONICS);
     railRe = new double[amplifiers * (HARMONICS + 1)];
     railIm = new double[railRe.length];
     restRe = new double[railRe.length];
@@ -56,8 +60,47 @@ final class RailDips {
     return down[amplifier];
   }
 
+  /** Keeps the order of elimination from now on. */
+  void freeze() {
+    several.freeze();
+  }
+
   /** Impedances of all rails at the harmonics of the tone. */
   boolean measure(
+      Network network, AlternatingSolver solver, DirectStage point, double toneRadians) {
+    known =
+        measureAtOnce(network, solver, point, toneRadians)
+            || measureOneByOne(network, solver, point, toneRadians);
+    return known;
+  }
+
+  private boolean measureAtOnce(
+      Network network, AlternatingSolver solver, DirectStage point, double toneRadians) {
+    if (!several.factor(solver, toneRadians, false)) {
+      return false;
+    }
+    for (AmplifierLaw amplifier : network.amplifiers) {
+      int supply = amplifier.supplyNode(point);
+      int ground = amplifier.groundNode(point);
+      int reference = amplifier.restNode(point);
+      double share = amplifier.restShare(point);
+      several.rest();
+      several.push(supply, ground, 1);
+      if (!several.solve()) {
+        return false;
+      }
+      for (int h = 1; h <= HARMONICS; h++) {
+        int at = amplifier.ordinal() * (HARMONICS + 1) + h;
+        railRe[at] = several.re(ground, h) - several.re(supply, h);
+        railIm[at] = several.im(ground, h) - several.im(supply, h);
+        restRe[at] = share * (several.re(ground, h) - several.re(reference, h));
+        restIm[at] = share * (several.im(ground, h) - several.im(reference, h));
+      }
+    }
+    return true;
+  }
+
+  private boolean measureOneByOne(
       Network network, AlternatingSolver solver, DirectStage point, double toneRadians) {
     for (int h = 1; h <= HARMONICS; h++) {
       if (!solver.audio(h * toneRadians)) {
@@ -78,7 +121,6 @@ final class RailDips {
         restIm[at] = share * (solver.im(ground) - solver.im(reference));
       }
     }
-    known = true;
     return true;
   }
 
@@ -91,14 +133,15 @@ final class RailDips {
       lowest = Math.min(lowest, volts);
       highest = Math.max(highest, volts);
     }
+    wave.drawnHarmonics(HARMONICS, drawnRe, drawnIm);
     double most = Double.NEGATIVE_INFINITY;
     double least = 0;
     for (int s = 0; s < OutputWave.SAMPLES; s++) {
       if (wave.volts[s] >= AT_LIMIT * highest) {
-        most = Math.max(most, dip(a, wave.drawn, s, true));
+        most = Math.max(most, dip(a, wave, s, true));
       }
       if (wave.volts[s] <= AT_LIMIT * lowest) {
-        least = Math.max(least, dip(a, wave.drawn, s, false));
+        least = Math.max(least, dip(a, wave, s, false));
       }
     }
     up[a] = Math.max(0, most);
@@ -106,23 +149,15 @@ final class RailDips {
   }
 
   /** The dip at one sample: of rail less rest, or of rest. */
-  private double dip(int a, double[] drawn, int sample, boolean ofUpper) {
+  private double dip(int a, OutputWave wave, int sample, boolean ofUpper) {
     double sum = 0;
     for (int h = 1; h <= HARMONICS; h++) {
       int at = a * (HARMONICS + 1) + h;
       double zr = ofUpper ? railRe[at] - restRe[at] : restRe[at];
       double zi = ofUpper ? railIm[at] - restIm[at] : restIm[at];
-      double real = 0;
-      double imaginary = 0;
-      for (int s = 0; s < drawn.length; s++) {
-        double angle = 2 * Math.PI * ((h * s) % drawn.length) / drawn.length;
-        real += 2.0 / drawn.length * drawn[s] * Math.cos(angle);
-        imaginary -= 2.0 / drawn.length * drawn[s] * Math.sin(angle);
-      }
-      double turn = 2 * Math.PI * ((h * sample) % drawn.length) / drawn.length;
-      double r = zr * real - zi * imaginary;
-      double m = zr * imaginary + zi * real;
-      sum += r * Math.cos(turn) - m * Math.sin(turn);
+      double r = zr * drawnRe[h] - zi * drawnIm[h];
+      double m = zr * drawnIm[h] + zi * drawnRe[h];
+      sum += r * wave.cosine(h * sample) - m * wave.sine(h * sample);
     }
     return sum;
   }

@@ -1,6 +1,8 @@
 package earward.engine.law;
 
 import earward.engine.linear.ComplexLu;
+import earward.engine.linear.HarmonicLu;
+import org.jspecify.annotations.Nullable;
 
 /**
  * The linearised equations of the circuit at one frequency, about a DC point. Node −1 is ground.
@@ -8,12 +10,17 @@ import earward.engine.linear.ComplexLu;
  * <p>Mutable, for one thread.
  */
 public final class AlternatingStage {
+  /** Stands for all of several systems. */
+  private static final int ALL = -1;
+
   private final int nodes;
   private final int size;
   private final ComplexLu audio;
   private final ComplexLu heldCarrier;
   private final ComplexLu freeCarrier;
   private ComplexLu matrix;
+  private @Nullable HarmonicLu several;
+  private int system;
   private final DirectStage point;
   private double omega;
   private int carrierHarmonic;
@@ -89,6 +96,32 @@ public final class AlternatingStage {
     for (int node = 0; node < nodes; node++) {
       matrix.add(node, node, DirectStage.FLOOR_SIEMENS, 0);
     }
+  }
+
+  /** Begins several systems at once, with what is the same in all of them. */
+  public void beginSeveral(HarmonicLu systems) {
+    several = systems;
+    system = ALL;
+    feedFree = false;
+    systems.clear();
+    for (int node = 0; node < nodes; node++) {
+      systems.addToAll(node, node, DirectStage.FLOOR_SIEMENS, 0);
+    }
+  }
+
+  /**
+   * Begins one of several systems: a multiple of the tone (harmonic 0) or of the carrier, in rad/s.
+   */
+  public void beginSystem(int index, double radians, int harmonic, double carrierRadians) {
+    system = index;
+    omega = radians;
+    carrierHarmonic = harmonic;
+    carrierOmega = carrierRadians;
+  }
+
+  /** Goes back to one system at a time. */
+  public void endSeveral() {
+    several = null;
   }
 
   public int size() {
@@ -177,7 +210,13 @@ public final class AlternatingStage {
   /** Adds to one element of the matrix. */
   public void add(int row, int column, double real, double imaginary) {
     if (row >= 0 && column >= 0) {
-      matrix.add(row, column, real, imaginary);
+      if (several == null) {
+        matrix.add(row, column, real, imaginary);
+      } else if (system == ALL) {
+        several.addToAll(row, column, real, imaginary);
+      } else {
+        several.add(system, row, column, real, imaginary);
+      }
     }
   }
 }

@@ -40,6 +40,10 @@ public final class AmplifierLaw extends Law {
   /** Place of each terminal that the type has among the nodes. */
   private final EnumMap<Terminal, Integer> places = new EnumMap<>(Terminal.class);
 
+  /** What of a volt of ripple reaches an output over the gain, with RIPPLE held and without. */
+  private final double heldRipple;
+
+  private final double bareRipple;
   private final CapacitorLaw[] compensation;
   private final CapacitorLaw[] bootstrap;
 
@@ -63,6 +67,8 @@ public final class AmplifierLaw extends Law {
     for (int i = 0; i < terminals.size(); i++) {
       places.put(terminals.get(i), i);
     }
+    heldRipple = Math.pow(10, -model.rippleRejectionDecibels() / 20);
+    bareRipple = Math.pow(10, -model.rippleRejectionBareDecibels() / 20);
     this.compensation = compensation.toArray(CapacitorLaw[]::new);
     this.bootstrap = bootstrap.toArray(CapacitorLaw[]::new);
   }
@@ -366,8 +372,8 @@ public final class AmplifierLaw extends Law {
   }
 
   private void ripple(AlternatingStage stage, int[] nodes, int branch, double scale) {
-    double held = scale * Math.pow(10, -model.rippleRejectionDecibels() / 20);
-    double bare = scale * Math.pow(10, -model.rippleRejectionBareDecibels() / 20);
+    double held = scale * heldRipple;
+    double bare = scale * bareRipple;
     int supply = at(nodes, Terminal.SUPPLY);
     int ground = at(nodes, Terminal.GROUND);
     if (has(Terminal.RIPPLE)) {

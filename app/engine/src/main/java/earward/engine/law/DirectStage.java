@@ -29,6 +29,7 @@ public final class DirectStage {
   private double floorSiemens = FLOOR_SIEMENS;
   private boolean powered = true;
   private boolean detecting;
+  private boolean slopes = true;
 
   /**
    * A stage.
@@ -65,9 +66,17 @@ public final class DirectStage {
     floorSiemens = siemens;
   }
 
-  /** Clears the equations and gives every node its conductance to ground. */
-  public void begin() {
-    matrix.clear();
+  /**
+   * Clears the equations and gives every node its conductance to ground.
+   *
+   * @param withSlopes whether the derivatives are wanted too; without them the matrix stays as it
+   *     is, factors and all
+   */
+  public void begin(boolean withSlopes) {
+    slopes = withSlopes;
+    if (withSlopes) {
+      matrix.clear();
+    }
     Arrays.fill(residual, 0);
     Arrays.fill(flow, 0);
     for (int node = 0; node < nodes; node++) {
@@ -147,6 +156,9 @@ public final class DirectStage {
     double scale = siemens * (Math.abs(va) + Math.abs(vb));
     leaves(a, amperes, scale);
     leaves(b, -amperes, scale);
+    if (!slopes) {
+      return;
+    }
     slope(a, a, siemens);
     slope(a, b, -siemens);
     slope(b, a, -siemens);
@@ -175,7 +187,7 @@ public final class DirectStage {
 
   /** Adds to the derivative of a row by an unknown. */
   public void slope(int row, int by, double amount) {
-    if (row >= 0 && by >= 0) {
+    if (slopes && row >= 0 && by >= 0) {
       matrix.add(row, by, amount);
     }
   }

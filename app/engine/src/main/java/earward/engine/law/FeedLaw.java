@@ -18,6 +18,21 @@ public abstract class FeedLaw extends Law {
   /** Branch whose current the held winding gives; −1 for an untuned feed. */
   public abstract int heldBranch();
 
+  /**
+   * Impedance of a tuned feed's circuit at a multiple of the carrier with its core turned, real
+   * part in Ω; 0 for an untuned feed. It stands in the row and column of {@link #heldBranch}.
+   */
+  public double circuitRealOhms(
+      DirectStage point, int harmonic, double carrierRadians, double turnedRadians) {
+    return 0;
+  }
+
+  /** The same, imaginary part. */
+  public double circuitImaginaryOhms(
+      DirectStage point, int harmonic, double carrierRadians, double turnedRadians) {
+    return 0;
+  }
+
   /** Rp of a tuned feed, in Ω; NaN for an untuned one. */
   public abstract double tankOhms(DirectStage point);
 

@@ -24,6 +24,11 @@ public abstract class Law {
     return 0;
   }
 
+  /** Whether what {@link #alternating} adds about one DC point is the same at all frequencies. */
+  public boolean steady() {
+    return false;
+  }
+
   /** Takes over the values of a case before its first step. */
   public void prepare(DirectStage stage) {}
 

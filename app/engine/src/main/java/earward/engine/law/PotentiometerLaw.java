@@ -86,6 +86,11 @@ final class PotentiometerLaw extends Law {
   }
 
   @Override
+  public boolean steady() {
+    return true;
+  }
+
+  @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
     for (int k = 0; k < pieces; k++) {
       stage.admittance(nodes[PIECES[k][0]], nodes[PIECES[k][1]], siemens(k, stage), 0);

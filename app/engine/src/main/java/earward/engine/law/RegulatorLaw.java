@@ -52,6 +52,11 @@ public final class RegulatorLaw extends Law implements Heated {
   }
 
   @Override
+  public boolean steady() {
+    return true;
+  }
+
+  @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
     DirectStage point = stage.point();
     double slope = Soft.plusSlope(push(point, nodes)) / model.outputOhms();

@@ -12,6 +12,11 @@ final class ResistiveLaw extends Law {
   }
 
   @Override
+  public boolean steady() {
+    return true;
+  }
+
+  @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
     stage.admittance(nodes[0], nodes[1], 1 / value(stage, 0), 0);
   }

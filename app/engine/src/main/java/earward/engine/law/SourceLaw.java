@@ -63,6 +63,11 @@ public final class SourceLaw extends Law {
   }
 
   @Override
+  public boolean steady() {
+    return true;
+  }
+
+  @Override
   void stampAlternating(AlternatingStage stage, int[] nodes) {
     stage.admittance(nodes[0], nodes[1], siemens(stage.point()), 0);
   }

@@ -104,13 +104,35 @@ final class TunedFeedLaw extends FeedLaw {
    * is turned by the core: 1/(ωc·L) = ωc·C − 2C·(ωc − ω0).
    */
   private void tank(AlternatingStage stage) {
-    double conductance = 1 / value(stage, PARALLEL_OHMS);
-    double harmonic = stage.carrierHarmonic();
-    double reactive = conductance * value(stage, QUALITY);
-    double turned = 2 * reactive * stage.turnedRadians() / stage.carrierOmega();
-    double susceptance = reactive * (harmonic - 1 / harmonic) + turned / harmonic;
-    double norm = conductance * conductance + susceptance * susceptance;
-    stage.add(branch(0), branch(0), conductance / norm, -susceptance / norm);
+    int harmonic = stage.carrierHarmonic();
+    double carrier = stage.carrierOmega();
+    double turned = stage.turnedRadians();
+    stage.add(
+        branch(0),
+        branch(0),
+        circuitRealOhms(stage.point(), harmonic, carrier, turned),
+        circuitImaginaryOhms(stage.point(), harmonic, carrier, turned));
+  }
+
+  @Override
+  public double circuitRealOhms(
+      DirectStage point, int harmonic, double carrierRadians, double turnedRadians) {
+    double conductance = 1 / value(point, PARALLEL_OHMS);
+    double susceptance = susceptance(point, harmonic, turnedRadians / carrierRadians);
+    return conductance / (conductance * conductance + susceptance * susceptance);
+  }
+
+  @Override
+  public double circuitImaginaryOhms(
+      DirectStage point, int harmonic, double carrierRadians, double turnedRadians) {
+    double conductance = 1 / value(point, PARALLEL_OHMS);
+    double susceptance = susceptance(point, harmonic, turnedRadians / carrierRadians);
+    return -susceptance / (conductance * conductance + susceptance * susceptance);
+  }
+
+  private double susceptance(DirectStage point, double harmonic, double turned) {
+    double reactive = value(point, QUALITY) / value(point, PARALLEL_OHMS);
+    return reactive * (harmonic - 1 / harmonic) + 2 * reactive * turned / harmonic;
   }
 
   private void audio(AlternatingStage stage, int[] nodes) {
