@@ -107,6 +107,23 @@ class DomainTest {
   }
 
   @Test
+  void pulsesNarrowerThanTheFinestSamples() {
+    // A pulse is about √(nVt/E) wide: at 16 V 0.040 rad, less than 128 samples leave between two.
+    List<Finding> found =
+        findings(
+            new TrialCircuit()
+                .generator(0.1, "in")
+                .diode("detector.d1", 1e-9, 1, 0.1, "in", "out")
+                .resistor("detector.r", 1e6, "out", Circuit.GROUND)
+                .capacitor("detector.c", 1e-9, "out", Circuit.GROUND)
+                .signal(16, 0.3, 400));
+    assertThat(found)
+        .filteredOn(finding -> finding.code().equals("harmonics-cut-off"))
+        .extracting(Finding::sentence)
+        .anyMatch(s -> s.contains("narrower") && s.contains("'detector.d1'"));
+  }
+
+  @Test
   void aKitThatCannotBeSolvedNamesItsWorstNode() {
     // a value that is no number, as a broken batch might bring it
     CompiledCircuit compiled =

@@ -238,6 +238,25 @@ final class BipolarLaw extends Law implements Heated, CarrierDriven {
     return sign * saturation * (towards - back) * early(stage, nodes);
   }
 
+  /** Heat, in W: what enters by collector and by base, each against the emitter. */
+  @Override
+  public double watts(DirectStage stage) {
+    if (isOpen(stage)) {
+      return 0;
+    }
+    int[] nodes = nodes(stage);
+    double emitter = stage.volts(nodes[2]);
+    double base = (stage.volts(nodes[1]) - stage.branch(branch(0))) / model.baseOhms();
+    double back = 0;
+    if (!apart(stage)) {
+      double thermal = Temperature.thermalVolts(stage.celsius());
+      double exponent = backward(stage, nodes) / thermal;
+      back = sign * saturation(stage) * (exponential(exponent) - 1) / model.reverseGain();
+    }
+    return (amperes(stage) - back) * (stage.volts(nodes[0]) - emitter)
+        + base * (stage.volts(nodes[1]) - emitter);
+  }
+
   @Override
   void stampWaveform(WaveformStage stage, int[] nodes) {
     DirectStage point = stage.point();
