@@ -19,6 +19,7 @@ import picocli.CommandLine.Spec;
       SheetCommand.class,
       FiguresCommand.class,
       ReviewCommand.class,
+      BatchCommand.class,
       ProveCommand.class,
       BlocksCommand.class,
       DesktopCommand.class

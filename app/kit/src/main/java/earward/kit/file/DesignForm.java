@@ -42,7 +42,7 @@ final class DesignForm {
         references.isPresent() ? ReferencesForm.read(references.get()) : References.NONE;
     SheetOptions options =
         sheet.isPresent() ? SheetForm.readSheet(sheet.get()) : SheetOptions.USUAL;
-    Bench owned = bench.isPresent() ? SheetForm.readBench(bench.get()) : Bench.USUAL;
+    Bench owned = bench.isPresent() ? BenchForm.read(bench.get()) : Bench.USUAL;
     try {
       return new KitDesign(
           title,
@@ -120,7 +120,7 @@ final class DesignForm {
   /** The usual bench is not written, unless the file had one. */
   private static Json bench(KitDesign design) {
     boolean usual = design.bench().equals(Bench.USUAL) && !design.written().has("bench");
-    return usual ? Json.object(List.of()) : SheetForm.writeBench(design.bench());
+    return usual ? Json.object(List.of()) : BenchForm.write(design.bench());
   }
 
   private static Json testPoint(AddedTestPoint point) {

@@ -6,13 +6,17 @@ import earward.block.figure.Quantity;
 import earward.engine.CircuitException;
 import earward.engine.CompiledCircuit;
 import earward.engine.Engine;
+import earward.engine.Slot;
 import earward.engine.SolveCase;
 import earward.engine.SolveOutcome;
 import java.util.EnumSet;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.Predicate;
+import java.util.stream.Collectors;
 
 /** Solves an assembled kit in all its cases. */
 public final class KitSolver {
@@ -161,5 +165,46 @@ public final class KitSolver {
             .toList();
     CompiledCircuit circuit = Engine.compile(assembly.circuit(), cases, wanted);
     return new CompiledKit(assembly, circuit, Map.of(), Map.of());
+  }
+
+  /**
+   * The kit compiled for those of its figures that are asked for, with no more cases than they
+   * need. The ambient is that of a row of values, but for the hottest case: a caller sets it.
+   *
+   * @param assembly a complete one
+   * @param asked which figures of {@link #compile} are wanted
+   * @throws CircuitException with a finding when the circuit makes no sense to the engine
+   */
+  public static CompiledKit compileKits(Assembly assembly, Predicate<FigureName> asked) {
+    KitCases cases = new KitCases(assembly);
+    List<FigureName> wanted =
+        WantedFigures.of(assembly, new Places(assembly.circuit()), true).stream()
+            .filter(asked)
+            .toList();
+    Set<CaseName> needed =
+        wanted.stream().map(FigureName::caseName).collect(Collectors.toUnmodifiableSet());
+    Map<String, Double> deepest =
+        needed.contains(CaseName.DEEPEST) ? TurnScan.deepest(assembly, cases) : Map.of();
+    Map<String, Double> worst =
+        needed.contains(CaseName.WORST_TURN) ? TurnScan.test(assembly, cases) : Map.of();
+    List<SolveCase> solved =
+        cases.all(deepest, worst).stream()
+            .filter(one -> needed.contains(one.name()))
+            .map(KitSolver::atTheAmbientOfTheRow)
+            .toList();
+    Set<CaseName> there =
+        solved.stream().map(SolveCase::name).collect(Collectors.toUnmodifiableSet());
+    List<FigureName> found = wanted.stream().filter(f -> there.contains(f.caseName())).toList();
+    CompiledCircuit circuit = Engine.compile(assembly.circuit(), solved, found);
+    return new CompiledKit(assembly, circuit, deepest, worst);
+  }
+
+  private static SolveCase atTheAmbientOfTheRow(SolveCase one) {
+    if (one.name().equals(CaseName.HOTTEST)) {
+      return one;
+    }
+    Map<String, Double> overrides = new HashMap<>(one.overrides());
+    overrides.remove(Slot.AMBIENT_CELSIUS);
+    return new SolveCase(one.name(), one.drive(), overrides);
   }
 }

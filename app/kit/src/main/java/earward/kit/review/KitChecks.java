@@ -16,15 +16,16 @@ import java.util.List;
  * What is wanted of the whole path, as data like the checks of blocks. A figure that a path does
  * not have, since it ends earlier, is not asked for.
  */
-final class KitChecks {
+public final class KitChecks {
   /** What these checks are about. */
-  static final String SUBJECT = "path";
+  public static final String SUBJECT = "path";
 
   private static final String SOURCE = "the kit design's own conditions";
 
   private KitChecks() {}
 
-  static List<Check> of(Assembly assembly) {
+  /** The checks of an assembly, in the order in which they are held. */
+  public static List<Check> of(Assembly assembly) {
     Conditions core = assembly.design().conditions().core();
     WantedLimits wanted = assembly.design().conditions().wanted();
     List<Check> checks = new ArrayList<>();
