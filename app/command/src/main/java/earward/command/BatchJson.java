@@ -40,8 +40,10 @@ final class BatchJson {
     result.readings().stream()
         .filter(spread -> spread.distribution().count() > 0)
         .forEach(spread -> readings.add(reading(assembly, spread)));
-    result.worst().ifPresentOrElse(
-        worst -> root.set("worstKit", worst(assembly, worst)), () -> root.putNull("worstKit"));
+    result
+        .worst()
+        .ifPresentOrElse(
+            worst -> root.set("worstKit", worst(assembly, worst)), () -> root.putNull("worstKit"));
     return root;
   }
 

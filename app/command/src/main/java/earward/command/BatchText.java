@@ -58,8 +58,7 @@ final class BatchText {
       to.println(result.unsolved() + " kits found no solution; they count as failed.");
     }
     if (!result.notLookedAt().isEmpty()) {
-      to.println(
-          "Not looked at (--full does): " + String.join(", ", result.notLookedAt()) + ".");
+      to.println("Not looked at (--full does): " + String.join(", ", result.notLookedAt()) + ".");
     }
   }
 
@@ -119,8 +118,7 @@ final class BatchText {
         .orElse("");
   }
 
-  private static void worst(
-      PrintWriter to, Assembly assembly, BatchResult result, WorstKit worst) {
+  private static void worst(PrintWriter to, Assembly assembly, BatchResult result, WorstKit worst) {
     to.println(
         "Worst kit: number "
             + worst.number()

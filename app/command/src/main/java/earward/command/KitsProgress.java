@@ -27,8 +27,7 @@ final class KitsProgress implements BatchProgress {
       double secondsLeft = (double) (now - start) / NANOS * (kits - done) / done;
       Faults.say(
           messages,
-          String.format(
-              Locale.ROOT, "%d of %d kits, about %.0f s to go", done, kits, secondsLeft));
+          String.format(Locale.ROOT, "%d of %d kits, about %.0f s to go", done, kits, secondsLeft));
       messages.flush();
       said = now;
     }

@@ -86,7 +86,11 @@ public record Bench(List<Instrument> instruments, AsWritten written) {
     public AudioRange {
       if (!(lowHertz > 0 && highHertz > lowHertz)) {
         throw new IllegalArgumentException(
-            "an instrument reads audio from " + lowHertz + " to " + highHertz + " Hz; wanted rising");
+            "an instrument reads audio from "
+                + lowHertz
+                + " to "
+                + highHertz
+                + " Hz; wanted rising");
       }
       if (!(stepVolts > 0 && stepVolts < 1e3)) {
         throw new IllegalArgumentException(

@@ -44,8 +44,7 @@ final class BenchForm {
     }
     double ohms = one.requiredQuantity(INPUT, Unit.OHM);
     double counts = one.quantity(COUNTS, Unit.NUMBER, Instrument.USUAL_COUNTS);
-    return new Instrument(
-        name, ohms, accuracy, (int) Math.max(1, counts), audio, one.written());
+    return new Instrument(name, ohms, accuracy, (int) Math.max(1, counts), audio, one.written());
   }
 
   private static AudioRange audio(MembersReader in) throws DesignFileException {
@@ -59,8 +58,7 @@ final class BenchForm {
 
   static Json.Members write(Bench bench) {
     return new MembersWriter(bench.written())
-        .nested(
-            INSTRUMENTS, Json.array(bench.instruments().stream().map(BenchForm::one).toList()))
+        .nested(INSTRUMENTS, Json.array(bench.instruments().stream().map(BenchForm::one).toList()))
         .done();
   }
 

@@ -147,19 +147,14 @@ final class BatchCount {
     List<ReadingSpread> spreads = new ArrayList<>();
     List<FigureName> names = plan.readings();
     for (int i = 0; i < readings; i++) {
-      spreads.add(
-          new ReadingSpread(names.get(i), at(nominal, i), tallies.get(i).distribution()));
+      spreads.add(new ReadingSpread(names.get(i), at(nominal, i), tallies.get(i).distribution()));
     }
     List<CheckOutcome> outcomes = new ArrayList<>();
     for (int i = 0; i < failed.length; i++) {
       Distribution distribution = tallies.get(readings + i).distribution();
       outcomes.add(
           new CheckOutcome(
-              plan.checks().get(i),
-              seen[i],
-              failed[i],
-              at(nominal, readings + i),
-              distribution));
+              plan.checks().get(i), seen[i], failed[i], at(nominal, readings + i), distribution));
     }
     return new BatchResult(
         order, kits, passed, unsolved, spreads, outcomes, plan.notLookedAt(), worstKit());

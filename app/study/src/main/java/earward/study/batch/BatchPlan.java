@@ -120,12 +120,10 @@ public final class BatchPlan {
       namesOf(each.check().figure()).stream()
           .filter(there::contains)
           .findFirst()
-          .ifPresentOrElse(
-              name -> held.add(at(each, name)), () -> left.add(each.check().code()));
+          .ifPresentOrElse(name -> held.add(at(each, name)), () -> left.add(each.check().code()));
     }
     List<FigureName> readings = readings(assembly).stream().filter(there::contains).toList();
-    return new BatchPlan(
-        assembly, kit, draw, held, left.stream().distinct().toList(), readings);
+    return new BatchPlan(assembly, kit, draw, held, left.stream().distinct().toList(), readings);
   }
 
   private static boolean isUsual(FigureName figure) {
@@ -155,8 +153,7 @@ public final class BatchPlan {
 
   /** A block's own place stands for the seam by which it is entered. */
   private static List<FigureName> namesOf(FigureName name) {
-    return List.of(
-        name, new FigureName("seam." + name.place(), name.quantity(), name.caseName()));
+    return List.of(name, new FigureName("seam." + name.place(), name.quantity(), name.caseName()));
   }
 
   private static BatchCheck at(BatchCheck held, FigureName name) {
@@ -192,8 +189,7 @@ public final class BatchPlan {
         .parts()
         .forEach(
             part -> {
-              names.add(
-                  new FigureName(part.name(), Quantity.DISSIPATION_WATTS, CaseName.HOTTEST));
+              names.add(new FigureName(part.name(), Quantity.DISSIPATION_WATTS, CaseName.HOTTEST));
               names.add(new FigureName(part.name(), Quantity.JUNCTION_CELSIUS, CaseName.HOTTEST));
             });
     return names;

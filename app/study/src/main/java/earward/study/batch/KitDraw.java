@@ -23,8 +23,8 @@ import java.util.List;
  *
  * <p>Passive parts lie evenly within their tolerance; saturation currents evenly in the logarithm
  * within the band of their own model, or by the factor of their class. Ceramic capacitors also move
- * with the room's temperature: class 1 by ±30 ppm/K (C0G, IEC 60384-8), class 2 by ±15 % over
- * 100 K (X7R, IEC 60384-9, both from memory).
+ * with the room's temperature: class 1 by ±30 ppm/K (C0G, IEC 60384-8), class 2 by ±15 % over 100 K
+ * (X7R, IEC 60384-9, both from memory).
  */
 public final class KitDraw {
   /** From here on a ceramic capacitor counts as one of class 2 (common practice), in F. */
@@ -194,7 +194,8 @@ public final class KitDraw {
     }
     double celsius =
         ambientCelsius
-            + habits.ambientKelvin() * Chance.evenly(seed, kit, Chance.stream(Slot.AMBIENT_CELSIUS));
+            + habits.ambientKelvin()
+                * Chance.evenly(seed, kit, Chance.stream(Slot.AMBIENT_CELSIUS));
     row[ambientSlot] = celsius;
     for (Ceramic ceramic : ceramics) {
       double coefficient = ceramic.perKelvin() * Chance.evenly(seed, kit, ceramic.stream());

@@ -9,8 +9,8 @@ import java.util.Objects;
  * @param kits kits that are drawn, from 2 to a million
  * @param seed of their draws
  * @param threads how many solve at a time; it changes no result
- * @param withSignal whether readings with the test signal have limits too; without it the kits
- *     take a hundredth of the time
+ * @param withSignal whether readings with the test signal have limits too; without it the kits take
+ *     a hundredth of the time
  * @param habits what is taken for granted beside the tolerances
  */
 public record LimitOrder(int kits, long seed, int threads, boolean withSignal, Habits habits) {

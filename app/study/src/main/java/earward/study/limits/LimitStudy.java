@@ -33,8 +33,9 @@ public final class LimitStudy {
     this.order = order;
     plan = BatchPlan.of(assembly, this::asked, order.habits());
     Bench bench = assembly.design().bench();
-    meters = (bench.instruments().isEmpty() ? Bench.USUAL : bench)
-        .instruments().stream().map(Meter::new).toList();
+    meters =
+        (bench.instruments().isEmpty() ? Bench.USUAL : bench)
+            .instruments().stream().map(Meter::new).toList();
   }
 
   /**

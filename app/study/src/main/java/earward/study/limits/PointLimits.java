@@ -14,8 +14,8 @@ import java.util.Objects;
  * @param expected reading of the nominal kit on that instrument, its loading included
  * @param low lowest reading of a healthy kit, at the nominal supply reading
  * @param high highest reading of a healthy kit, at the nominal supply reading
- * @param perSupplyVolt by how much both move for each volt of the builder's own supply reading above
- *     the nominal one; 0 where they do not follow it
+ * @param perSupplyVolt by how much both move for each volt of the builder's own supply reading
+ *     above the nominal one; 0 where they do not follow it
  * @param loadedShare share of the voltage that is left with the instrument across the point
  */
 public record PointLimits(

@@ -3,7 +3,8 @@ package earward.study.limits;
 /**
  * How many of the drawn kits limits must hold, so that a share of all kits passes them: the
  * distribution-free tolerance limit (Wilks 1941). With the r-th smallest of n kits as the limit, at
- * least a share p passes with the probability that at most r − 1 of n kits lie below the p-quantile.
+ * least a share p passes with the probability that at most r − 1 of n kits lie below the
+ * p-quantile.
  */
 final class ToleranceRank {
   private static final double SURE = 0.95;

@@ -117,8 +117,7 @@ class KitDrawTest {
     CompiledCircuit compiled = compiled(circuit);
     Tolerances usual = resistorsOf(0.05);
     KitDraw one = new KitDraw(circuit, compiled, usual, 25, Habits.USUAL);
-    KitDraw other =
-        new KitDraw(circuit, compiled, usual.with("d.upper", 0.01), 25, Habits.USUAL);
+    KitDraw other = new KitDraw(circuit, compiled, usual.with("d.upper", 0.01), 25, Habits.USUAL);
     double[] before = one.nominal();
     double[] after = one.nominal();
     int upper = compiled.slot("d.upper:ohms");
@@ -127,8 +126,7 @@ class KitDrawTest {
       one.draw(1, kit, before);
       other.draw(1, kit, after);
       assertThat(after[lower]).isEqualTo(before[lower]);
-      assertThat(after[upper] / 10e3 - 1)
-          .isCloseTo((before[upper] / 10e3 - 1) / 5, within(1e-12));
+      assertThat(after[upper] / 10e3 - 1).isCloseTo((before[upper] / 10e3 - 1) / 5, within(1e-12));
     }
   }
 

@@ -20,13 +20,11 @@ class MeterTest {
   }
 
   private static Meter needle() {
-    return new Meter(
-        new Instrument("needle", 20e3, 0.03, 0, Optional.empty(), AsWritten.NEW));
+    return new Meter(new Instrument("needle", 20e3, 0.03, 0, Optional.empty(), AsWritten.NEW));
   }
 
   private static Meter audio(AudioRange range) {
-    return new Meter(
-        new Instrument("audio", 10e6, 0.005, 2000, Optional.of(range), AsWritten.NEW));
+    return new Meter(new Instrument("audio", 10e6, 0.005, 2000, Optional.of(range), AsWritten.NEW));
   }
 
   /** Common practice: 9.00 V on a 20 V range at ±(0.5 % + 2 digits) is ±0.065 V. */
