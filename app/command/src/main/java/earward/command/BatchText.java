@@ -30,7 +30,7 @@ final class BatchText {
     to.println();
     readings(to, reviewed.solved().assembly(), result);
     to.println();
-    result.worst().ifPresent(worst -> worst(to, reviewed.solved().assembly(), result, worst));
+    result.worst().ifPresent(worst -> worst(to, reviewed.solved().assembly(), worst));
     Habits habits = result.order().habits();
     to.println(
         String.format(
@@ -118,7 +118,7 @@ final class BatchText {
         .orElse("");
   }
 
-  private static void worst(PrintWriter to, Assembly assembly, BatchResult result, WorstKit worst) {
+  private static void worst(PrintWriter to, Assembly assembly, WorstKit worst) {
     to.println(
         "Worst kit: number "
             + worst.number()
