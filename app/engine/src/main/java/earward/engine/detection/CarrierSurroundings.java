@@ -9,6 +9,9 @@ package earward.engine.detection;
  * not used, since the mean belongs to the audio rate.
  */
 public final class CarrierSurroundings {
+  /** An open voltage whose rounding is looked at, in V. */
+  private static final double LEAST_VOLTS = 0.1;
+
   private final int devices;
   private final int carrierHarmonics;
   private final int audioHarmonics;
@@ -125,7 +128,17 @@ public final class CarrierSurroundings {
         && near(carrierImaginaryOhms, other.carrierImaginaryOhms, share)
         && near(audioRealOhms, other.audioRealOhms, share)
         && near(audioImaginaryOhms, other.audioImaginaryOhms, share)
-        && near(openVolts, other.openVolts, share);
+        && nearVolts(other, share);
+  }
+
+  /** As much as of the other rows, or of a tenth of a volt: without bias they are nothing. */
+  private boolean nearVolts(CarrierSurroundings other, double share) {
+    boolean near = true;
+    for (int i = 0; i < devices; i++) {
+      double off = Math.abs(openVolts[i] - other.openVolts[i]);
+      near &= off <= share * (LEAST_VOLTS + Math.abs(openVolts[i]));
+    }
+    return near;
   }
 
   private static boolean near(double[] one, double[] other, double share) {

@@ -32,6 +32,10 @@ public final class EnvelopeSolver {
 
   final double[] state;
   private final JointNewton joint;
+
+  /** The short way for a single diode; null where there are more devices. */
+  private final @Nullable DiodeNewton single;
+
   private final double[] trial;
   final double[] junctions;
   private final double[] savedJunctions;
@@ -56,10 +60,14 @@ public final class EnvelopeSolver {
 
   public final double[] audioImaginary;
 
-  /** Carrier harmonics of the current at each sample, index (sample·(K+1) + k)·devices + device. */
-  public final double[] carrierReal;
+  /** See {@link #carrierReal()}; worked out when they are first asked for. */
+  private final double[] carrierRe;
 
-  public final double[] carrierImaginary;
+  private final double[] carrierIm;
+  private boolean shown = true;
+  private boolean prepared;
+  private double coarseness = 1;
+  private PortLaw[] devicesLaws = new PortLaw[0];
 
   /** Envelope at the held node at each sample: e.m.f. or tuned node. */
   public final double[] feedReal;
@@ -97,12 +105,13 @@ public final class EnvelopeSolver {
     meanAmperes = new double[devices * audioSamples];
     audioReal = new double[audioSamples / 2 * devices];
     audioImaginary = new double[audioSamples / 2 * devices];
-    carrierReal = new double[audioSamples * (cycle.harmonics + 1) * devices];
-    carrierImaginary = new double[carrierReal.length];
+    carrierRe = new double[audioSamples * (cycle.harmonics + 1) * devices];
+    carrierIm = new double[carrierRe.length];
     feedReal = new double[audioSamples];
     feedImaginary = new double[audioSamples];
     reversePeakVolts = new double[devices];
     joint = new JointNewton(this, blocks * audioSamples);
+    single = devices == 1 ? new DiodeNewton(this, blocks * audioSamples) : null;
   }
 
   /**
@@ -116,8 +125,51 @@ public final class EnvelopeSolver {
     return slopes[(sample * blocks + row) * blocks + column];
   }
 
+  /** Carrier harmonics of the current at each sample, index (sample·(K+1) + k)·devices + device. */
+  public double[] carrierReal() {
+    show();
+    return carrierRe;
+  }
+
+  /** The same, imaginary parts. */
+  public double[] carrierImaginary() {
+    show();
+    return carrierIm;
+  }
+
+  private void show() {
+    CarrierSurroundings around = last;
+    if (shown || around == null) {
+      return;
+    }
+    shown = true;
+    prepare(around);
+    int width = (cycle.harmonics + 1) * devices;
+    int row = devices * cycle.samples;
+    for (int s = 0; s < warmSamples; s++) {
+      cycle.harmonics(around, junctions, s * row, exact ? cycle.harmonics : SHOWN);
+      System.arraycopy(cycle.harmonicReal, 0, carrierRe, s * width, width);
+      System.arraycopy(cycle.harmonicImaginary, 0, carrierIm, s * width, width);
+    }
+    for (int s = warmSamples; s < samples; s++) {
+      System.arraycopy(carrierRe, 0, carrierRe, s * width, width);
+      System.arraycopy(carrierIm, 0, carrierIm, s * width, width);
+    }
+  }
+
+  /** Makes the general cycle ready; the short way needs none. */
+  private void prepare(CarrierSurroundings around) {
+    if (!prepared) {
+      cycle.prepare(around, devicesLaws);
+      prepared = true;
+    }
+  }
+
   private void refine() {
     CarrierSurroundings around = last;
+    if (around != null) {
+      prepare(around);
+    }
     for (int s = 0; s < warmSamples && around != null; s++) {
       if (cycle.exactSlopes(around, junctions, s * devices * cycle.samples)) {
         System.arraycopy(cycle.slopes, 0, slopes, s * blocks * blocks, blocks * blocks);
@@ -133,6 +185,9 @@ public final class EnvelopeSolver {
   public double aliasing() {
     double off = 0;
     double most = 0;
+    if (last != null) {
+      prepare(last);
+    }
     for (int s = 0; s < warmSamples; s += Math.max(1, warmSamples / 8)) {
       off = Math.max(off, cycle.aliasing(junctions, s * devices * cycle.samples));
     }
@@ -189,6 +244,9 @@ public final class EnvelopeSolver {
     System.arraycopy(junctions, 0, keptJunctions, 0, junctions.length);
     if (warm && warmSamples > 1 && last != null) {
       joint.keep(last);
+      if (single != null) {
+        single.keep(last);
+      }
     }
     keptWarm = warm;
     keptSamples = warmSamples;
@@ -196,10 +254,21 @@ public final class EnvelopeSolver {
 
   /** Goes back to the solution that was kept, so that no former solve leaves a trace. */
   public void recall() {
+    if (single != null) {
+      single.recall();
+    }
     System.arraycopy(keptState, 0, state, 0, state.length);
     System.arraycopy(keptJunctions, 0, junctions, 0, junctions.length);
     warm = keptWarm;
     warmSamples = keptSamples;
+  }
+
+  /**
+   * Sets how many times the error of rounding the short way for a single diode may leave from now
+   * on; 1 is the start.
+   */
+  public void coarser(double times) {
+    coarseness = times;
   }
 
   /** Number of carrier harmonics, K: what the surroundings must hold. */
@@ -236,13 +305,24 @@ public final class EnvelopeSolver {
       double peakVolts,
       double depth,
       double toneRadians) {
-    cycle.prepare(around, laws);
+    devicesLaws = laws;
+    prepared = false;
+    shown = false;
     gentleVolts = laws[0].gentleVolts();
     last = around;
     refined = false;
     int wanted = depth == 0 ? 1 : samples;
     boolean solved = false;
-    if (warm && warmSamples == wanted) {
+    if (warm && warmSamples == wanted && single != null && laws[0] instanceof JunctionLaw law) {
+      solved = single.solve(around, law, peakVolts, depth, toneRadians, wanted, coarseness);
+      if (!solved) {
+        single.undo();
+      }
+    }
+    if (!solved) {
+      prepare(around);
+    }
+    if (!solved && warm && warmSamples == wanted) {
       solved = joint.solve(around, peakVolts, depth, toneRadians, wanted);
       if (!solved) {
         joint.undo();
@@ -261,7 +341,7 @@ public final class EnvelopeSolver {
     warm = solved;
     warmSamples = wanted;
     if (solved) {
-      collect(around, wanted);
+      collect(wanted);
     }
     return solved;
   }
@@ -437,14 +517,7 @@ public final class EnvelopeSolver {
             + around.loadImaginarySiemens * real;
   }
 
-  private void collect(CarrierSurroundings around, int count) {
-    int width = (cycle.harmonics + 1) * devices;
-    int row = devices * cycle.samples;
-    for (int s = 0; s < count; s++) {
-      cycle.harmonics(around, junctions, s * row, exact ? cycle.harmonics : SHOWN);
-      System.arraycopy(cycle.harmonicReal, 0, carrierReal, s * width, width);
-      System.arraycopy(cycle.harmonicImaginary, 0, carrierImaginary, s * width, width);
-    }
+  private void collect(int count) {
     if (count == 1) {
       repeatFirst();
     }
@@ -469,11 +542,6 @@ public final class EnvelopeSolver {
   private void repeatFirst() {
     for (int d = devices - 1; d >= 0; d--) {
       Arrays.fill(meanAmperes, d * samples, (d + 1) * samples, meanAmperes[d]);
-    }
-    int width = (cycle.harmonics + 1) * devices;
-    for (int s = 1; s < samples; s++) {
-      System.arraycopy(carrierReal, 0, carrierReal, s * width, width);
-      System.arraycopy(carrierImaginary, 0, carrierImaginary, s * width, width);
     }
     Arrays.fill(feedReal, feedReal[0]);
     Arrays.fill(feedImaginary, feedImaginary[0]);

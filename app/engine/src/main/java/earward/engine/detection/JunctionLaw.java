@@ -18,6 +18,12 @@ public final class JunctionLaw extends PortLaw {
   private double builtInVolts;
   private double gradingExponent;
   private double breakdownVolts;
+  private final PowerTable power = new PowerTable();
+
+  /** The exponent for which {@link #kneePower} holds. */
+  private double kneeExponent = Double.NaN;
+
+  private double kneePower;
 
   /** A law without figures yet. */
   public JunctionLaw() {
@@ -50,6 +56,11 @@ public final class JunctionLaw extends PortLaw {
     this.builtInVolts = builtInVolts;
     this.gradingExponent = gradingExponent;
     this.breakdownVolts = breakdownVolts;
+    if (gradingExponent != kneeExponent) {
+      kneeExponent = gradingExponent;
+      kneePower = Math.pow(0.5, -gradingExponent - 1);
+      power.set(-gradingExponent);
+    }
   }
 
   /** Current in amperes at a junction voltage. */
@@ -91,9 +102,9 @@ public final class JunctionLaw extends PortLaw {
   void charges(double volts) {
     double here = Math.min(volts, builtInVolts / 2);
     double left = 1 - here / builtInVolts;
-    double power = gradingExponent == 0.5 ? 1 / Math.sqrt(left) : Math.pow(left, -gradingExponent);
-    farads = junctionFarads * power;
-    coulombs = junctionFarads * builtInVolts / (1 - gradingExponent) * (1 - left * power);
+    double grown = gradingExponent == 0.5 ? 1 / Math.sqrt(left) : power.of(left);
+    farads = junctionFarads * grown;
+    coulombs = junctionFarads * builtInVolts / (1 - gradingExponent) * (1 - left * grown);
     if (volts > here) {
       double over = volts - here;
       double slope = capacitanceSlopeAtKnee();
@@ -138,6 +149,16 @@ public final class JunctionLaw extends PortLaw {
     return saturationAmperes;
   }
 
+  /** n·Vt, in V. */
+  double scaledThermalVolts() {
+    return scaledThermalVolts;
+  }
+
+  /** Above this voltage breakdown adds nothing, in V. */
+  double leastVolts() {
+    return FAR * scaledThermalVolts - breakdownVolts;
+  }
+
   /** Conductance in parallel, in S. */
   public double leakageSiemens() {
     return leakageSiemens;
@@ -159,7 +180,7 @@ public final class JunctionLaw extends PortLaw {
   }
 
   private double capacitanceSlopeAtKnee() {
-    return junctionFarads * gradingExponent / builtInVolts * Math.pow(0.5, -gradingExponent - 1);
+    return junctionFarads * gradingExponent / builtInVolts * kneePower;
   }
 
   private static double slope(double exponent) {

@@ -66,34 +66,24 @@ final class AudioSignal {
   }
 
   /** Writes the wave of an unknown; returns the largest magnitude. */
-  double wave(int unknown, double[] into, double[] cosine, double[] sine) {
-    int samples = into.length;
+  double wave(int unknown, double[] into) {
+    Arrays.fill(into, 0);
+    for (int h = 1; h <= harmonics && unknown >= 0; h++) {
+      int at = h * size + unknown;
+      Turns.add(h, re[at], im[at], into);
+    }
     double largest = 0;
-    for (int s = 0; s < samples; s++) {
-      double sum = 0;
-      for (int h = 1; h <= harmonics; h++) {
-        int turn = (h * s) % samples;
-        sum += re(h, unknown) * cosine[turn] - im(h, unknown) * sine[turn];
-      }
-      into[s] = sum;
-      largest = Math.max(largest, Math.abs(sum));
+    for (double value : into) {
+      largest = Math.max(largest, Math.abs(value));
     }
     return largest;
   }
 
   /** Makes an output follow a wave: each harmonic's change is added through the output's column. */
-  void replace(
-      AudioTable table, int column, int node, double[] wave, double[] cosine, double[] sine) {
-    int samples = wave.length;
+  void replace(AudioTable table, int column, int node, double[] wave) {
     for (int h = 1; h <= harmonics; h++) {
-      double real = 0;
-      double imaginary = 0;
-      for (int s = 0; s < samples; s++) {
-        int turn = (h * s) % samples;
-        real += 2.0 / samples * wave[s] * cosine[turn];
-        imaginary -= 2.0 / samples * wave[s] * sine[turn];
-      }
-      add(table, h, column, real - re(h, node), imaginary - im(h, node));
+      double real = Turns.real(h, wave) - re(h, node);
+      add(table, h, column, real, Turns.imaginary(h, wave) - im(h, node));
     }
   }
 }

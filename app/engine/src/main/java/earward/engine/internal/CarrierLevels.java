@@ -39,8 +39,8 @@ final class CarrierLevels {
       for (int j = 0; j < ports; j++) {
         double r = difference(work.carrierTable, harmonic, j + 1, plus, minus, true);
         double m = difference(work.carrierTable, harmonic, j + 1, plus, minus, false);
-        double ir = solved.carrierReal[s * width + harmonic * ports + j];
-        double ii = solved.carrierImaginary[s * width + harmonic * ports + j];
+        double ir = solved.carrierReal()[s * width + harmonic * ports + j];
+        double ii = solved.carrierImaginary()[s * width + harmonic * ports + j];
         real += r * ir - m * ii;
         imaginary += r * ii + m * ir;
       }
@@ -87,8 +87,8 @@ final class CarrierLevels {
     for (int j = 0; j < ports; j++) {
       double zr = around.carrierRealOhms[around.index(1, port, j)];
       double zi = around.carrierImaginaryOhms[around.index(1, port, j)];
-      double ir = solved.carrierReal[ports + j];
-      double ii = solved.carrierImaginary[ports + j];
+      double ir = solved.carrierReal()[ports + j];
+      double ii = solved.carrierImaginary()[ports + j];
       sum -= real ? zr * ir - zi * ii : zr * ii + zi * ir;
     }
     return sum;
@@ -128,8 +128,8 @@ final class CarrierLevels {
     double vi = portVolts(work, detection, port, false);
     int at = work.network.ports.length + port;
     double power =
-        vr * detection.carrierOnly.carrierReal[at]
-            + vi * detection.carrierOnly.carrierImaginary[at];
+        vr * detection.carrierOnly.carrierReal()[at]
+            + vi * detection.carrierOnly.carrierImaginary()[at];
     return (vr * vr + vi * vi) / power;
   }
 
@@ -156,15 +156,15 @@ final class CarrierLevels {
       for (int j = 0; j < ports && k > 1; j++) {
         double zr = around.carrierRealOhms[around.index(k, port, j)];
         double zi = around.carrierImaginaryOhms[around.index(k, port, j)];
-        double ir = solved.carrierReal[k * ports + j];
-        double ii = solved.carrierImaginary[k * ports + j];
+        double ir = solved.carrierReal()[k * ports + j];
+        double ii = solved.carrierImaginary()[k * ports + j];
         real -= zr * ir - zi * ii;
         imaginary -= zr * ii + zi * ir;
       }
       watts +=
           0.5
-              * (real * solved.carrierReal[k * ports + port]
-                  + imaginary * solved.carrierImaginary[k * ports + port]);
+              * (real * solved.carrierReal()[k * ports + port]
+                  + imaginary * solved.carrierImaginary()[k * ports + port]);
     }
     return watts;
   }
@@ -174,8 +174,8 @@ final class CarrierLevels {
     double vr = portVolts(work, detection, port, true);
     double vi = portVolts(work, detection, port, false);
     int at = work.network.ports.length + port;
-    double ir = detection.carrierOnly.carrierReal[at];
-    double ii = detection.carrierOnly.carrierImaginary[at];
+    double ir = detection.carrierOnly.carrierReal()[at];
+    double ii = detection.carrierOnly.carrierImaginary()[at];
     double norm = vr * vr + vi * vi;
     return real ? (ir * vr + ii * vi) / norm : (ii * vr - ir * vi) / norm;
   }

@@ -19,6 +19,11 @@ final class CaseWork {
 
   private static final double SETTLED_CORE = 1e-9;
 
+  /** Coarseness of the first round of peaking, and by how much each is finer than the last. */
+  private static final double COARSE_PEAK = 1e5;
+
+  private static final double FINER = 1e3;
+
   final Network network;
   final CasePlan plan;
   private final Fineness fineness;
@@ -316,15 +321,18 @@ final class CaseWork {
     double turned = feed.tuned() ? around.detuningRadians : 0;
     alternating.stage().turnCore(turned);
     boolean filled = carrierTable.fill(alternating, stage(), feed, carrierRadians(), around);
+    double coarseness = COARSE_PEAK;
     for (int round = 0; filled && feed.tuned() && round < MOST_ROUNDS; round++) {
-      double shift = parts.peak(peakVolts());
+      double shift = parts.peak(peakVolts(), Math.max(1, coarseness));
       if (Double.isNaN(shift)) {
         return fail(network.drivenNames() + " did not settle while the winding was peaked");
       }
       around.detuningRadians = shift - feed.detuningRadians(stage());
-      if (Math.abs(around.detuningRadians - turned) < SETTLED_CORE * carrierRadians()) {
+      if (coarseness <= 1
+          && Math.abs(around.detuningRadians - turned) < SETTLED_CORE * carrierRadians()) {
         break;
       }
+      coarseness /= FINER;
       turned = around.detuningRadians;
       alternating.stage().turnCore(turned);
       filled = carrierTable.turn(alternating, stage(), feed, carrierRadians(), around);

@@ -168,11 +168,14 @@ final class Detection {
    * Tunes as a builder does, for most detector DC: turns the winding's core until it is in phase
    * with what drives it, the devices and their capacitances in place.
    *
+   * @param coarseness how many times rounding's own error a start near by may leave; 1 for none
    * @return ωc − ω0 at the peak, in rad/s; NaN where nothing converged
    */
-  double peak(double peakVolts) {
+  double peak(double peakVolts, double coarseness) {
     around.peaking = true;
+    carrierOnly.coarser(coarseness);
     boolean solved = solveCarrier(peakVolts);
+    carrierOnly.coarser(1);
     around.peaking = false;
     return solved
         ? -carrierOnly.drawnImaginary(0) / (2 * around.tankFarads * carrierOnly.feedReal[0])

@@ -14,22 +14,17 @@ final class HalfWaves {
   private static final int ROUNDS = 2;
 
   private final Network network;
-  private final double[] cosine;
-  private final double[] sine;
   private final double[] amperes;
   private final double[] taken;
   private final double[] addedRe;
   private final double[] addedIm;
 
-  /** Room for waves of as many samples as the tables of one turn have. */
-  HalfWaves(Network network, double[] cosine, double[] sine) {
+  HalfWaves(Network network) {
     this.network = network;
-    this.cosine = cosine;
-    this.sine = sine;
-    amperes = new double[cosine.length];
-    taken = new double[cosine.length];
-    addedRe = new double[cosine.length];
-    addedIm = new double[cosine.length];
+    amperes = new double[Turns.SAMPLES];
+    taken = new double[Turns.SAMPLES];
+    addedRe = new double[Turns.SAMPLES];
+    addedIm = new double[Turns.SAMPLES];
   }
 
   /**
@@ -45,7 +40,7 @@ final class HalfWaves {
       for (int round = 0; round < ROUNDS; round++) {
         Arrays.fill(taken, 0);
         for (int k = 0; k < amplifier.branches(); k++) {
-          double unused = signal.wave(amplifier.outputBranch(k), amperes, cosine, sine);
+          double unused = signal.wave(amplifier.outputBranch(k), amperes);
           assert unused >= 0;
           for (int s = 0; s < taken.length; s++) {
             taken[s] += Math.abs(amperes[s]) / 2;
@@ -58,15 +53,9 @@ final class HalfWaves {
 
   /** Brings what the rail has given so far to what is taken. */
   private void draw(AudioTable table, int column, AudioSignal signal) {
-    int samples = taken.length;
     for (int h = 1; h <= signal.harmonics; h++) {
-      double real = 0;
-      double imaginary = 0;
-      for (int s = 0; s < samples; s++) {
-        int turn = (h * s) % samples;
-        real += 2.0 / samples * taken[s] * cosine[turn];
-        imaginary -= 2.0 / samples * taken[s] * sine[turn];
-      }
+      double real = Turns.real(h, taken);
+      double imaginary = Turns.imaginary(h, taken);
       signal.add(table, h, column, real - addedRe[h], imaginary - addedIm[h]);
       addedRe[h] = real;
       addedIm[h] = imaginary;

@@ -15,7 +15,7 @@ final class Outputs {
 
   private static final double ROUGH = 1e-4;
 
-  private static final int SAMPLES = 128;
+  private static final int SAMPLES = Turns.SAMPLES;
   private static final double TEN_PERCENT = 0.10;
 
   /** Share of its limit above which a signal is near to it. */
@@ -39,8 +39,16 @@ final class Outputs {
 
   private final double[] volts = new double[SAMPLES];
   private final double[] amperes = new double[SAMPLES];
-  private final double[] cosine = new double[SAMPLES];
-  private final double[] sine = new double[SAMPLES];
+
+  /** The sine that heats each amplifier most, of the last case and of the nominal kit; −1: none. */
+  private final int[] bestSine;
+
+  private final int[] likelySine;
+
+  /** The most heat so far, in W, and the drive that makes it. */
+  private double mostWatts;
+
+  private int mostAt;
 
   /** Power that leaves each amplifier, in W. */
   final double[] outWatts;
@@ -68,7 +76,11 @@ final class Outputs {
     int count = network.amplifiers.length;
     dips = new RailDips(count, network.size);
     search = new PeakSearch(network.size);
-    halfWaves = new HalfWaves(network, cosine, sine);
+    halfWaves = new HalfWaves(network);
+    bestSine = new int[count];
+    likelySine = new int[count];
+    Arrays.fill(bestSine, -1);
+    Arrays.fill(likelySine, -1);
     outWatts = new double[count];
     clipWatts = new double[count];
     tenPercentWatts = new double[count];
@@ -78,14 +90,11 @@ final class Outputs {
     loadIm = new double[count];
     heatWatts = new double[count];
     loadShare = new double[count];
-    for (int s = 0; s < SAMPLES; s++) {
-      cosine[s] = Math.cos(2 * Math.PI * s / SAMPLES);
-      sine[s] = Math.sin(2 * Math.PI * s / SAMPLES);
-    }
   }
 
-  /** Keeps the orders of elimination from now on. */
+  /** Keeps the orders of elimination and the sine that heats most from now on. */
   void freeze() {
+    System.arraycopy(bestSine, 0, likelySine, 0, bestSine.length);
     dips.freeze();
   }
 
@@ -121,7 +130,7 @@ final class Outputs {
     for (AmplifierLaw amplifier : network.amplifiers) {
       double ohms = Math.hypot(loadRe[amplifier.ordinal()], loadIm[amplifier.ordinal()]);
       for (int k = 0; k < amplifier.branches(); k++) {
-        double peak = signal.wave(amplifier.outputNode(point, k), volts, cosine, sine);
+        double peak = signal.wave(amplifier.outputNode(point, k), volts);
         double up = limited(amplifier, point, k, ohms, true);
         near |= peak > NEAR * Math.min(up, limited(amplifier, point, k, ohms, false));
       }
@@ -187,12 +196,12 @@ final class Outputs {
         int node = amplifier.outputNode(point, k);
         double up = limited(amplifier, point, k, ohms, true);
         double down = limited(amplifier, point, k, ohms, false);
-        double peak = signal.wave(node, volts, cosine, sine);
+        double peak = signal.wave(node, volts);
         wanted = Math.max(wanted, peak);
         limit = Math.min(limit, Math.min(up, down));
         if (peak > Math.min(up, down)) {
           clipWave(up, down);
-          signal.replace(table, column + k, node, volts, cosine, sine);
+          signal.replace(table, column + k, node, volts);
         }
       }
       overloadDecibels[a] = 20 * Math.log10(wanted / limit);
@@ -234,8 +243,8 @@ final class Outputs {
       double leaving = 0;
       double peak = 0;
       for (int k = 0; k < amplifier.branches(); k++) {
-        peak = Math.max(peak, signal.wave(amplifier.outputBranch(k), amperes, cosine, sine));
-        double unused = signal.wave(amplifier.outputNode(point, k), volts, cosine, sine);
+        peak = Math.max(peak, signal.wave(amplifier.outputBranch(k), amperes));
+        double unused = signal.wave(amplifier.outputNode(point, k), volts);
         for (int s = 0; s < SAMPLES; s++) {
           drawn += Math.max(0, amperes[s]) / SAMPLES;
           leaving += volts[s] * amperes[s] / SAMPLES;
@@ -311,29 +320,64 @@ final class Outputs {
     return up > 0 && down > 0 ? down / up : 1;
   }
 
-  /** The drive that heats most, from a small sine to a square wave; leaves the point there. */
+  /**
+   * The drive that heats most, from a small sine to a square wave; leaves the point there.
+   *
+   * <p>Of the sines all are tried for the nominal kit. What the supply gives is a concave function
+   * of the current, and what leaves a convex one, so that their difference has one summit: for
+   * other kits it is climbed from where the nominal kit has it.
+   */
   boolean atWorstHeat(DirectSolver direct) {
     for (AmplifierLaw amplifier : network.amplifiers) {
-      double most = -1;
-      double share = 1;
-      double overdrive = 1;
-      for (int i = 0; i <= SINES + OVERDRIVES.length; i++) {
-        double s = i <= SINES ? i / (double) SINES : 1;
-        double o = i <= SINES ? 1 : OVERDRIVES[i - SINES - 1];
-        if (Double.isNaN(settle(direct, amplifier, s, o, ROUGH))) {
-          return false;
+      int a = amplifier.ordinal();
+      mostWatts = -1;
+      if (likelySine[a] < 0) {
+        for (int i = 0; i <= SINES; i++) {
+          tryDrive(direct, amplifier, i);
         }
-        double heat = amplifier.watts(direct.stage()) - outWatts[amplifier.ordinal()];
-        if (heat > most) {
-          most = heat;
-          share = s;
-          overdrive = o;
+      } else {
+        tryDrive(direct, amplifier, likelySine[a]);
+        int up = likelySine[a] + 1;
+        while (up <= SINES && tryDrive(direct, amplifier, up)) {
+          up++;
+        }
+        int down = likelySine[a] - 1;
+        while (up == likelySine[a] + 1 && down >= 0 && tryDrive(direct, amplifier, down)) {
+          down--;
         }
       }
-      double unused = settle(direct, amplifier, share, overdrive, EXACT);
-      assert !Double.isNaN(unused);
+      bestSine[a] = mostAt;
+      for (int i = SINES + 1; i <= SINES + OVERDRIVES.length; i++) {
+        tryDrive(direct, amplifier, i);
+      }
+      if (mostWatts < 0
+          || Double.isNaN(settle(direct, amplifier, share(mostAt), overdrive(mostAt), EXACT))) {
+        return false;
+      }
     }
     measureHeat(direct.stage());
+    return true;
+  }
+
+  private static double share(int drive) {
+    return Math.min(1, drive / (double) SINES);
+  }
+
+  private static double overdrive(int drive) {
+    return drive <= SINES ? 1 : OVERDRIVES[drive - SINES - 1];
+  }
+
+  /** Tries a sine or an overdrive; whether it heats more than all that were tried before. */
+  private boolean tryDrive(DirectSolver direct, AmplifierLaw amplifier, int drive) {
+    if (Double.isNaN(settle(direct, amplifier, share(drive), overdrive(drive), ROUGH))) {
+      return false;
+    }
+    double heat = amplifier.watts(direct.stage()) - outWatts[amplifier.ordinal()];
+    if (!(heat > mostWatts)) {
+      return false;
+    }
+    mostWatts = heat;
+    mostAt = drive;
     return true;
   }
 

@@ -293,8 +293,14 @@ public final class ComplexLu {
       offIm[rows[e]] -= i;
       scale[rows[e]] += Math.abs(r) + Math.abs(i);
     }
+    double most = 0;
     for (int row = 0; row < size; row++) {
-      if (!(Math.abs(offRe[row]) + Math.abs(offIm[row]) <= RealLu.GOOD * scale[row])) {
+      most = Math.max(most, scale[row]);
+    }
+    double nothing = RealLu.NOTHING * most;
+    for (int row = 0; row < size; row++) {
+      double off = Math.abs(offRe[row]) + Math.abs(offIm[row]);
+      if (!(off <= RealLu.GOOD * (scale[row] + nothing))) {
         return false;
       }
     }

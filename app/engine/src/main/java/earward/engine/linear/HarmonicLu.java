@@ -31,7 +31,8 @@ public final class HarmonicLu {
   private final double[][] sideIm;
   private final double[][] offRe;
   private final double[][] offIm;
-  private final double[] scale;
+  private final double[][] scales;
+  private final double[] most;
 
   /**
    * Room for systems.
@@ -48,7 +49,8 @@ public final class HarmonicLu {
     sideIm = new double[size][count];
     offRe = new double[size][count];
     offIm = new double[size][count];
-    scale = new double[count];
+    scales = new double[size][count];
+    most = new double[count];
   }
 
   /** How many systems. */
@@ -172,10 +174,11 @@ public final class HarmonicLu {
 
   /** Whether every equation of every system is met but for rounding; fills what is off. */
   private boolean good(HarmonicReplay order, double[][] valuesRe, double[][] valuesIm) {
-    boolean good = true;
+    Arrays.fill(most, 0);
     for (int row = 0; row < size; row++) {
       double[] offR = offRe[row];
       double[] offI = offIm[row];
+      double[] scale = scales[row];
       start(sideRe[row], sideIm[row], offR, offI, scale);
       for (int e = order.rowFrom[row]; e < order.rowFrom[row + 1]; e++) {
         int column = order.rowColumn[e];
@@ -183,8 +186,21 @@ public final class HarmonicLu {
         subtract(re[place], im[place], valuesRe[column], valuesIm[column], offR, offI, scale);
       }
       for (int k = 0; k < scale.length; k++) {
-        good &= Math.abs(offR[k]) + Math.abs(offI[k]) <= RealLu.GOOD * scale[k];
+        most[k] = Math.max(most[k], scale[k]);
       }
+    }
+    boolean good = true;
+    for (int row = 0; row < size; row++) {
+      good &= good(offRe[row], offIm[row], scales[row], most);
+    }
+    return good;
+  }
+
+  private static boolean good(double[] offR, double[] offI, double[] scale, double[] most) {
+    boolean good = true;
+    for (int k = 0; k < scale.length; k++) {
+      double wanted = RealLu.GOOD * (scale[k] + RealLu.NOTHING * most[k]);
+      good &= Math.abs(offR[k]) + Math.abs(offI[k]) <= wanted;
     }
     return good;
   }

@@ -14,6 +14,12 @@ public final class RealLu {
   /** Residual over the sum of its terms' magnitudes beyond which a replay is not trusted. */
   static final double GOOD = 1e-11;
 
+  /**
+   * Share of the largest such sum that counts as nothing in any other: what rounding leaves in a
+   * part of the circuit that the right side does not reach.
+   */
+  static final double NOTHING = 1e-12;
+
   private final int size;
   private final double[] a;
   private final double[] kept;
@@ -22,6 +28,7 @@ public final class RealLu {
   private final double[] unknown;
   private final double[] side;
   private final double[] off;
+  private final double[] scale;
   private final Pattern pattern;
   private @Nullable Elimination replayed;
   private int tried;
@@ -35,6 +42,7 @@ public final class RealLu {
     unknown = new double[size];
     side = new double[size];
     off = new double[size];
+    scale = new double[size];
     pattern = new Pattern(size);
   }
 
@@ -216,20 +224,26 @@ public final class RealLu {
   private boolean good(Elimination order, double[] values) {
     int[] entries = order.entries;
     int at = 0;
-    boolean good = true;
+    double most = 0;
     for (int row = 0; row < size; row++) {
       double sum = -side[row];
-      double scale = Math.abs(sum);
+      double flow = Math.abs(sum);
       int end = (row + 1) * size;
       for (; at < entries.length && entries[at] < end; at++) {
         double term = kept[entries[at]] * values[entries[at] - row * size];
         sum += term;
-        scale += Math.abs(term);
+        flow += Math.abs(term);
       }
       off[row] = sum;
-      good &= Math.abs(sum) <= GOOD * scale;
+      scale[row] = flow;
+      most = Math.max(most, flow);
     }
-    return good;
+    for (int row = 0; row < size; row++) {
+      if (!(Math.abs(off[row]) <= GOOD * (scale[row] + NOTHING * most))) {
+        return false;
+      }
+    }
+    return true;
   }
 
   private void solveDensely(double[] values) {

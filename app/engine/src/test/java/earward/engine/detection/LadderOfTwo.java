@@ -83,7 +83,8 @@ final class LadderOfTwo {
       for (int k = 1; k < width; k++) {
         double[] z = at(2 * Math.PI * k * carrierHertz);
         double amperes =
-            Math.hypot(solver.carrierReal[s * width + k], solver.carrierImaginary[s * width + k]);
+            Math.hypot(
+                solver.carrierReal()[s * width + k], solver.carrierImaginary()[s * width + k]);
         sum += 0.5 * amperes * amperes * (z[0] * z[0] + z[1] * z[1]);
       }
     }
