@@ -20,7 +20,7 @@ import picocli.CommandLine.Option;
     })
 final class BatchCommand extends DesignCommand {
   static final long MOST_KITS = 100_000_000;
-  private static final int MOST_THREADS = 256;
+  static final int MOST_THREADS = 256;
 
   @Option(
       names = "--kits",

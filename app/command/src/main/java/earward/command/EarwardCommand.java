@@ -20,6 +20,7 @@ import picocli.CommandLine.Spec;
       FiguresCommand.class,
       ReviewCommand.class,
       BatchCommand.class,
+      FaultsCommand.class,
       ProveCommand.class,
       BlocksCommand.class,
       DesktopCommand.class

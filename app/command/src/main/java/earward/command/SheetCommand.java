@@ -1,5 +1,10 @@
 package earward.command;
 
+import earward.study.limits.LimitStudy;
+import earward.study.limits.LimitOrder;
+import earward.study.limits.KitLimits;
+import earward.study.batch.BatchProgress;
+import earward.engine.CircuitException;
 import earward.kit.review.ReviewedKit;
 import earward.sheet.SheetWriter;
 import earward.sheet.Sheets;
@@ -24,6 +29,7 @@ import picocli.CommandLine.Option;
     description = "Writes the build sheet of a kit design, and says its name and key figures.")
 final class SheetCommand extends DesignCommand {
   private static final String ENDING = ".pdf";
+  private static final int LIMIT_KITS = 1000;
 
   @Option(
       names = {"-o", "--output"},
@@ -38,7 +44,7 @@ final class SheetCommand extends DesignCommand {
     SheetContent content;
     try {
       Wording wording = wording(reviewed, program.sheetWordings());
-      content = Sheets.of(reviewed, wording);
+      content = Sheets.of(reviewed, wording, limits(reviewed));
       file.write(out -> SheetWriter.write(content, wording, out));
     } catch (WordingException e) {
       throw CommandFault.ofInput(String.valueOf(e.getMessage()));
@@ -49,6 +55,16 @@ final class SheetCommand extends DesignCommand {
     keyFigures(content);
     if (reviewed.doNotBuild()) {
       results().println("DO NOT BUILD: a finding is STOP; 'earward review' says which.");
+    }
+  }
+
+  /** Limits of the readings at rest: quick enough to wait for. */
+  private static KitLimits limits(ReviewedKit reviewed) {
+    try {
+      return LimitStudy.of(
+          reviewed.solved().assembly(), LimitOrder.of(LIMIT_KITS, false), BatchProgress.NONE);
+    } catch (CircuitException e) {
+      return KitLimits.NONE; // the review says what is wrong with the circuit
     }
   }
 

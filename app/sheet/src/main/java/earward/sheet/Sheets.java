@@ -1,5 +1,6 @@
 package earward.sheet;
 
+import earward.study.limits.KitLimits;
 import earward.kit.file.Designs;
 import earward.kit.review.ReviewedKit;
 import earward.sheet.content.SheetContent;
@@ -28,6 +29,15 @@ public final class Sheets {
    * @param wording the words; hand the same one to the writer
    */
   public static SheetContent of(ReviewedKit kit, Wording wording) {
-    return Gathered.of(kit, Designs.digest(kit.solved().assembly().design()), Words.of(wording));
+    return of(kit, wording, KitLimits.NONE);
+  }
+
+  /**
+   * The same with limits of its readings beside the expected values.
+   *
+   * @param limits as they were worked out; {@link KitLimits#NONE} for none
+   */
+  public static SheetContent of(ReviewedKit kit, Wording wording, KitLimits limits) {
+    return Gathered.of(kit, Designs.digest(kit.solved().assembly().design()), Words.of(wording), limits);
   }
 }

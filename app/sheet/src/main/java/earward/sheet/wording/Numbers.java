@@ -4,6 +4,7 @@ import earward.block.quantity.Unit;
 import earward.kit.design.QuantityText;
 import earward.sheet.content.Amount;
 import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.text.DecimalFormatSymbols;
 import java.util.Locale;
 
@@ -94,6 +95,27 @@ public final class Numbers {
   public String plain(double si, Unit unit) {
     String number = BigDecimal.valueOf(si).stripTrailingZeros().toPlainString();
     return decimal(number) + NO_BREAK_SPACE + unit.symbol();
+  }
+
+  /**
+   * Two voltages in one unit, as a meter shows them: 4.62 to 4.78 V.
+   *
+   * @param words the wording between them, with {@code {low}} and {@code {high}}
+   */
+  public String between(double low, double high, String words) {
+    double most = Math.max(Math.abs(low), Math.abs(high));
+    boolean small = most < 1;
+    int digits = small ? (most < 0.1 ? 1 : 0) : most < 2 ? 3 : 2;
+    return words
+        .replace("{low}", fixed(small ? 1000 * low : low, digits))
+        .replace(
+            "{high}",
+            fixed(small ? 1000 * high : high, digits) + NO_BREAK_SPACE + (small ? "mV" : "V"));
+  }
+
+  private String fixed(double number, int digits) {
+    String text = BigDecimal.valueOf(number).setScale(digits, RoundingMode.HALF_UP).toPlainString();
+    return decimal(text.replace('-', MINUS));
   }
 
   private String decimal(String number) {

@@ -51,6 +51,13 @@ public final class BatchPlan {
           Quantity.RESPONSE_DEVIATION_DECIBELS,
           Quantity.RESPONSE_DEVIATION_HERTZ);
 
+  /** Cases with a modulated carrier of their own: there only what the bare carrier gives is quick. */
+  private static final Set<CaseName> MODULATED =
+      Set.of(CaseName.WEAK, CaseName.STRONG, CaseName.DEEPEST, CaseName.FULL_VOLUME);
+
+  private static final Set<Quantity> OF_BARE_CARRIER =
+      EnumSet.of(Quantity.CLIPPING_DEPTH, Quantity.CARRIER_PEAK_VOLTS);
+
   private final Assembly assembly;
   private final CompiledKit kit;
   private final KitDraw draw;
@@ -90,8 +97,13 @@ public final class BatchPlan {
         figure ->
             full
                 || isUsual(figure)
-                || (checked.contains(figure) && !SLOW.contains(figure.quantity())),
+                || (checked.contains(figure) && isQuick(figure)),
         habits);
+  }
+
+  private static boolean isQuick(FigureName figure) {
+    return !SLOW.contains(figure.quantity())
+        && (!MODULATED.contains(figure.caseName()) || OF_BARE_CARRIER.contains(figure.quantity()));
   }
 
   /**

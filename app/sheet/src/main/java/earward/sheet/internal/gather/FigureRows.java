@@ -1,5 +1,10 @@
 package earward.sheet.internal.gather;
 
+import java.util.Optional;
+import earward.study.limits.PointLimits;
+import earward.study.limits.KitLimits;
+import earward.sheet.content.LimitRow;
+import earward.block.figure.FigureName;
 import earward.block.Role;
 import earward.block.device.Adaptor;
 import earward.block.device.AudioAmplifier;
@@ -24,12 +29,18 @@ import java.util.List;
 
 /** The tables of figures: test points, supplies, heat and seams. */
 final class FigureRows {
+  /** A limit that moves less for a volt of the supply stays within what is rounded away. */
+  private static final double LEAST_MOVE = 0.01;
+
   private final Assembly assembly;
   private final Figures figures;
   private final BlockNames names;
   private final Words words;
+  private final KitLimits limits;
 
-  FigureRows(Assembly assembly, Figures figures, BlockNames names, Words words) {
+  FigureRows(
+      Assembly assembly, Figures figures, BlockNames names, Words words, KitLimits limits) {
+    this.limits = limits;
     this.assembly = assembly;
     this.figures = figures;
     this.names = names;
@@ -51,9 +62,24 @@ final class FigureRows {
               at(place, Quantity.DC_VOLTS, CaseName.NO_SIGNAL),
               at(place, Quantity.DC_VOLTS, CaseName.TEST),
               at(place, Quantity.AUDIO_RMS_VOLTS, CaseName.TEST),
-              at(place, Quantity.CARRIER_RMS_VOLTS, CaseName.TEST)));
+              at(place, Quantity.CARRIER_RMS_VOLTS, CaseName.TEST),
+              restLimits(place)));
     }
     return rows;
+  }
+
+  private Optional<LimitRow> restLimits(String place) {
+    return limits
+        .of(new FigureName(place, Quantity.DC_VOLTS, CaseName.NO_SIGNAL))
+        .filter(PointLimits::readable)
+        .map(
+            point ->
+                new LimitRow(
+                    new Amount(point.low(), Unit.VOLT),
+                    new Amount(point.high(), Unit.VOLT),
+                    Math.abs(point.perSupplyVolt()) < LEAST_MOVE
+                        ? Amount.none(Unit.VOLT)
+                        : new Amount(point.perSupplyVolt(), Unit.VOLT)));
   }
 
   List<CurrentRow> currents() {

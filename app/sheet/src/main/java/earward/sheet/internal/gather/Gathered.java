@@ -1,5 +1,11 @@
 package earward.sheet.internal.gather;
 
+import earward.kit.path.PlacedTestPoint;
+import earward.block.quantity.Unit;
+import java.util.ArrayList;
+import java.util.Optional;
+import earward.study.limits.PointLimits;
+import earward.study.limits.KitLimits;
 import earward.block.check.Finding;
 import earward.kit.design.Digest;
 import earward.kit.design.KitDesign;
@@ -20,14 +26,15 @@ public final class Gathered {
   private Gathered() {}
 
   /** The content. */
-  public static SheetContent of(ReviewedKit kit, Digest digest, Words words) {
+  public static SheetContent of(
+      ReviewedKit kit, Digest digest, Words words, KitLimits limits) {
     Assembly assembly = kit.solved().assembly();
     Figures figures = kit.figures();
     KitDesign design = assembly.design();
     SheetOptions options = design.sheet();
     BlockNames names = new BlockNames(assembly, words.wording().locale());
     PartRows parts = new PartRows(assembly, names, words);
-    FigureRows rows = new FigureRows(assembly, figures, names, words);
+    FigureRows rows = new FigureRows(assembly, figures, names, words, limits);
     CoverFigures cover = new CoverFigures(assembly, figures, names, words);
     String name = design.title().isBlank() ? words.text("title.nameless") : design.title();
     return new SheetContent(
@@ -42,12 +49,40 @@ public final class Gathered {
         new Drawn(assembly, names, parts, words).drawing(),
         parts.pinOuts(),
         parts.rows(),
-        cover.method(),
+        method(cover, assembly, limits, words),
         rows.testPoints(),
         rows.currents(),
         rows.heat(),
         rows.seams(),
         findings(kit.findings()));
+  }
+
+  /** How to measure; and where there are limits, where they come from. */
+  private static List<String> method(
+      CoverFigures cover, Assembly assembly, KitLimits limits, Words words) {
+    List<String> method = new ArrayList<>(cover.method());
+    if (limits.kits() > 0) {
+      method.add(
+          words.text(
+              limits.supplyPlace().isPresent() ? "method.limits-supply" : "method.limits",
+              "kits",
+              Integer.toString(limits.kits()),
+              "instrument",
+              limits.points().stream()
+                  .map(PointLimits::instrument)
+                  .filter(name -> !name.isEmpty())
+                  .findFirst()
+                  .orElse(""),
+              "supply",
+              words.numbers().text(limits.supplyVolts(), Unit.VOLT),
+              "point",
+              assembly.testPoints().stream()
+                  .filter(point -> limits.supplyPlace().equals(Optional.of(point.place())))
+                  .map(PlacedTestPoint::reference)
+                  .findFirst()
+                  .orElse("")));
+    }
+    return method;
   }
 
   private static List<FindingRow> findings(List<ReviewFinding> findings) {

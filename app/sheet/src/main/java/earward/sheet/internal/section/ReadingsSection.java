@@ -2,6 +2,7 @@ package earward.sheet.internal.section;
 
 import earward.sheet.content.Amount;
 import earward.sheet.content.CurrentRow;
+import earward.sheet.content.LimitRow;
 import earward.sheet.content.SheetContent;
 import earward.sheet.content.TestPointRow;
 import earward.sheet.internal.page.Cell;
@@ -83,7 +84,7 @@ final class ReadingsSection {
           List.of(
               Cell.text(row.flag(), Style.STRONG),
               where(row, words),
-              amount(row.dcAtRest(), words),
+              atRest(row, words),
               reading(row.dcAtRest(), words),
               amount(row.dcAtTest(), words),
               reading(row.dcAtTest(), words),
@@ -103,6 +104,33 @@ final class ReadingsSection {
     String carrier = words.numbers().write(row.carrier()).whole();
     String text = words.text("readings.carrier", "carrier", carrier);
     return Cell.stacked(where, Cell.text(text, Style.LABEL));
+  }
+
+  /** The expected value, its limits below it, and how these move with the supply. */
+  private static Cell atRest(TestPointRow row, Words words) {
+    Cell expected = amount(row.dcAtRest(), words);
+    if (row.restLimits().isEmpty()) {
+      return expected;
+    }
+    LimitRow limits = row.restLimits().get();
+    Cell between =
+        Cell.textToRight(
+            words
+                .numbers()
+                .between(
+                    limits.low().si(),
+                    limits.high().si(),
+                    words.text("readings.limits", "low", "{low}", "high", "{high}")),
+            Style.LABEL);
+    if (!limits.perSupplyVolt().known()) {
+      return Cell.stacked(expected, between);
+    }
+    String move = words.numbers().text(limits.perSupplyVolt().si(), limits.perSupplyVolt().unit());
+    return Cell.stacked(
+        expected,
+        Cell.stacked(
+            between,
+            Cell.textToRight(words.text("readings.per-volt", "move", move), Style.LABEL)));
   }
 
   private static Cell amount(Amount amount, Words words) {

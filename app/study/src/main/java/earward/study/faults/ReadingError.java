@@ -1,0 +1,48 @@
+package earward.study.faults;
+
+import earward.block.quantity.Unit;
+import earward.study.limits.Meter;
+import java.util.List;
+
+/**
+ * How far a reading may lie from its prediction, as a standard deviation: the spread of healthy
+ * kits in proportion, and the meter's own error. Immutable.
+ *
+ * @param readings the readings
+ * @param relative of each, the deviation of kits as a share of the reading
+ * @param meter on which they are read
+ */
+record ReadingError(List<FaultReading> readings, List<Double> relative, Meter meter) {
+  /** Error of an ohmmeter and of an ammeter, as a share (common practice). */
+  private static final double OTHER_SHARE = 0.03;
+
+  private static final double LEAST_OHMS = 2;
+  private static final double LEAST_AMPERES = 2e-4;
+
+  /** From here on a display says "over range". */
+  static final double MOST_OHMS = 2e6;
+
+  ReadingError {
+    readings = List.copyOf(readings);
+    relative = List.copyOf(relative);
+  }
+
+  double deviation(int reading, double value) {
+    double ofKits = relative.get(reading) * Math.abs(value);
+    Unit unit = readings.get(reading).unit();
+    double ofMeter =
+        unit == Unit.VOLT
+            ? meter.errorVolts(value)
+            : OTHER_SHARE * Math.abs(value) + (unit == Unit.OHM ? LEAST_OHMS : LEAST_AMPERES);
+    return Math.hypot(ofKits, ofMeter);
+  }
+
+  /** How many standard deviations two predictions lie apart; 0 where one does not exist. */
+  double apart(int reading, double one, double other) {
+    if (Double.isNaN(one) || Double.isNaN(other)) {
+      return 0;
+    }
+    double width = Math.hypot(deviation(reading, one), deviation(reading, other));
+    return Math.abs(one - other) / width;
+  }
+}
