@@ -44,8 +44,7 @@ final class FaultsCommand extends DesignCommand {
     FaultOrder order = new FaultOrder(threads, SPREAD_KITS, 1, Habits.USUAL);
     try (Cancellation cancellation = new Cancellation(messages())) {
       FaultGuide guide =
-          FaultStudy.of(
-              reviewed.solved().assembly(), order, (done, all) -> !cancellation.asked());
+          FaultStudy.of(reviewed.solved().assembly(), order, (done, all) -> !cancellation.asked());
       if (cancellation.asked()) {
         throw CommandFault.ofInput(List.of()); // the cancellation says it
       }

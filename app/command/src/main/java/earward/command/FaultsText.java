@@ -37,7 +37,10 @@ final class FaultsText {
       to.println();
       to.println(
           String.format(
-              java.util.Locale.ROOT, "%3d  %.1f %%  %s", group.number(), 100 * group.prior(),
+              java.util.Locale.ROOT,
+              "%3d  %.1f %%  %s",
+              group.number(),
+              100 * group.prior(),
               seen(guide, group)));
       for (FaultSigns each : group.faults()) {
         to.println(INDENT + FaultWords.sentence(assembly, each.fault()));
@@ -78,5 +81,4 @@ final class FaultsText {
     }
     return String.join("; ", seen);
   }
-
 }

@@ -1,9 +1,5 @@
 package earward.command;
 
-import earward.study.limits.LimitStudy;
-import earward.study.limits.LimitOrder;
-import earward.study.limits.KitLimits;
-import earward.study.batch.BatchProgress;
 import earward.engine.CircuitException;
 import earward.kit.review.ReviewedKit;
 import earward.sheet.SheetWriter;
@@ -13,6 +9,10 @@ import earward.sheet.content.SheetContent;
 import earward.sheet.wording.Numbers;
 import earward.sheet.wording.Wording;
 import earward.sheet.wording.WordingException;
+import earward.study.batch.BatchProgress;
+import earward.study.limits.KitLimits;
+import earward.study.limits.LimitOrder;
+import earward.study.limits.LimitStudy;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;

@@ -1,12 +1,12 @@
 package earward.sheet;
 
-import earward.study.limits.KitLimits;
 import earward.kit.file.Designs;
 import earward.kit.review.ReviewedKit;
 import earward.sheet.content.SheetContent;
 import earward.sheet.internal.gather.Gathered;
 import earward.sheet.internal.section.Words;
 import earward.sheet.wording.Wording;
+import earward.study.limits.KitLimits;
 
 /** Makes the content of build sheets from reviewed kits. Nothing is solved here. */
 public final class Sheets {
@@ -38,6 +38,7 @@ public final class Sheets {
    * @param limits as they were worked out; {@link KitLimits#NONE} for none
    */
   public static SheetContent of(ReviewedKit kit, Wording wording, KitLimits limits) {
-    return Gathered.of(kit, Designs.digest(kit.solved().assembly().design()), Words.of(wording), limits);
+    return Gathered.of(
+        kit, Designs.digest(kit.solved().assembly().design()), Words.of(wording), limits);
   }
 }

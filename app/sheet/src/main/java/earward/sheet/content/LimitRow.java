@@ -7,8 +7,8 @@ import java.util.Objects;
  *
  * @param low lowest
  * @param high highest
- * @param perSupplyVolt by how much both move for each volt of the builder's own supply reading above
- *     the expected one; none where they stay
+ * @param perSupplyVolt by how much both move for each volt of the builder's own supply reading
+ *     above the expected one; none where they stay
  */
 public record LimitRow(Amount low, Amount high, Amount perSupplyVolt) {
   public LimitRow {

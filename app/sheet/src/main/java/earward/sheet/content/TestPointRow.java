@@ -15,7 +15,12 @@ import java.util.Optional;
  * @param restLimits of the DC without a signal; empty where none were worked out
  */
 public record TestPointRow(
-    String flag, String where, Amount dcAtRest, Amount dcAtTest, Amount audio, Amount carrier,
+    String flag,
+    String where,
+    Amount dcAtRest,
+    Amount dcAtTest,
+    Amount audio,
+    Amount carrier,
     Optional<LimitRow> restLimits) {
   public TestPointRow {
     Objects.requireNonNull(where);

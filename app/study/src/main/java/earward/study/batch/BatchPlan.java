@@ -51,7 +51,9 @@ public final class BatchPlan {
           Quantity.RESPONSE_DEVIATION_DECIBELS,
           Quantity.RESPONSE_DEVIATION_HERTZ);
 
-  /** Cases with a modulated carrier of their own: there only what the bare carrier gives is quick. */
+  /**
+   * Cases with a modulated carrier of their own: there only what the bare carrier gives is quick.
+   */
   private static final Set<CaseName> MODULATED =
       Set.of(CaseName.WEAK, CaseName.STRONG, CaseName.DEEPEST, CaseName.FULL_VOLUME);
 
@@ -94,10 +96,7 @@ public final class BatchPlan {
     checks(assembly).forEach(held -> checked.addAll(namesOf(held.check().figure())));
     return of(
         assembly,
-        figure ->
-            full
-                || isUsual(figure)
-                || (checked.contains(figure) && isQuick(figure)),
+        figure -> full || isUsual(figure) || (checked.contains(figure) && isQuick(figure)),
         habits);
   }
 

@@ -2,8 +2,8 @@ package earward.study.faults;
 
 import earward.block.Conditions;
 import earward.block.Role;
-import earward.block.device.AudioAmplifier;
 import earward.block.device.Adaptor;
+import earward.block.device.AudioAmplifier;
 import earward.block.device.Battery;
 import earward.block.device.BatteryModel;
 import earward.block.device.CarrierGenerator;
@@ -169,13 +169,10 @@ final class FaultCircuit {
   }
 
   private void cell(String name, double volts) {
-    BatteryModel model =
-        new BatteryModel(name, volts, 1e-3, volts / 2, 1e-3, 1, 1, 0, volts, 1);
+    BatteryModel model = new BatteryModel(name, volts, 1e-3, volts / 2, 1e-3, 1, 1, 0, volts, 1);
     extras.add(
         new CircuitPart(
-            name,
-            new Battery(model),
-            Map.of(Terminal.PLUS, name, Terminal.MINUS, Circuit.GROUND)));
+            name, new Battery(model), Map.of(Terminal.PLUS, name, Terminal.MINUS, Circuit.GROUND)));
   }
 
   private void injector(String node) {

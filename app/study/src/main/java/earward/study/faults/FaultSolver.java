@@ -84,14 +84,10 @@ public final class FaultSolver {
     readings.add(new FaultReading("supply:no-signal", "path", Unit.AMPERE, supply, false));
     for (CircuitPart part : assembly.circuit().parts()) {
       FigureName own = new FigureName(part.name(), Quantity.SUPPLY_AMPERES, CaseName.NO_SIGNAL);
-      if (part.device() instanceof Battery
-          || part.device() instanceof Adaptor) {
+      if (part.device() instanceof Battery || part.device() instanceof Adaptor) {
         supplies.add(add(own));
       } else if (part.device() instanceof AudioAmplifier) {
-        heat.add(
-            add(
-                new FigureName(
-                    part.name(), Quantity.DISSIPATION_WATTS, CaseName.NO_SIGNAL)));
+        heat.add(add(new FigureName(part.name(), Quantity.DISSIPATION_WATTS, CaseName.NO_SIGNAL)));
       }
     }
     if (cases.contains(CaseName.TEST)) {
@@ -188,7 +184,9 @@ public final class FaultSolver {
     /** A loudspeaker that is not connected is silent, whatever stands across its wires. */
     private Tone tone(double[] solved) {
       boolean open = loudspeakers.stream().allMatch(slot -> solved[slot] > 0.5);
-      return tone < 0 || (open && !loudspeakers.isEmpty()) ? Tone.SILENT : Tone.of(row[tone] / nominal[tone], row[distortion]);
+      return tone < 0 || (open && !loudspeakers.isEmpty())
+          ? Tone.SILENT
+          : Tone.of(row[tone] / nominal[tone], row[distortion]);
     }
 
     private boolean hot() {

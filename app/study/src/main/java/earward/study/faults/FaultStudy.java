@@ -47,8 +47,7 @@ public final class FaultStudy {
       List<Future<Signs>> asked = new ArrayList<>();
       asked.add(threads.submit(() -> signs(solver.draw().nominal(), List.of())));
       for (Fault fault : faults) {
-        asked.add(
-            threads.submit(() -> signs(solver.draw().nominal(), List.of(fault.values()))));
+        asked.add(threads.submit(() -> signs(solver.draw().nominal(), List.of(fault.values()))));
       }
       for (int kit = 0; kit < order.spreadKits(); kit++) {
         double[] values = solver.draw().nominal();
@@ -89,15 +88,13 @@ public final class FaultStudy {
     for (int i = 0; i < solver.readings().size(); i++) {
       relative.add(Spreads.relative(kits, i));
     }
-    ReadingError error =
-        new ReadingError(solver.readings(), relative, meter(solver.assembly()));
+    ReadingError error = new ReadingError(solver.readings(), relative, meter(solver.assembly()));
     return new Grouping(solver.readings(), healthy, error).guide(faults, signs, relative);
   }
 
   /** The first instrument of the bench. */
   static Meter meter(Assembly assembly) {
     Bench bench = assembly.design().bench();
-    return new Meter(
-        (bench.instruments().isEmpty() ? Bench.USUAL : bench).instruments().get(0));
+    return new Meter((bench.instruments().isEmpty() ? Bench.USUAL : bench).instruments().get(0));
   }
 }

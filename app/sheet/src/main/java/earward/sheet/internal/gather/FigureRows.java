@@ -1,16 +1,12 @@
 package earward.sheet.internal.gather;
 
-import java.util.Optional;
-import earward.study.limits.PointLimits;
-import earward.study.limits.KitLimits;
-import earward.sheet.content.LimitRow;
-import earward.block.figure.FigureName;
 import earward.block.Role;
 import earward.block.device.Adaptor;
 import earward.block.device.AudioAmplifier;
 import earward.block.device.Battery;
 import earward.block.device.Regulator;
 import earward.block.figure.CaseName;
+import earward.block.figure.FigureName;
 import earward.block.figure.Quantity;
 import earward.block.quantity.Unit;
 import earward.block.wiring.WiredPart;
@@ -21,11 +17,15 @@ import earward.kit.path.PlacedTestPoint;
 import earward.sheet.content.Amount;
 import earward.sheet.content.CurrentRow;
 import earward.sheet.content.HeatRow;
+import earward.sheet.content.LimitRow;
 import earward.sheet.content.SeamRow;
 import earward.sheet.content.TestPointRow;
 import earward.sheet.internal.section.Words;
+import earward.study.limits.KitLimits;
+import earward.study.limits.PointLimits;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** The tables of figures: test points, supplies, heat and seams. */
 final class FigureRows {
@@ -38,8 +38,7 @@ final class FigureRows {
   private final Words words;
   private final KitLimits limits;
 
-  FigureRows(
-      Assembly assembly, Figures figures, BlockNames names, Words words, KitLimits limits) {
+  FigureRows(Assembly assembly, Figures figures, BlockNames names, Words words, KitLimits limits) {
     this.limits = limits;
     this.assembly = assembly;
     this.figures = figures;

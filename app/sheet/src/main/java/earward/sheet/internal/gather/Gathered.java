@@ -1,17 +1,13 @@
 package earward.sheet.internal.gather;
 
-import earward.kit.path.PlacedTestPoint;
-import earward.block.quantity.Unit;
-import java.util.ArrayList;
-import java.util.Optional;
-import earward.study.limits.PointLimits;
-import earward.study.limits.KitLimits;
 import earward.block.check.Finding;
+import earward.block.quantity.Unit;
 import earward.kit.design.Digest;
 import earward.kit.design.KitDesign;
 import earward.kit.design.SheetOptions;
 import earward.kit.path.Assembly;
 import earward.kit.path.Figures;
+import earward.kit.path.PlacedTestPoint;
 import earward.kit.review.Remedy;
 import earward.kit.review.ReviewFinding;
 import earward.kit.review.ReviewedKit;
@@ -19,15 +15,18 @@ import earward.sheet.content.FindingRow;
 import earward.sheet.content.KitTitle;
 import earward.sheet.content.SheetContent;
 import earward.sheet.internal.section.Words;
+import earward.study.limits.KitLimits;
+import earward.study.limits.PointLimits;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** All that a reviewed kit says, as the content of its sheet. */
 public final class Gathered {
   private Gathered() {}
 
   /** The content. */
-  public static SheetContent of(
-      ReviewedKit kit, Digest digest, Words words, KitLimits limits) {
+  public static SheetContent of(ReviewedKit kit, Digest digest, Words words, KitLimits limits) {
     Assembly assembly = kit.solved().assembly();
     Figures figures = kit.figures();
     KitDesign design = assembly.design();

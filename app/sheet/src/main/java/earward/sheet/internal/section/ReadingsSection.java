@@ -129,8 +129,7 @@ final class ReadingsSection {
     return Cell.stacked(
         expected,
         Cell.stacked(
-            between,
-            Cell.textToRight(words.text("readings.per-volt", "move", move), Style.LABEL)));
+            between, Cell.textToRight(words.text("readings.per-volt", "move", move), Style.LABEL)));
   }
 
   private static Cell amount(Amount amount, Words words) {
