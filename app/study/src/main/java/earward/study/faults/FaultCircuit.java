@@ -148,7 +148,7 @@ final class FaultCircuit {
     for (int i = 1; i < pins.size(); i++) {
       Optional<String> one = node(part, pins.get(i - 1));
       Optional<String> other = node(part, pins.get(i));
-      boolean sides = part.device() instanceof AudioAmplifier && 2 * (i) == pins.size();
+      boolean sides = part.device() instanceof AudioAmplifier && 2 * i == pins.size();
       if (one.isPresent() && other.isPresent() && !one.equals(other) && !sides) {
         String name =
             part.name() + ".bridge-" + pins.get(i - 1).number() + "-" + pins.get(i).number();

@@ -57,7 +57,7 @@ final class FaultList {
     double whole = counts.keySet().stream().mapToDouble(FaultClass::share).sum();
     List<Fault> weighted = new ArrayList<>();
     for (Fault fault : faults.values()) {
-      weighted.add(fault.with(fault.kind().share() / whole / counts.get(fault.kind())));
+      weighted.add(fault.with(fault.kind().share() / whole / counts.getOrDefault(fault.kind(), 1)));
     }
     weighted.sort(java.util.Comparator.comparingDouble(Fault::prior).reversed());
     return weighted;
