@@ -48,7 +48,8 @@ abstract class DesignCommand implements Callable<Integer> {
   abstract void show(ReviewedKit reviewed, Program program) throws CommandFault;
 
   /** What is still to be done to the review of a solved kit before it is shown. */
-  ReviewedKit completed(ReviewedKit reviewed, PluginSet types, PartsLibrary parts) {
+  ReviewedKit completed(ReviewedKit reviewed, PluginSet types, PartsLibrary parts)
+      throws CommandFault {
     return reviewed;
   }
 

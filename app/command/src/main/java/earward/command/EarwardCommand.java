@@ -22,6 +22,7 @@ import picocli.CommandLine.Spec;
       BatchCommand.class,
       FaultsCommand.class,
       ProveCommand.class,
+      ProposeCommand.class,
       BlocksCommand.class,
       DesktopCommand.class
     },

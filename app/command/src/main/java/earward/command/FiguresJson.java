@@ -25,6 +25,7 @@ import earward.kit.path.PlacedBlock;
 import earward.kit.path.PlacedTestPoint;
 import earward.kit.review.CleanDepthLimit;
 import earward.kit.review.ReviewedKit;
+import earward.kit.review.SeamVerdict;
 
 /** All figures of a kit, for programs: SI base units, peak or rms said in the key. */
 final class FiguresJson {
@@ -101,6 +102,7 @@ final class FiguresJson {
         put(node, "carrierPeakVoltsWeak", place, Quantity.CARRIER_PEAK_VOLTS, WEAK);
         put(node, "efficiencyFractionTest", place, Quantity.DETECTION_EFFICIENCY, TEST);
         put(node, "inputOhmsTest", place, Quantity.CARRIER_INPUT_OHMS, TEST);
+        put(node, "loadRatioFractionTest", place, Quantity.LOAD_RATIO, TEST);
         put(node, "clippingDepthFractionTest", place, Quantity.CLIPPING_DEPTH, TEST);
         put(
             node,
@@ -142,8 +144,30 @@ final class FiguresJson {
       put(node, "headroomDecibelsTest", level, Quantity.HEADROOM_DECIBELS, TEST);
       put(node, "headroomDecibelsStrong", level, Quantity.HEADROOM_DECIBELS, STRONG);
       put(node, "noiseRmsVoltsTest", level, Quantity.NOISE_RMS_VOLTS, TEST);
+      overTheBand(node, place);
+      put(node, "audioRmsVoltsWeak", level, Quantity.AUDIO_RMS_VOLTS, WEAK);
+      put(node, "audioRmsVoltsStrong", level, Quantity.AUDIO_RMS_VOLTS, STRONG);
+      put(node, "audioRmsVoltsDeepest", level, Quantity.AUDIO_RMS_VOLTS, DEEPEST);
+      put(node, "dcVoltsNoSignal", level, Quantity.DC_VOLTS, NO_SIGNAL);
+      Quantity distance = Quantity.SIGNAL_TO_NOISE_DECIBELS;
+      put(node, "signalToNoiseDecibelsTest", level, distance, TEST);
+      node.put("verdict", SeamVerdict.of(kit.solved(), seam).key());
     }
     return seams;
+  }
+
+  private void overTheBand(ObjectNode node, String place) {
+    put(node, "onwardOhmsLowestTone", place, Quantity.LOWEST_TONE_ONWARD_OHMS, TEST);
+    put(node, "onwardOhmsHighestTone", place, Quantity.HIGHEST_TONE_ONWARD_OHMS, TEST);
+    put(node, "onwardOhmsCarrier", place, Quantity.CARRIER_ONWARD_OHMS, TEST);
+    put(node, "backwardOhmsLowestTone", place, Quantity.LOWEST_TONE_BACKWARD_OHMS, TEST);
+    put(node, "backwardOhmsHighestTone", place, Quantity.HIGHEST_TONE_BACKWARD_OHMS, TEST);
+    put(node, "backwardOhmsCarrier", place, Quantity.CARRIER_BACKWARD_OHMS, TEST);
+    Quantity low = Quantity.LOWEST_TONE_LOADING_LOSS_DECIBELS;
+    Quantity high = Quantity.HIGHEST_TONE_LOADING_LOSS_DECIBELS;
+    put(node, "loadingLossDecibelsLowestTone", place, low, TEST);
+    put(node, "loadingLossDecibelsHighestTone", place, high, TEST);
+    put(node, "loadRatioFractionWithout", place, Quantity.LOAD_RATIO_WITHOUT, TEST);
   }
 
   /** Both wires of a pair have the level between them. */

@@ -1,11 +1,13 @@
 package earward.command;
 
 import static earward.block.figure.CaseName.BATTERY_LOW;
+import static earward.block.figure.CaseName.DEEPEST;
 import static earward.block.figure.CaseName.FULL_OUTPUT;
 import static earward.block.figure.CaseName.HOTTEST;
 import static earward.block.figure.CaseName.NO_SIGNAL;
 import static earward.block.figure.CaseName.STRONG;
 import static earward.block.figure.CaseName.TEST;
+import static earward.block.figure.CaseName.WEAK;
 import static earward.block.figure.CaseName.WORST_TURN;
 
 import earward.block.Conditions;
@@ -20,6 +22,7 @@ import earward.kit.path.Assembly;
 import earward.kit.path.PlacedTestPoint;
 import earward.kit.review.CleanDepthLimit;
 import earward.kit.review.ReviewedKit;
+import earward.kit.review.SeamVerdict;
 import java.io.PrintWriter;
 
 /** All figures of a kit, for people: first by place, then every one under its name. */
@@ -81,20 +84,42 @@ final class FiguresText {
   private void seams() {
     TextTable table =
         new TextTable()
-            .row("into", "audio rms", "onward", "backward", "loss", "headroom", "strong", "noise");
+            .row(
+                "into",
+                "weak",
+                "test",
+                "strong",
+                "deepest",
+                "onward",
+                "backward",
+                "loss",
+                "load ratio cut",
+                "headroom",
+                "strong",
+                "noise",
+                "verdict");
     for (Seam seam : assembly.circuit().seams()) {
       String place = "seam." + seam.name();
+      String level = "seam." + seam.name().split("\\.", 2)[0];
       table.row(
           seam.name(),
-          shown(place, Quantity.AUDIO_RMS_VOLTS, TEST),
+          shown(level, Quantity.AUDIO_RMS_VOLTS, WEAK),
+          shown(level, Quantity.AUDIO_RMS_VOLTS, TEST),
+          shown(level, Quantity.AUDIO_RMS_VOLTS, STRONG),
+          shown(level, Quantity.AUDIO_RMS_VOLTS, DEEPEST),
           shown(place, Quantity.ONWARD_OHMS, TEST),
           shown(place, Quantity.BACKWARD_OHMS, TEST),
           shown(place, Quantity.LOADING_LOSS_DECIBELS, TEST),
-          shown(place, Quantity.HEADROOM_DECIBELS, TEST),
-          shown(place, Quantity.HEADROOM_DECIBELS, STRONG),
-          shown(place, Quantity.NOISE_RMS_VOLTS, TEST));
+          shown(place, Quantity.LOAD_RATIO_WITHOUT, TEST),
+          shown(level, Quantity.HEADROOM_DECIBELS, TEST),
+          shown(level, Quantity.HEADROOM_DECIBELS, STRONG),
+          shown(level, Quantity.NOISE_RMS_VOLTS, TEST),
+          SeamVerdict.of(kit.solved(), seam).key());
     }
-    section("Seams, at the test tone (headroom of the test and the strong signal)", table);
+    section(
+        "Seams: audio rms; impedances and loss at the test tone; the detector's load ratio if the path"
+            + " ended there; headroom of test and strong signal",
+        table);
   }
 
   private void path() {

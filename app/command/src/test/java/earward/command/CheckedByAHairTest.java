@@ -4,7 +4,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import earward.block.Conditions;
-import earward.block.check.Check;
 import earward.block.check.Finding;
 import earward.block.check.Severity;
 import earward.block.device.AdaptorModel;
@@ -15,8 +14,6 @@ import earward.kit.design.KitDesign;
 import earward.kit.design.QuantityText;
 import earward.kit.design.SettingEntry;
 import earward.kit.path.Assembly;
-import earward.kit.path.KitSolver;
-import earward.kit.path.PlacedBlock;
 import java.util.Optional;
 import java.util.function.DoubleFunction;
 import java.util.stream.Stream;
@@ -138,24 +135,13 @@ class CheckedByAHairTest {
   }
 
   private static boolean holds(Pair pair, double number) {
-    Assembly assembly = TestKits.assembled(pair.design().apply(number));
-    assertThat(assembly.complete()).as("%s", assembly.findings()).isTrue();
-    PlacedBlock block = assembly.block(pair.block()).orElseThrow();
-    Check check =
-        block.description().checks().stream()
-            .filter(each -> each.code().equals(pair.code()))
-            .findFirst()
-            .map(block::global)
-            .orElseThrow();
-    double figure = KitSolver.figure(assembly, check.figure());
-    assertThat(figure).as("%s at %s", check.figure(), number).isFinite();
-    return check.relation().holds(figure, check.limit());
+    return found(pair, number).isEmpty();
   }
 
   private static Optional<Finding> found(Pair pair, double number) {
-    return TestKits.findings(TestKits.reviewed(pair.design().apply(number))).stream()
-        .filter(f -> f.code().equals(pair.code()) && f.subject().equals(pair.block()))
-        .findFirst();
+    Assembly assembly = TestKits.assembled(pair.design().apply(number));
+    assertThat(assembly.complete()).as("%s", assembly.findings()).isTrue();
+    return TestKits.found(assembly, pair.code(), pair.block());
   }
 
   private static KitDesign with(

@@ -23,11 +23,12 @@ class MainTest {
     Ran ran = Ran.earward("--help");
     assertThat(ran.code()).isZero();
     assertThat(ran.results())
-        .contains("sheet", "figures", "review", "prove", "blocks", "desktop", "Exit code: 0");
+        .contains("sheet", "figures", "review", "prove", "propose", "blocks", "desktop")
+        .contains("Exit code: 0");
     assertThat(ran.results()).doesNotContain("picocli", "${");
     assertThat(ran.messages()).isEmpty();
     for (String command :
-        new String[] {"sheet", "figures", "review", "prove", "blocks", "desktop"}) {
+        new String[] {"sheet", "figures", "review", "prove", "propose", "blocks", "desktop"}) {
       Ran help = Ran.earward(command, "--help");
       assertThat(help.code()).isZero();
       assertThat(help.results()).startsWith("Usage: earward " + command);

@@ -1,7 +1,10 @@
 package earward.command;
 
+import static org.assertj.core.api.Assertions.assertThat;
+
 import earward.block.BlockTypes;
 import earward.block.check.Finding;
+import earward.block.figure.FigureName;
 import earward.host.PluginSet;
 import earward.host.Plugins;
 import earward.kit.design.KitDesign;
@@ -11,10 +14,14 @@ import earward.kit.file.PartsFiles;
 import earward.kit.parts.PartsLibrary;
 import earward.kit.path.Assembler;
 import earward.kit.path.Assembly;
+import earward.kit.path.Figures;
+import earward.kit.path.KitSolver;
+import earward.kit.path.SolvedKit;
 import earward.kit.review.ReviewFinding;
 import earward.kit.review.ReviewedKit;
 import earward.kit.review.Reviewer;
 import java.util.List;
+import java.util.Optional;
 
 /** The starter kits, the plug-ins as jars and the parts library, for tests without a command. */
 final class TestKits {
@@ -49,6 +56,22 @@ final class TestKits {
 
   static List<Finding> findings(ReviewedKit reviewed) {
     return reviewed.findings().stream().map(ReviewFinding::finding).toList();
+  }
+
+  /** What one check of a kit finds, with no more solved than its own figures. */
+  static Optional<Finding> found(Assembly assembly, String code, String subject) {
+    List<FigureName> names =
+        Reviewer.checks(assembly).stream()
+            .filter(each -> each.check().code().equals(code) && each.subject().equals(subject))
+            .map(each -> each.check().figure())
+            .toList();
+    assertThat(names).as("checks '%s' of '%s'", code, subject).isNotEmpty();
+    Figures figures = KitSolver.figures(assembly, names);
+    assertThat(figures.all()).as("%s", names).isNotEmpty();
+    SolvedKit solved = new SolvedKit(assembly, figures, List.of(), true);
+    return findings(Reviewer.review(solved, Reviewer.USUAL_LANGUAGE)).stream()
+        .filter(f -> f.code().equals(code) && f.subject().equals(subject))
+        .findFirst();
   }
 
   private static PartsLibrary parts() {

@@ -86,6 +86,24 @@ class UnfinishedKitsTest {
   }
 
   @Test
+  void anAmplifierWithoutTheNetworkThatItNeedsIsTold() {
+    KitDesign bare = TestKits.starter("lantern").withSetting("power", "network", "none");
+    assertThat(codes(TestKits.starter("lantern"))).doesNotContain("output-network-missing");
+    assertThat(codes(bare)).contains("output-network-missing");
+    // the Boathouse's amplifier is stable without one, and has none
+    assertThat(codes(TestKits.starter("boathouse"))).doesNotContain("output-network-missing");
+  }
+
+  @Test
+  void aSwitchingAmplifierBesideAnAmReceiverIsTold() throws Exception {
+    ObjectNode kit = kit("lantern");
+    copy(kit, 4, "amplifier", "amplifiers", "TDA2822M bridge");
+    assertThat(codes(read(kit))).doesNotContain("switching-amplifier");
+    ((ObjectNode) kit.get("path").get(4).get("settings").get("amplifier")).put("switching", true);
+    assertThat(codes(read(kit))).contains("switching-amplifier");
+  }
+
+  @Test
   void aDetectorTurnedRoundGivesTheSameWithTheOtherSignAndItsAgcMustFollow() {
     KitDesign turned = TestKits.starter("lantern").withSetting("detector", "direction", "negative");
     assertThat(codes(TestKits.starter("lantern"))).doesNotContain("agc-direction");

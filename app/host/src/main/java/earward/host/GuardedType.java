@@ -5,6 +5,7 @@ import earward.block.BlockType;
 import earward.block.Conditions;
 import earward.block.Proposer;
 import earward.block.Role;
+import earward.block.SeamUse;
 import earward.block.check.Finding;
 import earward.block.setting.Setting;
 import earward.block.setting.SettingValue;
@@ -102,6 +103,11 @@ final class GuardedType implements BlockType {
               Map<String, SettingValue> proposed = proposer.propose(asked);
               return proposed == null ? null : Map.copyOf(proposed);
             });
+  }
+
+  @Override
+  public List<SeamUse> seamUses() {
+    return guard.list(id + ".seamUses", within::seamUses);
   }
 
   @Override

@@ -67,6 +67,15 @@ public interface BlockType {
   }
 
   /**
+   * What it can do for a seam where two blocks do not suit one another. The host puts it there with
+   * values of its own choice, solves, and shows what comes of it. A block that is no help there
+   * says nothing.
+   */
+  default List<SeamUse> seamUses() {
+    return List.of();
+  }
+
+  /**
    * A judgement that no check can put as data; runs once per edit, on the nominal design. Prefer
    * {@link earward.block.check.Check}: only checks are held against every kit of a batch, and only
    * they have remedies. What it says are texts of the block, by {@code Finding.inWords}.

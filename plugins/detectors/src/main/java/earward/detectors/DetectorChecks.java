@@ -20,6 +20,9 @@ final class DetectorChecks {
   /** Share of the breakdown voltage that is used (common practice). */
   private static final double REVERSE_MARGIN = 0.8;
 
+  /** Share of the carrier's peak that comes out as DC of a reservoir that holds it. */
+  private static final double LEAST_EFFICIENCY = 0.4;
+
   private DetectorChecks() {}
 
   /**
@@ -68,6 +71,22 @@ final class DetectorChecks {
             * ThermalVoltage.volts(conditions.ambientCelsius()),
         "common practice: below about 4·n·Vt a diode detects by its square law",
         moreDrive);
+  }
+
+  /** Whether the reservoir holds the peak between two carrier cycles. */
+  static Check following(String diode, boolean ownLoad) {
+    List<RemedyHint> more = new ArrayList<>(List.of(RemedyHint.raise("c1")));
+    if (ownLoad) {
+      more.add(RemedyHint.raise("r1"));
+    }
+    return Check.atLeast(
+        "carrier-following",
+        Severity.WEIGH,
+        new FigureName(diode, Quantity.DETECTION_EFFICIENCY, CaseName.TEST),
+        LEAST_EFFICIENCY,
+        "Terman, Radio Engineers' Handbook: 80 to 90 % in ordinary practice (from memory); half of"
+            + " the peak is where the output follows the carrier rather than its envelope",
+        more.toArray(RemedyHint[]::new));
   }
 
   static Check reverse(String diode, DiodeModel model) {

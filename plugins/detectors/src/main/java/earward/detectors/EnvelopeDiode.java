@@ -8,6 +8,7 @@ import earward.block.BlockType;
 import earward.block.Conditions;
 import earward.block.Proposer;
 import earward.block.Role;
+import earward.block.check.Check;
 import earward.block.check.Finding;
 import earward.block.device.Diode;
 import earward.block.device.DiodeModel;
@@ -17,6 +18,7 @@ import earward.block.setting.Values;
 import earward.block.wiring.Port.Single;
 import earward.block.wiring.Wiring;
 import earward.block.wiring.WiringPlan;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
@@ -54,9 +56,13 @@ public final class EnvelopeDiode implements BlockType {
                 values.chosen("direction", "positive") ? ANODE : CATHODE,
                 "out");
     Reservoir.hang(DiodeCautions.of(plan, "d1", model), values);
+    boolean ownLoad = Reservoir.ownLoad(values);
+    List<Check> checks =
+        new ArrayList<>(DetectorChecks.of(List.of("d1"), model, conditions, ownLoad));
+    checks.add(DetectorChecks.following("d1", ownLoad));
     return new BlockDescription(
         plan.fit("d1", "c1").testPoint("out", "out").to(new Single("out")),
-        DetectorChecks.of(List.of("d1"), model, conditions, Reservoir.ownLoad(values)),
+        checks,
         List.of(Reservoir.clippingOverCapacitor(values, "d1")));
   }
 

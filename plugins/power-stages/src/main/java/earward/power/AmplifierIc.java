@@ -6,7 +6,10 @@ import earward.block.Conditions;
 import earward.block.Curve;
 import earward.block.Proposer;
 import earward.block.Role;
+import earward.block.check.Finding;
+import earward.block.check.Severity;
 import earward.block.device.AmplifierModel;
+import earward.block.device.AmplifierTraits;
 import earward.block.device.PartKind;
 import earward.block.device.Terminal;
 import earward.block.figure.CaseName;
@@ -18,10 +21,12 @@ import earward.block.quantity.Unit;
 import earward.block.setting.Setting;
 import earward.block.setting.SettingValue;
 import earward.block.setting.Values;
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.ToDoubleFunction;
 
 /**
  * An audio amplifier IC from the parts library with all that its pins need: which parts there are
@@ -93,6 +98,20 @@ public final class AmplifierIc implements BlockType {
         surroundings.wiring(),
         AmplifierChecks.of(values, model, conditions, surroundings.exitNode()),
         values.chosen("cooling", "heat-sink") ? List.of(heat) : List.of());
+  }
+
+  @Override
+  public List<Finding> judge(
+      Values values, Conditions conditions, ToDoubleFunction<String> figure) {
+    AmplifierTraits traits = values.part("amplifier", AmplifierModel.class).traits();
+    List<Finding> findings = new ArrayList<>();
+    if (traits.needsOutputNetwork() && !values.chosen("network", "fitted")) {
+      findings.add(Finding.inWords(Severity.WEIGH, "output-network-missing"));
+    }
+    if (traits.switching()) {
+      findings.add(Finding.inWords(Severity.WEIGH, "switching-amplifier"));
+    }
+    return findings;
   }
 
   /** Gain and output capacitors that each put their corner an octave below the lowest tone. */

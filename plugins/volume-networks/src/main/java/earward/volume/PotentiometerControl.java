@@ -11,7 +11,10 @@ import earward.block.Conditions;
 import earward.block.Curve;
 import earward.block.Proposer;
 import earward.block.Role;
+import earward.block.check.Check;
+import earward.block.check.Relation;
 import earward.block.check.RemedyHint;
+import earward.block.check.Severity;
 import earward.block.device.Potentiometer;
 import earward.block.device.Resistor;
 import earward.block.device.Taper;
@@ -40,6 +43,9 @@ public final class PotentiometerControl implements BlockType {
   private static final String AFTER_CAPACITOR = "after-capacitor";
   private static final String CAPACITOR = "capacitor";
   private static final String RESISTOR = "resistor";
+
+  /** DC that may go on from the wiper, V (common practice). */
+  private static final double MOST_DC_VOLTS = 0.1;
 
   @Override
   public String id() {
@@ -92,7 +98,10 @@ public final class PotentiometerControl implements BlockType {
         plan.fit("track").testPoint("top", top).testPoint("wiper", "wiper").to(new Single(exit));
     return new BlockDescription(
         wiring,
-        List.of(Coupling.edgeCheck(exit, conditions, moreBass)),
+        List.of(
+            Coupling.edgeCheck(exit, conditions, moreBass),
+            dcPassedOn(exit, Relation.AT_MOST, MOST_DC_VOLTS),
+            dcPassedOn(exit, Relation.AT_LEAST, -MOST_DC_VOLTS)),
         List.of(
             new Curve(
                 "level-over-turn",
@@ -101,6 +110,18 @@ public final class PotentiometerControl implements BlockType {
                 1,
                 21,
                 List.of(new FigureName(exit, Quantity.AUDIO_RMS_VOLTS, CaseName.TEST)))));
+  }
+
+  /** DC at the wiper crackles when it is turned, and shifts the rest of what follows. */
+  private static Check dcPassedOn(String exit, Relation relation, double limitVolts) {
+    return new Check(
+        "dc-passed-on",
+        Severity.WEIGH,
+        new FigureName(exit, Quantity.DC_VOLTS, CaseName.STRONG),
+        relation,
+        limitVolts,
+        "common practice: a wiper that carries DC crackles",
+        List.of(RemedyHint.change("wiper-coupling"), RemedyHint.change("coupling")));
   }
 
   private static Potentiometer track(Values values) {

@@ -45,7 +45,19 @@ final class Readings {
           RESPONSE_DEVIATION_DECIBELS,
           RESPONSE_DEVIATION_HERTZ ->
           atNodes(name);
-      case ONWARD_OHMS, BACKWARD_OHMS, LOADING_LOSS_DECIBELS -> atSeam(name);
+      case ONWARD_OHMS,
+          BACKWARD_OHMS,
+          LOADING_LOSS_DECIBELS,
+          LOWEST_TONE_ONWARD_OHMS,
+          HIGHEST_TONE_ONWARD_OHMS,
+          LOWEST_TONE_BACKWARD_OHMS,
+          HIGHEST_TONE_BACKWARD_OHMS,
+          LOWEST_TONE_LOADING_LOSS_DECIBELS,
+          HIGHEST_TONE_LOADING_LOSS_DECIBELS,
+          CARRIER_ONWARD_OHMS,
+          CARRIER_BACKWARD_OHMS,
+          LOAD_RATIO_WITHOUT ->
+          atSeam(name);
       case HEADROOM_DECIBELS,
           OUTPUT_RMS_VOLTS,
           OUTPUT_WATTS,
@@ -118,20 +130,47 @@ final class Readings {
 
   private Reading atSeam(FigureName name) {
     List<Seam> seams = network.circuit.seams();
-    SeamView.Side side =
-        switch (name.quantity()) {
-          case ONWARD_OHMS -> SeamView.Side.ONWARD;
-          case BACKWARD_OHMS -> SeamView.Side.BACKWARD;
-          default -> SeamView.Side.LOSS;
-        };
     for (int i = 0; i < seams.size(); i++) {
       if (name.place().equals(SEAM + seams.get(i).name())) {
         int seam = i;
         int partner = partner(seams, seams.get(i).name());
-        return work -> SeamView.of(work, seam, partner, side);
+        return name.quantity() == Quantity.LOAD_RATIO_WITHOUT
+            ? work -> LoadRatio.cut(work, seam, partner)
+            : seamView(name.quantity(), seam, partner);
       }
     }
     throw new IllegalArgumentException("there is no seam '" + name.place() + "' in the circuit");
+  }
+
+  private static Reading seamView(Quantity quantity, int seam, int partner) {
+    SeamView.Side side =
+        switch (quantity) {
+          case ONWARD_OHMS,
+              LOWEST_TONE_ONWARD_OHMS,
+              HIGHEST_TONE_ONWARD_OHMS,
+              CARRIER_ONWARD_OHMS ->
+              SeamView.Side.ONWARD;
+          case BACKWARD_OHMS,
+              LOWEST_TONE_BACKWARD_OHMS,
+              HIGHEST_TONE_BACKWARD_OHMS,
+              CARRIER_BACKWARD_OHMS ->
+              SeamView.Side.BACKWARD;
+          default -> SeamView.Side.LOSS;
+        };
+    SeamView.At at =
+        switch (quantity) {
+          case LOWEST_TONE_ONWARD_OHMS,
+              LOWEST_TONE_BACKWARD_OHMS,
+              LOWEST_TONE_LOADING_LOSS_DECIBELS ->
+              SeamView.At.LOWEST_TONE;
+          case HIGHEST_TONE_ONWARD_OHMS,
+              HIGHEST_TONE_BACKWARD_OHMS,
+              HIGHEST_TONE_LOADING_LOSS_DECIBELS ->
+              SeamView.At.HIGHEST_TONE;
+          case CARRIER_ONWARD_OHMS, CARRIER_BACKWARD_OHMS -> SeamView.At.CARRIER;
+          default -> SeamView.At.OWN_TONE;
+        };
+    return work -> SeamView.of(work, seam, partner, side, at);
   }
 
   /** The way back of a pair's seam, −1 for a single wire. */
@@ -178,6 +217,7 @@ final class Readings {
     return switch (quantity) {
       case DC_AMPERES, SUPPLY_AMPERES ->
           work -> work.solved() ? law.amperes(work.stage()) : Double.NaN;
+      case DROP_VOLTS -> work -> work.solved() ? law.dropVolts(work.stage()) : Double.NaN;
       case DISSIPATION_WATTS -> work -> work.solved() ? law.watts(work.stage()) : Double.NaN;
       case JUNCTION_CELSIUS ->
           law instanceof Heated heated
@@ -217,6 +257,7 @@ final class Readings {
       case CARRIER_PEAK_VOLTS -> work -> CarrierLevels.portPeakVolts(work, port);
       case DETECTION_EFFICIENCY -> work -> CarrierLevels.efficiency(work, port);
       case CARRIER_INPUT_OHMS -> work -> CarrierLevels.inputOhms(work, port);
+      case LOAD_RATIO -> work -> LoadRatio.of(work, port);
       case CLIPPING_DEPTH -> work -> work.clipping.depth(port, ClippingRule.Without.NOTHING);
       case CLIPPING_DEPTH_WITHOUT_CAPACITOR ->
           work -> work.clipping.depth(port, ClippingRule.Without.CAPACITOR);

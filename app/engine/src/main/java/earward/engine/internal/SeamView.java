@@ -9,6 +9,9 @@ final class SeamView {
   /** Share of the feed's voltage above which a seam belongs to the carrier. */
   private static final double CARRIER_SHARE = 0.5;
 
+  /** Share of the feed's voltage below which a seam has nothing to do with the carrier. */
+  private static final double LEAST_CARRIER_SHARE = 1e-3;
+
   private SeamView() {}
 
   /** What is asked of a seam. */
@@ -18,9 +21,17 @@ final class SeamView {
     LOSS
   }
 
+  /** At which frequency. Before the detector all but the last are the carrier. */
+  enum At {
+    OWN_TONE,
+    LOWEST_TONE,
+    HIGHEST_TONE,
+    CARRIER
+  }
+
   /** Magnitude in Ω, or the loss in dB; NaN where the case has no solution. */
-  static double of(CaseWork work, int seam, int partner, Side side) {
-    if (!work.solved() || !stampAndFactor(work, seam)) {
+  static double of(CaseWork work, int seam, int partner, Side side, At at) {
+    if (!work.solved() || !stampAndFactor(work, seam, at)) {
       return Double.NaN;
     }
     int branch = work.network.firstSeamBranch + seam;
@@ -53,10 +64,13 @@ final class SeamView {
     };
   }
 
-  private static boolean stampAndFactor(CaseWork work, int seam) {
+  private static boolean stampAndFactor(CaseWork work, int seam, At at) {
     Detection detection = work.detection;
     boolean carrier = work.carrierSolved();
-    if (detection != null && carrier && atCarrier(work, seam)) {
+    if (at == At.CARRIER && (!carrier || !passed(work, seam))) {
+      return false;
+    }
+    if (detection != null && carrier && (at == At.CARRIER || atCarrier(work, seam))) {
       work.alternating.stage().beginFreeCarrier(work.carrierRadians());
       work.alternating.stamp();
       for (int i = 0; i < work.network.ports.length; i++) {
@@ -71,14 +85,28 @@ final class SeamView {
       }
       return work.alternating.factor();
     }
-    work.alternating.stage().beginAudio(work.toneRadians());
+    double radians = radians(work, at);
+    work.alternating.stage().beginAudio(radians);
     work.alternating.stamp();
     if (detection != null && carrier) {
-      work.small.fill(
-          detection.around, detection.carrierOnly, work.peakVolts(), work.toneRadians());
+      work.small.fill(detection.around, detection.carrierOnly, work.peakVolts(), radians);
       SmallResponse.addPorts(work);
     }
     return work.alternating.factor();
+  }
+
+  private static double radians(CaseWork work, At at) {
+    return switch (at) {
+      case LOWEST_TONE -> 2 * Math.PI * work.row[work.network.lowestTone];
+      case HIGHEST_TONE -> 2 * Math.PI * work.row[work.network.highestTone];
+      case OWN_TONE, CARRIER -> work.toneRadians();
+    };
+  }
+
+  /** Whether enough of the carrier passes here for its impedance to matter. */
+  private static boolean passed(CaseWork work, int seam) {
+    double rms = CarrierLevels.rmsVolts(work, 1, work.network.seamBefore[seam], -1);
+    return Math.sqrt(2) * rms > LEAST_CARRIER_SHARE * work.peakVolts();
   }
 
   private static boolean atCarrier(CaseWork work, int seam) {

@@ -108,6 +108,12 @@ public abstract class Law {
     return Double.NaN;
   }
 
+  /** DC voltage from the first terminal to the last, in V. */
+  public final double dropVolts(DirectStage stage) {
+    int[] nodes = seat.nodes();
+    return stage.volts(nodes[0]) - stage.volts(nodes[nodes.length - 1]);
+  }
+
   /** DC power that the part turns into heat, in W. */
   public double watts(DirectStage stage) {
     int[] nodes = seat.nodes();

@@ -3,6 +3,7 @@ package earward.kit.file;
 import earward.block.device.AmplifierGain;
 import earward.block.device.AmplifierModel;
 import earward.block.device.AmplifierRatings;
+import earward.block.device.AmplifierTraits;
 import earward.block.device.ControlPoint;
 import earward.block.quantity.Unit;
 import earward.kit.design.QuantityText;
@@ -43,7 +44,11 @@ final class AmplifierForm {
             in.quantity("ripple rejection without capacitor", Unit.DECIBEL, rejection),
             in.quantity("input noise", Unit.VOLT, 0),
             in.text("package").orElse(""),
-            PinsForm.read(in));
+            PinsForm.read(in),
+            new AmplifierTraits(
+                in.flag("output network needed", false),
+                in.flag("switching", false),
+                in.quantity("highest input", Unit.VOLT, Double.POSITIVE_INFINITY)));
     return new FittedPart(model, fit.map(SwingFit::report));
   }
 

@@ -122,13 +122,15 @@ final class DerivedFigures {
 
   private void output() {
     double ohms = ratedLoadOhms();
-    for (CaseName caseName : List.of(WEAK, TEST, STRONG, FULL_VOLUME)) {
+    for (CaseName caseName :
+        List.of(WEAK, TEST, STRONG, FULL_VOLUME, KitCases.WEAK_AT_FULL_VOLUME)) {
       double volts = get(CircuitBuilder.PATH, Quantity.AUDIO_RMS_VOLTS, caseName);
       put(CircuitBuilder.PATH, Quantity.OUTPUT_RMS_VOLTS, caseName, volts);
       outputWatts(caseName, volts * volts / ohms);
     }
     for (CircuitPart part : parts()) {
       if (part.device() instanceof AudioAmplifier) {
+        put(part.name(), Quantity.LOAD_OHMS, FULL_OUTPUT, ohms);
         for (CaseName caseName : List.of(FULL_OUTPUT, BATTERY_LOW)) {
           double clipWatts = get(part.name(), Quantity.CLIP_WATTS, caseName);
           put(CircuitBuilder.PATH, Quantity.CLIP_WATTS, caseName, clipWatts);

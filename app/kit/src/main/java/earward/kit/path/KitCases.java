@@ -23,6 +23,9 @@ final class KitCases {
   /** What stands for no internal resistance when the highest voltage counts. */
   private static final double NO_LOAD_OHMS = 1e-3;
 
+  /** The weakest station with every knob at its upper stop: what the kit can make of it. */
+  static final CaseName WEAK_AT_FULL_VOLUME = new CaseName("weak-at-full-volume");
+
   private final Assembly assembly;
   private final Conditions conditions;
   private final Knobs knobs;
@@ -47,6 +50,11 @@ final class KitCases {
     if (!worstPosition.isEmpty()) {
       cases.add(new SolveCase(CaseName.WORST_TURN, Drive.SIGNAL, with(test(), worstPosition)));
     }
+    cases.add(
+        new SolveCase(
+            WEAK_AT_FULL_VOLUME,
+            Drive.SIGNAL,
+            with(carrier(conditions.weakPeakVolts()), knobs.allFull())));
     return cases;
   }
 

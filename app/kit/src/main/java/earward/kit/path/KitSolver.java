@@ -9,11 +9,11 @@ import earward.engine.Engine;
 import earward.engine.Slot;
 import earward.engine.SolveCase;
 import earward.engine.SolveOutcome;
+import java.util.Collection;
 import java.util.EnumSet;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Set;
 import java.util.function.Predicate;
 import java.util.stream.Collectors;
@@ -100,29 +100,68 @@ public final class KitSolver {
    * @param name of the figure in the whole path
    */
   public static double figure(Assembly assembly, FigureName name) {
-    Optional<FigureName> asked = new Places(assembly.circuit()).inEngine(name);
-    if (asked.isEmpty()) {
-      return solve(assembly).figures().orNaN(name);
-    }
+    Figures figures = figures(assembly, List.of(name));
+    double own = figures.orNaN(name);
+    return Double.isNaN(own)
+        ? figures.orNaN(new FigureName("seam." + name.place(), name.quantity(), name.caseName()))
+        : own;
+  }
+
+  /**
+   * Some figures of an assembly, with no more solved than they need. A block's own place stands for
+   * the seam by which it is entered. None at all where a case has no solution: whoever proves an
+   * edit solves it whole and sees the finding.
+   *
+   * @param assembly a complete one
+   * @param names of figures in the whole path
+   */
+  public static Figures figures(Assembly assembly, Collection<FigureName> names) {
+    SolvedKit solved = solve(assembly, names);
+    return solved.solved() ? solved.figures() : Figures.NONE;
+  }
+
+  /**
+   * The kit with some of its figures, and what was found on solving for them: no more is solved
+   * than they need.
+   *
+   * @param assembly a complete one
+   * @param names of figures in the whole path
+   */
+  public static SolvedKit solve(Assembly assembly, Collection<FigureName> names) {
     try {
-      KitCases cases = new KitCases(assembly);
-      boolean deepest = name.caseName().equals(CaseName.DEEPEST);
-      boolean worst = name.caseName().equals(CaseName.WORST_TURN);
-      List<SolveCase> only =
-          cases
-              .all(
-                  deepest ? TurnScan.deepest(assembly, cases) : Map.of(),
-                  worst ? TurnScan.test(assembly, cases) : Map.of())
-              .stream()
-              .filter(each -> each.name().equals(name.caseName()))
-              .toList();
-      CompiledCircuit circuit = Engine.compile(assembly.circuit(), only, List.of(asked.get()));
-      double[] row = new double[1];
-      boolean solved = circuit.newSolver().solve(circuit.nominalValues(), row).solved();
-      return solved ? row[0] : Double.NaN;
+      CompiledKit kit = compile(assembly, names);
+      double[] row = new double[kit.circuit().figures().size()];
+      if (row.length == 0) {
+        return new SolvedKit(assembly, Figures.NONE, List.of(), true);
+      }
+      SolveOutcome outcome = kit.circuit().newSolver().solve(kit.circuit().nominalValues(), row);
+      return new SolvedKit(
+          assembly, kit.figures(row), outcome.findings(), outcome.solved(), kit.deepestKnobs());
     } catch (CircuitException e) {
-      return Double.NaN; // whoever proves an edit solves it whole and sees the finding
+      return new SolvedKit(assembly, Figures.NONE, List.of(e.finding()), false);
     }
+  }
+
+  private static CompiledKit compile(Assembly assembly, Collection<FigureName> names) {
+    Set<CaseName> asked = names.stream().map(FigureName::caseName).collect(Collectors.toSet());
+    KitCases cases = new KitCases(assembly);
+    Map<String, Double> deepest =
+        asked.contains(CaseName.DEEPEST) ? TurnScan.deepest(assembly, cases) : Map.of();
+    Map<String, Double> worst =
+        asked.contains(CaseName.WORST_TURN) ? TurnScan.test(assembly, cases) : Map.of();
+    Places places = new Places(assembly.circuit());
+    List<FigureName> standing = WantedFigures.of(assembly, places, !worst.isEmpty());
+    Set<FigureName> needed = new FigureNeeds(places, standing).of(names);
+    List<SolveCase> only =
+        cases.all(deepest, worst).stream()
+            .filter(each -> needed.stream().anyMatch(of -> of.caseName().equals(each.name())))
+            .toList();
+    List<FigureName> wanted =
+        needed.stream()
+            .filter(of -> only.stream().anyMatch(each -> each.name().equals(of.caseName())))
+            .toList();
+    CompiledCircuit circuit = Engine.compile(assembly.circuit(), only, wanted);
+    return new CompiledKit(assembly, circuit, deepest, worst);
   }
 
   /**

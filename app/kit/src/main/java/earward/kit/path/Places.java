@@ -74,6 +74,7 @@ final class Places {
           RESPONSE_DEVIATION_HERTZ ->
           Kind.NODE;
       case DC_AMPERES,
+          DROP_VOLTS,
           DISSIPATION_WATTS,
           JUNCTION_CELSIUS,
           SURFACE_CELSIUS,
@@ -81,6 +82,7 @@ final class Places {
           CARRIER_PEAK_VOLTS,
           DETECTION_EFFICIENCY,
           CARRIER_INPUT_OHMS,
+          LOAD_RATIO,
           CLIPPING_DEPTH,
           CLIPPING_DEPTH_WITHOUT_CAPACITOR,
           CLIPPING_DEPTH_WITHOUT_COUPLING,
@@ -97,8 +99,21 @@ final class Places {
           RAIL_LOOP_HERTZ,
           OVERLOAD_DECIBELS ->
           Kind.PART;
-      case ONWARD_OHMS, BACKWARD_OHMS, LOADING_LOSS_DECIBELS -> Kind.SEAM;
+      case ONWARD_OHMS,
+          BACKWARD_OHMS,
+          LOADING_LOSS_DECIBELS,
+          LOWEST_TONE_ONWARD_OHMS,
+          HIGHEST_TONE_ONWARD_OHMS,
+          LOWEST_TONE_BACKWARD_OHMS,
+          HIGHEST_TONE_BACKWARD_OHMS,
+          LOWEST_TONE_LOADING_LOSS_DECIBELS,
+          HIGHEST_TONE_LOADING_LOSS_DECIBELS,
+          CARRIER_ONWARD_OHMS,
+          CARRIER_BACKWARD_OHMS,
+          LOAD_RATIO_WITHOUT ->
+          Kind.SEAM;
       case HEADROOM_DECIBELS,
+          LOAD_OHMS,
           OUTPUT_RMS_VOLTS,
           OUTPUT_WATTS,
           SIGNAL_TO_NOISE_DECIBELS,

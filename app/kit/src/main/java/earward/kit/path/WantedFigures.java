@@ -16,8 +16,12 @@ import earward.block.check.Check;
 import earward.block.device.Adaptor;
 import earward.block.device.AudioAmplifier;
 import earward.block.device.Battery;
+import earward.block.device.Capacitor;
 import earward.block.device.Diode;
+import earward.block.device.Potentiometer;
 import earward.block.device.Regulator;
+import earward.block.device.Resistor;
+import earward.block.device.Terminal;
 import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
 import earward.block.figure.Quantity;
@@ -26,12 +30,27 @@ import earward.engine.Probe;
 import earward.engine.Seam;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 
 /** All figures that are asked of the engine for a kit: the standing list, and what checks name. */
 final class WantedFigures {
   private static final List<CaseName> POWERED = List.of(NO_SIGNAL, WEAK, TEST, STRONG);
   private static final List<CaseName> SIGNALS = List.of(WEAK, TEST, STRONG, FULL_VOLUME);
+  private static final List<Quantity> AT_SEAMS =
+      List.of(
+          Quantity.ONWARD_OHMS,
+          Quantity.LOWEST_TONE_ONWARD_OHMS,
+          Quantity.HIGHEST_TONE_ONWARD_OHMS,
+          Quantity.CARRIER_ONWARD_OHMS,
+          Quantity.BACKWARD_OHMS,
+          Quantity.LOWEST_TONE_BACKWARD_OHMS,
+          Quantity.HIGHEST_TONE_BACKWARD_OHMS,
+          Quantity.CARRIER_BACKWARD_OHMS,
+          Quantity.LOADING_LOSS_DECIBELS,
+          Quantity.LOWEST_TONE_LOADING_LOSS_DECIBELS,
+          Quantity.HIGHEST_TONE_LOADING_LOSS_DECIBELS,
+          Quantity.LOAD_RATIO_WITHOUT);
   private static final List<CaseName> OUTPUTS = List.of(FULL_OUTPUT, BATTERY_LOW);
 
   private final Set<FigureName> wanted = new LinkedHashSet<>();
@@ -67,10 +86,14 @@ final class WantedFigures {
     add(probe.name(), Quantity.DISTORTION, SIGNALS);
     add(probe.name(), Quantity.SECOND_HARMONIC, List.of(TEST));
     add(probe.name(), Quantity.THIRD_HARMONIC, List.of(TEST));
+    if (probe.name().startsWith("seam.")) {
+      add(probe.name(), Quantity.AUDIO_RMS_VOLTS, List.of(DEEPEST));
+    }
     add(probe.name(), Quantity.CARRIER_RMS_VOLTS, List.of(TEST, STRONG));
     add(probe.name(), Quantity.SECOND_CARRIER_RMS_VOLTS, List.of(TEST));
     add(probe.name(), Quantity.THIRD_CARRIER_RMS_VOLTS, List.of(TEST));
     if (probe.name().equals(CircuitBuilder.PATH)) {
+      add(probe.name(), Quantity.AUDIO_RMS_VOLTS, List.of(KitCases.WEAK_AT_FULL_VOLUME));
       add(probe.name(), Quantity.LOW_EDGE_HERTZ, List.of(TEST));
       add(probe.name(), Quantity.HIGH_EDGE_HERTZ, List.of(TEST));
       add(probe.name(), Quantity.RESPONSE_DEVIATION_DECIBELS, List.of(TEST));
@@ -90,18 +113,22 @@ final class WantedFigures {
 
   private void atSeam(Seam seam) {
     String place = "seam." + seam.name();
-    add(place, Quantity.ONWARD_OHMS, List.of(TEST));
-    add(place, Quantity.BACKWARD_OHMS, List.of(TEST));
-    add(place, Quantity.LOADING_LOSS_DECIBELS, List.of(TEST));
+    AT_SEAMS.forEach(quantity -> add(place, quantity, List.of(TEST)));
   }
 
   private void ofPart(CircuitPart part) {
-    if (part.device() instanceof Diode) {
+    if (part.device() instanceof Capacitor) {
+      add(part.name(), Quantity.DROP_VOLTS, List.of(NO_SIGNAL, STRONG, HIGHEST_SUPPLY));
+    } else if (part.device() instanceof Resistor || part.device() instanceof Potentiometer) {
+      add(part.name(), Quantity.DISSIPATION_WATTS, List.of(STRONG, HIGHEST_SUPPLY));
+    } else if (part.device() instanceof Diode) {
       ofDiode(part.name());
     } else if (part.device() instanceof AudioAmplifier) {
       ofAmplifier(part.name());
     } else if (part.device() instanceof Regulator) {
       ofHeated(part.name());
+      String input = Objects.requireNonNull(part.nodes().get(Terminal.INPUT));
+      add(input, Quantity.DC_VOLTS, List.of(BATTERY_LOW));
     } else if (part.device() instanceof Battery || part.device() instanceof Adaptor) {
       add(
           part.name(),
@@ -129,6 +156,7 @@ final class WantedFigures {
     add(name, Quantity.CARRIER_PEAK_VOLTS, List.of(WEAK, TEST, STRONG));
     add(name, Quantity.DETECTION_EFFICIENCY, List.of(TEST));
     add(name, Quantity.CARRIER_INPUT_OHMS, List.of(TEST));
+    add(name, Quantity.LOAD_RATIO, List.of(TEST));
   }
 
   private void ofAmplifier(String name) {

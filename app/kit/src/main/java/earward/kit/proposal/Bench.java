@@ -55,11 +55,11 @@ record Bench(ReviewedKit now, BlockTypes types, PartsLibrary library, Locale lan
         .toList();
   }
 
-  private static List<Finding> findings(ReviewedKit reviewed) {
+  static List<Finding> findings(ReviewedKit reviewed) {
     return reviewed.findings().stream().map(ReviewFinding::finding).toList();
   }
 
-  private static boolean same(Finding one, Finding other) {
+  static boolean same(Finding one, Finding other) {
     return one.code().equals(other.code()) && one.subject().equals(other.subject());
   }
 }

@@ -5,6 +5,7 @@ import earward.block.check.Finding;
 import earward.kit.design.KitDesign;
 import earward.kit.parts.PartsLibrary;
 import earward.kit.path.Assembler;
+import earward.kit.path.Assembly;
 import earward.kit.path.KitSolver;
 import earward.kit.path.SolvedKit;
 import java.util.ArrayList;
@@ -50,6 +51,11 @@ public final class Reviewer {
     }
     return new ReviewedKit(
         solved, weightiestFirst(all).stream().map(f -> new ReviewFinding(f, List.of())).toList());
+  }
+
+  /** Every check that is held against a kit: its blocks', its own, those of every part. */
+  public static List<KitCheck> checks(Assembly assembly) {
+    return KitChecks.of(assembly);
   }
 
   /** Sorted by severity, in the order found within each; what was already said is left out. */

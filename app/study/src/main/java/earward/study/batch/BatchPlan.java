@@ -8,9 +8,9 @@ import earward.block.figure.Quantity;
 import earward.kit.path.Assembly;
 import earward.kit.path.CompiledKit;
 import earward.kit.path.KitSolver;
-import earward.kit.path.PlacedBlock;
 import earward.kit.path.PlacedTestPoint;
-import earward.kit.review.KitChecks;
+import earward.kit.review.KitCheck;
+import earward.kit.review.Reviewer;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.EnumSet;
@@ -150,14 +150,9 @@ public final class BatchPlan {
 
   private static List<BatchCheck> checks(Assembly assembly) {
     List<BatchCheck> checks = new ArrayList<>();
-    for (PlacedBlock block : assembly.blocks()) {
-      for (Check check : block.description().checks()) {
-        boolean stop = check.severity() == Severity.STOP;
-        checks.add(new BatchCheck(block.global(check), block.id(), stop));
-      }
-    }
-    for (Check check : KitChecks.of(assembly)) {
-      checks.add(new BatchCheck(check, KitChecks.SUBJECT, true));
+    for (KitCheck each : Reviewer.checks(assembly)) {
+      boolean forYield = each.wanted() || each.check().severity() == Severity.STOP;
+      checks.add(new BatchCheck(each.check(), each.subject(), forYield));
     }
     return checks;
   }

@@ -1,6 +1,7 @@
 package earward.block.device;
 
 import java.util.List;
+import java.util.Objects;
 
 /**
  * An audio power amplifier IC by its data.
@@ -24,6 +25,7 @@ import java.util.List;
  * @param noiseVolts rms noise at the input over 22 Hz to 22 kHz, at least 0
  * @param packageName for instance DIP-8
  * @param pins the pins, each terminal that the type has exactly once or more (several grounds)
+ * @param traits what else a kit must mind
  */
 public record AmplifierModel(
     String name,
@@ -40,7 +42,8 @@ public record AmplifierModel(
     double rippleRejectionBareDecibels,
     double noiseVolts,
     String packageName,
-    List<Pin> pins)
+    List<Pin> pins,
+    AmplifierTraits traits)
     implements PartModel {
   public AmplifierModel {
     Require.named(name, "amplifier");
@@ -53,6 +56,7 @@ public record AmplifierModel(
     Require.notNegative(200, rippleRejectionBareDecibels, name + ": ripple rejection (dB)");
     Require.atLeast(
         rippleRejectionBareDecibels, rippleRejectionDecibels, name + ": ripple rejection (dB)");
+    Objects.requireNonNull(traits);
     pins = List.copyOf(pins);
     for (Terminal needed :
         List.of(Terminal.INPUT, Terminal.OUTPUT, Terminal.SUPPLY, Terminal.GROUND)) {
@@ -67,6 +71,42 @@ public record AmplifierModel(
     if (gain.setFromOutside() && !has(pins, Terminal.GAIN)) {
       throw new IllegalArgumentException(name + ": its gain is set from outside, so it has GAIN");
     }
+  }
+
+  /** A linear amplifier that is stable without a network at its output. */
+  public AmplifierModel(
+      String name,
+      boolean bridge,
+      AmplifierGain gain,
+      OutputSwing swing,
+      AmplifierRatings ratings,
+      double quiescentAmperes,
+      double restFraction,
+      double restVolts,
+      double inputOhms,
+      double biasAmperes,
+      double rippleRejectionDecibels,
+      double rippleRejectionBareDecibels,
+      double noiseVolts,
+      String packageName,
+      List<Pin> pins) {
+    this(
+        name,
+        bridge,
+        gain,
+        swing,
+        ratings,
+        quiescentAmperes,
+        restFraction,
+        restVolts,
+        inputOhms,
+        biasAmperes,
+        rippleRejectionDecibels,
+        rippleRejectionBareDecibels,
+        noiseVolts,
+        packageName,
+        pins,
+        AmplifierTraits.PLAIN);
   }
 
   private static boolean has(List<Pin> pins, Terminal terminal) {

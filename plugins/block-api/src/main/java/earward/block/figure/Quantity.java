@@ -29,6 +29,8 @@ public enum Quantity {
   // of a part
   /** Positive from the first terminal to the second; of a transistor from collector to emitter. */
   DC_AMPERES("dc-amperes", Unit.AMPERE),
+  /** DC voltage from the first terminal of a part to its last, in the order of dc-amperes. */
+  DROP_VOLTS("drop-volts", Unit.VOLT),
   /** Heat of DC; of an amplifier IC with its drive, of a detector diode with its bare carrier. */
   DISSIPATION_WATTS("dissipation-watts", Unit.WATT),
   JUNCTION_CELSIUS("junction-celsius", Unit.CELSIUS),
@@ -42,6 +44,8 @@ public enum Quantity {
   DETECTION_EFFICIENCY("detection-efficiency", Unit.FRACTION),
   /** What a carrier-driven device presents to the carrier. */
   CARRIER_INPUT_OHMS("carrier-input-ohms", Unit.OHM),
+  /** Impedance at the test tone of all that a detector drives over its resistance at DC. */
+  LOAD_RATIO("load-ratio", Unit.FRACTION),
   /** Depth at which the clipping rule says that the detector lets go. */
   CLIPPING_DEPTH("clipping-depth", Unit.FRACTION),
   /** The same with the detector's reservoir capacitor taken away: names the cause. */
@@ -70,10 +74,23 @@ public enum Quantity {
   HUM_RMS_VOLTS("hum-rms-volts", Unit.VOLT),
   /** Frequency at which the loop through the rail is nearest to sustaining itself. */
   RAIL_LOOP_HERTZ("rail-loop-hertz", Unit.HERTZ),
+  /** Rated resistance of the load at the end of the path that an amplifier IC drives. */
+  LOAD_OHMS("load-ohms", Unit.OHM),
   // of a seam
   ONWARD_OHMS("onward-ohms", Unit.OHM),
   BACKWARD_OHMS("backward-ohms", Unit.OHM),
   LOADING_LOSS_DECIBELS("loading-loss-decibels", Unit.DECIBEL),
+  LOWEST_TONE_ONWARD_OHMS("lowest-tone-onward-ohms", Unit.OHM),
+  HIGHEST_TONE_ONWARD_OHMS("highest-tone-onward-ohms", Unit.OHM),
+  LOWEST_TONE_BACKWARD_OHMS("lowest-tone-backward-ohms", Unit.OHM),
+  HIGHEST_TONE_BACKWARD_OHMS("highest-tone-backward-ohms", Unit.OHM),
+  LOWEST_TONE_LOADING_LOSS_DECIBELS("lowest-tone-loading-loss-decibels", Unit.DECIBEL),
+  HIGHEST_TONE_LOADING_LOSS_DECIBELS("highest-tone-loading-loss-decibels", Unit.DECIBEL),
+  /** Looking on at the carrier, where enough of it still passes. */
+  CARRIER_ONWARD_OHMS("carrier-onward-ohms", Unit.OHM),
+  CARRIER_BACKWARD_OHMS("carrier-backward-ohms", Unit.OHM),
+  /** What the load ratio of the detector before the seam would be if the path ended there. */
+  LOAD_RATIO_WITHOUT("load-ratio-without", Unit.FRACTION),
   HEADROOM_DECIBELS("headroom-decibels", Unit.DECIBEL),
   // of the path
   LOW_EDGE_HERTZ("low-edge-hertz", Unit.HERTZ),

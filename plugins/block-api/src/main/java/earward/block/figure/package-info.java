@@ -28,10 +28,10 @@
  *   a-weighted-noise-rms-volts (22.4 Hz to 22.4 kHz): thermal noise of all resistances and of the
  *   feed's sidebands, shot noise of diodes and transistors, input noise of amplifiers; nothing of
  *   the front end</td><td>all but unpowered</td></tr>
- * <tr><td>any part</td><td>dc-amperes, dissipation-watts: of DC, except as below</td>
+ * <tr><td>any part</td><td>dc-amperes, drop-volts, dissipation-watts: of DC, except as below</td>
  *   <td>all</td></tr>
  * <tr><td>diode or transistor that the carrier drives</td><td>carrier-peak-volts, detection-efficiency,
- *   carrier-input-ohms, the three clipping depths, reversal-depth, clean-depth</td>
+ *   carrier-input-ohms, load-ratio, the three clipping depths, reversal-depth, clean-depth</td>
  *   <td>signal</td></tr>
  * <tr><td>any diode</td><td>reverse-peak-volts: with the carrier where that drives it, else DC</td>
  *   <td>all</td></tr>
@@ -39,6 +39,7 @@
  *   dissipation-watts with its output's power taken off</td><td>all; peak-amperes is 0 in
  *   hottest</td></tr>
  * <tr><td></td><td>clip-watts, ten-percent-watts</td><td>full-output, battery-low</td></tr>
+ * <tr><td></td><td>load-ohms: in a kit that ends in a load</td><td>full-output</td></tr>
  * <tr><td></td><td>overload-decibels</td><td>signal</td></tr>
  * <tr><td>regulator, bipolar or field-effect transistor</td><td>junction-celsius</td>
  *   <td>all</td></tr>
@@ -52,7 +53,11 @@
  * <tr><td>empty, in a block with a battery or adaptor</td><td>supply-amperes: the sum</td>
  *   <td>no-signal, test, strong, full-volume, full-output, battery-low, hottest</td></tr>
  * <tr><td>empty, in a block with an entry: its seam</td><td>onward-ohms, backward-ohms,
- *   loading-loss-decibels</td><td>all</td></tr>
+ *   loading-loss-decibels, at the case's own tone or at the lowest-tone- or the highest-tone-</td>
+ *   <td>all</td></tr>
+ * <tr><td></td><td>carrier-onward-ohms, carrier-backward-ohms where a thousandth of the carrier
+ *   passes; load-ratio-without, behind a detector that keeps a load for DC</td>
+ *   <td>signal</td></tr>
  * <tr><td></td><td>headroom-decibels: behind the detector, in a kit that ends in an amplifier
  *   IC</td><td>test, strong</td></tr>
  * <tr><td>potentiometer that a listener turns</td><td>knob-position, where it is at its

@@ -30,7 +30,7 @@ public final class CheckRule implements BlockRule {
     for (Check check : description.checks()) {
       String name = "check " + check.code();
       faults.addIf(
-          !codes.add(check.code() + " of " + check.figure()),
+          !codes.add(check.code() + " of " + check.figure() + " " + check.relation()),
           name + " of " + check.figure() + " is there twice; leave one out");
       faults.addIf(
           Double.isInfinite(check.limit()),

@@ -61,7 +61,7 @@ final class FigurePlaces {
           RESPONSE_DEVIATION_DECIBELS,
           RESPONSE_DEVIATION_HERTZ ->
           unless(nodes.contains(place), place, "a node or test point; there are " + nodes);
-      case DC_AMPERES, DISSIPATION_WATTS -> ofPart(place, Device.class);
+      case DC_AMPERES, DROP_VOLTS, DISSIPATION_WATTS -> ofPart(place, Device.class);
       case JUNCTION_CELSIUS ->
           ofPart(
               place,
@@ -74,6 +74,7 @@ final class FigurePlaces {
       case CARRIER_PEAK_VOLTS,
           DETECTION_EFFICIENCY,
           CARRIER_INPUT_OHMS,
+          LOAD_RATIO,
           CLIPPING_DEPTH,
           CLIPPING_DEPTH_WITHOUT_CAPACITOR,
           CLIPPING_DEPTH_WITHOUT_COUPLING,
@@ -85,6 +86,7 @@ final class FigurePlaces {
           PEAK_AMPERES,
           CLIP_WATTS,
           TEN_PERCENT_WATTS,
+          LOAD_OHMS,
           OVERLOAD_DECIBELS ->
           ofPart(place, AudioAmplifier.class);
       case SUPPLY_AMPERES ->
@@ -94,7 +96,19 @@ final class FigurePlaces {
       case RIPPLE_REJECTION_DECIBELS, HUM_RMS_VOLTS, RAIL_LOOP_MARGIN_DECIBELS, RAIL_LOOP_HERTZ ->
           ofPart(place, List.of(Battery.class, Adaptor.class));
       case BATTERY_HOURS -> ofPart(place, Battery.class);
-      case ONWARD_OHMS, BACKWARD_OHMS, LOADING_LOSS_DECIBELS, HEADROOM_DECIBELS ->
+      case ONWARD_OHMS,
+          BACKWARD_OHMS,
+          LOADING_LOSS_DECIBELS,
+          LOWEST_TONE_ONWARD_OHMS,
+          HIGHEST_TONE_ONWARD_OHMS,
+          LOWEST_TONE_BACKWARD_OHMS,
+          HIGHEST_TONE_BACKWARD_OHMS,
+          LOWEST_TONE_LOADING_LOSS_DECIBELS,
+          HIGHEST_TONE_LOADING_LOSS_DECIBELS,
+          CARRIER_ONWARD_OHMS,
+          CARRIER_BACKWARD_OHMS,
+          LOAD_RATIO_WITHOUT,
+          HEADROOM_DECIBELS ->
           unless(
               place.isEmpty() && wiring.entry().isPresent(),
               place,

@@ -17,6 +17,7 @@ import earward.block.device.AdaptorModel;
 import earward.block.device.AmplifierGain;
 import earward.block.device.AmplifierModel;
 import earward.block.device.AmplifierRatings;
+import earward.block.device.AmplifierTraits;
 import earward.block.device.BatteryModel;
 import earward.block.device.ControlPoint;
 import earward.block.device.DiodeMaterial;
@@ -134,6 +135,7 @@ public final class SampleParts {
         30,
         3e-6,
         "DIP-8",
-        pins);
+        pins,
+        new AmplifierTraits(false, false, 0.4));
   }
 }
