@@ -18,8 +18,16 @@ final class DiodeCycles {
   /** Exponent below which an exponential adds nothing to its own saturation current. */
   private static final double NO_EXPONENT = -42;
 
+  /** Change of a voltage over n·Vt up to which a series is as good as the law. */
+  private static final double SERIES = 1e-3;
+
+  private static final double LEAST_PIVOT = 1e-9;
+
   /** Right-hand sides: the residual, and one volt of v, of E real and of E imaginary. */
   private static final int SIDES = 4;
+
+  /** An untuned feed holds E. */
+  private static final int SIDES_OF_UNTUNED = 2;
 
   /** Rows of the slopes: mean, drawn real and imaginary, stored real and imaginary. */
   static final int ROWS = 5;
@@ -33,14 +41,28 @@ final class DiodeCycles {
   private double throughRe;
   private double throughIm;
   private boolean charged;
+  private boolean tuned;
 
-  private final double[] current;
-  private final double[] slope;
-  private final double[] charge;
-  private final double[] capacitance;
+  /**
+   * Voltages where all was worked out in full, and what stood there: current, charge, capacitance
+   * and its first two derivatives, the charge and capacitance less what the kernel has taken over.
+   */
+  private final double[][] volts;
+
+  private final double[][] current;
+  private final double[][] charge;
+  private final double[][] capacitance;
+  private final double[][] bend;
+  private final double[][] curve;
+
+  /** Currents and charges where the cycle stands now. */
+  private final double[] nowCurrent;
+
+  private final double[] nowCharge;
   private final double[] work;
   private final int[] all;
-  private final int[] some;
+  private final int[][] some;
+  private final int[] conducting;
   private final double[] amounts;
   private final double[] chargeAmounts;
 
@@ -53,9 +75,11 @@ final class DiodeCycles {
   private final double[][] activeFarads;
   private final double[][][] answers;
 
-  /** The matrix with its right-hand sides beside it. */
-  private final double[][] rows;
+  /** The factors of each sample's matrix, its right-hand sides beside it. */
+  private final double[][][] factors;
 
+  private double driveRe;
+  private double driveIm;
   private double phasorRe;
   private double phasorIm;
   private double storedRe;
@@ -72,16 +96,21 @@ final class DiodeCycles {
   DiodeCycles(int samples, int audioSamples) {
     this.samples = samples;
     kernel = new DiodeKernel(samples, samples / 2 - 1);
-    current = new double[samples];
-    slope = new double[samples];
-    charge = new double[samples];
-    capacitance = new double[samples];
+    volts = new double[audioSamples][samples];
+    current = new double[audioSamples][samples];
+    charge = new double[audioSamples][samples];
+    capacitance = new double[audioSamples][samples];
+    bend = new double[audioSamples][samples];
+    curve = new double[audioSamples][samples];
+    nowCurrent = new double[samples];
+    nowCharge = new double[samples];
     work = new double[samples];
     all = new int[samples];
     for (int s = 0; s < samples; s++) {
       all[s] = s;
     }
-    some = new int[samples];
+    some = new int[audioSamples][samples];
+    conducting = new int[audioSamples];
     amounts = new double[samples];
     chargeAmounts = new double[samples];
     residuals = new double[audioSamples][samples];
@@ -90,21 +119,24 @@ final class DiodeCycles {
     activeSlope = new double[audioSamples][samples];
     activeFarads = new double[audioSamples][samples];
     answers = new double[audioSamples][SIDES][samples];
-    rows = new double[samples][samples + SIDES];
+    factors = new double[audioSamples][samples][samples + SIDES];
   }
 
   /**
    * Takes in surroundings and law.
    *
-   * @param volts mean voltage across the junction, about which its capacitance is taken over
+   * @param mean voltage across the junction, about which its capacitance is taken over
+   * @param again whether the law and what was linearised are those of the last time
    */
-  void prepare(CarrierSurroundings around, JunctionLaw junction, double volts) {
+  void prepare(CarrierSurroundings around, JunctionLaw junction, double mean, boolean again) {
     law = junction;
     charged = law.charged();
+    tuned = around.tuned;
     radians = around.carrierRadians;
     throughRe = around.transferReal[0];
     throughIm = around.transferImaginary[0];
-    kernel.prepare(around, law.leakageSiemens(), charged ? law.capacitance(volts) : 0);
+    double taken = charged ? law.capacitance(mean) : 0;
+    kernel.prepare(around, law.leakageSiemens(), again ? kernel.farads : taken);
   }
 
   /**
@@ -116,63 +148,126 @@ final class DiodeCycles {
    */
   boolean linearise(
       int s, double v, double feedRe, double feedIm, double[] u, int at, double[] into) {
-    if (!evaluate(u, at)) {
+    if (!evaluate(s, u, at)) {
       return false;
     }
-    double[] off = residuals[s];
-    double real = kernel.transferRe * feedRe - kernel.transferIm * feedIm;
-    double imaginary = kernel.transferRe * feedIm + kernel.transferIm * feedRe;
-    drive(u, at, v, real, imaginary, off);
-    int conducting = 0;
-    for (int k = 0; k < samples; k++) {
-      if (current[k] * kernel.currentReach > NOTHING) {
-        some[conducting] = k;
-        amounts[conducting++] = current[k];
-      }
-    }
-    kernel.addCurrents(some, amounts, conducting, off);
-    if (charged) {
-      kernel.addCharges(all, charge, samples, off);
-    }
+    residual(s, v, feedRe, feedIm, u, at);
     choose(s);
     if (!eliminate(s)) {
       return false;
     }
-    base(s, conducting, v, real, imaginary);
-    for (int c = 0; c < COLUMNS; c++) {
+    base(s, v);
+    for (int c = 0; c < (tuned ? COLUMNS : 1); c++) {
       column(s, c, into);
     }
     return true;
   }
 
+  /**
+   * The same near where the cycle was last linearised: currents and charges by their series, the
+   * step by the factors of that time; all slopes stay.
+   *
+   * @return false where it is too far away for that
+   */
+  boolean follow(int s, double v, double feedRe, double feedIm, double[] u, int at) {
+    if (!series(s, u, at)) {
+      return false;
+    }
+    residual(s, v, feedRe, feedIm, u, at);
+    substitute(s);
+    base(s, v);
+    return true;
+  }
+
+  private void residual(int s, double v, double feedRe, double feedIm, double[] u, int at) {
+    double[] off = residuals[s];
+    driveRe = kernel.transferRe * feedRe - kernel.transferIm * feedIm;
+    driveIm = kernel.transferRe * feedIm + kernel.transferIm * feedRe;
+    drive(u, at, v, driveRe, driveIm, off);
+    int[] which = some[s];
+    for (int k = 0; k < conducting[s]; k++) {
+      amounts[k] = nowCurrent[which[k]];
+    }
+    kernel.addCurrents(which, amounts, conducting[s], off);
+    if (charged) {
+      kernel.addCharges(all, nowCharge, samples, off);
+    }
+  }
+
   /** Currents, charges and their slopes, less what the kernel has taken over. */
-  private boolean evaluate(double[] u, int at) {
+  private boolean evaluate(int s, double[] u, int at) {
     double inverse = 1 / law.scaledThermalVolts();
     double saturation = law.saturationAmperes();
     double lowest = law.leastVolts();
+    double[] amperes = current[s];
+    int count = 0;
+    System.arraycopy(u, at, volts[s], 0, samples);
     for (int k = 0; k < samples; k++) {
-      double volts = u[at + k];
-      double exponent = volts * inverse;
-      if (!(exponent < PortLaw.MOST_EXPONENT) || volts < lowest) {
+      double exponent = u[at + k] * inverse;
+      if (!(exponent < PortLaw.MOST_EXPONENT) || u[at + k] < lowest) {
         return false;
       }
       double grown = exponent < NO_EXPONENT ? 0 : saturation * Math.exp(exponent);
-      current[k] = grown;
-      slope[k] = grown * inverse;
+      amperes[k] = grown;
+      nowCurrent[k] = grown;
+      if (grown * kernel.currentReach > NOTHING) {
+        some[s][count++] = k;
+      }
     }
+    conducting[s] = count;
     if (charged) {
       double taken = kernel.farads;
       for (int k = 0; k < samples; k++) {
-        double volts = u[at + k];
-        law.charges(volts);
-        charge[k] = law.coulombs - taken * volts;
-        capacitance[k] = law.farads - taken;
+        double here = u[at + k];
+        law.charges(here);
+        charge[s][k] = law.coulombs - taken * here;
+        nowCharge[k] = charge[s][k];
+        capacitance[s][k] = law.farads - taken;
+        bend[s][k] = law.faradsByVolt(here);
+        curve[s][k] = law.faradsByVoltSquared(here, bend[s][k]);
       }
     }
     return true;
   }
 
-  private void drive(double[] u, int at, double v, double real, double imaginary, double[] into) {
+  /** Currents and charges by their series about the last evaluation, to the fourth order. */
+  private boolean series(int s, double[] u, int at) {
+    double inverse = 1 / law.scaledThermalVolts();
+    double[] from = volts[s];
+    double most = 0;
+    for (int k = 0; k < from.length; k++) {
+      work[k] = u[at + k] - from[k];
+    }
+    for (int k = 0; k < from.length; k++) {
+      most = Math.max(most, Math.abs(work[k]));
+    }
+    if (!(most < SERIES * law.scaledThermalVolts())) {
+      return false;
+    }
+    byExponent(work, inverse, current[s], nowCurrent);
+    if (charged) {
+      byCharge(work, charge[s], capacitance[s], bend[s], curve[s], nowCharge);
+    }
+    return true;
+  }
+
+  private static void byExponent(double[] by, double inverse, double[] from, double[] into) {
+    for (int k = 0; k < into.length; k++) {
+      double d = by[k] * inverse;
+      into[k] = from[k] + from[k] * d * (1 + d * (1.0 / 2 + d * (1.0 / 6 + d * (1.0 / 24))));
+    }
+  }
+
+  private static void byCharge(
+      double[] by, double[] from, double[] first, double[] second, double[] third, double[] into) {
+    for (int k = 0; k < into.length; k++) {
+      double d = by[k];
+      into[k] = from[k] + d * (first[k] + d * (second[k] / 2 + d * third[k] / 6));
+    }
+  }
+
+  private void drive(
+      double[] u, int at, double v, double real, double imaginary, double[] into) {
     double[] cosine = kernel.cosine();
     double[] sine = kernel.sine();
     System.arraycopy(u, at, into, 0, samples);
@@ -183,13 +278,16 @@ final class DiodeCycles {
 
   /** The samples that are eliminated. */
   private void choose(int s) {
+    double inverse = 1 / law.scaledThermalVolts();
     int count = 0;
     for (int k = 0; k < samples; k++) {
-      if (slope[k] * kernel.currentReach > FAINT
-          || (charged && Math.abs(capacitance[k]) * kernel.chargeReach > FAINT_CHARGE)) {
+      double slope = current[s][k] * inverse;
+      double rest = charged ? capacitance[s][k] : 0;
+      if (slope * kernel.currentReach > FAINT
+          || Math.abs(rest) * kernel.chargeReach > FAINT_CHARGE) {
         active[s][count] = k;
-        activeSlope[s][count] = slope[k];
-        activeFarads[s][count++] = charged ? capacitance[k] : 0;
+        activeSlope[s][count] = slope;
+        activeFarads[s][count++] = rest;
       }
     }
     actives[s] = count;
@@ -200,6 +298,40 @@ final class DiodeCycles {
    * that the pivots need no search.
    */
   private boolean eliminate(int s) {
+    fill(s);
+    int n = actives[s];
+    int width = n + (tuned ? SIDES : SIDES_OF_UNTUNED);
+    double[][] rows = factors[s];
+    for (int k = 0; k < n; k += 2) {
+      double[] first = rows[k];
+      if (!(Math.abs(first[k]) > LEAST_PIVOT)) {
+        return false;
+      }
+      double inverse = 1 / first[k];
+      if (k + 1 == n) {
+        break;
+      }
+      double[] second = rows[k + 1];
+      second[k] *= inverse;
+      subtract(second, first, second[k], k + 1, width);
+      if (!(Math.abs(second[k + 1]) > LEAST_PIVOT)) {
+        return false;
+      }
+      double inverseOfNext = 1 / second[k + 1];
+      for (int p = k + 2; p < n; p++) {
+        double[] row = rows[p];
+        double one = row[k] * inverse;
+        double other = (row[k + 1] - one * first[k + 1]) * inverseOfNext;
+        row[k] = one;
+        row[k + 1] = other;
+        subtract(row, first, one, second, other, k + 2, width);
+      }
+    }
+    back(s, n);
+    return true;
+  }
+
+  private void fill(int s) {
     int n = actives[s];
     int[] at = active[s];
     double[] g = activeSlope[s];
@@ -208,11 +340,15 @@ final class DiodeCycles {
     double[] sine = kernel.sine();
     double tr = kernel.transferRe;
     double ti = kernel.transferIm;
+    double[][] rows = factors[s];
+    boolean stores = false;
     for (int q = 0; q < n; q++) {
-      double[] answer = kernel.toCurrent(at[q]);
-      double[] stored = kernel.toCharge(at[q]);
-      for (int p = 0; p < n; p++) {
-        rows[p][q] = g[q] * answer[at[p]] + c[q] * stored[at[p]];
+      stores |= c[q] != 0;
+    }
+    for (int p = 0; p < n; p++) {
+      kernel.answers(at, n, at[p], g, rows[p]);
+      if (stores) {
+        kernel.addChargeAnswers(at, n, at[p], c, rows[p]);
       }
     }
     for (int p = 0; p < n; p++) {
@@ -220,23 +356,34 @@ final class DiodeCycles {
       row[p] += 1;
       row[n] = residuals[s][at[p]];
       row[n + 1] = 1;
-      row[n + 2] = tr * cosine[at[p]] - ti * sine[at[p]];
-      row[n + 3] = -ti * cosine[at[p]] - tr * sine[at[p]];
-    }
-    int width = n + SIDES;
-    for (int k = 0; k < n; k++) {
-      double[] pivotRow = rows[k];
-      double pivot = pivotRow[k];
-      if (!(Math.abs(pivot) > 1e-9)) {
-        return false;
-      }
-      double inverse = 1 / pivot;
-      for (int p = k + 1; p < n; p++) {
-        subtract(rows[p], pivotRow, rows[p][k] * inverse, k + 1, width);
+      if (tuned) {
+        row[n + 2] = tr * cosine[at[p]] - ti * sine[at[p]];
+        row[n + 3] = -ti * cosine[at[p]] - tr * sine[at[p]];
       }
     }
-    back(s, n);
-    return true;
+  }
+
+  /** The answer to the residual alone, by the factors that stand. */
+  private void substitute(int s) {
+    int n = actives[s];
+    double[] d = answers[s][0];
+    double[][] rows = factors[s];
+    for (int p = 0; p < n; p++) {
+      double[] row = rows[p];
+      double sum = residuals[s][active[s][p]];
+      for (int j = 0; j < p; j++) {
+        sum -= row[j] * d[j];
+      }
+      d[p] = sum;
+    }
+    for (int p = n - 1; p >= 0; p--) {
+      double[] row = rows[p];
+      double sum = d[p];
+      for (int j = p + 1; j < n; j++) {
+        sum -= row[j] * d[j];
+      }
+      d[p] = sum / row[p];
+    }
   }
 
   private static void subtract(double[] row, double[] pivot, double factor, int from, int to) {
@@ -245,13 +392,30 @@ final class DiodeCycles {
     }
   }
 
+  private static void subtract(
+      double[] row,
+      double[] first,
+      double byFirst,
+      double[] second,
+      double bySecond,
+      int from,
+      int to) {
+    for (int j = from; j < to; j++) {
+      row[j] -= byFirst * first[j] + bySecond * second[j];
+    }
+  }
+
   private void back(int s, int n) {
+    if (!tuned) {
+      backOfUntuned(s, n);
+      return;
+    }
     double[] first = answers[s][0];
     double[] second = answers[s][1];
     double[] third = answers[s][2];
     double[] fourth = answers[s][3];
     for (int p = n - 1; p >= 0; p--) {
-      double[] row = rows[p];
+      double[] row = factors[s][p];
       double a = row[n];
       double b = row[n + 1];
       double c = row[n + 2];
@@ -271,37 +435,51 @@ final class DiodeCycles {
     }
   }
 
-  /** Means and phasors as the step leaves them; {@code some} holds the samples that conduct. */
-  private void base(int s, int conducting, double v, double real, double imaginary) {
+  private void backOfUntuned(int s, int n) {
+    double[] first = answers[s][0];
+    double[] second = answers[s][1];
+    for (int p = n - 1; p >= 0; p--) {
+      double[] row = factors[s][p];
+      double a = row[n];
+      double b = row[n + 1];
+      for (int j = p + 1; j < n; j++) {
+        a -= row[j] * first[j];
+        b -= row[j] * second[j];
+      }
+      double inverse = 1 / row[p];
+      first[p] = a * inverse;
+      second[p] = b * inverse;
+    }
+  }
+
+  /** Means and phasors as the step leaves them; {@code amounts} holds what conducts. */
+  private void base(int s, double v) {
     double[] cosine = kernel.cosine();
     double[] sine = kernel.sine();
     double sum = 0;
     double ir = 0;
     double ii = 0;
-    for (int k = 0; k < conducting; k++) {
+    for (int k = 0; k < conducting[s]; k++) {
       double amperes = amounts[k];
       sum += amperes;
-      ir += amperes * cosine[some[k]];
-      ii -= amperes * sine[some[k]];
+      ir += amperes * cosine[some[s][k]];
+      ii -= amperes * sine[some[s][k]];
     }
     double qr = 0;
     double qi = 0;
     if (charged) {
       for (int k = 0; k < samples; k++) {
-        qr += charge[k] * cosine[k];
-        qi -= charge[k] * sine[k];
+        qr += nowCharge[k] * cosine[k];
+        qi -= nowCharge[k] * sine[k];
       }
     }
     double scale = 2.0 / samples;
     sums(s, 0);
-    mean = (sum - stepSum) / samples - law.saturationAmperes() + kernel.siemens * v;
+    mean =
+        (sum - stepSum) / samples - law.saturationAmperes() + kernel.siemens * v;
     phasors(
-        scale * (ir - stepRe),
-        scale * (ii - stepIm),
-        scale * (qr - stepQr),
-        scale * (qi - stepQi),
-        real,
-        imaginary);
+        scale * (ir - stepRe), scale * (ii - stepIm), scale * (qr - stepQr), scale * (qi - stepQi),
+        driveRe, driveIm);
     drawnRe = phasorRe;
     drawnIm = phasorIm;
     chargeRe = storedRe;
@@ -346,7 +524,8 @@ final class DiodeCycles {
    * @param ir fundamental of the current that is left, qr of the charge that is left
    * @param real fundamental of the drive
    */
-  private void phasors(double ir, double ii, double qr, double qi, double real, double imaginary) {
+  private void phasors(
+      double ir, double ii, double qr, double qi, double real, double imaginary) {
     double wr = ir - radians * qi;
     double wi = ii + radians * qr;
     double ur = real - (kernel.ohmsRe * wr - kernel.ohmsIm * wi);
@@ -392,7 +571,8 @@ final class DiodeCycles {
     }
     double[][] answer = answers[s];
     for (int p = 0; p < actives[s]; p++) {
-      double d = answer[0][p] - byV * answer[1][p] - byRe * answer[2][p] - byIm * answer[3][p];
+      double d =
+          answer[0][p] - byV * answer[1][p] - byRe * answer[2][p] - byIm * answer[3][p];
       amounts[p] = -activeSlope[s][p] * d;
       chargeAmounts[p] = -activeFarads[s][p] * d;
     }
@@ -401,9 +581,13 @@ final class DiodeCycles {
       kernel.addCharges(active[s], chargeAmounts, actives[s], work);
     }
     double largest = 0;
+    double knee = law.gentleVolts();
     for (int k = 0; k < samples; k++) {
       double from = u[at + k];
-      double to = law.limited(from, from - work[k]);
+      double to = from - work[k];
+      if (to - from > knee) {
+        to = law.limited(from, to);
+      }
       u[at + k] = to;
       largest = Math.max(largest, Math.abs(to - from));
     }

@@ -109,14 +109,18 @@ final class DiodeKernel {
     return sine;
   }
 
-  /** What all samples answer to one ampere at a sample. */
-  double[] toCurrent(int sample) {
-    return toCurrent[sample];
+  /** What one sample answers to so many amperes at each of some samples. */
+  void answers(int[] at, int count, int sample, double[] amperes, double[] into) {
+    for (int q = 0; q < count; q++) {
+      into[q] = amperes[q] * first[(sample - at[q]) & (samples - 1)];
+    }
   }
 
-  /** What all samples answer to one coulomb at a sample. */
-  double[] toCharge(int sample) {
-    return toCharge[sample];
+  /** Adds what one sample answers to so many coulombs at each of some samples. */
+  void addChargeAnswers(int[] at, int count, int sample, double[] coulombs, double[] into) {
+    for (int q = 0; q < count; q++) {
+      into[q] += coulombs[q] * second[(sample - at[q]) & (samples - 1)];
+    }
   }
 
   /** Adds the answers to currents at some samples, two at a time. */
@@ -129,7 +133,8 @@ final class DiodeKernel {
     add(toCharge, at, coulombs, count, into);
   }
 
-  private static void add(double[][] rows, int[] at, double[] values, int count, double[] into) {
+  private static void add(
+      double[][] rows, int[] at, double[] values, int count, double[] into) {
     int k = 0;
     for (; k + 3 < count; k += 4) {
       four(
@@ -149,15 +154,8 @@ final class DiodeKernel {
   }
 
   private static void four(
-      double[] a,
-      double[] b,
-      double[] c,
-      double[] d,
-      double va,
-      double vb,
-      double vc,
-      double vd,
-      double[] into) {
+      double[] a, double[] b, double[] c, double[] d,
+      double va, double vb, double vc, double vd, double[] into) {
     for (int s = 0; s < into.length; s++) {
       into[s] += va * a[s] + vb * b[s] + vc * c[s] + vd * d[s];
     }

@@ -31,6 +31,9 @@ final class DiodeNewton {
    */
   private static final double SMALL = 1e-6;
 
+  /** A step that has shrunk to this lets the cycles keep their factors for the next. */
+  private static final double QUICK = 0.05;
+
   private static final double LEFT = 0.02;
   private static final double LEAST = 1e-3;
   private static final int SLOPES = DiodeCycles.ROWS * DiodeCycles.COLUMNS;
@@ -41,6 +44,13 @@ final class DiodeNewton {
   private final double[][] inverse;
   private int keptSize;
   private boolean own;
+
+  /** For how many audio samples there are factors of cycles since the last recall. */
+  private int factored;
+
+  /** Of the law's figures that these were made with. */
+  private int version = -1;
+
   private final double[] savedState;
   private final double[] savedJunctions;
   private final double[] step;
@@ -88,6 +98,7 @@ final class DiodeNewton {
 
   /** Goes back to the law of the solution that was kept. */
   void recall() {
+    factored = 0;
     saturation = keptSaturation;
     thermalVolts = keptThermalVolts;
   }
@@ -110,14 +121,22 @@ final class DiodeNewton {
     System.arraycopy(owner.state, 0, savedState, 0, savedState.length);
     System.arraycopy(owner.junctions, 0, savedJunctions, 0, savedJunctions.length);
     owner.balance.begin(around, peakVolts, depth, toneRadians, count);
-    cycles.prepare(around, law, owner.state[0]);
+    factored = law.version() == version ? factored : 0;
+    version = law.version();
+    cycles.prepare(around, law, owner.state[0], factored == count);
+    factored = factored == count ? count : 0;
     follow(law, count);
     int size = owner.balance.size(around);
     own = size != keptSize || count == 1;
     double enough = coarseness * (1e-11 * peakVolts + 1e-13);
     double former = 0;
+    double shrunk = 1;
     for (int iteration = 0; iteration < MOST_ITERATIONS; iteration++) {
-      if (!linearise(around, count) || !balance(around, count, size, law.scaledThermalVolts())) {
+      boolean near = factored == count && (former == 0 || shrunk < QUICK);
+      if (!(near && follow(around, count)) && !linearise(around, count)) {
+        return false;
+      }
+      if (!balance(around, count, size, law.scaledThermalVolts())) {
         return false;
       }
       double largest = move(around, count, size);
@@ -125,7 +144,7 @@ final class DiodeNewton {
         return false;
       }
       // the next step would be at most this one times what this one was of the last
-      double shrunk = former > 0 ? largest / former : largest < SMALL ? LEFT : 1;
+      shrunk = former > 0 ? largest / former : largest < SMALL ? LEFT : 1;
       if (largest < enough || (shrunk < 1 && largest * Math.max(shrunk, LEAST) < enough)) {
         return true;
       }
@@ -151,7 +170,30 @@ final class DiodeNewton {
     thermalVolts = nowThermal;
   }
 
+  /** Linearises all cycles near where they were linearised last; false where one is too far. */
+  private boolean follow(CarrierSurroundings around, int count) {
+    for (int s = 0; s < count; s++) {
+      double real = around.tuned ? owner.state[count + s] : owner.balance.envelope[s];
+      double imaginary = around.tuned ? owner.state[2 * count + s] : 0;
+      int at = s * cycles.samples;
+      if (!cycles.follow(s, owner.state[s], real, imaginary, owner.junctions, at)) {
+        return false;
+      }
+      take(s);
+    }
+    return true;
+  }
+
+  private void take(int s) {
+    mean[s] = cycles.mean;
+    drawn[2 * s] = cycles.drawnRe;
+    drawn[2 * s + 1] = cycles.drawnIm;
+    stored[2 * s] = cycles.chargeRe;
+    stored[2 * s + 1] = cycles.chargeIm;
+  }
+
   private boolean linearise(CarrierSurroundings around, int count) {
+    factored = 0;
     for (int s = 0; s < count; s++) {
       double real = around.tuned ? owner.state[count + s] : owner.balance.envelope[s];
       double imaginary = around.tuned ? owner.state[2 * count + s] : 0;
@@ -161,12 +203,9 @@ final class DiodeNewton {
       }
       System.arraycopy(here, 0, slopes, s * SLOPES, SLOPES);
       System.arraycopy(here, 0, owner.slopes, s * 9, 9);
-      mean[s] = cycles.mean;
-      drawn[2 * s] = cycles.drawnRe;
-      drawn[2 * s + 1] = cycles.drawnIm;
-      stored[2 * s] = cycles.chargeRe;
-      stored[2 * s + 1] = cycles.chargeIm;
+      take(s);
     }
+    factored = count;
     return true;
   }
 
@@ -188,7 +227,7 @@ final class DiodeNewton {
         }
         made = true;
       }
-      correct(size);
+     correct(size);
       double former = off;
       off = residual(around, count);
       if (off <= wanted || off < 1e-14) {
@@ -231,16 +270,8 @@ final class DiodeNewton {
   }
 
   private static void four(
-      double[] a,
-      double[] b,
-      double[] c,
-      double[] d,
-      double va,
-      double vb,
-      double vc,
-      double vd,
-      double[] into,
-      int size) {
+      double[] a, double[] b, double[] c, double[] d,
+      double va, double vb, double vc, double vd, double[] into, int size) {
     for (int i = 0; i < size; i++) {
       into[i] -= va * a[i] + vb * b[i] + vc * c[i] + vd * d[i];
     }
@@ -297,7 +328,8 @@ final class DiodeNewton {
     for (int s = 0; s < count; s++) {
       double byRe = around.tuned ? step[count + s] : 0;
       double byIm = around.tuned ? step[2 * count + s] : 0;
-      double moved = cycles.move(s, step[s], byRe, byIm, owner.junctions, s * cycles.samples);
+      double moved =
+          cycles.move(s, step[s], byRe, byIm, owner.junctions, s * cycles.samples);
       largest = Math.max(largest, moved);
     }
     return largest;

@@ -18,6 +18,7 @@ public final class JunctionLaw extends PortLaw {
   private double builtInVolts;
   private double gradingExponent;
   private double breakdownVolts;
+  private int version;
   private final PowerTable power = new PowerTable();
 
   /** The exponent for which {@link #kneePower} holds. */
@@ -49,6 +50,15 @@ public final class JunctionLaw extends PortLaw {
       double builtInVolts,
       double gradingExponent,
       double breakdownVolts) {
+    if (this.saturationAmperes != saturationAmperes
+        || this.scaledThermalVolts != scaledThermalVolts
+        || this.leakageSiemens != leakageSiemens
+        || this.junctionFarads != junctionFarads
+        || this.builtInVolts != builtInVolts
+        || this.gradingExponent != gradingExponent
+        || this.breakdownVolts != breakdownVolts) {
+      version++;
+    }
     this.saturationAmperes = saturationAmperes;
     this.scaledThermalVolts = scaledThermalVolts;
     this.leakageSiemens = leakageSiemens;
@@ -147,6 +157,25 @@ public final class JunctionLaw extends PortLaw {
   /** Is at this temperature, in A. */
   public double saturationAmperes() {
     return saturationAmperes;
+  }
+
+  /** Changes whenever a figure does. */
+  int version() {
+    return version;
+  }
+
+  /** Slope of the capacitance that {@link #charges} has just found, in F/V. */
+  double faradsByVolt(double volts) {
+    return volts < builtInVolts / 2
+        ? farads * gradingExponent / (builtInVolts - volts)
+        : capacitanceSlopeAtKnee();
+  }
+
+  /** Slope of that slope, in F/V². */
+  double faradsByVoltSquared(double volts, double byVolt) {
+    return volts < builtInVolts / 2
+        ? byVolt * (gradingExponent + 1) / (builtInVolts - volts)
+        : 0;
   }
 
   /** n·Vt, in V. */

@@ -22,6 +22,7 @@ public final class HarmonicLu {
   private final List<Integer> elements = new ArrayList<>();
   private double[][] re = new double[0][];
   private double[][] im = new double[0][];
+  private double[][] elementSizes = new double[0][];
   private double[] steadyRe = new double[0];
   private double[] steadyIm = new double[0];
   private @Nullable HarmonicReplay replay;
@@ -32,6 +33,7 @@ public final class HarmonicLu {
   private final double[][] offRe;
   private final double[][] offIm;
   private final double[][] scales;
+  private final double[][] sizes;
   private final double[] most;
 
   /**
@@ -50,6 +52,7 @@ public final class HarmonicLu {
     offRe = new double[size][count];
     offIm = new double[size][count];
     scales = new double[size][count];
+    sizes = new double[size][count];
     most = new double[count];
   }
 
@@ -110,6 +113,8 @@ public final class HarmonicLu {
     im = Arrays.copyOf(im, place + 1);
     re[place] = new double[count];
     im[place] = new double[count];
+    elementSizes = Arrays.copyOf(elementSizes, place + 1);
+    elementSizes[place] = new double[count];
     steadyRe = Arrays.copyOf(steadyRe, place + 1);
     steadyIm = Arrays.copyOf(steadyIm, place + 1);
     replay = null;
@@ -134,6 +139,9 @@ public final class HarmonicLu {
     HarmonicReplay order = replay;
     if (order == null || (frozen && strange)) {
       return false;
+    }
+    for (int e = 0; e < re.length; e++) {
+      magnitudes(re[e], im[e], elementSizes[e]);
     }
     order.factor(re, im);
     return true;
@@ -175,15 +183,22 @@ public final class HarmonicLu {
   /** Whether every equation of every system is met but for rounding; fills what is off. */
   private boolean good(HarmonicReplay order, double[][] valuesRe, double[][] valuesIm) {
     Arrays.fill(most, 0);
+    for (int column = 0; column < size; column++) {
+      magnitudes(valuesRe[column], valuesIm[column], sizes[column]);
+    }
     for (int row = 0; row < size; row++) {
       double[] offR = offRe[row];
       double[] offI = offIm[row];
       double[] scale = scales[row];
-      start(sideRe[row], sideIm[row], offR, offI, scale);
+      System.arraycopy(sideRe[row], 0, offR, 0, count);
+      System.arraycopy(sideIm[row], 0, offI, 0, count);
+      magnitudes(offR, offI, scale);
       for (int e = order.rowFrom[row]; e < order.rowFrom[row + 1]; e++) {
         int column = order.rowColumn[e];
         int place = order.rowPlace[e];
-        subtract(re[place], im[place], valuesRe[column], valuesIm[column], offR, offI, scale);
+        HarmonicReplay.subtract(
+            re[place], im[place], valuesRe[column], valuesIm[column], offR, offI);
+        addProduct(elementSizes[place], sizes[column], scale);
       }
       for (int k = 0; k < scale.length; k++) {
         most[k] = Math.max(most[k], scale[k]);
@@ -196,6 +211,18 @@ public final class HarmonicLu {
     return good;
   }
 
+  private static void magnitudes(double[] r, double[] i, double[] into) {
+    for (int k = 0; k < into.length; k++) {
+      into[k] = Math.abs(r[k]) + Math.abs(i[k]);
+    }
+  }
+
+  private static void addProduct(double[] one, double[] other, double[] into) {
+    for (int k = 0; k < into.length; k++) {
+      into[k] += one[k] * other[k];
+    }
+  }
+
   private static boolean good(double[] offR, double[] offI, double[] scale, double[] most) {
     boolean good = true;
     for (int k = 0; k < scale.length; k++) {
@@ -203,25 +230,5 @@ public final class HarmonicLu {
       good &= Math.abs(offR[k]) + Math.abs(offI[k]) <= wanted;
     }
     return good;
-  }
-
-  private static void start(
-      double[] sideR, double[] sideI, double[] offR, double[] offI, double[] scale) {
-    for (int k = 0; k < scale.length; k++) {
-      offR[k] = sideR[k];
-      offI[k] = sideI[k];
-      scale[k] = Math.abs(sideR[k]) + Math.abs(sideI[k]);
-    }
-  }
-
-  private static void subtract(
-      double[] ar, double[] ai, double[] xr, double[] xi, double[] r, double[] i, double[] scale) {
-    for (int k = 0; k < scale.length; k++) {
-      double real = ar[k] * xr[k] - ai[k] * xi[k];
-      double imaginary = ar[k] * xi[k] + ai[k] * xr[k];
-      r[k] -= real;
-      i[k] -= imaginary;
-      scale[k] += Math.abs(real) + Math.abs(imaginary);
-    }
   }
 }
