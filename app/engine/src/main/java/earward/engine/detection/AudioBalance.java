@@ -25,6 +25,16 @@ final class AudioBalance {
   private final double[] audioKernel;
   private final double[] rateKernel;
 
+  /** The same with a row for each sample that answers, of each pair of devices. */
+  private final double[][][] audioRows;
+
+  private final double[][] rateRows;
+  private final double[] answer;
+  private final double[] heldReal;
+  private final double[] heldImaginary;
+  private final double[] rateReal;
+  private final double[] rateImaginary;
+
   /** (1 + Z(0)·g)⁻¹ − 1, row after row, and that inverse times Z(0). */
   private final double[] scaling;
 
@@ -52,6 +62,13 @@ final class AudioBalance {
     }
     audioKernel = new double[devices * devices * 2 * samples];
     rateKernel = new double[2 * samples];
+    audioRows = new double[devices * devices][samples][samples];
+    rateRows = new double[samples][samples];
+    answer = new double[samples];
+    heldReal = new double[samples];
+    heldImaginary = new double[samples];
+    rateReal = new double[samples];
+    rateImaginary = new double[samples];
     scaling = new double[devices * devices];
     scaledOhms = new double[devices * devices];
     column = new double[devices];
@@ -83,6 +100,17 @@ final class AudioBalance {
           audioKernel[at + count + s] = audioKernel[at + s];
         }
       }
+    }
+    spread(rateKernel, 0, rateRows);
+    for (int pair = 0; pair < devices * devices; pair++) {
+      spread(audioKernel, pair * 2 * count, audioRows[pair]);
+    }
+  }
+
+  /** Turns an impulse response, twice as long as the period, into a row for each sample. */
+  private void spread(double[] kernel, int from, double[][] rows) {
+    for (int r = 0; r < count; r++) {
+      System.arraycopy(kernel, from + count - r, rows[r], 0, count);
     }
   }
 
@@ -158,22 +186,52 @@ final class AudioBalance {
     double largest = 0;
     for (int i = 0; i < devices; i++) {
       double shift = 0;
+      Arrays.fill(answer, 0);
       for (int j = 0; j < devices; j++) {
         shift += scaling[i * devices + j] * meanOff[j];
-        int kernel = (i * devices + j) * 2 * count + count;
-        for (int r = 0; r < count; r++) {
-          double ampere = amperes[j * count + r];
-          for (int s = 0; s < count; s++) {
-            residual[i * count + s] += audioKernel[kernel + s - r] * ampere;
-          }
-        }
+        add(audioRows[i * devices + j], amperes, j * count, answer);
       }
       for (int s = 0; s < count; s++) {
-        residual[i * count + s] += shift;
+        residual[i * count + s] += shift + answer[s];
         largest = Math.max(largest, Math.abs(residual[i * count + s]));
       }
     }
     return largest;
+  }
+
+  /** Adds the answers to values at all samples, four at a time: rows run along the answer. */
+  private void add(double[][] rows, double[] values, int from, double[] into) {
+    if (count == 1) {
+      into[0] += rows[0][0] * values[from];
+      return;
+    }
+    for (int r = 0; r < count; r += 4) {
+      add(
+          rows[r],
+          values[from + r],
+          rows[r + 1],
+          values[from + r + 1],
+          rows[r + 2],
+          values[from + r + 2],
+          rows[r + 3],
+          values[from + r + 3],
+          into);
+    }
+  }
+
+  private static void add(
+      double[] a,
+      double byA,
+      double[] b,
+      double byB,
+      double[] c,
+      double byC,
+      double[] d,
+      double byD,
+      double[] into) {
+    for (int s = 0; s < into.length; s++) {
+      into[s] += byA * a[s] + byB * b[s] + byC * c[s] + byD * d[s];
+    }
   }
 
   /** The tuned feed's balance, times Rp so that it stands in volts. */
@@ -182,21 +240,24 @@ final class AudioBalance {
     double farads = 2 * around.tankFarads;
     double turn = around.peaking ? 0 : farads * around.detuningRadians;
     for (int s = 0; s < count; s++) {
-      double rateReal = 0;
-      double rateImaginary = 0;
-      for (int r = 0; r < count; r++) {
-        double rate = rateKernel[count + s - r];
-        rateReal += rate * (farads * x[devices * count + r] + stored[2 * r]);
-        rateImaginary += rate * (farads * x[(devices + 1) * count + r] + stored[2 * r + 1]);
-      }
+      heldReal[s] = farads * x[devices * count + s] + stored[2 * s];
+      heldImaginary[s] = farads * x[(devices + 1) * count + s] + stored[2 * s + 1];
+    }
+    Arrays.fill(rateReal, 0);
+    Arrays.fill(rateImaginary, 0);
+    if (count > 1) {
+      add(rateRows, heldReal, 0, rateReal);
+      add(rateRows, heldImaginary, 0, rateImaginary);
+    }
+    for (int s = 0; s < count; s++) {
       double real = x[devices * count + s];
       double imaginary = x[(devices + 1) * count + s];
       double first =
-          real - envelope[s] + around.tankOhms * (rateReal + drawn[2 * s] - turn * imaginary);
+          real - envelope[s] + around.tankOhms * (rateReal[s] + drawn[2 * s] - turn * imaginary);
       double second =
           around.peaking
               ? imaginary
-              : imaginary + around.tankOhms * (rateImaginary + drawn[2 * s + 1] + turn * real);
+              : imaginary + around.tankOhms * (rateImaginary[s] + drawn[2 * s + 1] + turn * real);
       residual[devices * count + s] = first;
       residual[(devices + 1) * count + s] = second;
       largest = Math.max(largest, Math.max(Math.abs(first), Math.abs(second)));

@@ -266,8 +266,7 @@ final class DiodeCycles {
     }
   }
 
-  private void drive(
-      double[] u, int at, double v, double real, double imaginary, double[] into) {
+  private void drive(double[] u, int at, double v, double real, double imaginary, double[] into) {
     double[] cosine = kernel.cosine();
     double[] sine = kernel.sine();
     System.arraycopy(u, at, into, 0, samples);
@@ -475,11 +474,14 @@ final class DiodeCycles {
     }
     double scale = 2.0 / samples;
     sums(s, 0);
-    mean =
-        (sum - stepSum) / samples - law.saturationAmperes() + kernel.siemens * v;
+    mean = (sum - stepSum) / samples - law.saturationAmperes() + kernel.siemens * v;
     phasors(
-        scale * (ir - stepRe), scale * (ii - stepIm), scale * (qr - stepQr), scale * (qi - stepQi),
-        driveRe, driveIm);
+        scale * (ir - stepRe),
+        scale * (ii - stepIm),
+        scale * (qr - stepQr),
+        scale * (qi - stepQi),
+        driveRe,
+        driveIm);
     drawnRe = phasorRe;
     drawnIm = phasorIm;
     chargeRe = storedRe;
@@ -524,8 +526,7 @@ final class DiodeCycles {
    * @param ir fundamental of the current that is left, qr of the charge that is left
    * @param real fundamental of the drive
    */
-  private void phasors(
-      double ir, double ii, double qr, double qi, double real, double imaginary) {
+  private void phasors(double ir, double ii, double qr, double qi, double real, double imaginary) {
     double wr = ir - radians * qi;
     double wi = ii + radians * qr;
     double ur = real - (kernel.ohmsRe * wr - kernel.ohmsIm * wi);
@@ -571,8 +572,7 @@ final class DiodeCycles {
     }
     double[][] answer = answers[s];
     for (int p = 0; p < actives[s]; p++) {
-      double d =
-          answer[0][p] - byV * answer[1][p] - byRe * answer[2][p] - byIm * answer[3][p];
+      double d = answer[0][p] - byV * answer[1][p] - byRe * answer[2][p] - byIm * answer[3][p];
       amounts[p] = -activeSlope[s][p] * d;
       chargeAmounts[p] = -activeFarads[s][p] * d;
     }

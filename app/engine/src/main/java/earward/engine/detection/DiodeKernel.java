@@ -133,8 +133,7 @@ final class DiodeKernel {
     add(toCharge, at, coulombs, count, into);
   }
 
-  private static void add(
-      double[][] rows, int[] at, double[] values, int count, double[] into) {
+  private static void add(double[][] rows, int[] at, double[] values, int count, double[] into) {
     int k = 0;
     for (; k + 3 < count; k += 4) {
       four(
@@ -154,8 +153,15 @@ final class DiodeKernel {
   }
 
   private static void four(
-      double[] a, double[] b, double[] c, double[] d,
-      double va, double vb, double vc, double vd, double[] into) {
+      double[] a,
+      double[] b,
+      double[] c,
+      double[] d,
+      double va,
+      double vb,
+      double vc,
+      double vd,
+      double[] into) {
     for (int s = 0; s < into.length; s++) {
       into[s] += va * a[s] + vb * b[s] + vc * c[s] + vd * d[s];
     }

@@ -227,7 +227,7 @@ final class DiodeNewton {
         }
         made = true;
       }
-     correct(size);
+      correct(size);
       double former = off;
       off = residual(around, count);
       if (off <= wanted || off < 1e-14) {
@@ -270,8 +270,16 @@ final class DiodeNewton {
   }
 
   private static void four(
-      double[] a, double[] b, double[] c, double[] d,
-      double va, double vb, double vc, double vd, double[] into, int size) {
+      double[] a,
+      double[] b,
+      double[] c,
+      double[] d,
+      double va,
+      double vb,
+      double vc,
+      double vd,
+      double[] into,
+      int size) {
     for (int i = 0; i < size; i++) {
       into[i] -= va * a[i] + vb * b[i] + vc * c[i] + vd * d[i];
     }
@@ -328,8 +336,7 @@ final class DiodeNewton {
     for (int s = 0; s < count; s++) {
       double byRe = around.tuned ? step[count + s] : 0;
       double byIm = around.tuned ? step[2 * count + s] : 0;
-      double moved =
-          cycles.move(s, step[s], byRe, byIm, owner.junctions, s * cycles.samples);
+      double moved = cycles.move(s, step[s], byRe, byIm, owner.junctions, s * cycles.samples);
       largest = Math.max(largest, moved);
     }
     return largest;

@@ -173,9 +173,7 @@ public final class JunctionLaw extends PortLaw {
 
   /** Slope of that slope, in F/V². */
   double faradsByVoltSquared(double volts, double byVolt) {
-    return volts < builtInVolts / 2
-        ? byVolt * (gradingExponent + 1) / (builtInVolts - volts)
-        : 0;
+    return volts < builtInVolts / 2 ? byVolt * (gradingExponent + 1) / (builtInVolts - volts) : 0;
   }
 
   /** n·Vt, in V. */

@@ -205,8 +205,7 @@ final class HarmonicReplay {
     }
   }
 
-  static void subtract(
-      double[] fr, double[] fi, double[] pr, double[] pi, double[] r, double[] i) {
+  static void subtract(double[] fr, double[] fi, double[] pr, double[] pi, double[] r, double[] i) {
     for (int k = 0; k < r.length; k++) {
       r[k] -= fr[k] * pr[k] - fi[k] * pi[k];
       i[k] -= fr[k] * pi[k] + fi[k] * pr[k];
