@@ -2,8 +2,11 @@ package earward.command;
 
 import earward.engine.CircuitException;
 import earward.kit.review.ReviewedKit;
+import earward.kit.review.Reviewer;
+import earward.kit.stage.BuildStages;
 import earward.sheet.SheetWriter;
 import earward.sheet.Sheets;
+import earward.sheet.ShoppingCsv;
 import earward.sheet.content.KeyFigure;
 import earward.sheet.content.SheetContent;
 import earward.sheet.wording.Numbers;
@@ -15,6 +18,7 @@ import earward.study.limits.LimitOrder;
 import earward.study.limits.LimitStudy;
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Locale;
 import java.util.Set;
@@ -30,6 +34,7 @@ import picocli.CommandLine.Option;
 final class SheetCommand extends DesignCommand {
   private static final String ENDING = ".pdf";
   private static final int LIMIT_KITS = 1000;
+  private static final int MOST_KITS = 100_000;
 
   @Option(
       names = {"-o", "--output"},
@@ -37,14 +42,31 @@ final class SheetCommand extends DesignCommand {
       description = "File to write; else the design's name with .pdf, in the current folder.")
   private @Nullable Path output;
 
+  @Option(
+      names = "--kits",
+      paramLabel = "N",
+      defaultValue = "1",
+      description = "How many kits the shopping list is for, from 1 to 100000; else one.")
+  private int kits;
+
+  @Option(
+      names = "--shopping",
+      paramLabel = "CSV",
+      description = "Writes the shopping list to this file too, for a spreadsheet.")
+  private @Nullable Path shopping;
+
   @Override
   void show(ReviewedKit reviewed, Program program) throws CommandFault {
     Path target = output == null ? besideTheUser() : output;
     OutputFile file = OutputFile.at(target, file());
+    if (kits < 1 || kits > MOST_KITS) {
+      throw CommandFault.ofInput(
+          "--kits is " + kits + "; wanted a number of kits from 1 to " + MOST_KITS + ".");
+    }
     SheetContent content;
     try {
       Wording wording = wording(reviewed, program.sheetWordings());
-      content = Sheets.of(reviewed, wording, limits(reviewed));
+      content = content(reviewed, wording).forKits(kits);
       file.write(out -> SheetWriter.write(content, wording, out));
     } catch (WordingException e) {
       throw CommandFault.ofInput(String.valueOf(e.getMessage()));
@@ -52,6 +74,9 @@ final class SheetCommand extends DesignCommand {
       throw OutputFile.fault(target, e);
     }
     results().println(target);
+    if (shopping != null) {
+      writeShopping(content, shopping);
+    }
     keyFigures(content);
     if (reviewed.doNotBuild()) {
       results().println("DO NOT BUILD: a finding is STOP; 'earward review' says which.");
@@ -66,6 +91,27 @@ final class SheetCommand extends DesignCommand {
     } catch (CircuitException e) {
       return KitLimits.NONE; // the review says what is wrong with the circuit
     }
+  }
+
+  /** All of it in one language: findings were said in English so far. */
+  private static SheetContent content(ReviewedKit reviewed, Wording wording) {
+    ReviewedKit said =
+        wording.locale().getLanguage().equals(Reviewer.USUAL_LANGUAGE.getLanguage())
+            ? reviewed
+            : Reviewer.review(reviewed.solved(), wording.locale());
+    return Sheets.of(
+        said, BuildStages.solve(reviewed.solved().assembly()), wording, limits(reviewed));
+  }
+
+  private void writeShopping(SheetContent content, Path csv) throws CommandFault {
+    OutputFile file = OutputFile.at(csv, file());
+    try {
+      String text = ShoppingCsv.of(content.building());
+      file.write(out -> out.write(text.getBytes(StandardCharsets.UTF_8)));
+    } catch (IOException | UncheckedIOException e) {
+      throw OutputFile.fault(csv, e);
+    }
+    results().println(csv);
   }
 
   /** The words of the design's language; it is not printed in another one unasked. */

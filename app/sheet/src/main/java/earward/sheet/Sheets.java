@@ -2,11 +2,13 @@ package earward.sheet;
 
 import earward.kit.file.Designs;
 import earward.kit.review.ReviewedKit;
+import earward.kit.stage.SolvedStage;
 import earward.sheet.content.SheetContent;
 import earward.sheet.internal.gather.Gathered;
 import earward.sheet.internal.section.Words;
 import earward.sheet.wording.Wording;
 import earward.study.limits.KitLimits;
+import java.util.List;
 
 /** Makes the content of build sheets from reviewed kits. Nothing is solved here. */
 public final class Sheets {
@@ -19,17 +21,28 @@ public final class Sheets {
    * @param kit as it was reviewed
    */
   public static SheetContent of(ReviewedKit kit) {
-    return of(kit, Wording.of(kit.solved().assembly().design().sheet().language()));
+    return of(kit, List.of(), Wording.of(kit.solved().assembly().design().sheet().language()));
+  }
+
+  /**
+   * The sheet of a kit with its build stages, in the language that its design names.
+   *
+   * @param kit as it was reviewed
+   * @param stages of {@link earward.kit.stage.BuildStages}; none: the kit is tried as a whole only
+   */
+  public static SheetContent of(ReviewedKit kit, List<SolvedStage> stages) {
+    return of(kit, stages, Wording.of(kit.solved().assembly().design().sheet().language()));
   }
 
   /**
    * The sheet of a kit in a wording of the caller's choice.
    *
    * @param kit as it was reviewed
+   * @param stages of {@link earward.kit.stage.BuildStages}; none: the kit is tried as a whole only
    * @param wording the words; hand the same one to the writer
    */
-  public static SheetContent of(ReviewedKit kit, Wording wording) {
-    return of(kit, wording, KitLimits.NONE);
+  public static SheetContent of(ReviewedKit kit, List<SolvedStage> stages, Wording wording) {
+    return of(kit, stages, wording, KitLimits.NONE);
   }
 
   /**
@@ -37,8 +50,9 @@ public final class Sheets {
    *
    * @param limits as they were worked out; {@link KitLimits#NONE} for none
    */
-  public static SheetContent of(ReviewedKit kit, Wording wording, KitLimits limits) {
+  public static SheetContent of(
+      ReviewedKit kit, List<SolvedStage> stages, Wording wording, KitLimits limits) {
     return Gathered.of(
-        kit, Designs.digest(kit.solved().assembly().design()), Words.of(wording), limits);
+        kit, stages, Designs.digest(kit.solved().assembly().design()), Words.of(wording), limits);
   }
 }

@@ -5,6 +5,7 @@ import earward.block.quantity.Unit;
 import earward.kit.design.SheetOptions.Paper;
 import earward.kit.parts.Marking;
 import earward.sheet.content.Amount;
+import earward.sheet.content.Building;
 import earward.sheet.content.CautionRow;
 import earward.sheet.content.CautionRow.Signal;
 import earward.sheet.content.CurrentRow;
@@ -72,6 +73,7 @@ final class SampleSheet {
         new PathDrawing(List.of(row(500, 120), row(500, 90))),
         List.of(new PinOut("IC1", "TDA2822M", "DIP-8", pins())),
         parts(40),
+        Building.NONE,
         List.of("Black lead to ground, red lead to the point."),
         testPoints(),
         List.of(

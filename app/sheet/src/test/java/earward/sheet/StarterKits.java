@@ -3,6 +3,7 @@ package earward.sheet;
 import earward.block.BlockType;
 import earward.block.BlockTypes;
 import earward.kit.design.KitDesign;
+import earward.kit.design.SheetOptions;
 import earward.kit.file.DesignFileException;
 import earward.kit.file.Designs;
 import earward.kit.file.PartsFiles;
@@ -26,6 +27,13 @@ final class StarterKits {
 
   static KitDesign design(String name) throws DesignFileException {
     return Designs.read(TEMPLATES.resolve("kits/" + name + ".earward")).design();
+  }
+
+  static KitDesign german(KitDesign design) {
+    SheetOptions now = design.sheet();
+    return design.withSheet(
+        new SheetOptions(
+            now.paper(), "de", now.clubName(), now.kitNumber(), now.density(), now.written()));
   }
 
   static ReviewedKit reviewed(KitDesign design) throws DesignFileException {

@@ -9,9 +9,12 @@ import earward.kit.design.KitDesign;
 import earward.kit.design.QuantityText;
 import earward.kit.design.SheetOptions.Paper;
 import earward.kit.path.Figures;
+import earward.kit.path.KitSolver;
 import earward.kit.path.SolvedKit;
 import earward.kit.review.ReviewFinding;
 import earward.kit.review.ReviewedKit;
+import earward.kit.review.Reviewer;
+import earward.kit.stage.BuildStages;
 import earward.sheet.content.CautionRow;
 import earward.sheet.content.PartMarking.Bands;
 import earward.sheet.content.PartRow;
@@ -35,6 +38,11 @@ class StarterSheetTest {
       REVIEWED.put(name, StarterKits.reviewed(StarterKits.design(name)));
     }
     return REVIEWED.get(name);
+  }
+
+  private static SheetContent staged(String name) throws Exception {
+    ReviewedKit kit = reviewed(name);
+    return Sheets.of(kit, BuildStages.solve(kit.solved().assembly()));
   }
 
   @ParameterizedTest
@@ -132,6 +140,25 @@ class StarterSheetTest {
   }
 
   @Test
+  void aGermanSheetIsGermanThroughout() throws Exception {
+    KitDesign design = StarterKits.german(StarterKits.design("lantern"));
+    SolvedKit solved = KitSolver.solve(StarterKits.assembled(design));
+    ReviewedKit kit = Reviewer.review(solved, Locale.GERMAN);
+    SheetContent content = Sheets.of(kit, BuildStages.solve(solved.assembly()));
+    try (ReadSheet sheet = ReadSheet.of(content)) {
+      String text = sheet.text();
+      assertThat(text)
+          .contains("Bauzettel", "Stufe 1: ", "Einkaufsliste", "Seite 1 von", "4,7 Ω", "NF eff.")
+          .doesNotContain("4.7 Ω", "Stage", "Readings", "ground", "Resistor", "Fitted");
+      assertThat(sheet.document().getDocumentCatalog().getLanguage()).isEqualTo("de");
+      for (int page = 1; page <= sheet.pages(); page++) {
+        SheetWriterTest.requireInside(sheet, page, Paper.A4);
+        assertThat(sheet.overprinted(page)).as("page %s", page).isEmpty();
+      }
+    }
+  }
+
+  @Test
   void aDrawingThatIsHigherThanAPageGoesOnFromRowToRow() throws Exception {
     KitDesign design = StarterKits.design("lantern");
     for (int i = 0; i < 24; i++) {
@@ -166,7 +193,7 @@ class StarterSheetTest {
   @ValueSource(strings = {"lantern", "hayloft", "boathouse"})
   void noLetterOfARealSheetLiesOutsideOrOverAnother(String name) throws Exception {
     for (Paper paper : Paper.values()) {
-      try (ReadSheet sheet = ReadSheet.of(Sheets.of(reviewed(name)).withPaper(paper))) {
+      try (ReadSheet sheet = ReadSheet.of(staged(name).withPaper(paper))) {
         for (int page = 1; page <= sheet.pages(); page++) {
           SheetWriterTest.requireInside(sheet, page, paper);
           assertThat(sheet.overprinted(page)).as("page %s", page).isEmpty();

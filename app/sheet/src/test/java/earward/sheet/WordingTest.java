@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import earward.block.check.Severity;
+import earward.block.device.Device;
 import earward.block.device.Dielectric;
 import earward.block.device.DiodeMaterial;
 import earward.block.device.Taper;
@@ -22,6 +23,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
+import java.util.Properties;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.regex.Matcher;
@@ -49,6 +51,43 @@ class WordingTest {
   }
 
   @Test
+  void everyLanguageSaysAllThatEnglishSaysWithTheSamePlaceholders() throws IOException {
+    Path folder = Path.of("../../templates/sheets");
+    Properties english = read(folder.resolve("en.properties"));
+    Set<String> languages = new TreeSet<>();
+    try (Stream<Path> files = Files.list(folder)) {
+      for (Path file : files.toList()) {
+        Properties words = read(file);
+        languages.add(String.valueOf(file.getFileName()));
+        assertThat(words.keySet()).as(file.toString()).isEqualTo(english.keySet());
+        for (String key : english.stringPropertyNames()) {
+          assertThat(placeholders(words, key))
+              .as(file + ": " + key)
+              .isEqualTo(placeholders(english, key));
+        }
+      }
+    }
+    assertThat(languages).contains("en.properties", "de.properties");
+  }
+
+  private static Properties read(Path file) throws IOException {
+    Properties words = new Properties();
+    try (var reader = Files.newBufferedReader(file)) {
+      words.load(reader);
+    }
+    return words;
+  }
+
+  private static Set<String> placeholders(Properties words, String key) {
+    Set<String> names = new TreeSet<>();
+    Matcher matcher = Pattern.compile("\\{([a-z]+)}").matcher(words.getProperty(key));
+    while (matcher.find()) {
+      names.add(matcher.group(1));
+    }
+    return names;
+  }
+
+  @Test
   void whateverAPartOrAFindingCanBeHasWords() {
     requireWords("colour.", BandColour.values());
     requireWords("terminal.", Terminal.values());
@@ -59,6 +98,10 @@ class WordingTest {
     requireWords("signal.", Signal.values());
     requireWords("front-end.", FrontEndSupply.values());
     requireWords("caution.", Caution.values());
+    for (Class<?> device : Device.class.getPermittedSubclasses()) {
+      String kind = device.getSimpleName().replaceAll("(?<=.)([A-Z])", "-$1");
+      assertThat(Wording.of("en").text("kind." + kind.toLowerCase(Locale.ROOT))).isNotBlank();
+    }
   }
 
   private static void requireWords(String prefix, Enum<?>... constants) {

@@ -8,6 +8,7 @@ import earward.kit.path.Assembler;
 import earward.kit.path.KitSolver;
 import earward.kit.review.ReviewedKit;
 import earward.kit.review.Reviewer;
+import earward.kit.stage.BuildStages;
 import earward.sheet.SheetWriter;
 import earward.sheet.Sheets;
 import earward.sheet.content.SheetContent;
@@ -220,7 +221,7 @@ public final class Workbench {
         Reviewer.review(
             KitSolver.solve(Assembler.assemble(design, workshop.types(), workshop.parts())),
             Reviewer.USUAL_LANGUAGE);
-    return new Reviewed(kit, Sheets.of(kit));
+    return new Reviewed(kit, Sheets.of(kit, BuildStages.solve(kit.solved().assembly())));
   }
 
   private void settle(int of, Reviewed reviewed) {

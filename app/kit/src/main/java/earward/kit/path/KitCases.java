@@ -68,6 +68,11 @@ final class KitCases {
     return cases;
   }
 
+  /** The slots of the test signal's conditions, which hold where there is no signal too. */
+  Map<String, Double> atTest() {
+    return test();
+  }
+
   /** Slots of the knobs. */
   List<String> knobSlots() {
     return knobs.slots();

@@ -18,6 +18,7 @@ import java.util.Objects;
  * @param drawing of the path
  * @param pinOuts of the integrated circuits
  * @param parts in fitting order
+ * @param building how it is bought and built
  * @param method how the expected values are to be measured, one paragraph each
  * @param testPoints in the order of the path
  * @param currents of the supplies
@@ -36,6 +37,7 @@ public record SheetContent(
     PathDrawing drawing,
     List<PinOut> pinOuts,
     List<PartRow> parts,
+    Building building,
     List<String> method,
     List<TestPointRow> testPoints,
     List<CurrentRow> currents,
@@ -48,6 +50,7 @@ public record SheetContent(
     Objects.requireNonNull(language);
     Objects.requireNonNull(introduction);
     Objects.requireNonNull(drawing);
+    Objects.requireNonNull(building);
     conditions = List.copyOf(conditions);
     keyFigures = List.copyOf(keyFigures);
     cautions = List.copyOf(cautions);
@@ -79,6 +82,29 @@ public record SheetContent(
         drawing,
         pinOuts,
         parts,
+        building,
+        method,
+        testPoints,
+        currents,
+        heat,
+        seams,
+        findings);
+  }
+
+  /** The same sheet with parts bought for so many kits. */
+  public SheetContent forKits(int kits) {
+    return new SheetContent(
+        title,
+        paper,
+        language,
+        introduction,
+        conditions,
+        keyFigures,
+        cautions,
+        drawing,
+        pinOuts,
+        parts,
+        building.forKits(kits),
         method,
         testPoints,
         currents,

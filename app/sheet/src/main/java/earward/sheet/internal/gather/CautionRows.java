@@ -69,6 +69,18 @@ final class CautionRows {
     return rows;
   }
 
+  /** Those of some of the parts, each with these parts only. */
+  List<CautionRow> of(Set<String> references) {
+    List<CautionRow> rows = new ArrayList<>();
+    for (CautionRow row : rows()) {
+      List<String> own = row.references().stream().filter(references::contains).toList();
+      if (!own.isEmpty()) {
+        rows.add(new CautionRow(row.signal(), row.headline(), row.sentence(), own));
+      }
+    }
+    return rows;
+  }
+
   private boolean loud() {
     return assembly.blocks().stream()
         .anyMatch(

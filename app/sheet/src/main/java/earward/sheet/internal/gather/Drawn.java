@@ -15,6 +15,7 @@ import earward.kit.path.PlacedBlock;
 import earward.sheet.content.PathDrawing;
 import earward.sheet.internal.page.Sheet;
 import earward.sheet.internal.page.Typeface;
+import earward.sheet.internal.section.SideBySide;
 import earward.sheet.internal.section.Words;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
@@ -42,25 +43,40 @@ final class Drawn {
   }
 
   PathDrawing drawing() {
-    if (assembly.path().isEmpty()) {
+    return drawing(assembly.path(), assembly.beside(), paper().contentWidth());
+  }
+
+  /** The drawing of some blocks that follow each other, and of some beside them. */
+  PathDrawing drawing(List<PlacedBlock> path, List<PlacedBlock> beside, double width) {
+    if (path.isEmpty()) {
       return PathDrawing.none();
     }
     boolean roomy = assembly.design().sheet().density() == Density.ROOMY;
     LayoutOptions options =
         new LayoutOptions(
-            Sheet.of(assembly.design().sheet().paper()).contentWidth(),
+            width,
             roomy ? ROOMY_TEXT : LayoutOptions.LEAST_TEXT_POINTS,
             Typeface.forDrawings(),
             new LayoutWords(words.text("drawing.to"), words.text("drawing.from")));
-    Schematic schematic =
-        Schematics.lay(blocks(assembly.path()), blocks(assembly.beside()), options);
+    Schematic schematic = Schematics.lay(blocks(path), blocks(beside), options);
     if (!(schematic.height() > 0)) {
       return PathDrawing.none();
     }
-    boolean onOnePage =
-        schematic.height() <= Sheet.of(assembly.design().sheet().paper()).contentHeight() - ROOM;
+    boolean onOnePage = schematic.height() <= paper().contentHeight() - ROOM;
     return new PathDrawing(
         onOnePage ? List.of(row(schematic, 0, schematic.height())) : rows(schematic));
+  }
+
+  /** The drawing of a stage: beside the list of its parts where it is small enough for that. */
+  PathDrawing stage(List<PlacedBlock> path, List<PlacedBlock> beside, boolean large) {
+    float half = SideBySide.half(paper().contentWidth());
+    PathDrawing small = large ? PathDrawing.none() : drawing(path, beside, half);
+    boolean fits = small.rows().size() == 1 && small.rows().get(0).widthPoints() <= half + 0.5;
+    return fits ? small : drawing(path, beside, paper().contentWidth());
+  }
+
+  private Sheet paper() {
+    return Sheet.of(assembly.design().sheet().paper());
   }
 
   /** Row by row, broken in the middle of what is between them. */

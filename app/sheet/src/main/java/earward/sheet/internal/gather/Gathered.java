@@ -11,6 +11,8 @@ import earward.kit.path.PlacedTestPoint;
 import earward.kit.review.Remedy;
 import earward.kit.review.ReviewFinding;
 import earward.kit.review.ReviewedKit;
+import earward.kit.stage.SolvedStage;
+import earward.sheet.content.Building;
 import earward.sheet.content.FindingRow;
 import earward.sheet.content.KitTitle;
 import earward.sheet.content.SheetContent;
@@ -26,7 +28,8 @@ public final class Gathered {
   private Gathered() {}
 
   /** The content. */
-  public static SheetContent of(ReviewedKit kit, Digest digest, Words words, KitLimits limits) {
+  public static SheetContent of(
+      ReviewedKit kit, List<SolvedStage> stages, Digest digest, Words words, KitLimits limits) {
     Assembly assembly = kit.solved().assembly();
     Figures figures = kit.figures();
     KitDesign design = assembly.design();
@@ -35,6 +38,8 @@ public final class Gathered {
     PartRows parts = new PartRows(assembly, names, words);
     FigureRows rows = new FigureRows(assembly, figures, names, words, limits);
     CoverFigures cover = new CoverFigures(assembly, figures, names, words);
+    CautionRows cautions = new CautionRows(assembly, figures, words);
+    Drawn drawn = new Drawn(assembly, names, parts, words);
     String name = design.title().isBlank() ? words.text("title.nameless") : design.title();
     return new SheetContent(
         new KitTitle(
@@ -44,10 +49,15 @@ public final class Gathered {
         cover.introduction(),
         cover.conditions(),
         cover.keyFigures(),
-        new CautionRows(assembly, figures, words).rows(),
-        new Drawn(assembly, names, parts, words).drawing(),
+        cautions.rows(),
+        drawn.drawing(),
         parts.pinOuts(),
         parts.rows(),
+        new Building(
+            new StageRows(assembly, names, parts, cautions, drawn, words).rows(stages),
+            new WireRows(assembly, words).rows(),
+            parts.shopping(),
+            1),
         method(cover, assembly, limits, words),
         rows.testPoints(),
         rows.currents(),

@@ -9,6 +9,7 @@ import earward.block.device.Diode;
 import earward.block.device.Loudspeaker;
 import earward.block.device.Pin;
 import earward.block.device.Potentiometer;
+import earward.block.device.Resistor;
 import earward.block.device.Terminal;
 import earward.block.quantity.Unit;
 import earward.block.wiring.WiredPart;
@@ -17,11 +18,15 @@ import earward.kit.path.PlacedBlock;
 import earward.sheet.content.PartRow;
 import earward.sheet.content.PinOut;
 import earward.sheet.content.PinOut.PinRow;
+import earward.sheet.content.ShoppingRow;
+import earward.sheet.content.StageRow;
 import earward.sheet.internal.section.Words;
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 
 /** The parts list, block by block, each in its fitting order; and the pins of what has many. */
@@ -60,6 +65,78 @@ final class PartRows {
       }
     }
     return rows;
+  }
+
+  /** The parts of some blocks, lowest first: a board lies flat while its low parts are soldered. */
+  List<StageRow.Part> lowestFirst(List<PlacedBlock> blocks) {
+    record Fitted(double height, StageRow.Part part) {}
+    List<Fitted> fitted = new ArrayList<>();
+    for (PlacedBlock block : blocks) {
+      for (String id : block.description().wiring().fittingOrder()) {
+        WiredPart part = block.description().wiring().part(id).orElseThrow();
+        fitted.add(
+            new Fitted(
+                Heights.millimetres(part.device()),
+                new StageRow.Part(
+                    reference(assembly, block, id),
+                    parts.value(part.device()),
+                    names.part(block, id))));
+      }
+    }
+    fitted.sort(Comparator.comparingDouble(Fitted::height));
+    return fitted.stream().map(Fitted::part).toList();
+  }
+
+  /** What is bought: parts of one value and rating together. */
+  List<ShoppingRow> shopping() {
+    record Kind(String what, String rating, double spareShare) {}
+    Map<Kind, List<String>> bought = new LinkedHashMap<>();
+    for (PlacedBlock block : assembly.blocks()) {
+      for (String id : block.description().wiring().fittingOrder()) {
+        WiredPart part = block.description().wiring().part(id).orElseThrow();
+        Device device = part.device();
+        Kind kind =
+            new Kind(
+                parts.kind(device) + " " + parts.value(device),
+                parts.rating(device, block.partName(part)),
+                Heights.spareShare(device));
+        bought.computeIfAbsent(kind, any -> new ArrayList<>()).add(reference(assembly, block, id));
+      }
+    }
+    return bought.entrySet().stream()
+        .map(
+            each ->
+                new ShoppingRow(
+                    each.getKey().what().strip(),
+                    each.getKey().rating(),
+                    each.getValue(),
+                    each.getKey().spareShare()))
+        .sorted(Comparator.comparing(row -> row.references().get(0).replaceAll("[0-9]", "")))
+        .toList();
+  }
+
+  /** What a meter on ohms can show at most across the resistors of some blocks. */
+  List<String> atMost(List<PlacedBlock> blocks) {
+    List<String> known = new ArrayList<>();
+    for (PlacedBlock block : blocks) {
+      for (WiredPart part : block.description().wiring().parts()) {
+        double ohms =
+            part.device() instanceof Resistor resistor
+                ? resistor.ohms()
+                : part.device() instanceof Potentiometer track ? track.trackOhms() : 0;
+        double share = parts.tolerance(part.device(), block.partName(part)).orElse(0);
+        if (ohms > 0 && assembly.references().ofPart(block.partName(part)).isPresent()) {
+          known.add(
+              words.text(
+                  "stage.at-most",
+                  "part",
+                  reference(assembly, block, part.id()),
+                  "ohms",
+                  words.numbers().text(StageRows.rounded(ohms * (1 + share), true), Unit.OHM)));
+        }
+      }
+    }
+    return known;
   }
 
   private PartRow row(PlacedBlock block, WiredPart part) {

@@ -87,6 +87,17 @@ final class PartWords {
     return device instanceof Switch ? words.text("value.switch") : "";
   }
 
+  /** What kind of part it is. */
+  String kind(Device device) {
+    return words.text(
+        "kind."
+            + device
+                .getClass()
+                .getSimpleName()
+                .replaceAll("(?<=.)([A-Z])", "-$1")
+                .toLowerCase(Locale.ROOT));
+  }
+
   /** What else must be ordered; may be empty. */
   String rating(Device device, String partName) {
     if (device instanceof Resistor resistor) {

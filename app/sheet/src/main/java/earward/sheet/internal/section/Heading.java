@@ -1,9 +1,11 @@
 package earward.sheet.internal.section;
 
 import earward.sheet.internal.page.Canvas;
+import earward.sheet.internal.page.Lines;
 import earward.sheet.internal.page.Piece;
 import earward.sheet.internal.page.Style;
 import earward.sheet.internal.page.Style.Tone;
+import java.util.List;
 import java.util.Optional;
 
 /**
@@ -28,13 +30,21 @@ record Heading(String title, boolean beginsPage, int together) implements Piece 
 
   @Override
   public float height(float width) {
-    return RULE + 5 + Style.HEADING.leading() + BELOW;
+    return RULE + 5 + lines(width).size() * Style.HEADING.leading() + BELOW;
   }
 
   @Override
   public void draw(Canvas canvas, float x, float y, float width) {
     canvas.fill(x, y, width, RULE, Tone.INK);
-    canvas.text(title, x, y + RULE + 5 + Style.HEADING.rise(), Style.HEADING);
+    float baseline = y + RULE + 5 + Style.HEADING.rise();
+    for (String line : lines(width)) {
+      canvas.text(line, x, baseline, Style.HEADING);
+      baseline += Style.HEADING.leading();
+    }
+  }
+
+  private List<String> lines(float width) {
+    return Lines.of(title, Style.HEADING, width);
   }
 
   @Override

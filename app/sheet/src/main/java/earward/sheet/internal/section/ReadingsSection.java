@@ -23,9 +23,12 @@ final class ReadingsSection {
 
   static List<Piece> firstPower(SheetContent content, Words words) {
     List<Piece> pieces = new ArrayList<>();
-    pieces.add(new Heading(words.text("section.first-power"), false));
-    for (int step = 1; step <= 5; step++) {
-      pieces.add(new StepPiece(words.text("first-power." + step)));
+    // stages have their own first power; what is left then is the last check
+    boolean staged = !content.building().stages().isEmpty();
+    String section = staged ? "last-check" : "first-power";
+    pieces.add(new Heading(words.text("section." + section), false));
+    for (int step = 1; step <= (staged ? 3 : 5); step++) {
+      pieces.add(new StepPiece(words.text(section + "." + step)));
     }
     if (content.currents().isEmpty()) {
       return pieces;

@@ -18,10 +18,13 @@ public final class Sections {
     pieces.addAll(drawing(content.drawing(), words));
     pieces.addAll(together(PartsSection.pinOuts(content.pinOuts(), words)));
     pieces.addAll(PartsSection.parts(content.parts(), words));
+    pieces.addAll(together(StagesSection.wires(content.building().wires(), words)));
+    StagesSection.stages(content.building(), words).forEach(s -> pieces.addAll(together(s)));
     pieces.addAll(together(ReadingsSection.firstPower(content, words)));
     pieces.addAll(together(ReadingsSection.testPoints(content, words)));
     pieces.addAll(together(LevelsSection.heat(content.heat(), words)));
     pieces.addAll(together(LevelsSection.seams(content.seams(), words)));
+    pieces.addAll(together(StagesSection.shopping(content.building(), words)));
     pieces.addAll(CoverSection.findings(content.findings(), words));
     pieces.addAll(
         together(

@@ -10,10 +10,11 @@ import earward.sheet.internal.page.Piece;
  * @param right the other
  * @param spaceAbove in points
  */
-record SideBySide(Piece left, Piece right, float spaceAbove) implements Piece {
+public record SideBySide(Piece left, Piece right, float spaceAbove) implements Piece {
   private static final float GUTTER = 22;
 
-  private static float half(float width) {
+  /** The width of each, of so wide a content. */
+  public static float half(float width) {
     return (width - GUTTER) / 2;
   }
 
