@@ -116,7 +116,7 @@ class SheetCommandTest {
     Files.writeString(kit, text.replace("\"language\": \"en\"", "\"language\": \"sw\""));
     Path pdf = folder.resolve("kit.pdf");
     assertFault(Ran.earward("sheet", kit, "-o", pdf), kit, "'sw', for which there is no wording");
-    assertThat(Ran.earward("sheet", kit, "-o", pdf).messages()).contains("there are en");
+    assertThat(Ran.earward("sheet", kit, "-o", pdf).messages()).contains("there are de, en");
     assertThat(pdf).doesNotExist();
     assertThat(Ran.earward("review", kit).code()).isZero();
     Files.writeString(kit, text.replace("\"language\": \"en\"", "\"language\": \"en-GB\""));
