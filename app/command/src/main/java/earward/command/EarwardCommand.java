@@ -21,6 +21,7 @@ import picocli.CommandLine.Spec;
       ReviewCommand.class,
       BatchCommand.class,
       FaultsCommand.class,
+      DiagnoseCommand.class,
       ProveCommand.class,
       ProposeCommand.class,
       BlocksCommand.class,

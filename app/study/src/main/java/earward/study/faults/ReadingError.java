@@ -1,6 +1,7 @@
 package earward.study.faults;
 
 import earward.block.quantity.Unit;
+import earward.kit.path.Assembly;
 import earward.study.limits.Meter;
 import java.util.List;
 
@@ -12,7 +13,7 @@ import java.util.List;
  * @param relative of each, the deviation of kits as a share of the reading
  * @param meter on which they are read
  */
-record ReadingError(List<FaultReading> readings, List<Double> relative, Meter meter) {
+public record ReadingError(List<FaultReading> readings, List<Double> relative, Meter meter) {
   /** Error of an ohmmeter and of an ammeter, as a share (common practice). */
   private static final double OTHER_SHARE = 0.03;
 
@@ -20,14 +21,26 @@ record ReadingError(List<FaultReading> readings, List<Double> relative, Meter me
   private static final double LEAST_AMPERES = 2e-4;
 
   /** From here on a display says "over range". */
-  static final double MOST_OHMS = 2e6;
+  public static final double MOST_OHMS = 2e6;
 
-  ReadingError {
+  public ReadingError {
     readings = List.copyOf(readings);
     relative = List.copyOf(relative);
   }
 
-  double deviation(int reading, double value) {
+  /** Of a guide's readings on the first instrument of the kit's bench. */
+  public static ReadingError of(FaultGuide guide, Assembly assembly) {
+    return new ReadingError(
+        guide.readings(), guide.deviations(), FaultStudy.meter(assembly));
+  }
+
+  /**
+   * Standard deviation of a reading about its prediction.
+   *
+   * @param reading its place in the list
+   * @param value predicted
+   */
+  public double deviation(int reading, double value) {
     double ofKits = relative.get(reading) * Math.abs(value);
     Unit unit = readings.get(reading).unit();
     double ofMeter =
@@ -38,7 +51,7 @@ record ReadingError(List<FaultReading> readings, List<Double> relative, Meter me
   }
 
   /** How many standard deviations two predictions lie apart; 0 where one does not exist. */
-  double apart(int reading, double one, double other) {
+  public double apart(int reading, double one, double other) {
     if (Double.isNaN(one) || Double.isNaN(other)) {
       return 0;
     }
