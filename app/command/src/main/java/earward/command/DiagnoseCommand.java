@@ -57,8 +57,7 @@ final class DiagnoseCommand extends DesignCommand {
     }
     Evidence evidence = evidence(text, solver, assembly.design());
     FaultGuide guide = FaultStudy.of(solver, order, BatchProgress.NONE);
-    Diagnosis diagnosis =
-        new Diagnostician(guide, ReadingError.of(guide, assembly)).of(evidence);
+    Diagnosis diagnosis = new Diagnostician(guide, ReadingError.of(guide, assembly)).of(evidence);
     if (json) {
       JsonOut.print(results(), DiagnosisJson.of(reviewed, evidence, diagnosis, guide));
     } else {

@@ -33,8 +33,7 @@ final class DiagnosisJson {
     for (RankedGroup each : diagnosis.ranked()) {
       ObjectNode node = ranked.addObject();
       each.group()
-          .ifPresentOrElse(
-              group -> node.put("group", group.number()), () -> node.putNull("group"));
+          .ifPresentOrElse(group -> node.put("group", group.number()), () -> node.putNull("group"));
       JsonOut.put(node, "probability", each.probability());
       node.put("fits", each.fits());
       ArrayNode misfits = node.putArray("misfits");

@@ -39,9 +39,7 @@ final class DiagnosisText {
                 ranked.group().map(g -> "group " + g.number()).orElse("no fault that shows"),
                 ranked.fits(),
                 evidence.size(),
-                ranked.misfits().isEmpty()
-                    ? ""
-                    : ", not " + String.join(", ", ranked.misfits())));
+                ranked.misfits().isEmpty() ? "" : ", not " + String.join(", ", ranked.misfits())));
         ranked
             .group()
             .ifPresent(
@@ -50,8 +48,7 @@ final class DiagnosisText {
                         .faults()
                         .forEach(
                             each ->
-                                to.println(
-                                    INDENT + FaultWords.sentence(assembly, each.fault()))));
+                                to.println(INDENT + FaultWords.sentence(assembly, each.fault()))));
       }
     }
     to.println();

@@ -15,8 +15,8 @@ import java.util.Optional;
 import java.util.function.Predicate;
 
 /**
- * Ranks groups of faults by Bayes' rule: prior times the likelihood of readings and observations.
- * A reading is off by its kits' spread and its meter, or a slip of the pen anywhere in its range.
+ * Ranks groups of faults by Bayes' rule: prior times the likelihood of readings and observations. A
+ * reading is off by its kits' spread and its meter, or a slip of the pen anywhere in its range.
  * Immutable.
  */
 public final class Diagnostician {
@@ -244,8 +244,7 @@ public final class Diagnostician {
   }
 
   private double overlap(int reading, Signs one, Signs other) {
-    double apart =
-        error.apart(reading, one.readings().get(reading), other.readings().get(reading));
+    double apart = error.apart(reading, one.readings().get(reading), other.readings().get(reading));
     return Math.max(SLIP, Math.exp(-apart * apart / 4));
   }
 }

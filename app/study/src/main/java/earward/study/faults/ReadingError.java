@@ -30,8 +30,7 @@ public record ReadingError(List<FaultReading> readings, List<Double> relative, M
 
   /** Of a guide's readings on the first instrument of the kit's bench. */
   public static ReadingError of(FaultGuide guide, Assembly assembly) {
-    return new ReadingError(
-        guide.readings(), guide.deviations(), FaultStudy.meter(assembly));
+    return new ReadingError(guide.readings(), guide.deviations(), FaultStudy.meter(assembly));
   }
 
   /**

@@ -28,10 +28,8 @@ class ReadingsTextTest {
   }
 
   private static Evidence read(String text) throws ReadingsException {
-    Conditions core =
-        new Conditions(455e3, 400, 4500, 150, 0.3, 0.7, 0.25, 1.5, 4, 25, 40, 0.2);
-    KitDesign design =
-        KitDesign.empty("kit", KitConditions.of(core, FrontEndSupply.values()[0]));
+    Conditions core = new Conditions(455e3, 400, 4500, 150, 0.3, 0.7, 0.25, 1.5, 4, 25, 40, 0.2);
+    KitDesign design = KitDesign.empty("kit", KitConditions.of(core, FrontEndSupply.values()[0]));
     return new ReadingsText("r.csv", READINGS, design, DIGEST).read(text);
   }
 
@@ -55,7 +53,8 @@ class ReadingsTextTest {
     refused("tone,purple", "line 1 says the tone is 'purple'; it can be silent");
     refused("heat,warm", "line 1 says heat is 'warm'; it can be hot or cool");
     refused("TP7:no-signal,many", "line 1 cannot be read");
-    refused("TP7:no-signal,4 V\nTP7:no-signal,5 V", "line 2 has the reading TP7:no-signal a second");
+    refused(
+        "TP7:no-signal,4 V\nTP7:no-signal,5 V", "line 2 has the reading TP7:no-signal a second");
     refused("nonsense", "line 1 is 'nonsense'");
     refused("", "r.csv has no reading");
     refused("revision,B\ntone,silent", "is of revision B, and the design at hand is A");
