@@ -1,12 +1,16 @@
 package earward.command;
 
 import earward.engine.CircuitException;
-import earward.kit.path.Assembly;
 import earward.kit.review.ReviewedKit;
 import earward.study.batch.Batch;
 import earward.study.batch.BatchOrder;
+import earward.study.batch.BatchPlan;
 import earward.study.batch.BatchResult;
 import earward.study.batch.Habits;
+import earward.study.matters.Matters;
+import earward.study.matters.MattersStudy;
+import java.util.List;
+import java.util.Optional;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 
@@ -42,6 +46,14 @@ final class BatchCommand extends DesignCommand {
       description = "All figures and checks, those too that are a search; much slower.")
   private boolean full;
 
+  @Option(
+      names = "--matters",
+      description = {
+        "Also which parts make the spread of each reading, and what tighter or looser tolerances",
+        "would do to the yield: some ten batches more."
+      })
+  private boolean matters;
+
   @Option(names = "--json", description = "As JSON, in SI base units (batch.schema.json).")
   private boolean json;
 
@@ -49,11 +61,28 @@ final class BatchCommand extends DesignCommand {
   void show(ReviewedKit reviewed, Program program) throws CommandFault {
     require(kits, MOST_KITS, "kits");
     require(threads, MOST_THREADS, "threads");
-    BatchResult result = batch(reviewed.solved().assembly());
+    BatchOrder order = new BatchOrder(kits, seed, threads, full, Habits.USUAL);
+    BatchResult result;
+    Optional<Matters> found = Optional.empty();
+    try (Cancellation cancellation = new Cancellation(messages())) {
+      KitsProgress progress = new KitsProgress(messages(), cancellation::asked);
+      BatchPlan plan = BatchPlan.of(reviewed.solved().assembly(), full, order.habits());
+      result = Batch.run(plan, order, progress);
+      if (matters && !cancellation.asked()) {
+        found = Optional.of(MattersStudy.of(plan, order, result, progress));
+      }
+      if (cancellation.asked()) {
+        throw CommandFault.ofInput(List.of()); // the cancellation says it
+      }
+    } catch (CircuitException e) {
+      throw CommandFault.ofInput(file() + ": " + e.finding().sentence());
+    }
     if (json) {
-      JsonOut.print(results(), BatchJson.of(reviewed, result));
+      JsonOut.print(results(), BatchJson.of(reviewed, result, found));
     } else {
       BatchText.print(results(), reviewed, result);
+      found.ifPresent(
+          what -> MattersText.print(results(), reviewed.solved().assembly(), what));
     }
   }
 
@@ -61,20 +90,6 @@ final class BatchCommand extends DesignCommand {
     if (given < 1 || given > most) {
       throw CommandFault.ofInput(
           "--" + what + " is " + given + "; it must be from 1 to " + most + ".");
-    }
-  }
-
-  private BatchResult batch(Assembly assembly) throws CommandFault {
-    BatchOrder order = new BatchOrder(kits, seed, threads, full, Habits.USUAL);
-    try (Cancellation cancellation = new Cancellation(messages())) {
-      KitsProgress progress = new KitsProgress(messages(), cancellation::asked);
-      BatchResult result = Batch.run(assembly, order, progress);
-      if (result.cancelled()) {
-        throw CommandFault.ofInput(java.util.List.of()); // the cancellation says it
-      }
-      return result;
-    } catch (CircuitException e) {
-      throw CommandFault.ofInput(file() + ": " + e.finding().sentence());
     }
   }
 }

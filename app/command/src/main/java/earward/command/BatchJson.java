@@ -10,7 +10,12 @@ import earward.study.batch.CheckOutcome;
 import earward.study.batch.Distribution;
 import earward.study.batch.ReadingSpread;
 import earward.study.batch.WorstKit;
+import earward.study.matters.FigureShares;
+import earward.study.matters.Matters;
+import earward.study.matters.PartShare;
+import earward.study.matters.ToleranceTrial;
 import java.util.Locale;
+import java.util.Optional;
 
 /** A batch, for programs. */
 final class BatchJson {
@@ -18,7 +23,7 @@ final class BatchJson {
 
   private BatchJson() {}
 
-  static ObjectNode of(ReviewedKit reviewed, BatchResult result) {
+  static ObjectNode of(ReviewedKit reviewed, BatchResult result, Optional<Matters> matters) {
     Assembly assembly = reviewed.solved().assembly();
     ObjectNode root = JsonOut.object().put("schema", "earward-batch-1");
     root.set("kit", KitHead.json(reviewed));
@@ -44,7 +49,31 @@ final class BatchJson {
         .worst()
         .ifPresentOrElse(
             worst -> root.set("worstKit", worst(assembly, worst)), () -> root.putNull("worstKit"));
+    matters.ifPresentOrElse(
+        what -> root.set("matters", matters(what)), () -> root.putNull("matters"));
     return root;
+  }
+
+  private static ObjectNode matters(Matters matters) {
+    ObjectNode node = JsonOut.object();
+    ArrayNode figures = node.putArray("figures");
+    for (FigureShares each : matters.figures()) {
+      ObjectNode one = figures.addObject().put("figure", each.figure().toString());
+      ArrayNode shares = one.putArray("shares");
+      for (PartShare share : each.shares()) {
+        ObjectNode part =
+            shares.addObject().put("place", share.part()).put("parameter", share.parameter());
+        JsonOut.put(part, "share", share.share());
+      }
+    }
+    ArrayNode trials = node.putArray("tolerances");
+    for (ToleranceTrial trial : matters.trials()) {
+      ObjectNode one = trials.addObject().put("place", trial.part());
+      JsonOut.put(one, "factor", trial.factor());
+      JsonOut.put(one, "yieldBefore", trial.yieldBefore());
+      JsonOut.put(one, "yieldAfter", trial.yieldAfter());
+    }
+    return node;
   }
 
   private static ObjectNode habits(BatchResult result) {

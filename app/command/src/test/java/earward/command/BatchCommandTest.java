@@ -28,12 +28,12 @@ class BatchCommandTest {
 
   @Test
   void aBatchIsToldInJson() throws IOException {
-    Ran ran = Ran.earward("batch", "--kits", "60", "--json", TestHome.starterKit("hayloft"));
+    Ran ran = Ran.earward("batch", "--kits", "40", "--json", TestHome.starterKit("hayloft"));
 
     assertThat(ran.code()).as(ran.messages()).isZero();
     SchemaCheck.assertValid("batch", ran.results());
     JsonNode root = new ObjectMapper().readTree(ran.results());
-    assertThat(root.get("kits").asInt()).isEqualTo(60);
+    assertThat(root.get("kits").asInt()).isEqualTo(40);
     assertThat(root.get("yield").get("unsolved").asInt()).isZero();
     assertThat(root.get("readings").findValuesAsText("figure"))
         .contains(
@@ -45,6 +45,24 @@ class BatchCommandTest {
       assertThat(reading.get("median").asDouble())
           .isBetween(reading.get("least").asDouble(), reading.get("most").asDouble());
     }
+  }
+
+  @Test
+  void whatMattersIsToldOnRequest() throws IOException {
+    Ran ran =
+        Ran.earward("batch", "--kits", "80", "--matters", "--json", TestHome.starterKit("hayloft"));
+
+    assertThat(ran.code()).as(ran.messages()).isZero();
+    SchemaCheck.assertValid("batch", ran.results());
+    JsonNode matters = new ObjectMapper().readTree(ran.results()).get("matters");
+    for (JsonNode figure : matters.get("figures")) {
+      if (figure.get("figure").asText().equals("path:supply-amperes@no-signal")) {
+        JsonNode first = figure.get("shares").get(0);
+        assertThat(first.get("parameter").asText()).isEqualTo("quiescent-amperes");
+        assertThat(first.get("share").asDouble()).isGreaterThan(0.8);
+      }
+    }
+    assertThat(matters.get("tolerances").size()).isEqualTo(4);
   }
 
   @Test
@@ -70,7 +88,7 @@ class BatchCommandTest {
   }
 
   private static BatchResult run(BatchPlan plan, int threads) {
-    BatchOrder order = new BatchOrder(150, SEED, threads, false, Habits.USUAL);
+    BatchOrder order = new BatchOrder(140, SEED, threads, false, Habits.USUAL);
     return Batch.run(plan, order, BatchProgress.NONE);
   }
 

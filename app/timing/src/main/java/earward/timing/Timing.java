@@ -10,7 +10,8 @@ import org.openjdk.jmh.Main;
 /**
  * Starts the timings. {@code bars [--quick]} holds times against their bars and ends with 1 where
  * one was missed; {@code accuracy [--from N] [--count N] [--seed S]} holds random designs against
- * their full waveform; anything else goes to JMH.
+ * their full waveform; {@code diagnosis [--kit NAME] [--trials N] [--seed S]} has kits with known
+ * faults diagnosed and ends with 1 where too few were right; anything else goes to JMH.
  */
 public final class Timing {
   private Timing() {}
@@ -18,7 +19,7 @@ public final class Timing {
   /**
    * Runs the bars, the accuracy run, or the benchmarks that the arguments name.
    *
-   * @param arguments {@code bars [--quick]}, {@code accuracy ...}, or JMH's own
+   * @param arguments {@code bars [--quick]}, {@code accuracy ...}, {@code diagnosis ...}, or JMH's own
    * @throws IOException where the results cannot be written
    */
   public static void main(String[] arguments) throws IOException {
@@ -28,6 +29,9 @@ public final class Timing {
     }
     if (arguments.length > 0 && arguments[0].equals("accuracy")) {
       System.exit(AccuracyCall.run(arguments, System.out, System.err));
+    }
+    if (arguments.length > 0 && arguments[0].equals("diagnosis")) {
+      System.exit(DiagnosisCall.run(arguments, System.out, System.err));
     }
     Main.main(arguments);
   }

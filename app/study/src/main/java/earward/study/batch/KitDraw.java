@@ -47,14 +47,14 @@ public final class KitDraw {
   private final double ambientCelsius;
   private final Habits habits;
 
-  private KitDraw(KitDraw from, List<DrawnValue> values) {
+  private KitDraw(KitDraw from, List<DrawnValue> values, Habits habits) {
     nominal = from.nominal;
     this.values = List.copyOf(values);
     ceramics = from.ceramics;
     batteries = from.batteries;
     ambientSlot = from.ambientSlot;
     ambientCelsius = from.ambientCelsius;
-    habits = from.habits;
+    this.habits = habits;
   }
 
   /**
@@ -162,7 +162,30 @@ public final class KitDraw {
 
   /** This draw with other spreads for some of its values; all random numbers stay. */
   public KitDraw with(List<DrawnValue> changed) {
-    return new KitDraw(this, changed);
+    return new KitDraw(this, changed, habits);
+  }
+
+  /** This draw with other habits. */
+  public KitDraw with(Habits other) {
+    return new KitDraw(this, values, other);
+  }
+
+  /**
+   * What a kit draws for each value, from −1 (one end of its spread) to 1 (the other), in the order
+   * of the values.
+   */
+  public double[] draws(long seed, long kit) {
+    double[] draws = new double[values.size()];
+    for (int i = 0; i < draws.length; i++) {
+      draws[i] = draw(seed, kit, values.get(i));
+    }
+    return draws;
+  }
+
+  private double draw(long seed, long kit, DrawnValue value) {
+    double own = Chance.evenly(seed, kit, value.stream());
+    double common = Chance.evenly(~seed, kit / habits.kitsPerLot(), value.lotStream());
+    return habits.lotShare() * common + (1 - habits.lotShare()) * own;
   }
 
   /** A fresh row of the nominal kit, at the usual ambient. */
@@ -179,12 +202,8 @@ public final class KitDraw {
    */
   public void draw(long seed, long kit, double[] row) {
     System.arraycopy(nominal, 0, row, 0, nominal.length);
-    long lot = kit / habits.kitsPerLot();
     for (DrawnValue value : values) {
-      double own = Chance.evenly(seed, kit, value.stream());
-      double common = Chance.evenly(~seed, lot, value.lotStream());
-      double draw = habits.lotShare() * common + (1 - habits.lotShare()) * own;
-      row[value.slot()] = value.spread().at(draw);
+      row[value.slot()] = value.spread().at(draw(seed, kit, value));
     }
     for (Cells cells : batteries) {
       double used = habits.batteryUsed() * Chance.unit(seed, kit, cells.stream());

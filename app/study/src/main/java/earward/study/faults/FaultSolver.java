@@ -128,6 +128,20 @@ public final class FaultSolver {
     return List.copyOf(readings);
   }
 
+  /**
+   * Index of a slot in a row of values.
+   *
+   * @throws IllegalArgumentException when there is none of this name
+   */
+  public int slot(String name) {
+    return circuit.slot(name);
+  }
+
+  /** A solver for one thread. */
+  public OneThread oneThread() {
+    return new OneThread();
+  }
+
   /** How healthy kits are drawn. */
   public KitDraw draw() {
     return draw;

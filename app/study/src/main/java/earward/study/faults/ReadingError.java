@@ -40,13 +40,15 @@ public record ReadingError(List<FaultReading> readings, List<Double> relative, M
    * @param value predicted
    */
   public double deviation(int reading, double value) {
-    double ofKits = relative.get(reading) * Math.abs(value);
+    return Math.hypot(relative.get(reading) * Math.abs(value), meterError(reading, value));
+  }
+
+  /** By how much the meter may be wrong at a value. */
+  public double meterError(int reading, double value) {
     Unit unit = readings.get(reading).unit();
-    double ofMeter =
-        unit == Unit.VOLT
+    return unit == Unit.VOLT
             ? meter.errorVolts(value)
             : OTHER_SHARE * Math.abs(value) + (unit == Unit.OHM ? LEAST_OHMS : LEAST_AMPERES);
-    return Math.hypot(ofKits, ofMeter);
   }
 
   /** How many standard deviations two predictions lie apart; 0 where one does not exist. */

@@ -29,7 +29,7 @@ class ReadingsTextTest {
 
   private static Evidence read(String text) throws ReadingsException {
     Conditions core = new Conditions(455e3, 400, 4500, 150, 0.3, 0.7, 0.25, 1.5, 4, 25, 40, 0.2);
-    KitDesign design = KitDesign.empty("kit", KitConditions.of(core, FrontEndSupply.values()[0]));
+    KitDesign design = KitDesign.empty("kit", KitConditions.of(core, FrontEndSupply.BATTERY));
     return new ReadingsText("r.csv", READINGS, design, DIGEST).read(text);
   }
 
@@ -37,8 +37,16 @@ class ReadingsTextTest {
   void linesAreReadWhateverPartsThem() throws ReadingsException {
     Evidence evidence =
         read(
-            "# first switch-on\nreading,value\nrevision,A\ndigest,FCEADD1E\n"
-                + "tp7:no-signal;4,7 V\n\"TP7:ohms\"\tover range\ntone,Silent\nheat,hot\n");
+            """
+            # first switch-on
+            reading,value
+            revision,A
+            digest,FCEADD1E
+            tp7:no-signal;4,7 V
+            "TP7:ohms"	over range
+            tone,Silent
+            heat,hot
+            """);
     assertThat(evidence.readings())
         .containsEntry("TP7:no-signal", 4.7)
         .containsEntry("TP7:ohms", ReadingError.MOST_OHMS);
