@@ -81,8 +81,7 @@ final class BatchCommand extends DesignCommand {
       JsonOut.print(results(), BatchJson.of(reviewed, result, found));
     } else {
       BatchText.print(results(), reviewed, result);
-      found.ifPresent(
-          what -> MattersText.print(results(), reviewed.solved().assembly(), what));
+      found.ifPresent(what -> MattersText.print(results(), reviewed.solved().assembly(), what));
     }
   }
 

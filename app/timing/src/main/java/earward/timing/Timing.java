@@ -19,7 +19,8 @@ public final class Timing {
   /**
    * Runs the bars, the accuracy run, or the benchmarks that the arguments name.
    *
-   * @param arguments {@code bars [--quick]}, {@code accuracy ...}, {@code diagnosis ...}, or JMH's own
+   * @param arguments {@code bars [--quick]}, {@code accuracy ...}, {@code diagnosis ...}, or JMH's
+   *     own
    * @throws IOException where the results cannot be written
    */
   public static void main(String[] arguments) throws IOException {

@@ -47,8 +47,8 @@ public record ReadingError(List<FaultReading> readings, List<Double> relative, M
   public double meterError(int reading, double value) {
     Unit unit = readings.get(reading).unit();
     return unit == Unit.VOLT
-            ? meter.errorVolts(value)
-            : OTHER_SHARE * Math.abs(value) + (unit == Unit.OHM ? LEAST_OHMS : LEAST_AMPERES);
+        ? meter.errorVolts(value)
+        : OTHER_SHARE * Math.abs(value) + (unit == Unit.OHM ? LEAST_OHMS : LEAST_AMPERES);
   }
 
   /** How many standard deviations two predictions lie apart; 0 where one does not exist. */

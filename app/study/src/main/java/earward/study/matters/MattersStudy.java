@@ -120,8 +120,7 @@ public final class MattersStudy {
   private ToleranceTrial trial(String part, double factor, BatchResult before) {
     List<DrawnValue> changed = new ArrayList<>();
     for (DrawnValue value : plan.draw().values()) {
-      changed.add(
-          value.part().equals(part) ? value.with(value.spread().scaled(factor)) : value);
+      changed.add(value.part().equals(part) ? value.with(value.spread().scaled(factor)) : value);
     }
     BatchResult after = Batch.run(plan.with(plan.draw().with(changed)), order, progress);
     return new ToleranceTrial(part, factor, before.goodShare(), after.goodShare());

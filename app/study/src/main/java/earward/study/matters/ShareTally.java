@@ -1,8 +1,8 @@
 package earward.study.matters;
 
 /**
- * Estimates the first-order shares of a figure's variance: Var(E[y | x])/Var(y) for each input x, by
- * the correlation ratio over bins of the input, corrected for their number. Inputs must be
+ * Estimates the first-order shares of a figure's variance: Var(E[y | x])/Var(y) for each input x,
+ * by the correlation ratio over bins of the input, corrected for their number. Inputs must be
  * independent of each other. For one thread; its size does not grow with the kits.
  *
  * <p>Source: Pearson 1905 (correlation ratio); first-order index as in Sobol' 1993; correction for

@@ -25,8 +25,8 @@ import java.util.Optional;
 import java.util.SplittableRandom;
 
 /**
- * Kits with known faults, diagnosed from at most eight readings. Faults that leave a trace are drawn
- * evenly over the parts; groups are those of the guide, fixed beforehand.
+ * Kits with known faults, diagnosed from at most eight readings. Faults that leave a trace are
+ * drawn evenly over the parts; groups are those of the guide, fixed beforehand.
  */
 final class DiagnosisTrial {
   private static final int MOST_READINGS = 8;
@@ -69,8 +69,7 @@ final class DiagnosisTrial {
     solver.draw().draw(seed + 77, number, values);
     OtherParts.factors(solver.assembly().circuit().parts(), random)
         .forEach((slot, factor) -> values[solver.slot(slot)] *= factor);
-    Signs signs =
-        threads.get().signs(values, faults.stream().map(Fault::values).toList());
+    Signs signs = threads.get().signs(values, faults.stream().map(Fault::values).toList());
     Evidence evidence = Evidence.NONE;
     Diagnosis diagnosis = diagnostician.of(evidence, reading -> !reading.needsSignal());
     while (evidence.size() < MOST_READINGS && diagnosis.next().isPresent()) {

@@ -38,8 +38,7 @@ public final class TrialCall {
             .parallel()
             .mapToObj(number -> trial.trial(seed, number))
             .toList();
-    double parts =
-        guide.groups().stream().mapToInt(TrialCall::parts).average().orElse(0);
+    double parts = guide.groups().stream().mapToInt(TrialCall::parts).average().orElse(0);
     out.printf(
         Locale.ROOT,
         "%s: %d faults, %d groups of %.2f parts on average, %d without trace; %d trials%n",
