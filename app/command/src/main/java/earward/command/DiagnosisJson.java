@@ -20,13 +20,17 @@ final class DiagnosisJson {
     root.set("kit", KitHead.json(reviewed));
     ObjectNode taken = root.putObject("evidence");
     ObjectNode readings = taken.putObject("readings");
-    evidence.readings().forEach((key, value) -> JsonOut.put(readings, key, value));
     evidence
-        .tone()
-        .ifPresentOrElse(tone -> taken.put("tone", tone.key()), () -> taken.putNull("tone"));
-    evidence
-        .hot()
-        .ifPresentOrElse(hot -> taken.put("hotAtRest", hot), () -> taken.putNull("hotAtRest"));
+        .readings()
+        .forEach(
+            (key, values) -> {
+              ArrayNode times = readings.putArray(key);
+              values.forEach(times::add);
+            });
+    ArrayNode tones = taken.putArray("tones");
+    evidence.tones().forEach(tone -> tones.add(tone.key()));
+    ArrayNode heats = taken.putArray("hotAtRest");
+    evidence.heats().forEach(heats::add);
     root.put("healthy", diagnosis.healthy());
     diagnosis.next().ifPresentOrElse(key -> root.put("next", key), () -> root.putNull("next"));
     ArrayNode ranked = root.putArray("ranked");

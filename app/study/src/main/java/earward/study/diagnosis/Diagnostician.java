@@ -10,7 +10,6 @@ import earward.study.faults.Tone;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.function.Predicate;
 
@@ -21,7 +20,7 @@ import java.util.function.Predicate;
  */
 public final class Diagnostician {
   /** Probability that a kit at hand has no fault or one that cannot be seen (judgement). */
-  private static final double HEALTHY_PRIOR = 0.5;
+  private static final double HEALTHY_PRIOR = 0.8;
 
   /** Share of readings that are slips (judgement). */
   private static final double SLIP = 0.05;
@@ -33,9 +32,12 @@ public final class Diagnostician {
   private static final double MISFIT = 3;
 
   /** A reading that tells less than this is not worth taking, in nats. */
-  private static final double LEAST_TOLD = 0.01;
+  private static final double LEAST_TOLD = 0.001;
 
   private static final int GROUPS_LOOKED_AT = 40;
+
+  /** A reading taken again guards against a slip; a third time tells nothing. */
+  private static final int MOST_TIMES = 2;
 
   private final FaultGuide guide;
   private final ReadingError error;
@@ -139,46 +141,77 @@ public final class Diagnostician {
   private double logLikelihood(Signs signs, Evidence evidence) {
     double log = 0;
     for (int i = 0; i < spans.length; i++) {
-      Double value = evidence.readings().get(guide.readings().get(i).key());
-      if (value != null) {
-        log += Math.log(density(i, value, signs.readings().get(i)));
+      List<Double> values =
+          evidence.readings().getOrDefault(guide.readings().get(i).key(), List.of());
+      if (!values.isEmpty()) {
+        log += Math.log(likelihood(i, values, signs.readings().get(i)));
       }
     }
-    if (evidence.tone().isPresent()) {
-      boolean same = evidence.tone().get() == signs.tone();
+    for (Tone tone : evidence.tones()) {
+      boolean same = tone == signs.tone();
       log += Math.log(same ? 1 - MISHEARD : MISHEARD / (Tone.values().length - 1));
     }
-    if (evidence.hot().isPresent()) {
-      log += Math.log(evidence.hot().get() == signs.hot() ? 1 - MISHEARD : MISHEARD);
+    for (boolean hot : evidence.heats()) {
+      log += Math.log(hot == signs.hot() ? 1 - MISHEARD : MISHEARD);
     }
     return log;
   }
 
-  private double density(int reading, double value, double predicted) {
+  /**
+   * Of a reading that was taken once or again. Two that agree within the meter are both right, or
+   * the same slip twice; of two that differ one is a slip, or both.
+   */
+  private double likelihood(int reading, List<Double> values, double predicted) {
+    double first = values.get(0);
+    double anywhere = SLIP / spans[reading];
+    if (values.size() == 1) {
+      return (1 - SLIP) * bell(reading, first, predicted) + anywhere;
+    }
+    double again = values.get(1);
+    double onTheMeter = Math.max(1e-12, error.meterError(reading, first));
+    boolean agree = Math.abs(first - again) <= MISFIT * onTheMeter;
+    double both =
+        agree
+            ? (1 - SLIP) * (1 - SLIP) * bell(reading, (first + again) / 2, predicted) / onTheMeter
+            : 0;
+    double one =
+        (1 - SLIP) * anywhere * (bell(reading, first, predicted) + bell(reading, again, predicted));
+    return both + one + anywhere * anywhere;
+  }
+
+  private double bell(int reading, double value, double predicted) {
     if (Double.isNaN(predicted)) {
       return 1 / spans[reading];
     }
     double deviation = error.deviation(reading, predicted);
     double off = (value - predicted) / deviation;
-    double bell = Math.exp(-off * off / 2) / (deviation * Math.sqrt(2 * Math.PI));
-    return (1 - SLIP) * bell + SLIP / spans[reading];
+    return Math.exp(-off * off / 2) / (deviation * Math.sqrt(2 * Math.PI));
   }
 
   private List<String> misfits(Signs signs, Evidence evidence) {
     List<String> misfits = new ArrayList<>();
-    for (Map.Entry<String, Double> each : evidence.readings().entrySet()) {
-      int reading = index(each.getKey());
-      double predicted = reading < 0 ? Double.NaN : signs.readings().get(reading);
-      if (!Double.isNaN(predicted)
-          && Math.abs(each.getValue() - predicted) > MISFIT * error.deviation(reading, predicted)) {
-        misfits.add(each.getKey());
+    evidence
+        .readings()
+        .forEach(
+            (key, values) -> {
+              int reading = index(key);
+              double predicted = reading < 0 ? Double.NaN : signs.readings().get(reading);
+              for (double value : values) {
+                if (!Double.isNaN(predicted)
+                    && Math.abs(value - predicted) > MISFIT * error.deviation(reading, predicted)) {
+                  misfits.add(key);
+                }
+              }
+            });
+    for (Tone tone : evidence.tones()) {
+      if (tone != signs.tone()) {
+        misfits.add(FaultReading.TONE);
       }
     }
-    if (evidence.tone().isPresent() && evidence.tone().get() != signs.tone()) {
-      misfits.add(FaultReading.TONE);
-    }
-    if (evidence.hot().isPresent() && evidence.hot().get() != signs.hot()) {
-      misfits.add(FaultReading.HEAT);
+    for (boolean hot : evidence.heats()) {
+      if (hot != signs.hot()) {
+        misfits.add(FaultReading.HEAT);
+      }
     }
     return misfits;
   }
@@ -203,7 +236,7 @@ public final class Diagnostician {
     Optional<String> next = Optional.empty();
     for (int i = 0; i < spans.length; i++) {
       FaultReading reading = guide.readings().get(i);
-      if (can.test(reading) && !evidence.readings().containsKey(reading.key())) {
+      if (can.test(reading) && evidence.times(reading.key()) < MOST_TIMES) {
         int column = i;
         double told = told(looked, (one, other) -> overlap(column, one, other));
         if (told > best) {
@@ -212,14 +245,14 @@ public final class Diagnostician {
         }
       }
     }
-    if (evidence.tone().isEmpty()) {
+    if (evidence.tones().size() < MOST_TIMES) {
       double told = told(looked, (one, other) -> one.tone() == other.tone() ? 1 : MISHEARD);
       if (told > best) {
         best = told;
         next = Optional.of(FaultReading.TONE);
       }
     }
-    if (evidence.hot().isEmpty()
+    if (evidence.heats().size() < MOST_TIMES
         && told(looked, (one, other) -> one.hot() == other.hot() ? 1 : MISHEARD) > best) {
       next = Optional.of(FaultReading.HEAT);
     }

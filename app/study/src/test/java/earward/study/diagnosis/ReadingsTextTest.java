@@ -48,10 +48,10 @@ class ReadingsTextTest {
             heat,hot
             """);
     assertThat(evidence.readings())
-        .containsEntry("TP7:no-signal", 4.7)
-        .containsEntry("TP7:ohms", ReadingError.MOST_OHMS);
-    assertThat(evidence.tone()).contains(Tone.SILENT);
-    assertThat(evidence.hot()).contains(true);
+        .containsEntry("TP7:no-signal", List.of(4.7))
+        .containsEntry("TP7:ohms", List.of(ReadingError.MOST_OHMS));
+    assertThat(evidence.tones()).containsExactly(Tone.SILENT);
+    assertThat(evidence.heats()).containsExactly(true);
     assertThat(read("TP7:no-signal,\ntone,usual\n").size()).isEqualTo(1);
   }
 
@@ -61,8 +61,7 @@ class ReadingsTextTest {
     refused("tone,purple", "line 1 says the tone is 'purple'; it can be silent");
     refused("heat,warm", "line 1 says heat is 'warm'; it can be hot or cool");
     refused("TP7:no-signal,many", "line 1 cannot be read");
-    refused(
-        "TP7:no-signal,4 V\nTP7:no-signal,5 V", "line 2 has the reading TP7:no-signal a second");
+    refused("TP7:ohms,4 Ω\nTP7:ohms,5 Ω\nTP7:ohms,6 Ω", "line 3 has the reading TP7:ohms a third");
     refused("nonsense", "line 1 is 'nonsense'");
     refused("", "r.csv has no reading");
     refused("revision,B\ntone,silent", "is of revision B, and the design at hand is A");
