@@ -4,10 +4,13 @@ import earward.host.PluginSet;
 import earward.kit.design.QuantityException;
 import earward.kit.file.Designs;
 import earward.kit.parts.PartsLibrary;
+import earward.kit.proposal.Matching;
+import earward.kit.proposal.MatchingAction;
 import earward.kit.proposal.Proposal;
 import earward.kit.proposal.Proposals;
 import earward.kit.proposal.Stock;
 import earward.kit.review.ReviewedKit;
+import earward.kit.review.Reviewer;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -49,7 +52,22 @@ final class ProposeCommand extends DesignCommand {
       description = "The resistances and capacitances at hand, one a line; else any preferred one.")
   private @Nullable Path stock;
 
+  @Option(
+      names = "--seam",
+      paramLabel = "ID",
+      description =
+          "What could be done where this block is entered: pad, coupling capacitor, series or shunt"
+              + " resistor, buffer, another track; all are shown with what they do, one is written.")
+  private @Nullable String seam;
+
+  @Option(
+      names = "--take",
+      paramLabel = "N",
+      description = "Which of those shown is written; else the first.")
+  private int taken = 1;
+
   private @Nullable Proposal proposal;
+  private List<MatchingAction> actions = List.of();
 
   @Override
   ReviewedKit completed(ReviewedKit reviewed, PluginSet types, PartsLibrary parts)
@@ -59,6 +77,9 @@ final class ProposeCommand extends DesignCommand {
           file() + ": the kit cannot be solved as it is; 'earward review' says why.");
     }
     requireKnown(reviewed);
+    if (seam != null) {
+      return atSeam(seam, reviewed, types, parts);
+    }
     Set<String> stays = Set.copyOf(kept);
     try {
       proposal =
@@ -69,6 +90,20 @@ final class ProposeCommand extends DesignCommand {
       throw CommandFault.ofInput(file() + ": " + e.getMessage());
     }
     return proposal.after();
+  }
+
+  private ReviewedKit atSeam(String into, ReviewedKit reviewed, PluginSet types, PartsLibrary parts)
+      throws CommandFault {
+    try {
+      actions = Matching.at(reviewed, into, types, parts);
+    } catch (IllegalArgumentException e) {
+      throw CommandFault.ofInput(file() + ": " + e.getMessage());
+    }
+    if (taken < 1 || taken > actions.size()) {
+      throw CommandFault.ofInput(
+          file() + ": --take is " + taken + "; it is a number from 1 to " + actions.size() + ".");
+    }
+    return Reviewer.review(actions.get(taken - 1).edited(), types, parts);
   }
 
   /** A setting that is kept must be one: a slip of the pen would let it be changed. */
@@ -108,16 +143,19 @@ final class ProposeCommand extends DesignCommand {
   @Override
   void show(ReviewedKit reviewed, Program program) throws CommandFault {
     Path target = Objects.requireNonNull(output);
-    Proposal shown = Objects.requireNonNull(proposal);
     OutputFile file = OutputFile.at(target, file());
-    String text = Designs.text(shown.edited());
+    String text = Designs.text(reviewed.solved().assembly().design());
     try {
       file.write(out -> out.write(text.getBytes(StandardCharsets.UTF_8)));
     } catch (IOException e) {
       throw OutputFile.fault(target, e);
     }
     results().println(target);
-    changes(shown);
+    if (actions.isEmpty()) {
+      changes(Objects.requireNonNull(proposal));
+    } else {
+      SeamText.print(results(), actions, taken);
+    }
     results().println();
     ReviewText.print(results(), reviewed);
   }

@@ -3,7 +3,10 @@ package earward.kit.proposal;
 import earward.block.BlockTypes;
 import earward.block.check.Finding;
 import earward.block.check.Severity;
+import earward.block.figure.CaseName;
 import earward.block.figure.FigureName;
+import earward.block.figure.Quantity;
+import earward.engine.Seam;
 import earward.kit.design.KitDesign;
 import earward.kit.parts.PartsLibrary;
 import earward.kit.path.Assembler;
@@ -12,6 +15,7 @@ import earward.kit.path.KitSolver;
 import earward.kit.review.ReviewFinding;
 import earward.kit.review.ReviewedKit;
 import earward.kit.review.Reviewer;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -33,19 +37,39 @@ record Bench(ReviewedKit now, BlockTypes types, PartsLibrary library, Locale lan
     return assembly.complete() ? KitSolver.figure(assembly, name) : Double.NaN;
   }
 
+  /** The same bench with another kit on it. */
+  Bench at(ReviewedKit kit) {
+    return new Bench(kit, types, library, language);
+  }
+
   /**
-   * The whole review of an edited design, where it clears the finding and brings no new STOP; empty
-   * otherwise.
+   * What all checks find of an edited design, with no more solved than their figures and the
+   * impedances of its seams; empty where it cannot be built.
    */
-  Optional<ReviewedKit> proof(KitDesign edited, Finding finding) {
+  Optional<ReviewedKit> checked(KitDesign edited) {
     Assembly assembly = Assembler.assemble(edited, types, library);
     if (!assembly.complete()) {
       return Optional.empty();
     }
-    ReviewedKit after = Reviewer.review(KitSolver.solve(assembly), language);
-    boolean cleared = findings(after).stream().noneMatch(other -> same(other, finding));
-    boolean stops = added(after).stream().anyMatch(added -> added.severity() == Severity.STOP);
-    return after.solved().solved() && cleared && !stops ? Optional.of(after) : Optional.empty();
+    List<FigureName> names = new ArrayList<>();
+    Reviewer.checks(assembly).forEach(each -> names.add(each.check().figure()));
+    for (Seam seam : assembly.circuit().seams()) {
+      String place = "seam." + seam.name();
+      names.add(new FigureName(place, Quantity.ONWARD_OHMS, CaseName.TEST));
+      names.add(new FigureName(place, Quantity.BACKWARD_OHMS, CaseName.TEST));
+    }
+    return Optional.of(Reviewer.review(KitSolver.solve(assembly, names), language));
+  }
+
+  /**
+   * What all checks find of an edited design, where it clears the finding and brings no new STOP;
+   * empty otherwise.
+   */
+  Optional<ReviewedKit> proof(KitDesign edited, Finding finding) {
+    return checked(edited)
+        .filter(after -> after.solved().solved())
+        .filter(after -> findings(after).stream().noneMatch(other -> same(other, finding)))
+        .filter(after -> added(after).stream().noneMatch(each -> each.severity() == Severity.STOP));
   }
 
   /** What another review finds that this one did not. */

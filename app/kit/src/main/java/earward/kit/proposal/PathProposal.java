@@ -34,7 +34,7 @@ final class PathProposal {
   private Bench bench;
 
   PathProposal(Bench bench, Stock stock, Set<String> kept) {
-    this.bench = bench;
+    this.bench = bench.checked(bench.design()).map(bench::at).orElse(bench);
     this.before = bench.design();
     this.stock = stock;
     this.kept = Set.copyOf(kept);
@@ -129,11 +129,11 @@ final class PathProposal {
   }
 
   private void take(ReviewedKit after) {
-    bench = new Bench(after, bench.types(), bench.library(), bench.language());
+    bench = bench.at(after);
   }
 
   private ReviewedKit review(KitDesign design) {
-    return Reviewer.review(design, bench.types(), bench.library());
+    return bench.checked(design).orElse(bench.now());
   }
 
   private static double score(ReviewedKit reviewed) {
@@ -163,7 +163,8 @@ final class PathProposal {
                         change.to(),
                         reasons.getOrDefault(change.block() + "." + change.setting(), "")))
             .toList();
-    return new Proposal(bench.design(), changes, bench.now());
+    ReviewedKit whole = Reviewer.review(bench.design(), bench.types(), bench.library());
+    return new Proposal(bench.design(), changes, whole);
   }
 
   /** What differs between two designs of the same blocks; a setting not named has no words. */
