@@ -28,6 +28,25 @@ class SheetWriterTest {
   }
 
   @Test
+  void theReadingsToSendBackAreFormFieldsWithNamesOfTheirOwn() throws Exception {
+    SheetContent content = SampleSheet.healthy();
+    try (ReadSheet sheet = ReadSheet.of(content)) {
+      var form = sheet.document().getDocumentCatalog().getAcroForm();
+      List<String> names = form.getFields().stream().map(f -> f.getFullyQualifiedName()).toList();
+      assertThat(names).doesNotHaveDuplicates().contains("lot", "kit", "meter", "date");
+      String flag = content.testPoints().get(0).flag();
+      assertThat(names).contains(flag + "-dc-rest", flag + "-audio");
+      form.getField("lot").setValue("2026-4");
+      assertThat(form.getField("lot").getValueAsString()).isEqualTo("2026-4");
+      assertThat(form.getField("lot").getAlternateFieldName()).isEqualTo("Lot, on the bag");
+      assertThat(sheet.text(sheet.pages())).contains("Readings to send back", "revision B");
+    }
+    try (ReadSheet stopped = ReadSheet.of(SampleSheet.stopped())) {
+      assertThat(stopped.text()).doesNotContain("Readings to send back");
+    }
+  }
+
+  @Test
   void theSameContentGivesTheSameBytesAlsoWithOtherSheetsBetween() throws IOException {
     byte[] first = ReadSheet.bytes(SampleSheet.healthy());
     byte[] other = ReadSheet.bytes(SampleSheet.of("Hayloft", List.of()));

@@ -1,9 +1,15 @@
 package earward.sheet.internal.page;
 
+import com.lowagie.text.DocumentException;
+import com.lowagie.text.Rectangle;
 import com.lowagie.text.pdf.PdfContentByte;
+import com.lowagie.text.pdf.PdfFormField;
 import com.lowagie.text.pdf.PdfTemplate;
+import com.lowagie.text.pdf.PdfWriter;
+import com.lowagie.text.pdf.TextField;
 import earward.sheet.internal.page.Style.Tone;
 import java.awt.Graphics2D;
+import java.io.IOException;
 import java.util.function.Consumer;
 
 /** One page to draw on: points of 1/72 inch, the origin at the upper left, y growing downwards. */
@@ -123,6 +129,22 @@ public final class Canvas {
       graphics.dispose();
     }
     content.addTemplate(template, x, height - y - high);
+  }
+
+  /** A form field of one line, to be filled in on the screen; its frame is drawn by others. */
+  public void field(String name, String tip, float x, float y, float width, float high) {
+    PdfWriter writer = content.getPdfWriter();
+    Rectangle box = new Rectangle(x, height - y - high, x + width, height - y);
+    TextField field = new TextField(writer, box, name);
+    field.setFontSize(Style.BODY.size());
+    field.setFont(Typeface.forFields());
+    try {
+      PdfFormField made = field.getTextField();
+      made.setUserName(tip);
+      writer.addAnnotation(made);
+    } catch (IOException | DocumentException e) {
+      throw new IllegalStateException("the field " + name + " cannot be made", e);
+    }
   }
 
   private void stroke(float points, Tone tone) {

@@ -83,6 +83,26 @@ public final class Typeface {
     return weight == Weight.BOLD ? Bold.FIRST : Regular.FIRST;
   }
 
+  /**
+   * The face of what is typed into a form field: Helvetica, which every reader of PDF brings itself
+   * (ISO 32000-1, 9.6.2.2) and which no sheet can hold letters of before they are typed.
+   */
+  static BaseFont forFields() {
+    return Fields.FACE;
+  }
+
+  private static final class Fields {
+    static final BaseFont FACE = standard();
+
+    private static BaseFont standard() {
+      try {
+        return BaseFont.createFont(BaseFont.HELVETICA, BaseFont.WINANSI, BaseFont.NOT_EMBEDDED);
+      } catch (IOException | DocumentException e) {
+        throw new IllegalStateException("the font of form fields cannot be used", e);
+      }
+    }
+  }
+
   private static BaseFont faceOf(int letter, Weight weight) {
     BaseFont first = first(weight);
     if (first.charExists(letter)) {

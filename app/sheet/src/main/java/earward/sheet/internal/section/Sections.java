@@ -29,6 +29,7 @@ public final class Sections {
     pieces.addAll(
         together(
             List.of(new Heading(words.text("section.notes"), false), new NotesPiece(NOTE_LINES))));
+    pieces.addAll(ReturnSection.of(content, words));
     return pieces;
   }
 
