@@ -11,16 +11,17 @@ import org.openjdk.jmh.Main;
  * Starts the timings. {@code bars [--quick]} holds times against their bars and ends with 1 where
  * one was missed; {@code accuracy [--from N] [--count N] [--seed S]} holds random designs against
  * their full waveform; {@code diagnosis [--kit NAME] [--trials N] [--seed S]} has kits with known
- * faults diagnosed and ends with 1 where too few were right; anything else goes to JMH.
+ * faults diagnosed and ends with 1 where too few were right; {@code cost} prints what a solve costs
+ * against nodes, devices and harmonics; anything else goes to JMH.
  */
 public final class Timing {
   private Timing() {}
 
   /**
-   * Runs the bars, the accuracy run, or the benchmarks that the arguments name.
+   * Runs the bars, the accuracy run, the table of costs, or the benchmarks that the arguments name.
    *
-   * @param arguments {@code bars [--quick]}, {@code accuracy ...}, {@code diagnosis ...}, or JMH's
-   *     own
+   * @param arguments {@code bars [--quick]}, {@code accuracy ...}, {@code diagnosis ...}, or as the
+   *     class says, or JMH's own
    * @throws IOException where the results cannot be written
    */
   public static void main(String[] arguments) throws IOException {
@@ -34,6 +35,9 @@ public final class Timing {
     if (arguments.length > 0 && arguments[0].equals("diagnosis")) {
       System.exit(DiagnosisCall.run(arguments, System.out, System.err));
     }
+    if (arguments.length > 0 && arguments[0].equals("cost")) {
+      System.exit(CostTable.print(System.out));
+    }
     Main.main(arguments);
   }
 
@@ -46,9 +50,13 @@ public final class Timing {
     bars.add(new WarmBar("blocks described and joined", 0.016, "AfterAnEdit.assembled"));
     bars.add(new WarmBar("the headline after an edited value", 0.016, "EditedValue.headline"));
     for (String kit : StarterKit.NAMES) {
-      bars.add(new ThousandKits(kit, false));
+      bars.add(new OneKit(kit));
     }
     bars.add(new ThousandKits("hayloft", true));
+    for (String kit : StarterKit.NAMES) {
+      bars.add(new AllCurves(kit));
+    }
+    bars.add(new AgainstWaveform("lantern"));
     for (String kit : StarterKit.NAMES) {
       bars.add(new WaveformSteps(kit));
     }
