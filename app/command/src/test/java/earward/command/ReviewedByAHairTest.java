@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import earward.block.Conditions;
 import earward.block.check.Finding;
 import earward.block.check.Severity;
+import earward.block.device.AdaptorModel;
 import earward.block.device.BatteryModel;
 import earward.block.device.LoudspeakerModel;
 import earward.block.quantity.Unit;
@@ -119,7 +120,9 @@ class ReviewedByAHairTest {
             1e4,
             100),
         weigh("motor-boating", "path", ohms -> leaking(ohms), 1e4, 3e3),
-        weigh("regulator-drop-out", "stress", volts -> stress("regulator", volts), 0.2, 3));
+        weigh("regulator-drop-out", "stress", volts -> stress("regulator", volts), 0.2, 3),
+        weigh("input-overload", "power", strong -> intoLm386(strong), 0.3, 9),
+        weigh("hum", "path", volts -> rippling(volts), 1e-3, 10));
   }
 
   private static Pair weigh(
@@ -218,6 +221,21 @@ class ReviewedByAHairTest {
     return TestKits.starter("hayloft")
         .withSetting("power", "bypass-capacitor", "47 µF")
         .addBlock(3, block);
+  }
+
+  private static KitDesign intoLm386(double strong) {
+    KitDesign full =
+        TestKits.starter("hayloft")
+            .withSetting("power", "amplifier", "LM386")
+            .withSetting("volume", "knob", "100 %");
+    return carriers(full, 0.01, 0.02, strong);
+  }
+
+  private static KitDesign rippling(double rmsVolts) {
+    AdaptorModel model = new AdaptorModel("sample adaptor", true, 12, 1, 12.6, 0.15, rmsVolts, 100);
+    return TestKits.starter("boathouse")
+        .withSetting("power", "control-knob", "60 %")
+        .withSetting("adaptor", "adaptor", new SettingEntry.Inline(model, "{}"));
   }
 
   private static KitDesign withSpeaker(String kit, double ohms, double ratedWatts) {
