@@ -19,8 +19,11 @@ import java.util.function.Predicate;
  * Immutable.
  */
 public final class Diagnostician {
-  /** Probability that a kit at hand has no fault or one that cannot be seen (judgement). */
-  private static final double HEALTHY_PRIOR = 0.8;
+  /**
+   * Probability that a kit at hand has no fault or one that cannot be seen (judgement): high, so
+   * that one slip of the pen does not make a sound kit faulty.
+   */
+  private static final double HEALTHY_PRIOR = 0.9;
 
   /** Share of readings that are slips (judgement). */
   private static final double SLIP = 0.05;
