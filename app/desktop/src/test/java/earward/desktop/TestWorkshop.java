@@ -18,6 +18,11 @@ public final class TestWorkshop {
 
   /** The workshop. */
   public static Workshop open() throws DesignFileException {
+    return open(List.of());
+  }
+
+  /** The workshop, with sentences on plug-ins that were refused. */
+  public static Workshop open(List<String> refusals) throws DesignFileException {
     List<BlockType> all =
         ServiceLoader.load(BlockType.class).stream().map(ServiceLoader.Provider::get).toList();
     BlockTypes types =
@@ -33,7 +38,10 @@ public final class TestWorkshop {
           }
         };
     return new Workshop(
-        types, PartsFiles.read(TEMPLATES.resolve("parts")), List.of(kit("lantern")), List.of());
+        types,
+        PartsFiles.read(TEMPLATES.resolve("parts")),
+        List.of(kit("boathouse"), kit("hayloft"), kit("lantern")),
+        refusals);
   }
 
   /** The file of a starter kit. */

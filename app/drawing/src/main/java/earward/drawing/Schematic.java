@@ -77,6 +77,35 @@ public final class Schematic {
     return found;
   }
 
+  /**
+   * The same drawing with other words on the flags of test points; where each stands is kept.
+   *
+   * @param texts by {@code block#test-point}; a flag that is not named keeps its words
+   */
+  public Schematic withFlagTexts(Map<String, String> texts) {
+    List<Element> changed =
+        elements.stream()
+            .map(element -> element instanceof Text text ? flag(text, texts) : element)
+            .toList();
+    return new Schematic(width, height, scale, font, changed, rows);
+  }
+
+  private static Element flag(Text text, Map<String, String> texts) {
+    String owner = Mark.Kind.TEST_POINT + " ";
+    String words =
+        text.inside().startsWith(owner) ? texts.get(text.inside().substring(owner.length())) : null;
+    return words == null
+        ? text
+        : new Text(
+            words,
+            text.x(),
+            text.baseline(),
+            text.sizePoints(),
+            text.role(),
+            text.inside(),
+            text.bounds());
+  }
+
   private Rectangle2D rectangle(Box box) {
     return new Rectangle2D.Double(
         box.left() * scale, box.top() * scale, box.width() * scale, box.height() * scale);

@@ -1,5 +1,6 @@
 package earward.sheet;
 
+import earward.block.device.Device;
 import earward.kit.file.Designs;
 import earward.kit.review.ReviewedKit;
 import earward.kit.stage.SolvedStage;
@@ -54,5 +55,15 @@ public final class Sheets {
       ReviewedKit kit, List<SolvedStage> stages, Wording wording, KitLimits limits) {
     return Gathered.of(
         kit, stages, Designs.digest(kit.solved().assembly().design()), Words.of(wording), limits);
+  }
+
+  /**
+   * What is written beside a part on its drawing: its value, or the name of its type.
+   *
+   * @param device the part
+   * @param language tag of the wording, for instance {@code en}
+   */
+  public static String partValue(Device device, String language) {
+    return Gathered.partValue(device, Words.of(Wording.of(language)));
   }
 }

@@ -12,7 +12,8 @@ import org.openjdk.jmh.Main;
  * one was missed; {@code accuracy [--from N] [--count N] [--seed S]} holds random designs against
  * their full waveform; {@code diagnosis [--kit NAME] [--trials N] [--seed S]} has kits with known
  * faults diagnosed and ends with 1 where too few were right; {@code cost} prints what a solve costs
- * against nodes, devices and harmonics; anything else goes to JMH.
+ * against nodes, devices and harmonics; {@code edits} types five hundred values into the desktop's
+ * window; anything else goes to JMH.
  */
 public final class Timing {
   private Timing() {}
@@ -37,6 +38,9 @@ public final class Timing {
     }
     if (arguments.length > 0 && arguments[0].equals("cost")) {
       System.exit(CostTable.print(System.out));
+    }
+    if (arguments.length > 0 && arguments[0].equals("edits")) {
+      System.exit(EditsCall.run(System.out));
     }
     Main.main(arguments);
   }

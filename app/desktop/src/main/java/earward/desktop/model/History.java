@@ -40,6 +40,13 @@ public final class History {
     return new History(more, more.size() - 1);
   }
 
+  /** With the last edit going further: still one step. */
+  public History amended(String name, KitDesign design) {
+    return at == 0
+        ? edited(name, design)
+        : new History(steps.subList(0, at), at - 1).edited(name, design);
+  }
+
   /** Name of the edit that can be undone. */
   public Optional<String> undoable() {
     return at > 0 ? Optional.of(steps.get(at).name()) : Optional.empty();

@@ -1,65 +1,143 @@
 package earward.desktop.model;
 
-import earward.block.BlockTexts;
+import earward.block.BlockType;
 import earward.block.Role;
 import earward.block.figure.CaseName;
 import earward.block.figure.Quantity;
 import earward.block.quantity.Unit;
-import earward.kit.design.QuantityText;
-import earward.kit.path.Figures;
+import earward.block.wiring.Wiring;
+import earward.kit.design.BlockEntry;
+import earward.kit.design.KitDesign;
+import earward.kit.path.Assembly;
 import earward.kit.path.PlacedBlock;
-import earward.kit.review.ReviewedKit;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
+import java.util.Optional;
 
-/** Reads the level diagram off a reviewed kit; nothing is worked out that was not solved. */
+/**
+ * Reads the level diagram off a design and its readings; nothing is worked out that was not solved.
+ */
 public final class PathLevels {
   private static final CaseName SHOWN = CaseName.TEST;
 
-  private PathLevels() {}
+  private final Workshop workshop;
+  private final KitDesign design;
+  private final Readings readings;
 
-  /** The cards of the path in its order. */
-  public static List<LevelCard> of(ReviewedKit kit) {
+  private PathLevels(Workshop workshop, KitDesign design, Readings readings) {
+    this.workshop = workshop;
+    this.design = design;
+    this.readings = readings;
+  }
+
+  /** The cards of the path in its order, ghosts for what it still needs among them. */
+  public static List<LevelCard> of(Workshop workshop, KitDesign design, Readings readings) {
+    return new PathLevels(workshop, design, readings).cards();
+  }
+
+  /** Supplies and take-offs; a ghost where there is no supply. */
+  public static List<SideCard> beside(Workshop workshop, KitDesign design, Readings readings) {
+    return new PathLevels(workshop, design, readings).sides();
+  }
+
+  private List<LevelCard> cards() {
     List<LevelCard> cards = new ArrayList<>();
+    boolean fed = false;
     boolean detected = false;
-    for (PlacedBlock block : kit.solved().assembly().path()) {
-      detected |= block.type().role() == Role.DETECTOR;
-      cards.add(card(kit.figures(), block, !detected));
+    boolean loaded = false;
+    for (BlockEntry entry : design.path()) {
+      Optional<BlockType> type = workshop.types().find(entry.typeId());
+      if (type.isEmpty()) {
+        cards.add(LevelCard.missing(entry.id(), entry.typeId()));
+        detected = true; // what a missing block is nobody knows: no ghost for it
+        fed = true;
+        loaded = true;
+        continue;
+      }
+      Role role = type.get().role();
+      fed |= role == Role.FEED;
+      detected |= role == Role.DETECTOR;
+      loaded |= role == Role.LOAD;
+      cards.add(card(entry, type.get(), !detected));
+    }
+    if (!fed) {
+      cards.add(0, LevelCard.ghost("feed"));
+    }
+    if (!detected) {
+      cards.add(Math.min(1, cards.size()), LevelCard.ghost("detector"));
+    }
+    if (!loaded) {
+      cards.add(LevelCard.ghost("load"));
     }
     return cards;
   }
 
-  private static LevelCard card(Figures figures, PlacedBlock block, boolean carrier) {
+  private LevelCard card(BlockEntry entry, BlockType type, boolean carrier) {
     Quantity quantity = carrier ? Quantity.CARRIER_RMS_VOLTS : Quantity.AUDIO_RMS_VOLTS;
-    boolean end = block.description().wiring().exit().isEmpty();
-    double volts = figures.find(end ? "path" : block.id(), quantity, SHOWN).orElse(Double.NaN);
-    double headroom =
-        figures.find("seam." + block.id(), Quantity.HEADROOM_DECIBELS, SHOWN).orElse(Double.NaN);
+    boolean end =
+        readings
+            .assembly()
+            .flatMap(assembly -> assembly.block(entry.id()))
+            .map(PlacedBlock::description)
+            .map(description -> description.wiring())
+            .flatMap(Wiring::exit)
+            .isEmpty();
+    ShownFigure level = readings.find(end ? "path" : entry.id(), quantity, SHOWN);
+    ShownFigure headroom = readings.find("seam." + entry.id(), Quantity.HEADROOM_DECIBELS, SHOWN);
+    ShownFigure noise = readings.find("seam." + entry.id(), Quantity.NOISE_RMS_VOLTS, SHOWN);
+    String words =
+        level.known()
+            ? Words.of(carrier ? "path.carrier" : "path.audio", level.text(Unit.VOLT))
+            : "";
     return new LevelCard(
-        block.id(),
-        title(block),
-        carrier,
-        volts > 0 ? 20 * Math.log10(volts) : Double.NaN,
-        volts > 0 ? QuantityText.format(volts, Unit.VOLT, Locale.ENGLISH) : "–",
-        headroom);
+        entry.id(),
+        name(type),
+        LevelCard.Kind.BLOCK,
+        words,
+        Amounts.decibelsVolt(level.value()),
+        headroom.value(),
+        Amounts.decibelsVolt(noise.value()),
+        level.standing());
   }
 
-  /** Supplies and take-offs. */
-  public static List<SideCard> beside(ReviewedKit kit) {
+  private List<SideCard> sides() {
     List<SideCard> cards = new ArrayList<>();
-    for (PlacedBlock block : kit.solved().assembly().beside()) {
-      double amperes =
-          kit.figures().find(block.id(), Quantity.SUPPLY_AMPERES, SHOWN).orElse(Double.NaN);
-      String says =
-          Double.isNaN(amperes) ? "" : QuantityText.format(amperes, Unit.AMPERE, Locale.ENGLISH);
-      cards.add(new SideCard(block.id(), title(block), says));
+    design.supplies().forEach(entry -> cards.add(side(entry)));
+    if (cards.isEmpty()) {
+      cards.add(
+          new SideCard(
+              "supply", Words.of("ghost.supply"), LevelCard.Kind.GHOST, Words.of("ghost.add"), ""));
     }
+    design.takeOffs().forEach(entry -> cards.add(side(entry)));
     return cards;
   }
 
-  /** What a block is called. */
-  static String title(PlacedBlock block) {
-    return BlockTexts.of(block.type(), Locale.ENGLISH).get("name");
+  private SideCard side(BlockEntry entry) {
+    Optional<BlockType> type = workshop.types().find(entry.typeId());
+    String joins = entry.joinsAt().map(node -> node.replaceAll("\\..*", "")).orElse("");
+    if (type.isEmpty()) {
+      return new SideCard(
+          entry.id(), entry.typeId(), LevelCard.Kind.MISSING, Words.of("path.missing"), joins);
+    }
+    return new SideCard(entry.id(), name(type.get()), LevelCard.Kind.BLOCK, says(entry), joins);
+  }
+
+  /** The current of a supply; the voltage of a take-off's first test point. */
+  private String says(BlockEntry entry) {
+    ShownFigure amperes = readings.find(entry.id(), Quantity.SUPPLY_AMPERES, SHOWN);
+    if (amperes.known()) {
+      return amperes.text(Unit.AMPERE);
+    }
+    return readings.assembly().map(Assembly::testPoints).orElse(List.of()).stream()
+        .filter(point -> point.place().startsWith(entry.id() + "."))
+        .map(point -> readings.find(point.place(), Quantity.DC_VOLTS, SHOWN))
+        .filter(ShownFigure::known)
+        .map(figure -> Amounts.reading(figure.value(), Unit.VOLT))
+        .findFirst()
+        .orElse("");
+  }
+
+  private static String name(BlockType type) {
+    return Texts.of(type).get("name");
   }
 }

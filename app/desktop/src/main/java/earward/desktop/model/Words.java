@@ -10,6 +10,16 @@ public final class Words {
 
   private Words() {}
 
+  /** The language of the words. */
+  public static Locale locale() {
+    return Locale.ENGLISH;
+  }
+
+  /** Whether there is a text of this key. */
+  public static boolean has(String key) {
+    return ALL.containsKey(key);
+  }
+
   /** The text of a key, with {0}, {1} … replaced. */
   public static String of(String key, Object... arguments) {
     String text = ALL.getString(key);

@@ -3,18 +3,8 @@ package earward.desktop.model;
 import earward.kit.design.KitDesign;
 import earward.kit.file.DesignFileException;
 import earward.kit.file.DesignReading;
-import earward.kit.file.Designs;
-import earward.kit.path.Assembler;
-import earward.kit.path.KitSolver;
+import earward.kit.path.KitCurves;
 import earward.kit.review.ReviewedKit;
-import earward.kit.review.Reviewer;
-import earward.kit.stage.BuildStages;
-import earward.sheet.SheetWriter;
-import earward.sheet.Sheets;
-import earward.sheet.content.SheetContent;
-import java.io.ByteArrayOutputStream;
-import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -23,35 +13,38 @@ import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 
 /**
- * One open kit: its history, its file, its last review. Lives on the event thread; solving goes
- * through a {@link Background}, and a review of a design that is no longer the present one is
- * dropped.
+ * One open kit: its history, what is being typed, its file, what was solved of it. Lives on the
+ * event thread; nothing is solved there.
  */
 public final class Workbench {
-  /** A review with the sheet that belongs to it; both are made in the background. */
-  private record Reviewed(ReviewedKit kit, SheetContent sheet) {}
-
   private final Workshop workshop;
-  private final Background background;
-  private final SettingRows forms;
+  private final Lanes lanes;
+  private final SolveFlow flow;
+  private final Forms forms;
+  private final PathEdits path;
   private final List<Runnable> watchers = new ArrayList<>();
+  private final KitFile file;
   private History history;
-  private KitDesign saved;
-  private @Nullable Path file;
-  private @Nullable Reviewed last;
+  private @Nullable KitDesign draft;
+  private @Nullable Baseline baseline;
+  private CaseView caseView = CaseView.USUAL;
   private String message = "";
-  private String selected = "";
-  private int version;
-  private boolean busy;
+
+  /** The visit to a field from which the last edit came; empty where it came otherwise. */
+  private String session = "";
+
+  private String selected = Selection.CONDITIONS;
+  private long changes;
 
   /** A workbench with a design on it that no file holds yet. */
-  public Workbench(Workshop workshop, Background background, KitDesign design) {
+  public Workbench(Workshop workshop, Solving solving, Lanes lanes, KitDesign design) {
     this.workshop = workshop;
-    this.background = background;
-    this.forms = new SettingRows(workshop);
+    this.lanes = lanes;
+    flow = new SolveFlow(solving, lanes, this::changed);
+    forms = new Forms(workshop);
+    path = new PathEdits(workshop);
+    file = new KitFile(design);
     history = History.of(design);
-    saved = design;
-    selectFirst();
   }
 
   /** Calls a watcher after each change, on the event thread. */
@@ -60,7 +53,13 @@ public final class Workbench {
   }
 
   private void changed() {
+    changes++;
     List.copyOf(watchers).forEach(Runnable::run);
+  }
+
+  /** Grows with every change: who keeps it knows whether anything is new. */
+  public long changes() {
+    return changes;
   }
 
   /** What the blocks of this workbench may be made of. */
@@ -68,27 +67,49 @@ public final class Workbench {
     return workshop;
   }
 
-  /** The forms of the blocks. */
-  public SettingRows forms() {
+  /** Where its work is done. */
+  public Lanes lanes() {
+    return lanes;
+  }
+
+  /** The forms of blocks, conditions, tolerances, bench and sheet. */
+  public Forms forms() {
     return forms;
   }
 
-  /** The present design. */
+  /** What may be done to the path. */
+  public PathEdits path() {
+    return path;
+  }
+
+  /** The present design, without what is being typed. */
   public KitDesign design() {
     return history.design();
   }
 
-  /**
-   * The last review that belongs to the present design or, while that is being solved, its
-   * forerunner.
-   */
-  public Optional<ReviewedKit> kit() {
-    return Optional.ofNullable(last).map(Reviewed::kit);
+  /** The present design with what is being typed. */
+  public KitDesign shown() {
+    return draft == null ? design() : draft;
   }
 
-  /** Whether figures are of a former design while the present one is being solved. */
+  /** All that was solved, with its standing. */
+  public Readings readings() {
+    return flow.readings();
+  }
+
+  /** The last review that belongs to the present design or to its forerunner. */
+  public Optional<ReviewedKit> kit() {
+    return flow.readings().reviewed();
+  }
+
+  /** Whether the whole review of the present design is still to come. */
   public boolean busy() {
-    return busy;
+    return flow.busy();
+  }
+
+  /** Whether remedies are being looked for. */
+  public boolean seekingRemedies() {
+    return flow.seeking();
   }
 
   /** What went wrong last, or was done last; may be empty. */
@@ -96,85 +117,144 @@ public final class Workbench {
     return message;
   }
 
-  /** The block whose settings are shown. */
+  /** Says something in the window's foot. */
+  public void say(String sentence) {
+    message = sentence;
+    changed();
+  }
+
+  /** What is selected: a block, a seam, or one of the kit's own forms; see {@link Selection}. */
   public String selected() {
     return selected;
   }
 
   /** Whether the design differs from its file. */
   public boolean unsaved() {
-    return !saved.equals(design());
+    return file.differs(design());
   }
 
   /** Where the design is kept. */
   public Optional<Path> file() {
-    return Optional.ofNullable(file);
+    return file.path();
   }
 
-  /** Shows the settings of another block. */
-  public void select(String blockId) {
-    if (design().block(blockId).isPresent() && !selected.equals(blockId)) {
-      selected = blockId;
+  /** Selects what is there. */
+  public void select(String what) {
+    if (!selected.equals(what) && Selection.exists(design(), what)) {
+      selected = what;
       changed();
     }
   }
 
-  private void selectFirst() {
-    if (design().block(selected).isEmpty()) {
-      selected = design().blocks().isEmpty() ? "" : design().blocks().get(0).id();
+  private void selectWhatIsThere() {
+    if (!Selection.exists(design(), selected)) {
+      selected = Selection.CONDITIONS;
     }
+  }
+
+  /** Puts a design on the bench that no file holds. */
+  public void start(KitDesign design, boolean unsaved) {
+    file.detach(null);
+    file.forget(unsaved ? design.withTitle(design.title() + " ") : design);
+    begin(design, "");
+  }
+
+  /** Puts a recovered design on the bench: unsaved, its file that which it was of. */
+  public void recover(KitDesign design, Optional<Path> original) {
+    file.detach(original.orElse(null));
+    file.forget(design.withTitle(design.title() + " "));
+    begin(design, Words.of("recovered", design.title()));
+  }
+
+  private void begin(KitDesign design, String said) {
+    history = History.of(design);
+    draft = null;
+    baseline = null;
+    selected = Selection.CONDITIONS;
+    message = said;
+    flow.clear();
+    solve();
   }
 
   /**
    * Opens a design file; where it cannot be read the present design stays and a sentence says why.
+   * Empty where it went well.
    */
-  public void open(Path from) {
+  public String open(Path from) {
     try {
-      DesignReading reading = Designs.read(from);
-      history = History.of(reading.design());
-      saved = reading.design();
-      file = from;
-      last = null;
-      message = reading.findings().isEmpty() ? "" : reading.findings().get(0).sentence();
-      selected = "";
-      selectFirst();
-      solve();
+      DesignReading reading = file.read(from);
+      begin(
+          reading.design(),
+          reading.findings().isEmpty() ? "" : reading.findings().get(0).sentence());
+      return "";
     } catch (DesignFileException e) {
-      message = e.sentence();
-      changed();
+      say(e.sentence());
+      return e.sentence();
     }
   }
 
   /** Saves to a file; the sentence of a failure, empty where it went well. */
   public String save(Path to) {
     try {
-      Designs.write(design(), to);
-      saved = design();
-      file = to;
-      message = Words.of("saved", to.getFileName());
-      changed();
+      file.write(design(), to);
+      say(Words.of("saved", to.getFileName()));
       return "";
     } catch (DesignFileException e) {
-      message = e.sentence();
+      say(e.sentence());
+      return e.sentence();
+    }
+  }
+
+  /** Whether somebody else changed the design's file since it was read or written; says so once. */
+  public boolean changedOutside() {
+    return file.changedOutside();
+  }
+
+  /** Shows figures for a design that is being typed and is no edit yet. */
+  public void type(KitDesign typed) {
+    if (!typed.equals(shown())) {
+      draft = typed;
+      flow.preview(typed);
       changed();
-      return message;
     }
   }
 
-  /** Changes one setting to words that {@link SettingRows#fault} found nothing wrong with. */
-  public void set(SettingRow row, String words) {
-    String now = words.strip();
-    if (!now.equals(row.words())) {
-      edit(
-          Words.of("edit.setting", row.label(), now),
-          design -> design.withSetting(row.blockId(), row.setting().id(), now));
+  /** What was typed is no more. */
+  public void untype() {
+    if (draft != null) {
+      draft = null;
+      flow.unpreview();
+      changed();
     }
   }
 
-  /** Changes the design; the name is what undo will say. */
+  /** Changes the design; the name is what undo will say. An edit that changes nothing is none. */
   public void edit(String name, UnaryOperator<KitDesign> change) {
-    history = history.edited(name, change.apply(design()));
-    afterEdit();
+    KitDesign after = change.apply(design());
+    if (after.equals(design())) {
+      untype();
+    } else {
+      history = history.edited(name, after);
+      session = "";
+      afterEdit();
+    }
+  }
+
+  /**
+   * Changes the design from a field: what is entered there until it is left is one step.
+   *
+   * @param visit a name of the field and of this visit to it
+   */
+  public void enter(String visit, String name, UnaryOperator<KitDesign> change) {
+    boolean goesOn = visit.equals(session) && history.undoable().isPresent();
+    KitDesign after = change.apply(design());
+    if (after.equals(design())) {
+      untype();
+    } else {
+      history = goesOn ? history.amended(name, after) : history.edited(name, after);
+      session = visit;
+      afterEdit();
+    }
   }
 
   /** Name of what {@link #undo} takes back. */
@@ -190,87 +270,100 @@ public final class Workbench {
   /** Takes the last edit back. */
   public void undo() {
     history = history.undone();
+    session = "";
     afterEdit();
   }
 
   /** Does again what was taken back. */
   public void redo() {
     history = history.redone();
+    session = "";
     afterEdit();
   }
 
   private void afterEdit() {
+    draft = null;
     message = "";
-    selectFirst();
+    selectWhatIsThere();
     solve();
   }
 
   /** Solves and reviews the present design in the background. */
   public void solve() {
-    version++;
-    int mine = version;
-    KitDesign design = design();
-    busy = true;
+    flow.settle(design());
     changed();
-    background.start(
-        () -> review(design), reviewed -> settle(mine, reviewed), fault -> fail(mine, fault));
   }
 
-  private Reviewed review(KitDesign design) {
-    ReviewedKit kit =
-        Reviewer.review(
-            KitSolver.solve(Assembler.assemble(design, workshop.types(), workshop.parts())),
-            Reviewer.USUAL_LANGUAGE);
-    return new Reviewed(kit, Sheets.of(kit, BuildStages.solve(kit.solved().assembly())));
+  /** Solves curves after each review from now on, or no more. */
+  public void askCurves(boolean asked) {
+    flow.askCurves(asked);
   }
 
-  private void settle(int of, Reviewed reviewed) {
-    if (of == version) {
-      busy = false;
-      last = reviewed;
+  /** Looks for remedies after each review from now on, or no more. */
+  public void askRemedies(boolean asked) {
+    flow.askRemedies(asked);
+  }
+
+  /** The curves last solved. */
+  public Optional<KitCurves> curves() {
+    return flow.curves();
+  }
+
+  /** Whether the curves are those of the present design. */
+  public boolean curvesCurrent() {
+    return flow.curvesCurrent();
+  }
+
+  /** What the present design is compared with. */
+  public Optional<Baseline> baseline() {
+    return Optional.ofNullable(baseline);
+  }
+
+  /** Pins the present design as it was last solved; without a solve nothing is pinned. */
+  public void pin() {
+    readings()
+        .good()
+        .ifPresent(
+            kit -> {
+              baseline = new Baseline(kit, curvesCurrent() ? curves() : Optional.empty());
+              changed();
+            });
+  }
+
+  /** Compares with nothing any more. */
+  public void unpin() {
+    baseline = null;
+    changed();
+  }
+
+  /** The case in which live values are shown. */
+  public CaseView caseView() {
+    return caseView;
+  }
+
+  /** Shows live values in another case. */
+  public void look(CaseView changed) {
+    if (!caseView.equals(changed)) {
+      caseView = changed;
       changed();
     }
   }
 
-  private void fail(int of, Exception fault) {
-    if (of == version) {
-      busy = false;
-      message = Words.of("solve.failed", String.valueOf(fault.getMessage()));
-      changed();
-    }
-  }
-
-  /** What the build sheet of the last review says; empty before the first. */
-  public Optional<SheetContent> content() {
-    return Optional.ofNullable(last).map(Reviewed::sheet);
-  }
-
-  /** The pages of the build sheet as they would be printed; empty before the first review. */
-  public Optional<byte[]> sheet() throws IOException {
-    if (last == null) {
-      return Optional.empty();
-    }
-    ByteArrayOutputStream out = new ByteArrayOutputStream();
-    SheetWriter.write(last.sheet(), out);
-    return Optional.of(out.toByteArray());
-  }
-
-  /** Writes the build sheet; the sentence of a failure, empty where it went well. */
-  public String export(Path to) {
-    try {
-      Optional<byte[]> pages = sheet();
-      if (pages.isPresent()) {
-        Files.write(to, pages.get());
-        message = Words.of("exported", to.getFileName());
-      } else {
-        message = Words.of("nothing.solved");
-      }
-      changed();
-      return pages.isPresent() ? "" : message;
-    } catch (IOException e) {
-      message = Words.of("export.failed", to, String.valueOf(e.getMessage()));
-      changed();
-      return message;
-    }
+  /** The name of the field that makes a part what it is, {@code volume.track-ohms}. */
+  public String settingOf(String partPlace) {
+    int dot = partPlace.indexOf('.');
+    String blockId = dot < 0 ? partPlace : partPlace.substring(0, dot);
+    return readings()
+        .assembly()
+        .flatMap(assembly -> assembly.block(blockId))
+        .flatMap(
+            block ->
+                SettingOfPart.find(
+                    block,
+                    partPlace.substring(dot + 1),
+                    design().conditions().core(),
+                    workshop.parts()))
+        .map(setting -> blockId + "." + setting.id())
+        .orElse(blockId);
   }
 }

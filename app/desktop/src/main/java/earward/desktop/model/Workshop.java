@@ -1,6 +1,9 @@
 package earward.desktop.model;
 
+import earward.block.BlockType;
 import earward.block.BlockTypes;
+import earward.block.setting.Setting;
+import earward.kit.design.BlockEntry;
 import earward.kit.parts.PartsLibrary;
 import java.nio.file.Path;
 import java.util.List;
@@ -21,5 +24,10 @@ public record Workshop(
     Objects.requireNonNull(parts);
     starterKits = List.copyOf(starterKits);
     refusals = List.copyOf(refusals);
+  }
+
+  /** The settings of a block; none where its type is missing. */
+  public List<Setting> settings(BlockEntry block) {
+    return types.find(block.typeId()).map(BlockType::settings).orElse(List.of());
   }
 }

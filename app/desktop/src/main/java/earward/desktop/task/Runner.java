@@ -13,21 +13,32 @@ import org.jspecify.annotations.Nullable;
 
 /**
  * The one owner of the window's worker thread. Work is started from the event thread and its result
- * comes back to it; later work cancels former work that has not begun to matter.
+ * comes back to it; later work takes the place of former work where the runner says so.
  */
 public final class Runner implements Background, AutoCloseable {
-  private final ExecutorService worker =
-      Executors.newSingleThreadExecutor(
-          work -> {
-            Thread thread = new Thread(work, "earward-solver");
-            thread.setDaemon(true);
-            return thread;
-          });
+  private final ExecutorService worker;
+  private final boolean latestOnly;
   private @Nullable FutureTask<?> former;
+
+  /**
+   * A runner whose thread bears a name; the thread is made when it is first needed.
+   *
+   * @param latestOnly whether later work takes the place of former work
+   */
+  public Runner(String name, boolean latestOnly) {
+    this.latestOnly = latestOnly;
+    worker =
+        Executors.newSingleThreadExecutor(
+            work -> {
+              Thread thread = new Thread(work, "earward-" + name);
+              thread.setDaemon(true);
+              return thread;
+            });
+  }
 
   @Override
   public <T> void start(Callable<T> work, Consumer<T> done, Consumer<Exception> failed) {
-    if (former != null) {
+    if (former != null && latestOnly) {
       former.cancel(false);
     }
     FutureTask<T> task =
@@ -38,7 +49,9 @@ public final class Runner implements Background, AutoCloseable {
           }
         };
     former = task;
-    worker.execute(task);
+    if (!worker.isShutdown()) {
+      worker.execute(task);
+    }
   }
 
   private static <T> void deliver(
@@ -49,6 +62,9 @@ public final class Runner implements Background, AutoCloseable {
       // later work took its place: its result is nobody's any more
     } catch (ExecutionException e) {
       failed.accept(e.getCause() instanceof Exception cause ? cause : e);
+      if (e.getCause() instanceof Error error) {
+        throw error; // the one uncaught handler says it
+      }
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
     }

@@ -1,195 +1,254 @@
 package earward.desktop.view;
 
+import com.formdev.flatlaf.FlatClientProperties;
 import com.formdev.flatlaf.util.UIScale;
-import earward.desktop.model.Background;
+import earward.desktop.model.KitSolving;
+import earward.desktop.model.Lanes;
+import earward.desktop.model.Proposing;
+import earward.desktop.model.Recovery;
+import earward.desktop.model.Selection;
+import earward.desktop.model.Solving;
 import earward.desktop.model.Words;
 import earward.desktop.model.Workbench;
 import java.awt.BorderLayout;
+import java.awt.CardLayout;
+import java.awt.event.ComponentAdapter;
+import java.awt.event.ComponentEvent;
 import java.awt.event.WindowAdapter;
 import java.awt.event.WindowEvent;
-import java.io.File;
-import java.nio.file.Path;
-import java.util.Optional;
-import javax.swing.BorderFactory;
-import javax.swing.JFileChooser;
 import javax.swing.JFrame;
 import javax.swing.JLabel;
-import javax.swing.JOptionPane;
 import javax.swing.JPanel;
-import javax.swing.JScrollPane;
-import javax.swing.JSplitPane;
 import javax.swing.JTabbedPane;
-import javax.swing.filechooser.FileNameExtensionFilter;
+import javax.swing.SwingUtilities;
+import javax.swing.Timer;
 import net.miginfocom.swing.MigLayout;
 
-/** The main window: the level diagram across the top, the desks below, findings at the right. */
+/** One window: its start page, or the level diagram across the top and the desks under it. */
 public final class MainWindow extends JFrame {
   private static final long serialVersionUID = 1L;
   private static final int WIDTH = 1366;
   private static final int HEIGHT = 768;
 
-  /** Height that the drawing gets at first; the figures below take the rest. */
-  private static final int DRAWING_HEIGHT = 290;
+  /** Below this the level diagram folds to its ribbon. */
+  private static final int FOLD_HEIGHT = 800;
 
+  private static final int AUTOSAVE_MILLISECONDS = 2000;
+  private static final String START = "start";
+  private static final String DESK = "desk";
+
+  private final transient OpenWindows windows;
   private final transient Workbench workbench;
+  private final transient Solving solving;
+  private final transient FileActions files;
+  private final transient Recovery recovery;
+  private final transient BlockCommands blocks;
+  private final transient WindowCommands commands;
   private final LevelPath path;
-  private final SettingsForm settings;
-  private final DrawingPane drawing;
-  private final FiguresPanel figures;
-  private final FindingsRail findings;
+  private final DesignDesk design;
   private final SheetDesk sheet;
-  private final Menu menu;
+  private final CaseBar cases;
+  private final JTabbedPane desks = new JTabbedPane();
+  private final JPanel deck = new JPanel(new CardLayout());
   private final JLabel state = new JLabel(" ");
+  private final WindowMenu menu;
+  private final Timer autosave = new Timer(AUTOSAVE_MILLISECONDS, e -> autosave());
+  private boolean atStart = true;
 
-  /** A window on a workbench; pages are rendered in a background of their own. */
-  public MainWindow(Workbench workbench, Background pages) {
-    this.workbench = workbench;
-    path = new LevelPath(workbench);
-    settings = new SettingsForm(workbench);
-    drawing = new DrawingPane(workbench);
-    figures = new FiguresPanel(workbench);
-    findings = new FindingsRail(workbench);
-    sheet = new SheetDesk(workbench, pages);
-    menu = new Menu(workbench, this);
+  /** A window at its start page. */
+  MainWindow(OpenWindows windows, Lanes lanes) {
+    this.windows = windows;
+    solving = new KitSolving(windows.workshop());
+    workbench = new Workbench(windows.workshop(), solving, lanes, NewKit.design());
+    recovery = new Recovery(windows.recovery());
+    files = new FileActions(this, windows, workbench);
+    blocks = new BlockCommands(workbench, () -> design().toField(workbench.selected()));
+    path = new LevelPath(workbench, blocks);
+    blocks.over(path);
+    design =
+        new DesignDesk(
+            workbench,
+            blocks,
+            this::propose,
+            drawer -> files.exportCurve(drawer, false),
+            drawer -> files.exportCurve(drawer, true));
+    sheet = new SheetDesk(workbench, files::export, () -> Printing.print(workbench));
+    cases = new CaseBar(workbench);
+    commands = new WindowCommands(this, windows, workbench, files, blocks, design);
+    menu = new WindowMenu(workbench, commands.all());
     setJMenuBar(menu);
-    add(path, BorderLayout.NORTH);
-    add(desks(), BorderLayout.CENTER);
-    add(findings, BorderLayout.EAST);
-    findings.setPreferredSize(UIScale.scale(new java.awt.Dimension(290, 10)));
-    JPanel foot = new JPanel(new MigLayout("insets 4 12 4 12, fillx", "[grow]"));
+    lay(new StartPage(windows.workshop(), lanes, files));
+    listen();
+    setSize(UIScale.scale(WIDTH), UIScale.scale(HEIGHT));
+    autosave.setRepeats(false);
+    workbench.watch(this::refresh);
+    refresh();
+  }
+
+  private DesignDesk design() {
+    return design;
+  }
+
+  private void lay(StartPage start) {
+    desks.setName("desks");
+    desks.addTab(Words.of("desk.design"), design);
+    desks.addTab(
+        Words.of("desk.batch"),
+        new WaitingDesk("batch", () -> workbenchForm(Selection.TOLERANCES)));
+    desks.addTab(
+        Words.of("desk.bench"), new WaitingDesk("bench", () -> workbenchForm(Selection.BENCH)));
+    desks.addTab(Words.of("desk.sheet"), sheet);
+    desks.putClientProperty(FlatClientProperties.TABBED_PANE_TRAILING_COMPONENT, cases);
+    desks.addChangeListener(e -> refresh());
+    JPanel desk = new JPanel(new BorderLayout());
+    desk.add(path, BorderLayout.NORTH);
+    desk.add(desks, BorderLayout.CENTER);
+    JPanel foot = new JPanel(new MigLayout("insets 3 12 3 12, fillx", "[grow]"));
+    state.setName("state");
     foot.add(state, "wmin 0");
-    add(foot, BorderLayout.SOUTH);
+    desk.add(foot, BorderLayout.SOUTH);
+    deck.add(start, START);
+    deck.add(desk, DESK);
+    add(deck, BorderLayout.CENTER);
+    SwingUtilities.invokeLater(start.first()::requestFocusInWindow);
+  }
+
+  private void workbenchForm(String form) {
+    desks.setSelectedIndex(0);
+    workbench.select(form);
+  }
+
+  private void listen() {
     setDefaultCloseOperation(DO_NOTHING_ON_CLOSE);
     addWindowListener(
         new WindowAdapter() {
           @Override
           public void windowClosing(WindowEvent e) {
-            quit();
+            leave();
+          }
+
+          @Override
+          public void windowActivated(WindowEvent e) {
+            SwingUtilities.invokeLater(files::noticeChange);
           }
         });
-    setSize(UIScale.scale(WIDTH), UIScale.scale(HEIGHT));
-    workbench.watch(this::refresh);
+    addComponentListener(
+        new ComponentAdapter() {
+          @Override
+          public void componentResized(ComponentEvent e) {
+            path.fold(getHeight() < UIScale.scale(FOLD_HEIGHT));
+          }
+        });
+    getRootPane().setTransferHandler(new DropToOpen(files));
+  }
+
+  /** Its design. */
+  public Workbench workbench() {
+    return workbench;
+  }
+
+  Solving solving() {
+    return solving;
+  }
+
+  boolean atStart() {
+    return atStart;
+  }
+
+  /** Opens a file here or says why not. */
+  public void openFile(java.nio.file.Path file) {
+    files.open(file);
+  }
+
+  /** Puts the design in the place of the start page. */
+  void showDesk() {
+    atStart = false;
+    ((CardLayout) deck.getLayout()).show(deck, DESK);
+    path.requestFocusInWindow();
     refresh();
   }
 
-  private JTabbedPane desks() {
-    JScrollPane paper = new JScrollPane(drawing);
-    paper.setBorder(BorderFactory.createEmptyBorder());
-    paper.getVerticalScrollBar().setUnitIncrement(24);
-    JSplitPane middle = new JSplitPane(JSplitPane.VERTICAL_SPLIT, paper, figures);
-    middle.setResizeWeight(1);
-    middle.setDividerLocation(UIScale.scale(DRAWING_HEIGHT));
-    middle.setBorder(BorderFactory.createEmptyBorder());
-    JPanel design = new JPanel(new BorderLayout());
-    settings.setPreferredSize(UIScale.scale(new java.awt.Dimension(250, 10)));
-    design.add(settings, BorderLayout.WEST);
-    design.add(middle, BorderLayout.CENTER);
-    JTabbedPane desks = new JTabbedPane();
-    desks.setName("desks");
-    desks.addTab(Words.of("desk.design"), design);
-    desks.addTab(Words.of("desk.sheet"), sheet);
-    desks.addChangeListener(e -> sheet.refresh());
+  JTabbedPane desks() {
     return desks;
+  }
+
+  java.util.List<String> deskKeys() {
+    return java.util.List.of("desk.design", "desk.batch", "desk.bench", "desk.sheet");
+  }
+
+  LevelPath path() {
+    return path;
+  }
+
+  DesignDesk designDesk() {
+    return design;
   }
 
   private void refresh() {
     String name = workbench.file().map(file -> " – " + file.getFileName()).orElse("");
+    boolean unsaved = !atStart && workbench.unsaved();
     setTitle(
-        (workbench.unsaved() ? "• " : "")
-            + workbench.design().title()
-            + name
-            + " – "
-            + Words.of("app"));
-    path.refresh();
-    settings.refresh();
-    if (!workbench.busy()) {
-      drawing.refresh();
-      figures.refresh();
-      findings.refresh();
-      sheet.refresh();
-    }
+        atStart
+            ? Words.of("app")
+            : (unsaved ? "• " : "") + workbench.design().title() + name + " – " + Words.of("app"));
     menu.refresh();
+    if (atStart) {
+      return;
+    }
+    path.refresh();
+    cases.refresh();
+    if (design.isShowing()) {
+      design.refresh();
+    }
+    sheet.refresh();
     String said = workbench.message();
     state.setText(
         said.isEmpty() ? Words.of(workbench.busy() ? "state.solving" : "state.ready") : said);
+    if (unsaved && !autosave.isRunning()) {
+      autosave.start();
+    }
   }
 
-  void larger() {
-    drawing.larger();
+  /** Keeps what is not saved; forgets the autosave of what is. */
+  void autosave() {
+    if (!workbench.unsaved()) {
+      recovery.clear();
+      return;
+    }
+    var design = workbench.design();
+    var file = workbench.file();
+    workbench
+        .lanes()
+        .asked()
+        .start(
+            () -> recovery.keep(design, file),
+            fault -> {
+              if (!fault.isEmpty()) {
+                workbench.say(fault);
+              }
+            },
+            fault -> {});
   }
 
-  void smaller() {
-    drawing.smaller();
+  /** Proposes values for all of the design. */
+  void propose() {
+    new Proposals(this, workbench, new Proposing(windows.workshop(), solving, commands.chooser()))
+        .all();
   }
 
-  void dark(boolean wanted) {
-    Look.change(wanted);
-    settings.relook();
-    findings.relook();
+  /** Takes over a look that has changed. */
+  void relook() {
+    path.repaint();
+    design.relook();
     refresh();
   }
 
-  void open() {
-    choose(Words.of("menu.open"), "earward", false).ifPresent(this::openKit);
-  }
-
-  void openKit(Path kit) {
-    if (mayLeave()) {
-      workbench.open(kit);
-    }
-  }
-
-  boolean save() {
-    return workbench.file().isPresent()
-        ? workbench.save(workbench.file().get()).isEmpty()
-        : saveAs();
-  }
-
-  boolean saveAs() {
-    Optional<Path> to = choose(Words.of("menu.save-as"), "earward", true);
-    return to.isPresent() && workbench.save(to.get()).isEmpty();
-  }
-
-  void export() {
-    choose(Words.of("menu.export"), "pdf", true).ifPresent(workbench::export);
-  }
-
-  void quit() {
-    if (mayLeave()) {
+  /** Closes the window, if its design may be let go. */
+  void leave() {
+    if (files.mayLeave()) {
+      autosave.stop();
+      recovery.clear();
       dispose();
     }
-  }
-
-  private boolean mayLeave() {
-    if (!workbench.unsaved()) {
-      return true;
-    }
-    Object[] options = {
-      Words.of("unsaved.save"), Words.of("unsaved.discard"), Words.of("unsaved.cancel")
-    };
-    int answer =
-        JOptionPane.showOptionDialog(
-            this,
-            Words.of("unsaved.question"),
-            Words.of("unsaved.title"),
-            JOptionPane.YES_NO_CANCEL_OPTION,
-            JOptionPane.QUESTION_MESSAGE,
-            null,
-            options,
-            options[0]);
-    return answer == 1 || (answer == 0 && save());
-  }
-
-  private Optional<Path> choose(String title, String ending, boolean saving) {
-    JFileChooser chooser = new JFileChooser();
-    chooser.setDialogTitle(title);
-    chooser.setFileFilter(new FileNameExtensionFilter("*." + ending, ending));
-    int answer = saving ? chooser.showSaveDialog(this) : chooser.showOpenDialog(this);
-    File file = chooser.getSelectedFile();
-    if (answer != JFileChooser.APPROVE_OPTION || file == null) {
-      return Optional.empty();
-    }
-    boolean named = file.getName().contains(".");
-    return Optional.of(saving && !named ? Path.of(file.getPath() + "." + ending) : file.toPath());
   }
 }

@@ -177,6 +177,11 @@ public record KitDesign(
     return edit().path(more).done();
   }
 
+  /** This design with the blocks of its path in another order, others gone or new among them. */
+  public KitDesign withPath(List<BlockEntry> changed) {
+    return edit().path(changed).done();
+  }
+
   /** This design with a supply more. */
   public KitDesign addSupply(BlockEntry supply) {
     return edit().supplies(Stream.concat(supplies.stream(), Stream.of(supply)).toList()).done();

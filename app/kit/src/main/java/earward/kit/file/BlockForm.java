@@ -8,15 +8,18 @@ import earward.kit.parts.FitReport;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 
 /** One block of a design, as a JSON object. */
 final class BlockForm {
   private static final String SETTINGS = "settings";
   private static final String RAILS = "rails";
   private static final String JOINS_AT = "joins at";
+  private static final String LOCKED = "locked";
 
   private BlockForm() {}
 
@@ -49,12 +52,25 @@ final class BlockForm {
     }
     in.find("id");
     in.source().stands(id, in.object().at());
+    Set<String> locked = locked(in);
     try {
       return new BlockEntry(
-          id, in.requiredText("type"), settings, rails, in.text(JOINS_AT), in.written());
+          id, in.requiredText("type"), settings, rails, in.text(JOINS_AT), locked, in.written());
     } catch (IllegalArgumentException e) {
       throw in.impossible(e);
     }
+  }
+
+  private static Set<String> locked(MembersReader in) throws DesignFileException {
+    Set<String> locked = new LinkedHashSet<>();
+    for (Json item : in.ownItems(LOCKED)) {
+      if (item instanceof Json.Scalar scalar && scalar.quoted()) {
+        locked.add(scalar.words());
+      } else {
+        throw in.fault("wrong-form", item, LOCKED, "names a setting that is no text");
+      }
+    }
+    return locked;
   }
 
   /** What an entry of the parts library says beside the part's figures. */
@@ -105,7 +121,11 @@ final class BlockForm {
     block.rails().forEach(rails::text);
     List<Json.Member> settings = new ArrayList<>();
     block.settings().forEach((id, entry) -> settings.add(new Json.Member(id, json(entry))));
-    return out.nested(RAILS, rails.done()).nested(SETTINGS, Json.object(settings)).done();
+    Json.Items locked = Json.array(block.locked().stream().map(Json.Scalar::text).toList());
+    return out.nested(RAILS, rails.done())
+        .nested(SETTINGS, Json.object(settings))
+        .nested(LOCKED, locked)
+        .done();
   }
 
   private static Json json(SettingEntry entry) {

@@ -8,7 +8,7 @@ import earward.block.device.BatteryModel;
  * <p>Source: Peukert's relation, written for the capacity at the drawn current; domain: the
  * exponent of the model, currents near those of its data sheet.
  */
-final class BatteryLife {
+public final class BatteryLife {
   private BatteryLife() {}
 
   /**
@@ -17,7 +17,7 @@ final class BatteryLife {
    * @param model the battery
    * @param amperes mean current drawn, at least 0
    */
-  static double hours(BatteryModel model, double amperes) {
+  public static double hours(BatteryModel model, double amperes) {
     if (Double.isNaN(amperes)) {
       return Double.NaN;
     }

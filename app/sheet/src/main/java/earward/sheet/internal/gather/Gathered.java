@@ -1,10 +1,12 @@
 package earward.sheet.internal.gather;
 
 import earward.block.check.Finding;
+import earward.block.device.Device;
 import earward.block.quantity.Unit;
 import earward.kit.design.Digest;
 import earward.kit.design.KitDesign;
 import earward.kit.design.SheetOptions;
+import earward.kit.design.Tolerances;
 import earward.kit.path.Assembly;
 import earward.kit.path.Figures;
 import earward.kit.path.PlacedTestPoint;
@@ -92,6 +94,11 @@ public final class Gathered {
                   .orElse("")));
     }
     return method;
+  }
+
+  /** What is written beside a part on its drawing. */
+  public static String partValue(Device device, Words words) {
+    return new PartWords(words, Tolerances.USUAL).value(device);
   }
 
   private static List<FindingRow> findings(List<ReviewFinding> findings) {
