@@ -1,6 +1,7 @@
 package earward.command;
 
 import earward.engine.CircuitException;
+import earward.kit.path.Assembly;
 import earward.kit.review.ReviewedKit;
 import earward.kit.review.Reviewer;
 import earward.kit.stage.BuildStages;
@@ -22,6 +23,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Locale;
 import java.util.Set;
+import java.util.concurrent.CompletableFuture;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
@@ -84,10 +86,9 @@ final class SheetCommand extends DesignCommand {
   }
 
   /** Limits of the readings at rest: quick enough to wait for. */
-  private static KitLimits limits(ReviewedKit reviewed) {
+  private static KitLimits limits(Assembly assembly) {
     try {
-      return LimitStudy.of(
-          reviewed.solved().assembly(), LimitOrder.of(LIMIT_KITS, false), BatchProgress.NONE);
+      return LimitStudy.of(assembly, LimitOrder.of(LIMIT_KITS, false), BatchProgress.NONE);
     } catch (CircuitException e) {
       return KitLimits.NONE; // the review says what is wrong with the circuit
     }
@@ -99,8 +100,9 @@ final class SheetCommand extends DesignCommand {
         wording.locale().getLanguage().equals(Reviewer.USUAL_LANGUAGE.getLanguage())
             ? reviewed
             : Reviewer.review(reviewed.solved(), wording.locale());
-    return Sheets.of(
-        said, BuildStages.solve(reviewed.solved().assembly()), wording, limits(reviewed));
+    Assembly assembly = reviewed.solved().assembly();
+    CompletableFuture<KitLimits> limits = CompletableFuture.supplyAsync(() -> limits(assembly));
+    return Sheets.of(said, BuildStages.solve(assembly), wording, limits.join());
   }
 
   private void writeShopping(SheetContent content, Path csv) throws CommandFault {

@@ -15,6 +15,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.CompletableFuture;
 
 /**
  * The curves of a kit at the test signal: its response, and level, distortion and harmonics at the
@@ -76,25 +77,31 @@ public record KitCurves(
     CompiledCircuit circuit = Engine.compile(assembly.circuit(), test, wanted);
     double[] values = circuit.nominalValues();
     Conditions core = assembly.design().conditions().core();
-    List<SweptFigures> knobs = new ArrayList<>();
-    for (String slot : cases.knobSlots()) {
-      knobs.add(circuit.sweep(values, CaseName.TEST, slot, even(0, 1, POSITIONS)));
-    }
+    double[] hertz = alike(20, 20e3, RESPONSE_POINTS);
+    double[] levels = alike(core.weakPeakVolts() / 2, core.strongPeakVolts(), LEVELS);
+    double[] tones = alike(core.lowestToneHertz(), core.highestToneHertz(), TONES);
+    // each starts from its own solve of the nominal kit, so they may as well go side by side
+    var response =
+        CompletableFuture.supplyAsync(
+            () -> circuit.response(values, CaseName.TEST, CircuitBuilder.PATH, hertz));
+    var depth = swept(circuit, values, Slot.DEPTH, even(0.05, 0.95, DEPTHS));
+    var level = swept(circuit, values, Slot.CARRIER_PEAK_VOLTS, levels);
+    var tone = swept(circuit, values, Slot.TONE_HERTZ, tones);
+    List<CompletableFuture<SweptFigures>> knobs =
+        cases.knobSlots().stream()
+            .map(slot -> swept(circuit, values, slot, even(0, 1, POSITIONS)))
+            .toList();
     return new KitCurves(
-        circuit.response(
-            values, CaseName.TEST, CircuitBuilder.PATH, alike(20, 20e3, RESPONSE_POINTS)),
-        circuit.sweep(values, CaseName.TEST, Slot.DEPTH, even(0.05, 0.95, DEPTHS)),
-        circuit.sweep(
-            values,
-            CaseName.TEST,
-            Slot.CARRIER_PEAK_VOLTS,
-            alike(core.weakPeakVolts() / 2, core.strongPeakVolts(), LEVELS)),
-        circuit.sweep(
-            values,
-            CaseName.TEST,
-            Slot.TONE_HERTZ,
-            alike(core.lowestToneHertz(), core.highestToneHertz(), TONES)),
-        knobs);
+        response.join(),
+        depth.join(),
+        level.join(),
+        tone.join(),
+        knobs.stream().map(CompletableFuture::join).toList());
+  }
+
+  private static CompletableFuture<SweptFigures> swept(
+      CompiledCircuit circuit, double[] values, String slot, double[] at) {
+    return CompletableFuture.supplyAsync(() -> circuit.sweep(values, CaseName.TEST, slot, at));
   }
 
   /** Points at like distances. */
