@@ -34,6 +34,7 @@ abstract class DesignCommand implements Callable<Integer> {
 
   @Override
   public final Integer call() throws CommandFault {
+    begin();
     try (Program program = Program.open()) {
       DesignReading reading = read();
       program.sayRefusals(messages());
@@ -43,6 +44,9 @@ abstract class DesignCommand implements Callable<Integer> {
       return reviewed.doNotBuild() ? Exit.DO_NOT_BUILD : Exit.DONE;
     }
   }
+
+  /** What may be got ready beside reading and solving. */
+  void begin() {}
 
   /** Shows or writes what the command is for. */
   abstract void show(ReviewedKit reviewed, Program program) throws CommandFault;

@@ -58,6 +58,11 @@ final class SheetCommand extends DesignCommand {
   private @Nullable Path shopping;
 
   @Override
+  void begin() {
+    var unused = CompletableFuture.runAsync(SheetWriter::prepare);
+  }
+
+  @Override
   void show(ReviewedKit reviewed, Program program) throws CommandFault {
     Path target = output == null ? besideTheUser() : output;
     OutputFile file = OutputFile.at(target, file());

@@ -9,15 +9,18 @@ import com.lowagie.text.pdf.PdfName;
 import com.lowagie.text.pdf.PdfOutline;
 import com.lowagie.text.pdf.PdfString;
 import com.lowagie.text.pdf.PdfWriter;
+import earward.kit.design.SheetOptions.Paper;
 import earward.sheet.content.SheetContent;
 import earward.sheet.internal.page.Canvas;
 import earward.sheet.internal.page.Flow;
 import earward.sheet.internal.page.Flow.Placed;
 import earward.sheet.internal.page.Sheet;
+import earward.sheet.internal.page.Style;
 import earward.sheet.internal.section.PageFrame;
 import earward.sheet.internal.section.Sections;
 import earward.sheet.internal.section.Words;
 import earward.sheet.wording.Wording;
+import java.awt.geom.Line2D;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.OutputStream;
@@ -27,7 +30,29 @@ import java.util.UUID;
 
 /** Writes build sheets as PDF. The same content gives the same bytes. Safe for several threads. */
 public final class SheetWriter {
+  /** Of both faces. */
+  private static final String LETTERS = "Earward Ω ☐";
+
   private SheetWriter() {}
+
+  /**
+   * Reads the faces and loads what writes PDF, so that the first sheet need not wait for them. May
+   * run beside anything else.
+   */
+  public static void prepare() {
+    Sheet sheet = Sheet.of(Paper.A4);
+    try (Document document = new Document(new Rectangle(sheet.width(), sheet.height()))) {
+      PdfWriter writer = PdfWriter.getInstance(document, OutputStream.nullOutputStream());
+      writer.setFullCompression();
+      document.open();
+      Canvas canvas = new Canvas(writer.getDirectContent(), sheet.height());
+      canvas.text(LETTERS, Sheet.SIDE, Sheet.TOP, Style.BODY);
+      canvas.text(LETTERS, Sheet.SIDE, Sheet.TOP, Style.STRONG);
+      canvas.drawing(0, 0, 10, 10, graphics -> graphics.draw(new Line2D.Float(0, 0, 10, 10)));
+    } catch (DocumentException e) {
+      throw new IllegalStateException("no sheet can be made", e);
+    }
+  }
 
   /**
    * Writes one sheet in the program's own wording. Nothing is written when it cannot be made.

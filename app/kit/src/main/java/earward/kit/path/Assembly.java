@@ -1,10 +1,13 @@
 package earward.kit.path;
 
 import earward.block.check.Finding;
+import earward.block.device.Device;
 import earward.engine.Circuit;
 import earward.kit.design.KitDesign;
 import earward.kit.design.References;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.stream.Stream;
@@ -48,5 +51,12 @@ public record Assembly(
   /** The block of this id. */
   public Optional<PlacedBlock> block(String id) {
     return blocks().stream().filter(block -> block.id().equals(id)).findFirst();
+  }
+
+  /** What each part of the whole circuit is, by its name there ({@code volume.track}), in order. */
+  public Map<String, Device> devices() {
+    Map<String, Device> devices = new LinkedHashMap<>();
+    circuit.parts().forEach(part -> devices.put(part.name(), part.device()));
+    return devices;
   }
 }

@@ -3,11 +3,11 @@ package earward.sheet.internal.gather;
 import earward.block.Role;
 import earward.block.device.Adaptor;
 import earward.block.device.Battery;
+import earward.block.device.Device;
 import earward.block.device.Loudspeaker;
 import earward.block.figure.CaseName;
 import earward.block.figure.Quantity;
 import earward.block.quantity.Unit;
-import earward.engine.CircuitPart;
 import earward.kit.design.Bench;
 import earward.kit.path.Assembly;
 import earward.kit.path.PlacedBlock;
@@ -165,13 +165,14 @@ final class StageRows {
   private List<String> power(SolvedStage solved) {
     List<String> steps = new ArrayList<>();
     boolean first = solved.stage().number() == 1;
-    for (CircuitPart part : solved.partial().circuit().parts()) {
-      String reference = assembly.references().ofPart(part.name()).orElse("");
-      double across = solved.seriesOhms() * amperes(solved, part.name(), SolvedStage.FIRST_POWER);
+    for (Map.Entry<String, Device> part : solved.partial().devices().entrySet()) {
+      String name = part.getKey();
+      String reference = assembly.references().ofPart(name).orElse("");
+      double across = solved.seriesOhms() * amperes(solved, name, SolvedStage.FIRST_POWER);
       if (!reference.isEmpty() && across > 0) {
         String current =
-            words.numbers().text(amperes(solved, part.name(), SolvedStage.AT_REST), Unit.AMPERE);
-        double volts = volts(part);
+            words.numbers().text(amperes(solved, name, SolvedStage.AT_REST), Unit.AMPERE);
+        double volts = volts(part.getValue());
         steps.add(
             words.text(
                 first ? "stage.series" : "stage.series-again",
@@ -193,10 +194,10 @@ final class StageRows {
     return steps;
   }
 
-  private static double volts(CircuitPart source) {
-    return source.device() instanceof Battery battery
+  private static double volts(Device source) {
+    return source instanceof Battery battery
         ? battery.model().newVolts()
-        : source.device() instanceof Adaptor adaptor ? adaptor.model().ratedVolts() : 0;
+        : source instanceof Adaptor adaptor ? adaptor.model().ratedVolts() : 0;
   }
 
   private static double rated(double watts) {
@@ -252,8 +253,7 @@ final class StageRows {
     List<String> steps = new ArrayList<>();
     boolean sounds =
         solved.partial().path().stream().anyMatch(b -> b.type().role() == Role.POWER)
-            && solved.partial().circuit().parts().stream()
-                .anyMatch(part -> part.device() instanceof Loudspeaker);
+            && solved.partial().devices().values().stream().anyMatch(Loudspeaker.class::isInstance);
     if (!sounds) {
       return steps;
     }
