@@ -48,6 +48,9 @@ abstract class DesignCommand implements Callable<Integer> {
   /** What may be got ready beside reading and solving. */
   void begin() {}
 
+  /** What may be solved beside the kit itself, of a complete assembly. */
+  void assembled(Assembly assembly) {}
+
   /** Shows or writes what the command is for. */
   abstract void show(ReviewedKit reviewed, Program program) throws CommandFault;
 
@@ -88,6 +91,7 @@ abstract class DesignCommand implements Callable<Integer> {
       throw CommandFault.ofInput(
           stops(assembly.findings()).stream().map(stop -> placed(stop, reading)).toList());
     }
+    assembled(assembly);
     SolvedKit solved = KitSolver.solve(assembly);
     ReviewedKit reviewed = Reviewer.review(solved, Reviewer.USUAL_LANGUAGE);
     if (!solved.solved() && solved.findings().isEmpty()) {

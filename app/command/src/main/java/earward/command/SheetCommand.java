@@ -5,6 +5,7 @@ import earward.kit.path.Assembly;
 import earward.kit.review.ReviewedKit;
 import earward.kit.review.Reviewer;
 import earward.kit.stage.BuildStages;
+import earward.kit.stage.SolvedStage;
 import earward.sheet.SheetWriter;
 import earward.sheet.Sheets;
 import earward.sheet.ShoppingCsv;
@@ -21,7 +22,9 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Locale;
+import java.util.Objects;
 import java.util.Set;
 import java.util.concurrent.CompletableFuture;
 import java.util.stream.Collectors;
@@ -57,9 +60,20 @@ final class SheetCommand extends DesignCommand {
       description = "Writes the shopping list to this file too, for a spreadsheet.")
   private @Nullable Path shopping;
 
+  /** On their way since the kit was assembled. */
+  private @Nullable CompletableFuture<List<SolvedStage>> stages;
+
+  private @Nullable CompletableFuture<KitLimits> limits;
+
   @Override
   void begin() {
     var unused = CompletableFuture.runAsync(SheetWriter::prepare);
+  }
+
+  @Override
+  void assembled(Assembly assembly) {
+    stages = CompletableFuture.supplyAsync(() -> BuildStages.solve(assembly));
+    limits = CompletableFuture.supplyAsync(() -> limits(assembly));
   }
 
   @Override
@@ -100,14 +114,16 @@ final class SheetCommand extends DesignCommand {
   }
 
   /** All of it in one language: findings were said in English so far. */
-  private static SheetContent content(ReviewedKit reviewed, Wording wording) {
+  private SheetContent content(ReviewedKit reviewed, Wording wording) {
     ReviewedKit said =
         wording.locale().getLanguage().equals(Reviewer.USUAL_LANGUAGE.getLanguage())
             ? reviewed
             : Reviewer.review(reviewed.solved(), wording.locale());
-    Assembly assembly = reviewed.solved().assembly();
-    CompletableFuture<KitLimits> limits = CompletableFuture.supplyAsync(() -> limits(assembly));
-    return Sheets.of(said, BuildStages.solve(assembly), wording, limits.join());
+    return Sheets.of(
+        said,
+        Objects.requireNonNull(stages).join(),
+        wording,
+        Objects.requireNonNull(limits).join());
   }
 
   private void writeShopping(SheetContent content, Path csv) throws CommandFault {

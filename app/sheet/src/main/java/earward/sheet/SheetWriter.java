@@ -30,8 +30,8 @@ import java.util.UUID;
 
 /** Writes build sheets as PDF. The same content gives the same bytes. Safe for several threads. */
 public final class SheetWriter {
-  /** Of both faces. */
-  private static final String LETTERS = "Earward Ω ☐";
+  /** Enough to read the face for. */
+  private static final String LETTERS = "Earward Ω";
 
   private SheetWriter() {}
 
