@@ -3,13 +3,11 @@ package earward.timing;
 import earward.kit.path.Assembly;
 import earward.kit.path.KitCurves;
 import java.io.IOException;
-import java.lang.management.ManagementFactory;
-import java.lang.management.ThreadMXBean;
 import java.util.Arrays;
 
 /**
- * All curves of the Design desk of a starter kit, warm: response, depth, level, tone and knobs; by
- * the time that the thread which solves them has had on its core.
+ * All curves of the Design desk of a starter kit, warm: response, depth, level, tone and knobs,
+ * side by side; by the wall clock.
  *
  * @param kit the starter kit
  */
@@ -29,16 +27,15 @@ record AllCurves(String kit) implements Bar {
 
   @Override
   public Timed measure(boolean quick) throws IOException {
-    ThreadMXBean threads = ManagementFactory.getThreadMXBean();
     try (StarterKit opened = StarterKit.open(kit)) {
       Assembly assembly = opened.assembled();
       double[] seconds = new double[quick ? RUNS / QUICK_SHARE : RUNS];
       for (int i = -RUNS; i < seconds.length; i++) {
-        long start = threads.getCurrentThreadCpuTime();
+        long start = System.nanoTime();
         if (KitCurves.of(assembly).isEmpty()) {
           throw new IllegalStateException("the curves of " + kit + " were not solved");
         }
-        seconds[Math.max(0, i)] = (threads.getCurrentThreadCpuTime() - start) / NANOS;
+        seconds[Math.max(0, i)] = (System.nanoTime() - start) / NANOS;
       }
       Arrays.sort(seconds);
       double median = seconds[seconds.length / 2];
